@@ -1,0 +1,22 @@
+import type { ReactNode } from 'react'
+import { ChalkLine } from './chalk-line'
+
+/** What stands where nothing stands yet: it says what to do next, with the button that does it. */
+export function EmptyState({
+  title,
+  children,
+  action,
+}: {
+  readonly title: string
+  readonly children?: ReactNode
+  readonly action?: ReactNode
+}) {
+  return (
+    <div className="grid justify-items-center gap-3 px-4 py-14 text-center">
+      <ChalkLine className="w-40 text-rule" />
+      <h2 className="text-lg font-semibold">{title}</h2>
+      {children && <div className="max-w-110 text-walnut">{children}</div>}
+      {action && <div className="mt-2">{action}</div>}
+    </div>
+  )
+}
