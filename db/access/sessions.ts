@@ -1,0 +1,139 @@
+import 'server-only'
+import { Op, QueryTypes, type Transaction } from 'sequelize'
+import { notFound } from '../access-error'
+import { connection } from '../connection'
+import { Membership } from '../models/membership'
+import { Session } from '../models/session'
+import { newId } from '../new-id'
+import { type Actor, type Role, roles } from '../permissions'
+import type { Unit } from '../shapes/length'
+import { knownId } from './known-id'
+
+const minute = 60_000
+const day = 24 * 60 * minute
+/** A session ends when it was not used for so long, and at the latest so long after sign-in. */
+const idleLimit = 14 * day
+const absoluteLimit = 60 * day
+
+/** Who is signed in, whether or not they still belong to a workroom. */
+export interface SignedIn {
+  readonly sessionId: string
+  readonly userId: string
+  readonly userName: string
+  readonly email: string
+  /** null when the membership of the session's workroom has ended. */
+  readonly actor: Actor | null
+  readonly workroom: { readonly id: string; readonly name: string; readonly unit: Unit } | null
+}
+
+interface Row {
+  readonly userId: string
+  readonly userName: string
+  readonly email: string
+  readonly lastSeenAt: Date
+  readonly workroomId: string | null
+  readonly workroomName: string | null
+  readonly unit: Unit | null
+  readonly membershipId: string | null
+  readonly roles: string | null
+}
+
+/** Starts a session in the workroom that the person used last. @returns its id */
+export async function startSession(userId: string, transaction?: Transaction): Promise<string> {
+  const latest = await Session.findOne({
+    where: { userId, workroomId: { [Op.ne]: null } },
+    order: [['lastSeenAt', 'desc']],
+    transaction,
+  })
+  const memberships = await Membership.findAll({
+    where: { userId, disabledAt: null },
+    order: [['createdAt', 'asc']],
+    transaction,
+  })
+  const usual = memberships.find((each) => each.workroomId === latest?.workroomId) ?? memberships[0]
+  const now = new Date()
+  const session = await Session.create(
+    {
+      id: newId(),
+      userId,
+      workroomId: usual?.workroomId ?? null,
+      startedAt: now,
+      lastSeenAt: now,
+      endedAt: null,
+    },
+    { transaction },
+  )
+  return session.id
+}
+
+async function rowFor(sessionId: string, now: Date): Promise<Row | undefined> {
+  const [row] = await connection.query<Row>(
+    `SELECT u.id AS userId, u.name AS userName, u.email, s.lastSeenAt, w.id AS workroomId, w.name AS workroomName,
+       w.unit, m.id AS membershipId,
+       (SELECT GROUP_CONCAT(r.role) FROM membership_roles r WHERE r.membershipId = m.id) AS roles
+     FROM sessions s
+     JOIN users u ON u.id = s.userId AND u.disabledAt IS NULL
+     LEFT JOIN memberships m ON m.userId = u.id AND m.workroomId = s.workroomId AND m.disabledAt IS NULL
+     LEFT JOIN workrooms w ON w.id = m.workroomId
+     WHERE s.id = :sessionId AND s.endedAt IS NULL AND s.lastSeenAt > :idle AND s.startedAt > :oldest`,
+    {
+      type: QueryTypes.SELECT,
+      replacements: {
+        sessionId,
+        idle: new Date(now.getTime() - idleLimit),
+        oldest: new Date(now.getTime() - absoluteLimit),
+      },
+    },
+  )
+  return row
+}
+
+/**
+ * Who is behind a session at this moment, or null when it has ended. Asked on every request: signing out, a new
+ * password, a lost role and a disabled member count from the next request on.
+ */
+export async function signedInBy(sessionId: string): Promise<SignedIn | null> {
+  const now = new Date()
+  const row = await rowFor(sessionId, now)
+  if (!row) return null
+  if (now.getTime() - new Date(row.lastSeenAt).getTime() > minute)
+    await Session.update({ lastSeenAt: now }, { where: { id: sessionId, endedAt: null } })
+  const { userId, userName, email, workroomId, membershipId, workroomName, unit } = row
+  const held = (row.roles ?? '').split(',')
+  const known: Role[] = roles.filter((role) => held.includes(role))
+  const member = workroomId !== null && membershipId !== null && known.length > 0
+  return {
+    sessionId,
+    userId,
+    userName,
+    email,
+    actor: member ? { userId, workroomId, membershipId, roles: known, sessionId } : null,
+    workroom:
+      member && workroomName !== null && unit !== null ? { id: workroomId, name: workroomName, unit } : null,
+  }
+}
+
+/** Ends one session. */
+export async function endSession(sessionId: string): Promise<void> {
+  await Session.update({ endedAt: new Date() }, { where: { id: sessionId, endedAt: null } })
+}
+
+/** Ends every session of a person, on every device. */
+export async function endAllSessions(userId: string, transaction?: Transaction): Promise<void> {
+  await Session.update({ endedAt: new Date() }, { where: { userId, endedAt: null }, transaction })
+}
+
+/** Moves a session to another workroom of the same person. @throws AccessError not-found */
+export async function switchWorkroom(
+  signedIn: Pick<SignedIn, 'sessionId' | 'userId'>,
+  workroomId: string,
+): Promise<void> {
+  const membership = await Membership.findOne({
+    where: { workroomId: knownId(workroomId, 'workroom'), userId: signedIn.userId, disabledAt: null },
+  })
+  if (!membership) throw notFound('workroom')
+  await Session.update(
+    { workroomId: membership.workroomId },
+    { where: { id: signedIn.sessionId, userId: signedIn.userId, endedAt: null } },
+  )
+}

@@ -1,0 +1,39 @@
+import * as z from 'zod'
+import type { DraftOrder } from '../../drafting/contract'
+import { unitShape } from './length'
+
+const name = z.string().regex(/^[a-zA-Z][a-zA-Z0-9-]{0,59}$/, 'This field is not known.')
+const millimetres = z.number('Write a length such as 36 1/2.').min(-100_000).max(100_000)
+const choice = z.union([millimetres, z.string().max(60), z.boolean()], 'This choice is not known.')
+const few = <T extends Record<string, unknown>>(values: T) => Object.keys(values).length <= 200
+
+const correction = z.strictObject({
+  id: z.string().min(1).max(60),
+  on: z.union([
+    z.strictObject({ piece: z.string().max(60), mark: z.string().max(60) }),
+    z.strictObject({ seam: z.string().max(60), level: millimetres }),
+  ]),
+  by: z.union([z.strictObject({ x: millimetres, y: millimetres }), millimetres]),
+  off: z.boolean().optional(),
+  note: z.string().max(500).optional(),
+})
+
+/**
+ * An order as it may be stored: well formed and of a sensible size. Whether it can be drafted is for the engine to say;
+ * an order that cannot be drafted yet is saved all the same, so that nothing typed is lost.
+ */
+export const orderShape = z.strictObject({
+  garment: name,
+  measurements: z.record(name, millimetres).refine(few, 'At most 200 measurements.'),
+  design: z.record(name, choice).refine(few, 'At most 200 choices.').optional(),
+  rules: z.record(name, z.string().max(500)).refine(few, 'At most 200 rules.').optional(),
+  corrections: z.array(correction).max(200).optional(),
+  unit: unitShape.optional(),
+  tape: z.number().min(0).max(100).optional(),
+  explain: z.boolean().optional(),
+}) satisfies z.ZodType<DraftOrder>
+
+/** What stood in each field when it was saved: 36½ stays 36½. */
+export const typedShape = z
+  .record(z.string().regex(/^[a-zA-Z][a-zA-Z0-9.-]{0,79}$/), z.string().max(500))
+  .refine(few, 'At most 200 fields.')
