@@ -1,0 +1,146 @@
+import type { CubicSegment, Path, Point, Segment } from '../contract'
+import { lengthBefore, pathLength } from './along'
+import { crossings } from './crossings'
+import { lengthTo } from './length'
+import { evaluate } from './segment'
+
+/** A place where two paths (or two stretches of one) meet: mm along each, and the point. */
+export interface Intersection {
+  readonly a: number
+  readonly b: number
+  readonly point: Point
+}
+
+/** Meetings closer than this (mm) are one. */
+const SAME = 1e-6
+
+/**
+ * Every place where two paths meet, sorted by the distance along the first; touching and shared end points count. Where
+ * they lie along one another, the ends of the shared stretch.
+ */
+export const intersections = (a: Path, b: Path): Intersection[] => {
+  const found: Intersection[] = []
+  for (let i = 0; i < a.segments.length; i++) {
+    const s = a.segments[i]!
+    for (let j = 0; j < b.segments.length; j++) {
+      const r = b.segments[j]!
+      if (boxesApart(s, r)) continue
+      crossings(s, r, (t, u) => {
+        found.push({
+          a: lengthBefore(a, i) + lengthTo(s, t),
+          b: lengthBefore(b, j) + lengthTo(r, u),
+          point: evaluate(s, t),
+        })
+      })
+    }
+  }
+  return found.length < 2 ? found : distinct(found)
+}
+
+/**
+ * Every place where a path meets itself, once each with a < b. Joints of neighbouring segments, and the closing joint of a
+ * closed path, do not count.
+ */
+export const selfIntersections = (path: Path): Intersection[] => {
+  const found: Intersection[] = []
+  const { segments, closed } = path
+  const count = segments.length
+  const whole = pathLength(path)
+  for (let i = 0; i < count; i++) {
+    const s = segments[i]!
+    if (s.kind === 'cubic') {
+      ownLoop(s, (t, u) => {
+        const a = lengthBefore(path, i)
+        found.push({ a: a + lengthTo(s, t), b: a + lengthTo(s, u), point: evaluate(s, t) })
+      })
+    }
+    for (let j = i + 1; j < count; j++) {
+      const r = segments[j]!
+      const next = j === i + 1
+      const round = closed && i === 0 && j === count - 1
+      if (boxesApart(s, r) || (next && goOnTogether(s, r)) || (round && goOnTogether(r, s))) continue
+      crossings(s, r, (t, u) => {
+        const a = lengthBefore(path, i) + lengthTo(s, t)
+        const b = lengthBefore(path, j) + lengthTo(r, u)
+        const apart = closed ? Math.min(b - a, whole - (b - a)) : b - a
+        if ((next || round || apart < 2 * SAME) && apart < 1e-4) return
+        if (apart > 2 * SAME) found.push({ a, b, point: evaluate(s, t) })
+      })
+    }
+  }
+  return found.length < 2 ? found : distinct(found)
+}
+
+const boxesApart = (a: Segment, b: Segment): boolean => {
+  const gap = 1e-9
+  return (
+    low(a, 'x') > high(b, 'x') + gap ||
+    low(b, 'x') > high(a, 'x') + gap ||
+    low(a, 'y') > high(b, 'y') + gap ||
+    low(b, 'y') > high(a, 'y') + gap
+  )
+}
+
+const low = (s: Segment, axis: 'x' | 'y'): number => {
+  const ends = Math.min(s.from[axis], s.to[axis])
+  return s.kind === 'line' ? ends : Math.min(ends, s.control1[axis], s.control2[axis])
+}
+
+const high = (s: Segment, axis: 'x' | 'y'): number => {
+  const ends = Math.max(s.from[axis], s.to[axis])
+  return s.kind === 'line' ? ends : Math.max(ends, s.control1[axis], s.control2[axis])
+}
+
+/** Whether both segments keep moving forward in one common direction, so that they meet at their joint only. */
+const goOnTogether = (a: Segment, b: Segment): boolean => {
+  const x = b.to.x - a.from.x
+  const y = b.to.y - a.from.y
+  return movesAlong(a, x, y) && movesAlong(b, x, y)
+}
+
+/** Whether a segment moves forward along a direction all the way. */
+export const movesAlong = (s: Segment, x: number, y: number): boolean => {
+  const { from, to } = s
+  if (s.kind === 'line') return (to.x - from.x) * x + (to.y - from.y) * y > 0
+  const { control1: p, control2: q } = s
+  const first = (p.x - from.x) * x + (p.y - from.y) * y
+  const middle = (q.x - p.x) * x + (q.y - p.y) * y
+  const last = (to.x - q.x) * x + (to.y - q.y) * y
+  return first >= 0 && middle >= 0 && last >= 0 && first + middle + last > 0
+}
+
+/** The one place where a cubic can cross itself, in closed form from B(t) = B(u), t ≠ u. */
+export const ownLoop = (s: CubicSegment, meet: (t: number, u: number) => void): void => {
+  const { from, control1, control2, to } = s
+  const ax = to.x - from.x + 3 * (control1.x - control2.x)
+  const ay = to.y - from.y + 3 * (control1.y - control2.y)
+  const bx = 3 * (from.x - 2 * control1.x + control2.x)
+  const by = 3 * (from.y - 2 * control1.y + control2.y)
+  const cx = 3 * (control1.x - from.x)
+  const cy = 3 * (control1.y - from.y)
+  const turn = ax * by - ay * bx
+  const square = ax * ax + ay * ay
+  if (turn === 0 || square === 0) return
+  const sum = -(ax * cy - ay * cx) / turn
+  const product = sum * sum + ((bx * sum + cx) * ax + (by * sum + cy) * ay) / square
+  const disc = sum * sum - 4 * product
+  if (!(disc > 1e-12)) return
+  const half = Math.sqrt(disc) / 2
+  const t = sum / 2 - half
+  const u = sum / 2 + half
+  if (t >= -1e-12 && u <= 1 + 1e-12) meet(Math.max(0, t), Math.min(1, u))
+}
+
+/** Sorted by a, then b, with repeats of one meeting (at joints, on halvings) left out. */
+const distinct = (found: Intersection[]): Intersection[] => {
+  found.sort((p, q) => p.a - q.a || p.b - q.b)
+  const kept: Intersection[] = []
+  for (const one of found) {
+    let again = false
+    for (let i = kept.length - 1; i >= 0 && one.a - kept[i]!.a <= SAME; i--) {
+      if (Math.abs(one.b - kept[i]!.b) <= SAME) again = true
+    }
+    if (!again) kept.push(one)
+  }
+  return kept
+}
