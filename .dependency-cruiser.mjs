@@ -1,5 +1,5 @@
 /** Imports run one way: app → components → drafting; app → app/_server → db → drafting. */
-export default {
+const rules = {
   forbidden: [
     {
       name: 'drafting-is-pure',
@@ -53,3 +53,5 @@ export default {
     },
   },
 }
+
+export default rules

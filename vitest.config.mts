@@ -5,7 +5,16 @@ const alias = { '@': fileURLToPath(new URL('.', import.meta.url)).replace(/\/$/,
 /** A stand-in for the marker package, which refuses to load outside a server bundle. */
 const serverOnly = { 'server-only': fileURLToPath(new URL('tests/support/server-only.ts', import.meta.url)) }
 
-/** Unit tests need nothing but Node; integration tests need the database that scripts/test.mjs starts. */
+/** Projects that work on the database share it, one file at a time. */
+const onDatabase = {
+  environment: 'node',
+  fileParallelism: false,
+  globalSetup: 'tests/support/needs-database.ts',
+  testTimeout: 60_000,
+  hookTimeout: 60_000,
+} as const
+
+/** Unit tests and laws need nothing but Node; the rest needs what scripts/test.mjs brings up. */
 export default defineConfig({
   resolve: { alias: { ...alias, ...serverOnly } },
   test: {
@@ -31,11 +40,13 @@ export default defineConfig({
         resolve: { alias: { ...alias, ...serverOnly } },
         test: {
           name: 'integration',
-          include: ['tests/{integration,security,print}/**/*.test.ts'],
-          environment: 'node',
-          fileParallelism: false,
-          testTimeout: 60_000,
+          include: ['tests/{integration,print}/**/*.test.ts'],
+          ...onDatabase,
         },
+      },
+      {
+        resolve: { alias: { ...alias, ...serverOnly } },
+        test: { name: 'security', include: ['tests/security/**/*.test.ts'], ...onDatabase },
       },
     ],
   },

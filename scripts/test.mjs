@@ -1,0 +1,94 @@
+/**
+ * `npm test -- [suite …] [part of a file name …] [--keep] [--dev]`: brings up what the suites need beside whatever
+ * runs already, runs them and counts. The last line is `N passed, M failed`.
+ */
+import { openSync } from 'node:fs'
+import { join } from 'node:path'
+import { ensureBuild } from './local/build.mjs'
+import { ensureCommands } from './local/debian.mjs'
+import { ensureModules } from './local/modules.mjs'
+import { freePort } from './local/ports.mjs'
+import { runMain, say, SetUpError } from './local/say.mjs'
+import { seedDemo } from './local/seed.mjs'
+import { serve } from './local/serve.mjs'
+import { localDatabase, localMail } from './local/services.mjs'
+import { openSettings } from './local/settings.mjs'
+import { createStopping } from './local/stopping.mjs'
+import { migrate } from './migrate.mjs'
+import { readArguments } from './testing/arguments.mjs'
+import { runSuite } from './testing/run-suite.mjs'
+import { takeSlot } from './testing/slot.mjs'
+import { total } from './testing/tally.mjs'
+
+const distDir = '.next-test'
+
+await runMain(async () => {
+  const asked = readArguments(process.argv.slice(2))
+  const stopping = createStopping()
+  const slot = takeSlot()
+  stopping.onStop(slot.release)
+  const tallies = []
+  try {
+    await ensureModules()
+    const env = await bringUpDatabase(asked, slot.folder, stopping)
+    let served = false
+    for (const suite of asked.suites) {
+      if (!served && (suite === 'security' || suite === 'e2e')) {
+        await bringUpApp(asked, slot.folder, env, stopping)
+        served = true
+      }
+      say(`\n── ${suite}`)
+      tallies.push(await runSuite(suite, { filters: asked.filters, folder: slot.folder, env }))
+      if (stopping.stopping) break
+    }
+  } catch (error) {
+    if (!(error instanceof SetUpError)) throw error
+    // What could not be brought up has failed, and is counted.
+    process.stderr.write(`\n${error.message}\n`)
+    tallies.push({ passed: 0, failed: 1, skipped: 0 })
+  } finally {
+    await stopping.stop()
+  }
+  return conclude(total(tallies), asked.filters)
+})
+
+async function bringUpDatabase(asked, folder, stopping) {
+  const env = { ...process.env, CHALKFOLD_ENV: 'test', TZ: 'UTC' }
+  if (!asked.database) return env
+  await ensureCommands(['mariadbd', 'mariadb-dump', 'chromium', 'pdftoppm', 'qpdf'])
+  const installation = openSettings(folder)
+  const { settings } = installation
+  const port = await freePort()
+  const origin = `http://localhost:${port}`
+  Object.assign(env, {
+    PORT: String(port),
+    APP_ORIGIN: origin,
+    NEXTAUTH_URL: origin,
+    NEXTAUTH_SECRET: settings.sessionSecret,
+    MAIL_FROM: 'Chalkfold <post@chalkfold.example>',
+    DEMO_PASSWORD: settings.demoPassword,
+    NEXT_DIST_DIR: distDir,
+    ...(await localMail({ folder, installation, stopping })),
+  })
+  const database = { name: 'chalkfold_test', fresh: !asked.keep, family: 'chalkfold_test_' }
+  env.DATABASE_URL = await localDatabase({ folder, installation, stopping, database })
+  await migrate(env.DATABASE_URL)
+  return env
+}
+
+async function bringUpApp(asked, folder, env, stopping) {
+  await seedDemo(env)
+  if (!asked.dev) await ensureBuild(distDir, env)
+  const output = openSync(join(folder, 'app.log'), 'w', 0o600)
+  const mode = asked.dev ? 'dev' : 'start'
+  const app = await serve({ mode, port: Number(env.PORT), host: '127.0.0.1', env, output })
+  stopping.onStop(app.stop)
+}
+
+function conclude({ passed, failed, skipped }, filters) {
+  if (passed + failed === 0 && filters.length > 0) say(`No test file matches ${filters.join(', ')}.`)
+  if (skipped > 0) say(`${skipped} skipped`)
+  const nothing = passed + failed === 0
+  say(`\n${passed} passed, ${failed} failed`)
+  return failed > 0 || nothing ? 1 : 0
+}
