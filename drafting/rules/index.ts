@@ -1,0 +1,7 @@
+export { checkFormulaKinds, type Kinds } from './check-formula-kinds'
+export { checkRule, type RuleSurroundings } from './check-rule'
+export { evaluateFormula } from './evaluate-formula'
+export { explainFormula, type Explanation } from './explain-formula'
+export type { Formula, FormulaNode, Kind, Values } from './formula'
+export { orderRules, type Formulas } from './order-rules'
+export { parseFormula } from './parse-formula'
