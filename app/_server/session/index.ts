@@ -1,0 +1,5 @@
+export { type ActionResult, publicAction, signedInAction, workroomAction } from './action'
+export { currentSession, requireActor, requireSignedIn } from './current'
+export { forPage } from './for-page'
+export { actorForRequest } from './request'
+export { workroomRoute } from './route'
