@@ -15,7 +15,7 @@ import { isFree, portFrom } from './local/ports.mjs'
 import { endProcess, isAlive } from './local/processes.mjs'
 import { productionProblems } from './local/production.mjs'
 import { runMain, say, SetUpError } from './local/say.mjs'
-import { seedDemo } from './local/seed.mjs'
+import { demoFile, seedDemo } from './local/seed.mjs'
 import { serve } from './local/serve.mjs'
 import { localDatabase, localMail } from './local/services.mjs'
 import { openSettings } from './local/settings.mjs'
@@ -23,7 +23,7 @@ import { createStopping } from './local/stopping.mjs'
 import { migrate } from './migrate.mjs'
 
 const mode = process.argv.includes('--dev') ? 'dev' : 'start'
-const distDir = '.next'
+const distDir = process.env.NEXT_DIST_DIR || '.next'
 const running = join(dataFolder, 'running.json')
 
 await runMain(async () => {
@@ -119,12 +119,12 @@ async function wantedPort(port, host) {
 
 /** Made once for each database; the list is kept beside it, so that it goes when the database goes. */
 async function demoSignIns(env, password) {
-  const kept = join(dataFolder, 'database', 'demo.json')
+  const kept = demoFile(dataFolder)
   const known = readJson(kept)
   if (known) return known
   say('Making the demo workroom …')
   const signIns = await seedDemo({ ...env, DEMO_PASSWORD: password })
-  writeJson(kept, signIns)
+  if (signIns.length > 0) writeJson(kept, signIns)
   return signIns
 }
 

@@ -14,7 +14,7 @@ import { socketFolder } from './socket-folder.mjs'
  * @param {object} options
  * @param {string} options.folder where its data, log and socket stand
  * @param {{ port?: number, socketFolder?: string }} options.remembered from the last start; port and folder are kept
- * @returns {Promise<{ port: number, socketFolder: string, sql: (text: string) => Promise<string>, stop: () => Promise<void> }>}
+ * @returns {Promise<{ port: number, socketFolder: string, wasRunning: boolean, sql: (text: string) => Promise<string>, stop: () => Promise<void> }>}
  */
 export async function startServer({ folder, remembered }) {
   const data = await installDatabase(folder)
@@ -34,6 +34,7 @@ export async function startServer({ folder, remembered }) {
   return {
     port,
     socketFolder: run,
+    wasRunning: answers,
     sql: (text) => sql(server.socket, text),
     stop: () => endProcess(pid, { patience: 60_000 }),
   }

@@ -56,7 +56,7 @@ function addToHash(hash, folder, name) {
  * @param {NodeJS.ProcessEnv} env
  */
 export async function ensureBuild(distDir, env) {
-  const lock = await waitForLock(join(root, '.data', `build${distDir}.lock`))
+  const lock = await waitForLock(join(root, '.cache', `build${distDir}.lock`))
   try {
     const mark = join(root, distDir, 'source-hash')
     const wanted = sourceHash()

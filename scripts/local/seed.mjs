@@ -16,3 +16,11 @@ export async function seedDemo(env) {
   const output = await run(process.execPath, args, { quiet: true, cwd: root, env })
   return JSON.parse(output.trim().split('\n').at(-1))
 }
+
+/**
+ * Where the demo sign-ins of the local database are listed; while the file is there, no demo is made.
+ * @param {string} folder data folder of the installation
+ */
+export function demoFile(folder) {
+  return join(folder, 'database', 'demo.json')
+}

@@ -10,11 +10,13 @@ import { startMail } from './mail/start.mjs'
  * @param {ReturnType<import('./settings.mjs').openSettings>} options.installation
  * @param {ReturnType<import('./stopping.mjs').createStopping>} options.stopping
  * @param {{ name: string, fresh?: boolean, family?: string }} options.database
+ * @param {boolean} [options.leaveRunning] a server that ran before is not stopped with us
  * @returns {Promise<string>} DATABASE_URL
  */
-export async function localDatabase({ folder, installation: { settings, remember }, stopping, database }) {
+export async function localDatabase({ folder, installation, stopping, database, leaveRunning = false }) {
+  const { settings, remember } = installation
   const server = await startServer({ folder: join(folder, 'database'), remembered: settings.database })
-  stopping.onStop(server.stop)
+  if (!(leaveRunning && server.wasRunning)) stopping.onStop(server.stop)
   remember({ database: { port: server.port, socketFolder: server.socketFolder } })
   return openDatabase(server, { ...database, password: settings.databasePassword })
 }
