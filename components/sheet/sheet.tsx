@@ -1,0 +1,236 @@
+'use client'
+
+import {
+  useCallback,
+  useEffect,
+  useImperativeHandle,
+  useLayoutEffect,
+  useMemo,
+  useRef,
+  useState,
+  type Ref,
+} from 'react'
+import type { Handle } from '@/drafting/contract'
+import { arrange, drawing, placePath, placeTransform, type Layer, type Places } from '@/drafting/drawing'
+import { applyTo } from '@/drafting/geometry/transform'
+import { classes } from '@/components/ui/classes'
+import type { FieldRef } from '@/components/studio/field-ref'
+import { isStale } from '@/components/studio/state'
+import { useStudio, useStudioList, useStudioState } from '@/components/studio/use-store'
+import { watchView } from './gestures'
+import { Points } from './points'
+import { ScaleBar } from './scale-bar'
+import { createStage, type Emphasis, type Stage } from './stage'
+import { ResultTag, ValueTag } from './tag'
+import { tagWishes, writeTagPlaces } from './tag-writing'
+import { fitView, toScreen, trueScale, zoomAt, type View } from './view'
+
+/** What the bar and the keyboard may ask of the sheet. */
+export interface SheetControl {
+  readonly fit: () => void
+  readonly actual: () => void
+  readonly zoom: (factor: number) => void
+  readonly focusTag: (step: 1 | -1) => void
+}
+
+export interface SheetProps {
+  readonly control: Ref<SheetControl>
+  readonly layers: readonly Layer[]
+  readonly hidden: ReadonlySet<string>
+  readonly emphasis: readonly Emphasis[]
+  /** Only the emphasis is drawn: the draft is being watched as it is made. */
+  readonly replaying: boolean
+  readonly showTags: boolean
+  /** Present on a phone: a tag opens its editor instead of being one. */
+  readonly onOpenTag?: (field: FieldRef) => void
+  readonly onFocusTag: (id: string | undefined) => void
+}
+
+/** The table: the drawing, its tags and points, under a window that pans and zooms. */
+export function Sheet(props: SheetProps) {
+  const { control, layers, hidden, emphasis, replaying, showTags, onOpenTag, onFocusTag } = props
+  const { store, engine, writable } = useStudio()
+  const area = useRef<HTMLDivElement>(null)
+  const svg = useRef<SVGSVGElement>(null)
+  const stage = useRef<Stage>(undefined)
+  const view = useRef<View>({ scale: 0.5, x: 0, y: 0 })
+  const places = useRef<Places>({})
+  const [scale, setScale] = useState(0.5)
+  const settled = useStudioState((state) => (state.gesture ? undefined : state.order))
+  const stale = useStudioState(isStale)
+  const dimensions = useStudioList((state) =>
+    (state.draft?.dimensions ?? []).map(
+      (each) => `${each.id}|${each.piece}|${each.shows}|${each.value ?? ''}|${each.label}`,
+    ),
+  )
+  const [handles, setHandles] = useState<readonly Handle[]>([])
+
+  useEffect(() => {
+    if (!settled || !writable) return
+    const later = setTimeout(() => {
+      try {
+        setHandles(engine.handles(settled))
+      } catch {
+        setHandles([])
+      }
+    }, 0)
+    return () => clearTimeout(later)
+  }, [engine, settled, writable])
+
+  const tags = useMemo(
+    () =>
+      dimensions.map((text) => {
+        const [id = '', piece = '', shows = '', value = '', label = ''] = text.split('|')
+        return {
+          id,
+          piece,
+          label,
+          field: shows === 'value' && value ? (`design.${value}` as FieldRef) : undefined,
+        }
+      }),
+    [dimensions],
+  )
+
+  const position = useCallback(() => {
+    const box = area.current
+    const { draft } = store.get()
+    if (!box || !draft) return
+    stage.current?.look(view.current)
+    writeTagPlaces(box, tagWishes(box, draft, places.current, view.current))
+    for (const handle of box.querySelectorAll<HTMLElement>('[data-point]')) {
+      const own = handles.find((each) => each.id === handle.dataset.point)
+      const mark = draft.pieces
+        .find((piece) => piece.id === own?.piece)
+        ?.marks.find((each) => each.id === own?.mark)
+      if (!own || !mark) continue
+      const at = toScreen(view.current, applyTo(placeTransform(places.current[own.piece]), mark.at))
+      handle.style.transform = `translate(${at.x}px, ${at.y}px)`
+    }
+  }, [handles, store])
+
+  const setView = useCallback(
+    (next: View) => {
+      view.current = next
+      position()
+      setScale(next.scale)
+    },
+    [position],
+  )
+
+  const draw = useCallback(() => {
+    const { draft, unit } = store.get()
+    if (!draft || !stage.current) return
+    places.current = arrange(draft, { kept: places.current })
+    const list = drawing(draft, { layers, places: places.current, unit })
+    const shown = list.items.filter(
+      (item) =>
+        !(item.layer === 'dimension' && item.kind === 'text') && !(item.piece && hidden.has(item.piece)),
+    )
+    stage.current.show({ ...list, items: replaying ? [] : shown })
+    position()
+  }, [hidden, layers, position, replaying, store])
+
+  const fit = useCallback(() => {
+    const box = area.current
+    const { draft } = store.get()
+    if (!box || !draft) return
+    const { bounds } = drawing(draft, { layers: ['cut', 'stitch'], places: places.current })
+    setView(
+      fitView(bounds, { width: box.clientWidth, height: box.clientHeight }, box.clientWidth < 600 ? 20 : 56),
+    )
+  }, [setView, store])
+
+  useLayoutEffect(() => {
+    if (!svg.current) return
+    const made = createStage(svg.current)
+    stage.current = made
+    return () => {
+      made.destroy()
+      stage.current = undefined
+    }
+  }, [])
+
+  useLayoutEffect(() => {
+    draw()
+    return store.subscribe(draw)
+  }, [draw, store, tags])
+
+  useLayoutEffect(() => {
+    stage.current?.emphasise(
+      emphasis.map((line) => ({ ...line, path: placePath(line.path, places.current[line.piece]) })),
+    )
+  }, [emphasis])
+
+  const fitted = useRef(false)
+  useEffect(() => {
+    const box = area.current
+    if (!box) return
+    const watch = new ResizeObserver(() => {
+      if (!fitted.current) fit()
+      fitted.current = box.clientWidth > 0
+    })
+    watch.observe(box)
+    return () => watch.disconnect()
+  }, [fit])
+
+  useEffect(() => {
+    if (!area.current) return
+    return watchView(area.current, { get: () => view.current, set: setView })
+  }, [setView])
+
+  useImperativeHandle(control, () => {
+    const middle = () => ({
+      x: (area.current?.clientWidth ?? 0) / 2,
+      y: (area.current?.clientHeight ?? 0) / 2,
+    })
+    return {
+      fit,
+      actual: () => setView(zoomAt(view.current, middle(), trueScale / view.current.scale)),
+      zoom: (factor) => setView(zoomAt(view.current, middle(), factor)),
+      focusTag: (step) => {
+        const inputs = [...(area.current?.querySelectorAll<HTMLInputElement>('[data-tag] input') ?? [])]
+        const now = inputs.findIndex((input) => input === document.activeElement)
+        inputs[(now + step + inputs.length) % inputs.length]?.focus()
+      },
+    }
+  }, [fit, setView])
+
+  return (
+    <div ref={area} className="relative h-full touch-none overflow-hidden bg-sheet select-none" data-sheet>
+      <svg
+        ref={svg}
+        aria-hidden
+        className={classes('absolute inset-0 size-full transition-opacity', stale && 'opacity-35')}
+      />
+      {showTags && !replaying && (
+        <>
+          <ol aria-label="Measurements on the drawing" className="pointer-events-none absolute inset-0">
+            {tags
+              .filter((tag) => !hidden.has(tag.piece))
+              .map((tag) =>
+                tag.field ? (
+                  <ValueTag
+                    key={tag.id}
+                    dimension={tag.id}
+                    label={tag.label}
+                    field={tag.field}
+                    onFocus={onFocusTag}
+                    onOpen={onOpenTag}
+                  />
+                ) : (
+                  <ResultTag key={tag.id} id={tag.id} label={tag.label} />
+                ),
+              )}
+          </ol>
+          <Points
+            handles={handles.filter((handle) => !hidden.has(handle.piece))}
+            places={() => places.current}
+            view={() => view.current}
+            area={() => area.current?.getBoundingClientRect()}
+          />
+        </>
+      )}
+      <ScaleBar scale={scale} />
+    </div>
+  )
+}

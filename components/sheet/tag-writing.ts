@@ -1,0 +1,48 @@
+import type { Draft } from '@/drafting/contract'
+import { placeTransform, type Places } from '@/drafting/drawing'
+import { applyTo } from '@/drafting/geometry/transform'
+import { placeTags, type TagPlace, type TagWish } from './tag-places'
+import { toScreen, type View } from './view'
+
+/** px: a tag's figures are this wide each, and its frame adds this much. */
+const figure = 7.2
+const frame = 18
+const height = 26
+
+/** Where the tags below `box` want to sit in this view. Those that can be typed in come first. */
+export function tagWishes(box: HTMLElement, draft: Draft, places: Places, view: View): readonly TagWish[] {
+  const dimensions = new Map(draft.dimensions.map((dimension) => [dimension.id, dimension]))
+  const wishes = [...box.querySelectorAll<HTMLElement>('[data-tag]')].flatMap((element) => {
+    const dimension = dimensions.get(element.dataset.tag ?? '')
+    if (!dimension) return []
+    const transform = placeTransform(places[dimension.piece])
+    const wish: TagWish = {
+      id: dimension.id,
+      from: toScreen(view, applyTo(transform, dimension.from)),
+      to: toScreen(view, applyTo(transform, dimension.to)),
+      width: frame + figure * textLength(element),
+      height,
+    }
+    return [{ wish, first: dimension.shows === 'value' }]
+  })
+  return [...wishes.filter((each) => each.first), ...wishes.filter((each) => !each.first)].map(
+    (each) => each.wish,
+  )
+}
+
+function textLength(element: HTMLElement): number {
+  const input = element.querySelector('input')
+  return input ? input.value.length + 1 : (element.querySelector('span')?.textContent?.length ?? 4)
+}
+
+/** Puts each tag at its place, without asking React. */
+export function writeTagPlaces(box: HTMLElement, wishes: readonly TagWish[]): void {
+  const places = new Map<string, TagPlace>(placeTags(wishes).map((place) => [place.id, place]))
+  for (const element of box.querySelectorAll<HTMLElement>('[data-tag]')) {
+    const place = places.get(element.dataset.tag ?? '')
+    element.hidden = !place
+    if (!place) continue
+    element.style.transform = `translate(${Math.round(place.x)}px, ${Math.round(place.y)}px)`
+    element.toggleAttribute('data-folded', place.folded)
+  }
+}

@@ -1,0 +1,132 @@
+'use client'
+
+import { memo } from 'react'
+import { classes } from '@/components/ui/classes'
+import { typeset } from '@/components/ui/typeset'
+import type { FieldRef } from '@/components/studio/field-ref'
+import { useField } from '@/components/studio/use-field'
+import { useStudioState } from '@/components/studio/use-store'
+import { lengthInWords } from '@/components/studio/lengths-in-words'
+import { formatLength } from '@/drafting/lengths'
+
+const shape =
+  'group absolute top-0 left-0 text-tag pointer-events-auto data-folded:z-0 z-10 focus-within:z-30 hover:z-20'
+
+/** A length that follows from others, written where a drafter would write it. */
+export const ResultTag = memo(function ResultTag({
+  id,
+  label,
+}: {
+  readonly id: string
+  readonly label: string
+}) {
+  const length = useStudioState(
+    (state) => state.draft?.dimensions.find((dimension) => dimension.id === id)?.length ?? 0,
+  )
+  const unit = useStudioState((state) => state.unit)
+  return (
+    <li data-tag={id} className={classes(shape, 'text-walnut')} title={label}>
+      <span aria-hidden className="measure block px-1.5 py-0.5 group-data-folded:hidden">
+        {typeset(formatLength(length, unit))}
+      </span>
+      <span
+        aria-hidden
+        className="m-2 hidden size-2 rounded-full bg-rule group-data-folded:block group-hover:hidden"
+      />
+      <span aria-hidden className="measure hidden bg-sheet px-1.5 py-0.5 group-data-folded:group-hover:block">
+        {label} {typeset(formatLength(length, unit))}
+      </span>
+      <span className="sr-only">{`${label} ${lengthInWords(length, unit)}`}</span>
+    </li>
+  )
+})
+
+/** A style measurement on the line it rules: type, and the pattern redraws. */
+export const ValueTag = memo(function ValueTag({
+  dimension,
+  label,
+  field: ref,
+  onFocus,
+  onOpen,
+}: {
+  /** Id of the dimension that it stands for. */
+  readonly dimension: string
+  readonly label: string
+  readonly field: FieldRef
+  readonly onFocus: (id: string | undefined) => void
+  /** On a phone the tag is a button that opens its editor above the keyboard. */
+  readonly onOpen?: (field: FieldRef) => void
+}) {
+  const field = useField(ref, label)
+  const id = `tag-${dimension}`
+  const frame = classes(
+    'rounded border bg-sheet text-ink',
+    field.problem ? 'border-madder border-2' : 'border-rule group-hover:border-indigo',
+  )
+  return (
+    <li data-tag={dimension} className={shape} title={label}>
+      {onOpen ? (
+        <button
+          type="button"
+          onClick={() => onOpen(ref)}
+          aria-label={`${label}, ${field.input.value} ${field.unit}`}
+          className={classes(
+            frame,
+            'measure min-h-6 min-w-6 px-1.5 group-data-folded:rounded-full group-data-folded:px-0',
+          )}
+        >
+          <span className="group-data-folded:hidden">{typeset(field.input.value)}</span>
+          <span
+            aria-hidden
+            className="mx-auto hidden size-2 rounded-full bg-indigo group-data-folded:block"
+          />
+        </button>
+      ) : (
+        <input
+          {...field.input}
+          id={id}
+          size={Math.max(3, field.input.value.length + 1)}
+          aria-label={`${label}${field.unit ? `, ${field.unit}` : ''}`}
+          aria-describedby={field.problem ? `${id}-problem` : undefined}
+          onFocus={(event) => {
+            field.input.onFocus(event)
+            onFocus(dimension)
+          }}
+          onBlur={() => {
+            field.input.onBlur()
+            onFocus(undefined)
+          }}
+          className={classes(
+            frame,
+            'measure min-h-6 px-1.5 text-center leading-5 focus:border-indigo',
+            'group-data-folded:not-focus:w-6 group-data-folded:not-focus:rounded-full group-data-folded:not-focus:px-0 group-data-folded:not-focus:text-[0px]',
+          )}
+        />
+      )}
+      <span
+        aria-hidden
+        className="pointer-events-none absolute bottom-full left-1/2 hidden -translate-x-1/2 bg-ink px-1.5 py-px text-tag whitespace-nowrap text-ground group-focus-within:block group-hover:block"
+      >
+        {label}
+      </span>
+      {field.problem && (
+        <p
+          id={`${id}-problem`}
+          className="absolute top-full left-1/2 z-40 mt-1 w-60 -translate-x-1/2 border-l-3 border-madder bg-sheet px-2.5 py-1.5 text-sm text-ink shadow-float"
+        >
+          {field.problem}{' '}
+          {field.refused && (
+            <button
+              type="button"
+              onPointerDown={(event) => event.preventDefault()}
+              onClick={field.putBack}
+              className="min-h-6 font-semibold text-indigo underline underline-offset-2"
+            >
+              Put back
+            </button>
+          )}
+        </p>
+      )}
+    </li>
+  )
+})
