@@ -5,22 +5,16 @@
 import { openSync } from 'node:fs'
 import { join } from 'node:path'
 import { ensureBuild } from './local/build.mjs'
-import { ensureCommands } from './local/debian.mjs'
 import { ensureModules } from './local/modules.mjs'
-import { freePort } from './local/ports.mjs'
 import { runMain, say, SetUpError } from './local/say.mjs'
 import { seedDemo } from './local/seed.mjs'
 import { serve } from './local/serve.mjs'
-import { localDatabase, localMail } from './local/services.mjs'
-import { openSettings } from './local/settings.mjs'
 import { createStopping } from './local/stopping.mjs'
-import { migrate } from './migrate.mjs'
 import { readArguments } from './testing/arguments.mjs'
 import { runSuite } from './testing/run-suite.mjs'
 import { takeSlot } from './testing/slot.mjs'
 import { total } from './testing/tally.mjs'
-
-const distDir = '.next-test'
+import { bringUpDatabase, testDistDir, testEnvironment } from './testing/test-database.mjs'
 
 await runMain(async () => {
   const asked = readArguments(process.argv.slice(2))
@@ -30,7 +24,9 @@ await runMain(async () => {
   const tallies = []
   try {
     await ensureModules()
-    const env = await bringUpDatabase(asked, slot.folder, stopping)
+    const env = asked.database
+      ? await bringUpDatabase({ folder: slot.folder, stopping, keep: asked.keep })
+      : testEnvironment()
     let served = false
     for (const suite of asked.suites) {
       if (!served && (suite === 'security' || suite === 'e2e')) {
@@ -52,33 +48,9 @@ await runMain(async () => {
   return conclude(total(tallies), asked.filters)
 })
 
-async function bringUpDatabase(asked, folder, stopping) {
-  const env = { ...process.env, CHALKFOLD_ENV: 'test', TZ: 'UTC' }
-  if (!asked.database) return env
-  await ensureCommands(['mariadbd', 'mariadb-dump', 'chromium', 'pdftoppm', 'qpdf'])
-  const installation = openSettings(folder)
-  const { settings } = installation
-  const port = await freePort()
-  const origin = `http://localhost:${port}`
-  Object.assign(env, {
-    PORT: String(port),
-    APP_ORIGIN: origin,
-    NEXTAUTH_URL: origin,
-    NEXTAUTH_SECRET: settings.sessionSecret,
-    MAIL_FROM: 'Chalkfold <post@chalkfold.example>',
-    DEMO_PASSWORD: settings.demoPassword,
-    NEXT_DIST_DIR: distDir,
-    ...(await localMail({ folder, installation, stopping })),
-  })
-  const database = { name: 'chalkfold_test', fresh: !asked.keep, family: 'chalkfold_test_' }
-  env.DATABASE_URL = await localDatabase({ folder, installation, stopping, database })
-  await migrate(env.DATABASE_URL)
-  return env
-}
-
 async function bringUpApp(asked, folder, env, stopping) {
   await seedDemo(env)
-  if (!asked.dev) await ensureBuild(distDir, env)
+  if (!asked.dev) await ensureBuild(testDistDir, env)
   const output = openSync(join(folder, 'app.log'), 'w', 0o600)
   const mode = asked.dev ? 'dev' : 'start'
   const app = await serve({ mode, port: Number(env.PORT), host: '127.0.0.1', env, output })
