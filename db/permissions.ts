@@ -12,7 +12,7 @@ export interface Actor {
   readonly sessionId: string
 }
 
-export type Resource = 'clients' | 'cards' | 'drafts' | 'shares' | 'workroom'
+export type Resource = 'clients' | 'cards' | 'drafts' | 'shares' | 'workroom' | 'members'
 export type Action = 'read' | 'write'
 
 /**
@@ -37,7 +37,8 @@ export const permissions: Readonly<Record<Role, Grants>> = {
     cards: everything,
     drafts: everything,
     shares: everything,
-    workroom: { read: ['all'], write: ['all'] },
+    workroom: everything,
+    members: everything,
   },
   drafter: {
     clients: everything,

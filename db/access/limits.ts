@@ -11,6 +11,7 @@ const limits = {
   'sign-in address': { tries: 60, minutes: 15 },
   'mail account': { tries: 5, minutes: 60 },
   'mail address': { tries: 30, minutes: 60 },
+  'invitations of workroom': { tries: 50, minutes: 60 },
   'token address': { tries: 60, minutes: 15 },
 } as const
 export type Limit = keyof typeof limits

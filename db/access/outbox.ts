@@ -11,8 +11,8 @@ export interface JobPayloads {
   'mail-reset': { readonly email: string }
   'mail-password-changed': { readonly email: string; readonly name: string }
   'mail-invitation': { readonly tokenId: string }
-  /** Automatic versions are thinned to one an hour. */
-  'thin-revisions': Record<string, never>
+  /** Thinning of automatic versions, and what has been kept long enough. */
+  housekeeping: Record<string, never>
 }
 export type JobKind = keyof JobPayloads
 

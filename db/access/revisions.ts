@@ -116,11 +116,7 @@ export async function saveRevision(actor: Actor, input: RevisionInput): Promise<
         throw new AccessError('conflict', 'This version was saved before with other contents. Save it again.')
       return { outcome: 'already-saved', head: await headOf(draft, transaction) }
     }
-    const known = await Revision.count({
-      where: { id: revision.basedOn, draftId: draft.id },
-      transaction,
-    })
-    if (known === 0) throw invalid('basedOn', 'The version this is based on does not belong to the draft.')
+    // A base that was thinned away meanwhile is no reason to lose the edit: it is kept beside the head like any other.
     const [moved] = await Draft.update(
       { headId: revision.id },
       { where: { id: draft.id, headId: revision.basedOn }, transaction },

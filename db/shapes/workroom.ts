@@ -37,6 +37,10 @@ export const usualAllowances: Allowances = {
 const knownZones = new Set([...Intl.supportedValuesOf('timeZone'), 'UTC'])
 const knownCurrencies = new Set(Intl.supportedValuesOf('currency'))
 
+export const timeZoneShape = z
+  .string('Choose a time zone.')
+  .refine((zone) => knownZones.has(zone), 'Choose a time zone such as Africa/Lagos.')
+
 /** What an owner may change about the workroom. */
 export const workroomShape = z.strictObject({
   name: requiredLine(120, 'the name of the workroom'),
@@ -45,9 +49,7 @@ export const workroomShape = z.strictObject({
   currency: z
     .string('Choose a currency.')
     .refine((code) => knownCurrencies.has(code), 'Choose a currency by its three letters, such as EUR.'),
-  timeZone: z
-    .string('Choose a time zone.')
-    .refine((zone) => knownZones.has(zone), 'Choose a time zone such as Africa/Lagos.'),
+  timeZone: timeZoneShape,
   allowances: allowancesShape,
 })
 export type WorkroomSettings = z.output<typeof workroomShape>
