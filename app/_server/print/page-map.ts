@@ -1,0 +1,87 @@
+import 'server-only'
+import type { Path } from '@/drafting/contract'
+import type { Style, Tiling, TilePage } from '@/drafting/drawing'
+import { transformPath } from '@/drafting/geometry/transform'
+import type { PageContent } from './page-content'
+
+const outlined: Style = { stroke: 'walnut', width: 0.15 }
+/** Of a piece, drawn small. */
+const shape: Style = { stroke: 'madder', width: 0.2 }
+const lit: Style = { fill: 'indigo' }
+
+export interface MapOptions {
+  /** Room the map may take, mm. */
+  readonly width: number
+  readonly height: number
+  /** The page to light. */
+  readonly here?: TilePage
+  /** Write the names into the cells. */
+  readonly names?: boolean
+  /** Of the pieces, to be drawn small across the cells. */
+  readonly outlines?: readonly Path[]
+}
+
+/** The part of a page that is its own once the sheets are trimmed and taped, mm. */
+function own(tiling: Tiling): { width: number; height: number } {
+  const lost = 2 * tiling.margin + tiling.overlap
+  return { width: tiling.width - lost, height: tiling.height - lost }
+}
+
+/** The size a map of the pages takes within the room it is given, in the proportions of the taped sheet. */
+export function mapSize(
+  tiling: Tiling,
+  room: { width: number; height: number },
+): { width: number; height: number } {
+  const page = own(tiling)
+  const wide = tiling.columns * page.width
+  const high = tiling.rows * page.height
+  const scale = Math.min(room.width / wide, room.height / high)
+  return { width: wide * scale, height: high * scale }
+}
+
+/** How the pages lie together: a cell for each that is printed, nothing where a page is left out, this page filled. */
+export function drawMap(
+  content: PageContent,
+  tiling: Tiling,
+  at: { x: number; y: number },
+  options: MapOptions,
+): void {
+  const size = mapSize(tiling, options)
+  const cell = { width: size.width / tiling.columns, height: size.height / tiling.rows }
+  const gap = Math.min(cell.width, cell.height) * 0.08
+  drawOutlines(content, tiling, at, cell.width / own(tiling).width, options.outlines ?? [])
+  for (const page of tiling.pages) {
+    if (page.blank) continue
+    const x = at.x + page.column * cell.width + gap / 2
+    const y = at.y + page.row * cell.height + gap / 2
+    const here = options.here?.name === page.name
+    content.box(x, y, cell.width - gap, cell.height - gap, here ? lit : outlined)
+    if (!options.names) continue
+    const em = Math.min(cell.width / 2.4, cell.height / 1.8, 4.2)
+    content.text(
+      page.name,
+      { x: x + (cell.width - gap) / 2, y: y + (cell.height - gap) / 2 + em * 0.33 },
+      {
+        size: em,
+        align: 'middle',
+      },
+    )
+  }
+}
+
+function drawOutlines(
+  content: PageContent,
+  tiling: Tiling,
+  at: { x: number; y: number },
+  scale: number,
+  outlines: readonly Path[],
+): void {
+  const first = tiling.pages[0]
+  if (!first) return
+  const half = tiling.overlap / 2
+  const e = at.x - (first.window.x + half) * scale
+  const f = at.y - (first.window.y + half) * scale
+  for (const outline of outlines) {
+    content.path(transformPath({ a: scale, b: 0, c: 0, d: scale, e, f }, outline), shape)
+  }
+}

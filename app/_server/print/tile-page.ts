@@ -1,0 +1,126 @@
+import 'server-only'
+import type { Drawing } from '@/drafting/contract'
+import { crosses } from '@/drafting/drawing'
+import type { MatchMark, PageWindow, Style, TilePage, Tiling } from '@/drafting/drawing'
+import { drawMap, mapSize } from './page-map'
+import type { PageContent } from './page-content'
+import { drawItems, itemsIn } from './page-items'
+import type { Placed } from './page-items'
+
+const hairline: Style = { stroke: 'walnut', width: 0.1 }
+const trim: Style = { stroke: 'walnut', width: 0.2 }
+const lay: Style = { stroke: 'walnut', width: 0.15, dash: [2, 2] }
+const mark: Style = { stroke: 'ink', width: 0.2 }
+
+/** Half of the widest line, kept inside the safe edge, mm. */
+const inset = 0.1
+
+export interface TileContext {
+  readonly tiling: Tiling
+  readonly items: readonly Placed[]
+  /** One line that tells this pattern from another. */
+  readonly caption: string
+  /** Of the printed pages, by name. */
+  readonly sheets: ReadonlyMap<string, number>
+}
+
+/** One page of the pattern: what the drawing shows there, how it joins its neighbours, and where it belongs. */
+export function drawTile(content: PageContent, page: TilePage, context: TileContext): void {
+  const { tiling } = context
+  const { margin } = tiling
+  const printable = {
+    x: margin,
+    y: margin,
+    width: tiling.width - 2 * margin,
+    height: tiling.height - 2 * margin,
+  }
+  const items = itemsIn(context.items, page.window)
+  content.within(printable, page.window, () => drawItems(content, items, page.window))
+  content.within(printable, printable, () => {
+    drawSides(content, page, tiling, printable)
+    for (const match of page.marks) drawMark(content, match, page.window, margin)
+    drawName(content, page, { ...context, items }, printable)
+  })
+}
+
+/**
+ * Left and top are trimmed and laid over the neighbour; right and bottom are laid under, up to the dashed line. A side without
+ * neighbour shows where the printable area ends.
+ */
+function drawSides(content: PageContent, page: TilePage, tiling: Tiling, printable: PageWindow): void {
+  const half = tiling.overlap / 2
+  const right = printable.x + printable.width
+  const bottom = printable.y + printable.height
+  const joined = new Set(page.marks.map((match) => match.side))
+  const upright = (x: number, style: Style) => content.line({ x, y: printable.y }, { x, y: bottom }, style)
+  const level = (y: number, style: Style) => content.line({ x: printable.x, y }, { x: right, y }, style)
+  if (joined.has('left')) upright(printable.x + half, trim)
+  else upright(printable.x + inset, hairline)
+  if (joined.has('right')) upright(right - half, lay)
+  else upright(right - inset, hairline)
+  if (joined.has('top')) level(printable.y + half, trim)
+  else level(printable.y + inset, hairline)
+  if (joined.has('bottom')) level(bottom - half, lay)
+  else level(bottom - inset, hairline)
+}
+
+/** A circle and a cross; its name stands beside it, on the side that stays visible on the lower sheet as well. */
+function drawMark(content: PageContent, match: MatchMark, window: PageWindow, margin: number): void {
+  const at = { x: match.at.x - window.x + margin, y: match.at.y - window.y + margin }
+  const radius = 3
+  const arm = 4.5
+  content.circle(at, radius, mark)
+  content.line({ x: at.x - arm, y: at.y }, { x: at.x + arm, y: at.y }, mark)
+  content.line({ x: at.x, y: at.y - arm }, { x: at.x, y: at.y + arm }, mark)
+  const upright = match.side === 'left' || match.side === 'right'
+  const size = 3
+  // Once on either side of the join: one is cut off or covered, the other is read.
+  for (const side of [-1, 1]) {
+    const text = upright ? { x: at.x + side * 3.2, y: at.y + 8 } : { x: at.x + 7.2, y: at.y + side * 2.6 + 1 }
+    content.text(match.name, text, { size, weight: 600, align: 'middle' })
+  }
+}
+
+/** The page's name, the map and the caption, in the corner where they hide least. */
+function drawName(content: PageContent, page: TilePage, context: TileContext, printable: PageWindow): void {
+  const { tiling } = context
+  const map = mapSize(tiling, { width: 26, height: 22 })
+  const box = { width: 62, height: Math.max(map.height, 15) }
+  const clear = tiling.overlap / 2 + 3
+  const corners = [
+    { x: clear, y: clear },
+    { x: clear, y: printable.height - clear - box.height },
+    { x: printable.width - clear - box.width, y: clear },
+    { x: printable.width - clear - box.width, y: printable.height - clear - box.height },
+    { x: (printable.width - box.width) / 2, y: clear },
+    { x: (printable.width - box.width) / 2, y: (printable.height - box.height) / 2 },
+  ]
+  const crossed = (corner: { x: number; y: number }) => {
+    const window = {
+      x: page.window.x + corner.x - 1,
+      y: page.window.y + corner.y - 1,
+      width: box.width + 2,
+      height: box.height + 2,
+    }
+    return context.items.filter(({ ink }) => crosses(ink, window)).length
+  }
+  const [first, ...others] = corners.map((corner) => ({ corner, crossed: crossed(corner) }))
+  if (!first) return
+  const { corner } = others.reduce((best, next) => (next.crossed < best.crossed ? next : best), first)
+  const x = printable.x + corner.x
+  const y = printable.y + corner.y
+  drawMap(content, tiling, { x, y }, { ...map, here: page })
+  const text = x + map.width + 3
+  content.text(page.name, { x: text, y: y + 6.4 }, { size: 8, weight: 600, dye: 'indigo' })
+  content.text(
+    `Sheet ${context.sheets.get(page.name) ?? 1} of ${context.sheets.size}`,
+    { x: text, y: y + 10.6 },
+    { size: 3, dye: 'walnut' },
+  )
+  content.text(context.caption, { x: text, y: y + 14.4 }, { size: 3, dye: 'walnut' })
+}
+
+/** Everything that a drawing's pages write besides the drawing itself, so that its characters can be looked up beforehand. */
+export function textsOf(drawing: Drawing): readonly string[] {
+  return drawing.items.flatMap((item) => (item.kind === 'text' ? [item.text] : []))
+}
