@@ -18,11 +18,12 @@ function dimensionOf(piece: Piece, dimension: Dimension, options: DrawingOptions
   const { from, to } = dimension
   const text = typesetFractions(formatLength(dimension.length, options.unit ?? 'cm'))
   const line = pathItem(piece, 'dimension', dimension.id, 'dimension', polyline([from, to]))
+  const size = 5.5 * (options.textScale ?? 1)
   const long = distance(from, to)
   const along = long > 1 ? unit(subtract(to, from)) : { x: 1, y: 0 }
   const turn = readable((Math.atan2(along.y, along.x) * 180) / Math.PI)
   const up = perpendicular({ x: -Math.cos((turn * Math.PI) / 180), y: -Math.sin((turn * Math.PI) / 180) })
-  const at = add(lerp(from, to, 0.5), scale(up, 1.5))
-  const label = textItem(piece, 'dimension', `${dimension.id}-text`, 'dimension-text', text, at, 5.5, turn)
+  const at = add(lerp(from, to, 0.5), scale(up, size * 0.27))
+  const label = textItem(piece, 'dimension', `${dimension.id}-text`, 'dimension-text', text, at, size, turn)
   return long > 1 ? [line, label] : [label]
 }

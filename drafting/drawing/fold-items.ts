@@ -17,11 +17,11 @@ export function foldItems(piece: Piece, _draft: Draft, options: DrawingOptions):
     .flatMap((edge) => [
       // With allowances the fold runs on through those at its ends.
       pathItem(piece, 'fold', edge.id, 'fold', options.allowances === false ? edge.path : edge.cut),
-      ...bracket(piece, edge),
+      ...bracket(piece, edge, options.textScale ?? 1),
     ])
 }
 
-function bracket(piece: Piece, edge: Edge): readonly DrawingItem[] {
+function bracket(piece: Piece, edge: Edge, textScale: number): readonly DrawingItem[] {
   const length = pathLength(edge.path)
   if (length < 25) return []
   const inset = Math.min(length * 0.2, 60)
@@ -61,14 +61,25 @@ function bracket(piece: Piece, edge: Edge): readonly DrawingItem[] {
       arrowhead(end.point, inside(end.tangent, -1), head * 1.6, head),
     ),
   ]
-  if (length < 70) return items
+  if (length < 70 * textScale) return items
   const middle = spotOn(edge.path, length / 2)
   const degrees = readable((Math.atan2(middle.tangent.y, middle.tangent.x) * 180) / Math.PI)
   const at = add(
     middle.point,
-    inside(middle.tangent, depth + (inwardIsUp(middle.tangent, degrees) ? 1.8 : 5)),
+    inside(middle.tangent, depth + (inwardIsUp(middle.tangent, degrees) ? 1.8 : 1 + 4 * textScale)),
   )
-  items.push(textItem(piece, 'fold', `${edge.id}-text`, 'label-small', 'place on the fold', at, 4, degrees))
+  items.push(
+    textItem(
+      piece,
+      'fold',
+      `${edge.id}-text`,
+      'label-small',
+      'place on the fold',
+      at,
+      4 * textScale,
+      degrees,
+    ),
+  )
   return items
 }
 

@@ -19,7 +19,8 @@ const leading = 1.35
 
 /** The name of the piece, how it is cut, and which draft it belongs to, where they fit inside the piece. */
 export function labelItems(piece: Piece, _draft: Draft, options: DrawingOptions): readonly DrawingItem[] {
-  const lines = labelLines(piece, options)
+  const scale = options.textScale ?? 1
+  const lines = labelLines(piece, options).map((line) => ({ ...line, size: line.size * scale }))
   const width = Math.max(...lines.map((line) => textWidth(line.text, line.size)))
   const height = lines.reduce((sum, line) => sum + line.size * leading, 0)
   const place = labelPlace(piece, width, height)

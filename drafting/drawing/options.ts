@@ -28,4 +28,6 @@ export interface DrawingOptions {
   /** Of the lengths on dimension lines. Default 'cm'. */
   readonly unit?: Unit
   readonly title?: TitleBlock
+  /** Texts so many times their size on paper, where a drawing is shown small. Default 1. */
+  readonly textScale?: number
 }

@@ -1,4 +1,4 @@
-import type { Drawing, DrawingItem } from '../contract'
+import type { Drawing, DrawingItem, Unit } from '../contract'
 import { layers } from './layers'
 import { styleOf } from './styles'
 import type { Dye, Style } from './styles'
@@ -13,6 +13,8 @@ export interface SvgOptions {
   readonly for?: 'paper' | 'screen'
   /** Room around the drawing, mm. Default 10. */
   readonly margin?: number
+  /** Drawings of the lengths in one unit each, of which the page shows one: groups marked `data-unit`. */
+  readonly units?: Readonly<Partial<Record<Unit, Drawing>>>
   /** What a dye is on this page. Default: the light theme's ink on paper. */
   readonly dye?: (dye: Dye) => string
 }
@@ -47,9 +49,16 @@ export function toSvg(drawing: Drawing, options: SvgOptions): string {
     `<svg xmlns="http://www.w3.org/2000/svg"${size} viewBox="${box}" role="img" fill="none" ` +
     `stroke-linecap="round" stroke-linejoin="round" font-family="'Source Sans 3', sans-serif" text-anchor="middle">` +
     `<title>${escaped(options.title)}</title>${description}` +
-    layers.map((layer) => layerGroup(drawing, layer, options)).join('') +
+    layerGroups(drawing, options) +
+    Object.entries(options.units ?? {})
+      .map(([unit, lengths]) => `<g data-unit="${unit}">${layerGroups(lengths, options)}</g>`)
+      .join('') +
     '</svg>'
   )
+}
+
+function layerGroups(drawing: Drawing, options: SvgOptions): string {
+  return layers.map((layer) => layerGroup(drawing, layer, options)).join('')
 }
 
 function layerGroup(drawing: Drawing, layer: string, options: SvgOptions): string {

@@ -1,13 +1,19 @@
-import 'server-only'
-import type { Draft, Drawing, Path } from '@/drafting/contract'
-import { arrange, drawing, outline, placePath, printLayers, tilePages } from '@/drafting/drawing'
-import type { Orientation, Paper, Tiling } from '@/drafting/drawing'
-import { bounds, flatten } from '@/drafting/geometry/path'
-import type { PatternTitle } from './pattern-title'
+import type { Draft, Drawing, Path } from '../contract'
+import { bounds, flatten } from '../geometry/path'
+import { arrange } from './arrange'
+import { drawing } from './drawing'
+import { printLayers } from './layers'
+import type { TitleBlock } from './options'
+import type { Paper } from './papers'
+import { placePath } from './place'
+import { outline } from './stitch-outline'
+import { tilePages } from './tile-pages'
+import type { Orientation, Tiling } from './tiling'
 
 export interface LayOutRequest {
   readonly draft: Draft
-  readonly title: PatternTitle
+  /** Of the labels on the pieces. */
+  readonly title?: TitleBlock
   readonly paper: Paper
   readonly orientation: Orientation
   readonly allowances: boolean
