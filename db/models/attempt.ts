@@ -15,7 +15,7 @@ Attempt.init(
   {
     scope: { type: DataTypes.STRING(24), primaryKey: true },
     subject: { type: DataTypes.CHAR(64), primaryKey: true },
-    windowEnds: moment,
+    windowEnds: moment(),
     count: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false },
   },
   { sequelize: connection, tableName: 'attempts', modelName: 'Attempt', timestamps: false },

@@ -24,15 +24,15 @@ export class Client extends Model<InferAttributes<Client>, InferCreationAttribut
 
 Client.init(
   {
-    id,
-    workroomId: reference,
+    id: id(),
+    workroomId: reference(),
     name: text(120),
     email: text(254),
     phone: text(40),
     note: { type: DataTypes.TEXT, allowNull: false },
-    archivedAt: maybeMoment,
-    createdAt: moment,
-    updatedAt: moment,
+    archivedAt: maybeMoment(),
+    createdAt: moment(),
+    updatedAt: moment(),
   },
   { sequelize: connection, tableName: 'clients', modelName: 'Client', timestamps: true },
 )

@@ -14,11 +14,11 @@ export class KeptDraft extends Model<InferAttributes<KeptDraft>, InferCreationAt
 
 KeptDraft.init(
   {
-    revisionId: id,
-    workroomId: reference,
+    revisionId: id(),
+    workroomId: reference(),
     engineVersion: text(40),
     drafted: { type: DataTypes.BLOB('long'), allowNull: false },
-    keptAt: moment,
+    keptAt: moment(),
   },
   { sequelize: connection, tableName: 'kept_drafts', modelName: 'KeptDraft', timestamps: false },
 )

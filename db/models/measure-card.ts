@@ -26,16 +26,16 @@ export class MeasureCard extends Model<InferAttributes<MeasureCard>, InferCreati
 
 MeasureCard.init(
   {
-    id,
-    workroomId: reference,
-    clientId: maybeReference,
-    membershipId: maybeReference,
+    id: id(),
+    workroomId: reference(),
+    clientId: maybeReference(),
+    membershipId: maybeReference(),
     name: text(120),
     takenOn: { type: DataTypes.DATEONLY, allowNull: false },
     unit: text(2),
     note: { type: DataTypes.TEXT, allowNull: false },
-    createdAt: moment,
-    updatedAt: moment,
+    createdAt: moment(),
+    updatedAt: moment(),
   },
   { sequelize: connection, tableName: 'measure_cards', modelName: 'MeasureCard', timestamps: true },
 )

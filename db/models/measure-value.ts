@@ -19,9 +19,9 @@ export class MeasureValue extends Model<
 
 MeasureValue.init(
   {
-    cardId: id,
+    cardId: id(),
     measurement: { type: DataTypes.STRING(40), primaryKey: true },
-    workroomId: reference,
+    workroomId: reference(),
     mm: { type: DataTypes.DECIMAL(9, 3), allowNull: false },
     typed: text(40),
     unit: text(2),

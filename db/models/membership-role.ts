@@ -16,9 +16,9 @@ export class MembershipRole extends Model<
 
 MembershipRole.init(
   {
-    membershipId: id,
+    membershipId: id(),
     role: { type: DataTypes.STRING(16), primaryKey: true },
-    workroomId: reference,
+    workroomId: reference(),
   },
   { sequelize: connection, tableName: 'membership_roles', modelName: 'MembershipRole', timestamps: false },
 )

@@ -15,12 +15,12 @@ export class Membership extends Model<InferAttributes<Membership>, InferCreation
 
 Membership.init(
   {
-    id,
-    workroomId: reference,
-    userId: reference,
-    disabledAt: maybeMoment,
-    createdAt: moment,
-    updatedAt: moment,
+    id: id(),
+    workroomId: reference(),
+    userId: reference(),
+    disabledAt: maybeMoment(),
+    createdAt: moment(),
+    updatedAt: moment(),
   },
   { sequelize: connection, tableName: 'memberships', modelName: 'Membership', timestamps: true },
 )

@@ -32,10 +32,10 @@ export class Revision extends Model<InferAttributes<Revision>, InferCreationAttr
 
 Revision.init(
   {
-    id,
-    workroomId: reference,
-    draftId: reference,
-    basedOn: maybeReference,
+    id: id(),
+    workroomId: reference(),
+    draftId: reference(),
+    basedOn: maybeReference(),
     order: { type: DataTypes.JSON, allowNull: false },
     typed: { type: DataTypes.JSON, allowNull: false },
     bodyHash: { type: DataTypes.CHAR(64), allowNull: false },
@@ -43,10 +43,10 @@ Revision.init(
     name: { type: DataTypes.STRING(120), allowNull: true },
     engineVersion: text(40),
     conflict: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
-    madeBy: maybeReference,
-    savedAt: moment,
-    printedAt: maybeMoment,
-    sharedAt: maybeMoment,
+    madeBy: maybeReference(),
+    savedAt: moment(),
+    printedAt: maybeMoment(),
+    sharedAt: maybeMoment(),
   },
   { sequelize: connection, tableName: 'revisions', modelName: 'Revision', timestamps: false },
 )

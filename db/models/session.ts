@@ -15,12 +15,12 @@ export class Session extends Model<InferAttributes<Session>, InferCreationAttrib
 
 Session.init(
   {
-    id,
-    userId: reference,
-    workroomId: maybeReference,
-    startedAt: moment,
-    lastSeenAt: moment,
-    endedAt: maybeMoment,
+    id: id(),
+    userId: reference(),
+    workroomId: maybeReference(),
+    startedAt: moment(),
+    lastSeenAt: moment(),
+    endedAt: maybeMoment(),
   },
   { sequelize: connection, tableName: 'sessions', modelName: 'Session', timestamps: false },
 )

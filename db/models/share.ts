@@ -20,16 +20,16 @@ export class Share extends Model<InferAttributes<Share>, InferCreationAttributes
 
 Share.init(
   {
-    id,
-    workroomId: reference,
-    draftId: reference,
+    id: id(),
+    workroomId: reference(),
+    draftId: reference(),
     tokenHash: { type: DataTypes.CHAR(64), allowNull: false },
     scope: text(8),
     expiresOn: { type: DataTypes.DATEONLY, allowNull: false },
-    expiresAt: moment,
-    revokedAt: maybeMoment,
-    madeBy: maybeReference,
-    createdAt: moment,
+    expiresAt: moment(),
+    revokedAt: maybeMoment(),
+    madeBy: maybeReference(),
+    createdAt: moment(),
   },
   { sequelize: connection, tableName: 'shares', modelName: 'Share', timestamps: false },
 )

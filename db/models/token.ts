@@ -32,16 +32,16 @@ export class Token extends Model<InferAttributes<Token>, InferCreationAttributes
 
 Token.init(
   {
-    id,
+    id: id(),
     kind: text(16),
     tokenHash: { type: DataTypes.CHAR(64), allowNull: false },
     email: text(254),
-    userId: maybeReference,
-    workroomId: maybeReference,
+    userId: maybeReference(),
+    workroomId: maybeReference(),
     details: { type: DataTypes.JSON, allowNull: false },
-    createdAt: moment,
-    expiresAt: moment,
-    usedAt: maybeMoment,
+    createdAt: moment(),
+    expiresAt: moment(),
+    usedAt: maybeMoment(),
   },
   { sequelize: connection, tableName: 'tokens', modelName: 'Token', timestamps: false },
 )

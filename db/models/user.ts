@@ -16,13 +16,13 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
 
 User.init(
   {
-    id,
+    id: id(),
     email: text(254),
     name: text(120),
     passwordHash: text(255),
-    disabledAt: maybeMoment,
-    createdAt: moment,
-    updatedAt: moment,
+    disabledAt: maybeMoment(),
+    createdAt: moment(),
+    updatedAt: moment(),
   },
   { sequelize: connection, tableName: 'users', modelName: 'User', timestamps: true },
 )

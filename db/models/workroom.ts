@@ -26,15 +26,15 @@ export class Workroom extends Model<InferAttributes<Workroom>, InferCreationAttr
 
 Workroom.init(
   {
-    id,
+    id: id(),
     name: text(120),
     note: text(500),
     unit: text(2),
     currency: text(3),
     timeZone: text(64),
     allowances: { type: DataTypes.JSON, allowNull: false },
-    createdAt: moment,
-    updatedAt: moment,
+    createdAt: moment(),
+    updatedAt: moment(),
   },
   { sequelize: connection, tableName: 'workrooms', modelName: 'Workroom', timestamps: true },
 )
