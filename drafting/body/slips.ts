@@ -72,7 +72,7 @@ function slipsOf(card: Card, measurement: TapeMeasurement): readonly Slip[] {
     .map(({ slip }) => slip)
 }
 
-/** Measurements in doubt, those that fit the least first: impossible values, then odd ones. */
+/** Measurements in doubt, those that fit the least first: impossible values, then those at odds with two others or more. */
 function suspects(card: Card): readonly TapeMeasurement[] {
   const odd = misfits(trusted(card))
   return measurements
@@ -85,7 +85,7 @@ function suspects(card: Card): readonly TapeMeasurement[] {
         doubt: impossible ? Infinity : odd.filter((misfit) => concerns(misfit, id)).length,
       }
     })
-    .filter(({ doubt }) => doubt > 0)
+    .filter(({ doubt }) => doubt > 1)
     .sort((a, b) => (a.doubt === b.doubt ? 0 : b.doubt - a.doubt))
     .map(({ measurement }) => measurement)
 }
@@ -106,7 +106,8 @@ function sharedSlip(card: Card): readonly Slip[] {
 
 /**
  * Values that look like an inch figure typed as centimetres, the reverse, or a tape that was doubled. A value is named only
- * when undoing the slip makes it possible and lets it go with everything else on the card; when several values are impossible
+ * when undoing the slip makes it possible and lets it go with everything else on the card (one odd pair alone does not
+ * say which of the two is wrong); when several values are impossible
  * and one slip of unit explains them all, that is it.
  * @param card mm, our own measurements only
  * @returns for each such measurement its slips, the likeliest first
