@@ -43,12 +43,11 @@ export interface SheetProps {
   readonly showTags: boolean
   /** Present on a phone: a tag opens its editor instead of being one. */
   readonly onOpenTag?: (field: FieldRef) => void
-  readonly onFocusTag: (id: string | undefined) => void
 }
 
 /** The table: the drawing, its tags and points, under a window that pans and zooms. */
 export function Sheet(props: SheetProps) {
-  const { control, layers, hidden, emphasis, replaying, showTags, onOpenTag, onFocusTag } = props
+  const { control, layers, hidden, emphasis, replaying, showTags, onOpenTag } = props
   const { store, engine, writable } = useStudio()
   const area = useRef<HTMLDivElement>(null)
   const svg = useRef<SVGSVGElement>(null)
@@ -58,6 +57,7 @@ export function Sheet(props: SheetProps) {
   const [scale, setScale] = useState(0.5)
   const settled = useStudioState((state) => (state.gesture ? undefined : state.order))
   const stale = useStudioState(isStale)
+  const unit = useStudioState((state) => state.unit)
   const dimensions = useStudioList((state) =>
     (state.draft?.dimensions ?? []).map(
       (each) => `${each.id}|${each.piece}|${each.shows}|${each.value ?? ''}|${each.label}`,
@@ -214,7 +214,6 @@ export function Sheet(props: SheetProps) {
                     dimension={tag.id}
                     label={tag.label}
                     field={tag.field}
-                    onFocus={onFocusTag}
                     onOpen={onOpenTag}
                   />
                 ) : (
@@ -230,7 +229,7 @@ export function Sheet(props: SheetProps) {
           />
         </>
       )}
-      <ScaleBar scale={scale} />
+      <ScaleBar scale={scale} unit={unit} />
     </div>
   )
 }

@@ -26,7 +26,7 @@ export const ResultTag = memo(function ResultTag({
   const unit = useStudioState((state) => state.unit)
   return (
     <li data-tag={id} className={classes(shape, 'text-walnut')} title={label}>
-      <span aria-hidden className="measure block px-1.5 py-0.5 group-data-folded:hidden">
+      <span aria-hidden className="measure block bg-sheet/85 px-1.5 py-0.5 group-data-folded:hidden">
         {typeset(formatLength(length, unit))}
       </span>
       <span
@@ -46,14 +46,12 @@ export const ValueTag = memo(function ValueTag({
   dimension,
   label,
   field: ref,
-  onFocus,
   onOpen,
 }: {
   /** Id of the dimension that it stands for. */
   readonly dimension: string
   readonly label: string
   readonly field: FieldRef
-  readonly onFocus: (id: string | undefined) => void
   /** On a phone the tag is a button that opens its editor above the keyboard. */
   readonly onOpen?: (field: FieldRef) => void
 }) {
@@ -88,14 +86,6 @@ export const ValueTag = memo(function ValueTag({
           size={Math.max(3, field.input.value.length + 1)}
           aria-label={`${label}${field.unit ? `, ${field.unit}` : ''}`}
           aria-describedby={field.problem ? `${id}-problem` : undefined}
-          onFocus={(event) => {
-            field.input.onFocus(event)
-            onFocus(dimension)
-          }}
-          onBlur={() => {
-            field.input.onBlur()
-            onFocus(undefined)
-          }}
           className={classes(
             frame,
             'measure min-h-6 px-1.5 text-center leading-5 focus:border-indigo',

@@ -1,0 +1,156 @@
+'use client'
+
+import { PanelLeftClose, Ruler } from 'lucide-react'
+import { useState } from 'react'
+import type { MeasurementDefinition } from '@/drafting/contract'
+import { typeset } from '@/components/ui/typeset'
+import { ValueField } from '@/components/studio/value-field'
+import { useStudio, useStudioState } from '@/components/studio/use-store'
+import { shownText } from '@/components/studio/values'
+import { lengthDigits } from '@/drafting/lengths'
+import { Figure } from './figure'
+import { bodyOrder } from './figure-places'
+import { TapeStrip } from './tape-strip'
+
+/** The measurements this draft is made from, in the order of the body. */
+function useDraftMeasurements(): readonly string[] {
+  const { garment } = useStudio()
+  const given = useStudioState((state) => state.order.measurements)
+  return bodyOrder([...new Set([...garment.needs, ...garment.estimates, ...Object.keys(given)])])
+}
+
+/** The tape folded in: every measurement hangs at its height with its figure. */
+function TapeRail({
+  definitions,
+  onOpen,
+}: {
+  readonly definitions: readonly MeasurementDefinition[]
+  readonly onOpen: (id: string | undefined) => void
+}) {
+  const ids = useDraftMeasurements()
+  return (
+    <nav
+      aria-label="Body measurements"
+      className="relative flex w-18 shrink-0 flex-col border-r border-rule bg-panel"
+    >
+      <button
+        type="button"
+        onClick={() => onOpen(undefined)}
+        className="flex min-h-11 items-center justify-center gap-1 border-b hairline text-sm font-semibold hover:text-indigo"
+      >
+        <Ruler size={16} aria-hidden />
+        Tape
+      </button>
+      <TapeStrip className="pointer-events-none absolute top-11 right-0 bottom-0 w-5 rotate-180" />
+      <ol className="min-h-0 flex-1 overflow-y-auto py-1 [scrollbar-width:none]">
+        {ids.map((id) => (
+          <RailEntry
+            key={id}
+            id={id}
+            name={definitions.find((definition) => definition.id === id)?.name ?? id}
+            onOpen={() => onOpen(id)}
+          />
+        ))}
+      </ol>
+    </nav>
+  )
+}
+
+function RailEntry({
+  id,
+  name,
+  onOpen,
+}: {
+  readonly id: string
+  readonly name: string
+  readonly onOpen: () => void
+}) {
+  const text = useStudioState((state) => {
+    const given = state.order.measurements[id]
+    if (given !== undefined) return shownText('length', given, state.typed[`measurements.${id}`], state.unit)
+    const estimate = state.draft?.used[id]?.mm
+    return estimate === undefined ? '' : `≈ ${lengthDigits(estimate, state.unit)}`
+  })
+  return (
+    <li>
+      <button
+        type="button"
+        onClick={onOpen}
+        className="relative block min-h-11 w-full px-1.5 py-0.5 text-left hover:text-indigo"
+      >
+        <span className="measure block font-semibold">{text ? typeset(text) : '–'}</span>
+        <span className="block truncate pr-3 text-[12px] leading-4 text-walnut">{name}</span>
+      </button>
+    </li>
+  )
+}
+
+/** The tape drawn out: figure, how each is taken, and the fields. Changes here stay with this draft. */
+export function TapePanel({
+  definitions,
+  focused,
+  onClose,
+}: {
+  readonly definitions: readonly MeasurementDefinition[]
+  readonly focused: string | undefined
+  readonly onClose?: () => void
+}) {
+  const ids = useDraftMeasurements()
+  const [at, setAt] = useState(focused)
+  const definition = definitions.find((each) => each.id === at)
+  const used = useStudioState((state) => state.draft?.used)
+  return (
+    <section aria-label="Body measurements" className="flex min-h-0 flex-1 flex-col bg-panel">
+      <header className="flex min-h-11 items-center justify-between gap-2 border-b hairline px-4">
+        <h2 className="font-semibold">Tape</h2>
+        {onClose && (
+          <button
+            type="button"
+            onClick={onClose}
+            className="flex min-h-11 items-center gap-1.5 text-sm text-walnut hover:text-ink"
+          >
+            <PanelLeftClose size={16} aria-hidden />
+            Fold in
+          </button>
+        )}
+      </header>
+      <div className="flex items-center gap-3 border-b hairline px-4 py-2">
+        <Figure focused={at} className="h-40 shrink-0" />
+        <p className="text-sm text-walnut">
+          {definition ? definition.how : 'Choose a measurement to see where it is taken.'}
+        </p>
+      </div>
+      <div className="relative min-h-0 flex-1 overflow-y-auto py-4 pr-4 pl-8">
+        <TapeStrip className="pointer-events-none absolute top-0 left-0 h-full w-6" />
+        <p className="mb-4 text-sm text-walnut">
+          Changed here, changed for this draft. The measure card stays as it is.
+        </p>
+        <div className="grid gap-4">
+          {ids.map((id) => {
+            const estimate = used?.[id]?.estimatedBy
+            return (
+              <ValueField
+                key={id}
+                field={`measurements.${id}`}
+                label={definitions.find((each) => each.id === id)?.name ?? id}
+                hint={estimate ? `Estimated: ${estimate}` : undefined}
+                onFocus={() => setAt(id)}
+              />
+            )
+          })}
+        </div>
+      </div>
+    </section>
+  )
+}
+
+/** The tape at the left of the studio: folded in, or drawn out to its fields. */
+export function StudioTape({ definitions }: { readonly definitions: readonly MeasurementDefinition[] }) {
+  const [open, setOpen] = useState<{ readonly at: string | undefined }>()
+  if (!open) return <TapeRail definitions={definitions} onOpen={(at) => setOpen({ at })} />
+  return (
+    <div className="flex w-80 shrink-0 flex-col border-r border-rule">
+      <TapePanel definitions={definitions} focused={open.at} onClose={() => setOpen(undefined)} />
+    </div>
+  )
+}
