@@ -69,7 +69,7 @@ const widths: readonly Relation[] = [
 ]
 
 const lengths: readonly Relation[] = [
-  relation('shoulderLength', ['height'], both(share(0.066, 0.106), line(3.229, 0.0633, 2.9)), ansur),
+  relation('shoulderLength', ['height'], both(share(0.0655, 0.106), line(3.229, 0.0633, 2.9)), ansur),
   // To the navel in the survey; a natural waist lies 2–5 cm higher.
   relation('napeToWaist', ['height'], line(8.823, 0.207, 6.9 + 5, 6.9 - 2), ansur),
   // 0–10 cm longer than the back counted from the side neck, which lies 1.7–2.5 cm above the nape.
