@@ -187,6 +187,8 @@ export interface Dimension {
   readonly length: number
   readonly shows: 'value' | 'result'
   readonly value?: string
+  /** mm that the body gives before the style value counts: typing a length sets the value to that length less this. */
+  readonly over?: number
   readonly step?: string
   readonly edge?: string
 }

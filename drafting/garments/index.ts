@@ -1,0 +1,23 @@
+import type { DraftOrder, GarmentDefinition } from '../contract'
+import { DraftingError } from '../drafting-error'
+import type { Garment } from '../pen/garment'
+import { circleSkirt } from './circle-skirt'
+import { flaredDress } from './flared-dress'
+
+const all: readonly Garment[] = [flaredDress, circleSkirt]
+
+/** Every garment that can be drafted. */
+export const garments: readonly GarmentDefinition[] = all.map((garment) => garment.definition)
+
+/** The garment that an order asks for. Throws DraftingError('unknown-garment'). */
+export function findGarment(order: Pick<DraftOrder, 'garment'>): Garment {
+  const garment = all.find((one) => one.definition.id === order?.garment)
+  if (garment) return garment
+  throw new DraftingError([
+    {
+      field: 'garment',
+      code: 'unknown-garment',
+      message: `There is no garment “${String(order?.garment).slice(0, 60)}”. Choose one of ${all.map((one) => one.definition.id).join(', ')}.`,
+    },
+  ])
+}

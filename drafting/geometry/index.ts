@@ -1,0 +1,7 @@
+export { arcPath } from './arc'
+export { intersections, selfIntersections } from './intersect'
+export { offsetPath } from './offset'
+export * from './path'
+export * from './point'
+export * from './segment'
+export * from './transform'

@@ -1,0 +1,30 @@
+import type { Path, Point } from '../contract'
+import { add, cubic, distance, openPath, perpendicular, scale } from '../geometry'
+
+/**
+ * The armhole of one half: it leaves the shoulder square, is deepest at the hollow, then turns in a J to the underarm, where
+ * it arrives square to the side seam. With a flared side seam that takes it a little below the underarm.
+ *
+ * @param tip shoulder tip.
+ * @param hollow the innermost point, about half way down.
+ * @param underarm where the side seam begins.
+ * @param shoulder unit direction of the shoulder line, outwards.
+ * @param side unit direction of the side seam, downwards.
+ */
+export function armholeCurve(tip: Point, hollow: Point, underarm: Point, shoulder: Point, side: Point): Path {
+  const upper = distance(tip, hollow)
+  const fall = underarm.y - hollow.y
+  const run = underarm.x - hollow.x
+  const leaves = perpendicular(shoulder)
+  // Square to the side seam, outwards: the seam's direction turned a quarter back.
+  const arrives = { x: side.y, y: -side.x }
+  return openPath([
+    cubic(tip, add(tip, scale(leaves, upper * 0.36)), { x: hollow.x, y: hollow.y - upper * 0.36 }, hollow),
+    cubic(
+      hollow,
+      { x: hollow.x, y: hollow.y + fall * 0.66 },
+      add(underarm, scale(arrives, -run * 0.5)),
+      underarm,
+    ),
+  ])
+}

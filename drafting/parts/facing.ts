@@ -1,0 +1,268 @@
+import type { Path } from '../contract'
+import { endOf, offsetPath, reversePath, startOf, startTangent, unit } from '../geometry'
+import type { Pen } from '../pen/pen'
+import { between, type PiecePen } from '../pen/piece-pen'
+import { fairCurve } from './hem'
+import { trimBetween } from './trim'
+
+const down = { x: 0, y: 1 }
+
+/** Facings are cut once in the cloth and once in interfacing. */
+function cutFacing(facing: PiecePen, onFold: boolean): void {
+  const count = onFold ? 1 : 2
+  facing.cut(
+    { cloth: 'main', count, onFold, handed: !onFold },
+    { cloth: 'interfacing', count, onFold, handed: !onFold },
+  )
+}
+
+/**
+ * The facing of one half of a neckline: a band of even depth measured from the stitched neckline, from the centre to the
+ * shoulder. Its neckline is the garment's own, so it lies on it exactly.
+ *
+ * @param depth mm.
+ * @param onFold whether the centre lies on the fold; otherwise it is turned in beside the zip.
+ */
+export function neckFacing(pen: Pen, body: PiecePen, depth: number, onFold: boolean): PiecePen {
+  const facing = pen.piece(`${body.id}-neck-facing`, `${body.name} neck facing`)
+  const neckline = body.edge('neckline')
+  const shoulder = unit(between(body.at('sideNeck'), body.at('shoulderTip')))
+  const inside = trimBetween(
+    offsetPath(neckline.path, -depth).path,
+    { at: body.at('centreNeck'), along: down },
+    { at: body.at('sideNeck'), along: shoulder },
+  )
+  if (!inside) {
+    pen.refuse({
+      field: 'facingDepth',
+      code: 'impossible-shape',
+      message: `A facing ${pen.say(depth)} deep does not fit inside this neckline. Make it shallower.`,
+    })
+  }
+  const names = ['facingDepth']
+  const through = ['centreNeck', 'sideNeck', 'shoulderTip']
+  copyMarks(facing, body, through, neckline.uses)
+  facing.place('shoulderEdge', endOf(inside), {
+    say: 'Along the shoulder come out the depth of the facing',
+    from: 'sideNeck',
+    uses: names,
+    through: ['sideNeck', 'shoulderTip'],
+  })
+  facing.place('centreEdge', startOf(inside), {
+    say: 'Down the centre come the depth of the facing',
+    from: 'centreNeck',
+    uses: names,
+    through,
+  })
+  facing.curve('neckline', neckline.path, 'centreNeck', 'sideNeck', {
+    role: 'neckline',
+    allowance: 'neckAllowance',
+    kind: 'copy',
+    say: `Trace the neckline from the ${body.name.toLowerCase()}`,
+    through,
+  })
+  facing.line('shoulder', 'sideNeck', 'shoulderEdge', {
+    role: 'seam',
+    allowance: 'shoulderAllowance',
+    say: 'Trace the shoulder as far as the facing goes',
+  })
+  facing.curve('outer', reversePath(inside), 'shoulderEdge', 'centreEdge', {
+    role: 'free',
+    say: 'Draw the outer edge even with the neckline',
+    uses: names,
+    through,
+  })
+  centreEdge(facing, onFold, 'centreEdge')
+  finishFacing(facing, onFold)
+  return facing
+}
+
+/**
+ * The facing of one half of an armhole: a band of even depth from the shoulder to the side seam.
+ *
+ * @param depth mm.
+ */
+export function armholeFacing(pen: Pen, body: PiecePen, depth: number): PiecePen {
+  const facing = pen.piece(`${body.id}-armhole-facing`, `${body.name} armhole facing`)
+  const armhole = body.edge('armhole')
+  const shoulder = unit(between(body.at('sideNeck'), body.at('shoulderTip')))
+  const side = startTangent(body.edge('side').path)
+  const inside = trimBetween(
+    offsetPath(armhole.path, -depth).path,
+    { at: body.at('shoulderTip'), along: shoulder },
+    { at: body.at('underarm'), along: side },
+  )
+  if (!inside) {
+    pen.refuse({
+      field: 'facingDepth',
+      code: 'impossible-shape',
+      message: `A facing ${pen.say(depth)} deep does not fit inside this armhole. Make it shallower.`,
+    })
+  }
+  const names = ['facingDepth']
+  const through = ['sideNeck', 'shoulderTip', 'hollow', 'underarm']
+  copyMarks(facing, body, through, armhole.uses)
+  facing.place('shoulderEdge', startOf(inside), {
+    say: 'Along the shoulder come in the depth of the facing',
+    from: 'shoulderTip',
+    uses: names,
+    through,
+  })
+  facing.place('sideEdge', endOf(inside), {
+    say: 'Down the side seam come the depth of the facing',
+    from: 'underarm',
+    uses: names,
+    through,
+  })
+  facing.line('shoulder', 'shoulderEdge', 'shoulderTip', {
+    role: 'seam',
+    allowance: 'shoulderAllowance',
+    say: 'Trace the end of the shoulder',
+  })
+  facing.curve('armhole', armhole.path, 'shoulderTip', 'underarm', {
+    role: 'armhole',
+    allowance: 'armholeAllowance',
+    kind: 'copy',
+    say: `Trace the armhole from the ${body.name.toLowerCase()}`,
+    through,
+  })
+  facing.line('side', 'underarm', 'sideEdge', {
+    role: 'seam',
+    allowance: 'sideAllowance',
+    say: 'Trace the top of the side seam',
+  })
+  facing.curve('outer', reversePath(inside), 'sideEdge', 'shoulderEdge', {
+    role: 'free',
+    say: 'Draw the outer edge even with the armhole',
+    uses: names,
+    through,
+  })
+  facing.cut(
+    { cloth: 'main', count: 2, onFold: false, handed: true },
+    { cloth: 'interfacing', count: 2, onFold: false, handed: true },
+  )
+  const end = facing.at('sideEdge')
+  facing.grain({ x: end.x - 12, y: end.y - depth }, { x: end.x - 12, y: end.y - 6 })
+  return facing
+}
+
+/**
+ * One facing for neck and armhole together, where the shoulder is too narrow for two: it covers the whole shoulder and ends
+ * below the armhole.
+ *
+ * @param depth how far below the underarm and the neckline it ends, mm.
+ */
+export function shoulderFacing(pen: Pen, body: PiecePen, depth: number, onFold: boolean): PiecePen {
+  const facing = pen.piece(`${body.id}-neck-facing`, `${body.name} facing, neck and armhole`)
+  const through = ['centreNeck', 'sideNeck', 'shoulderTip', 'hollow', 'underarm', 'sideHem']
+  const neckline = body.edge('neckline')
+  const armhole = body.edge('armhole')
+  const side = startTangent(body.edge('side').path)
+  copyMarks(facing, body, through.slice(0, 5), neckline.uses | armhole.uses)
+  const underarm = body.at('underarm')
+  const sideEdge = { x: underarm.x + side.x * depth, y: underarm.y + side.y * depth }
+  const lowest = Math.max(body.at('centreNeck').y + depth, underarm.y + depth + 5)
+  const names = ['facingDepth']
+  facing.place('sideEdge', sideEdge, {
+    say: 'Down the side seam come the depth of the facing',
+    from: 'underarm',
+    uses: names,
+    through: ['underarm'],
+  })
+  facing.place(
+    'centreEdge',
+    { x: 0, y: lowest },
+    {
+      say: 'Down the centre come below both the neckline and the armhole',
+      from: 'centreNeck',
+      uses: names,
+      through: ['underarm', 'centreNeck'],
+    },
+  )
+  facing.curve('neckline', neckline.path, 'centreNeck', 'sideNeck', {
+    role: 'neckline',
+    allowance: 'neckAllowance',
+    kind: 'copy',
+    say: `Trace the neckline from the ${body.name.toLowerCase()}`,
+  })
+  facing.line('shoulder', 'sideNeck', 'shoulderTip', {
+    role: 'seam',
+    allowance: 'shoulderAllowance',
+    say: 'Trace the shoulder',
+  })
+  facing.curve('armhole', armhole.path, 'shoulderTip', 'underarm', {
+    role: 'armhole',
+    allowance: 'armholeAllowance',
+    kind: 'copy',
+    say: `Trace the armhole from the ${body.name.toLowerCase()}`,
+  })
+  facing.line('side', 'underarm', 'sideEdge', {
+    role: 'seam',
+    allowance: 'sideAllowance',
+    say: 'Trace the top of the side seam',
+  })
+  facing.curve('outer', lowerEdge(sideEdge, side, { x: 0, y: lowest }), 'sideEdge', 'centreEdge', {
+    role: 'free',
+    say: 'Draw the lower edge square to the side and the centre',
+    uses: names,
+    through: ['underarm', 'centreNeck'],
+  })
+  centreEdge(facing, onFold, 'centreEdge')
+  finishFacing(facing, onFold)
+  return facing
+}
+
+/** From the side to the centre, square to both where one bend allows it. */
+function lowerEdge(
+  from: { x: number; y: number },
+  side: { x: number; y: number },
+  to: { x: number; y: number },
+): Path {
+  const leaves = { x: -side.y, y: side.x }
+  const fair = fairCurve(from, leaves, to, { x: -1, y: 0 })
+  if (fair) return fair
+  const third = (from.x - to.x) / 3
+  return {
+    closed: false,
+    segments: [
+      {
+        kind: 'cubic',
+        from,
+        control1: { x: from.x + leaves.x * third, y: from.y + leaves.y * third },
+        control2: { x: to.x + third, y: to.y },
+        to,
+      },
+    ],
+  }
+}
+
+/** Marks traced from the body, so that corrections there follow here. */
+function copyMarks(facing: PiecePen, body: PiecePen, ids: readonly string[], uses: bigint): void {
+  for (const id of ids) facing.trace(id, body, uses)
+}
+
+function centreEdge(facing: PiecePen, onFold: boolean, from: string): void {
+  facing.line('centre', from, 'centreNeck', {
+    role: onFold ? 'fold' : 'opening',
+    ...(onFold ? {} : { allowance: 'centreBackAllowance' }),
+    say: onFold ? 'The centre lies on the fold' : 'The centre is turned in beside the zip',
+  })
+}
+
+function finishFacing(facing: PiecePen, onFold: boolean): void {
+  cutFacing(facing, onFold)
+  const top = facing.at('centreNeck')
+  const bottom = facing.at('centreEdge')
+  const inset = Math.min(14, Math.abs(facing.at('sideNeck').x) / 3)
+  facing.grain({ x: inset, y: top.y + 6 }, { x: inset, y: bottom.y - 4 })
+  // A zip needs the facing a little clear of its teeth; the turn is marked, the neckline stays whole.
+  if (!onFold && facing.at('centreEdge').y - top.y > 10) {
+    facing.inner(
+      'zip-turn',
+      'turn',
+      { closed: false, segments: [{ kind: 'line', from: { x: 4, y: top.y }, to: { x: 4, y: bottom.y } }] },
+      'Turn in 4 mm short of the centre, clear of the zip',
+      facing.usesOf('centreNeck', 'centreEdge'),
+    )
+  }
+}

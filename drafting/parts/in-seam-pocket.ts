@@ -1,0 +1,182 @@
+import type { DesignValue, Path, Run } from '../contract'
+import { intersections, pathLength } from '../geometry'
+import { length, yesNo } from '../pen/design'
+import type { Pen } from '../pen/pen'
+import { straight, type PiecePen } from '../pen/piece-pen'
+
+const worn = { id: 'pockets', is: [true] }
+
+export const pocketDesign: readonly DesignValue[] = [
+  yesNo('pockets', 'Pockets in the side seams', 'pockets', true),
+  length('pocketTop', 'Pocket below the waist', 'pockets', { default: 65, min: 20, max: 150 }, worn),
+  length('pocketOpening', 'Pocket opening', 'pockets', { default: 165, min: 120, max: 200 }, worn),
+  length('pocketDepth', 'Depth of the bag', 'pockets', { default: 310, min: 220, max: 360 }, worn),
+  length('pocketAllowance', 'Pocket bag allowance', 'allowances', { default: 12.7, min: 0, max: 30 }, worn),
+]
+
+/** Common practice: the mouth ends at least so far above the hem, mm. */
+const aboveHem = 80
+const bagWidth = 180
+
+/** Where the mouth lies along a side seam, mm from its top. */
+export interface PocketMouth {
+  readonly from: number
+  readonly to: number
+}
+
+/**
+ * Finds the mouth on a side seam: its top so far below the waist, measured down the body.
+ *
+ * @param waistLevel y of the waist on the piece, mm.
+ * @returns undefined, after noting why, where the seam is too short for it.
+ */
+export function pocketMouth(pen: Pen, seam: Path, waistLevel: number): PocketMouth | undefined {
+  const level = waistLevel + pen.length('pocketTop')
+  const top = intersections(seam, straight({ x: -50, y: level }, { x: 3000, y: level }))[0]
+  const opening = pen.length('pocketOpening')
+  const whole = pathLength(seam)
+  const room = top ? whole - top.a - aboveHem : -1
+  if (!top || room < opening) {
+    pen.doubt({
+      field: 'pocketTop',
+      code: 'impossible-shape',
+      message: `There is no room for the pocket above the hem. Make the garment longer, set the pocket higher, or leave pockets out.`,
+      ...(top ? { max: Math.max(0, pen.value('pocketTop') + room - opening) } : {}),
+    })
+    return undefined
+  }
+  return { from: pen.onTape(top.a), to: pen.onTape(top.a) + opening }
+}
+
+/**
+ * A pocket bag whose mouth is a copy of the side seam; two of them hang in each side seam.
+ *
+ * @param least how deep the bag may hang before it shows below the hem, mm.
+ */
+export function pocketBag(pen: Pen, least: number): PiecePen {
+  const bag = pen.piece('pocket-bag', 'Pocket bag')
+  const opening = pen.length('pocketOpening')
+  const wanted = pen.length('pocketDepth')
+  const depth = Math.max(opening + 40, Math.min(wanted, least))
+  if (depth < wanted - 0.01) {
+    pen.caution(
+      'pocket-bag-shortened',
+      `The pocket bag is cut ${pen.say(depth)} deep so that it does not hang below the hem.`,
+      'pocketDepth',
+      'length',
+    )
+  }
+  const names = ['pocketOpening', 'pocketDepth']
+  bag.start('mouthTop', { x: 0, y: 0 }, 'Mark the top of the mouth')
+  bag.go('mouthEnd', 'mouthTop', 'down', 'pocketOpening', {
+    say: 'Come down the opening; it is a copy of the side seam',
+    drag: ['pocketOpening'],
+  })
+  pen.tag({
+    piece: 'pocket-bag',
+    from: 'mouthTop',
+    to: 'mouthEnd',
+    label: 'Pocket opening',
+    value: 'pocketOpening',
+  })
+  const low = { x: -bagWidth * 0.5, y: depth }
+  const far = { x: -bagWidth, y: depth * 0.5 }
+  bag.place('bottom', low, { say: 'Mark the bottom of the bag', uses: names })
+  bag.place('inside', far, { say: 'Mark the inner edge of the bag', uses: names })
+  bag.line('mouth', 'mouthTop', 'mouthEnd', {
+    role: 'seam',
+    allowance: 'sideAllowance',
+    kind: 'copy',
+    say: 'Draw the mouth',
+  })
+  bag.curve(
+    'outer',
+    {
+      closed: false,
+      segments: [
+        {
+          kind: 'cubic',
+          from: { x: 0, y: opening },
+          control1: { x: -8, y: opening + (depth - opening) * 0.6 },
+          control2: { x: -bagWidth * 0.22, y: depth },
+          to: low,
+        },
+        {
+          kind: 'cubic',
+          from: low,
+          control1: { x: -bagWidth * 0.8, y: depth },
+          control2: { x: -bagWidth, y: depth * 0.78 },
+          to: far,
+        },
+        {
+          kind: 'cubic',
+          from: far,
+          control1: { x: -bagWidth, y: depth * 0.2 },
+          control2: { x: -bagWidth * 0.5, y: 0 },
+          to: { x: 0, y: 0 },
+        },
+      ],
+    },
+    'mouthEnd',
+    'mouthTop',
+    {
+      role: 'seam',
+      allowance: 'pocketAllowance',
+      say: 'Draw round the bag in one sweep',
+      uses: names,
+      through: ['bottom', 'inside'],
+    },
+  )
+  bag.cut({ cloth: 'main', count: 4, onFold: false, handed: true })
+  bag.grain({ x: -bagWidth * 0.45, y: depth * 0.3 }, { x: -bagWidth * 0.45, y: depth * 0.75 })
+  return bag
+}
+
+/**
+ * Sews a side seam with a pocket in it: the two sides to each other above and below the mouth, and to the bags along it.
+ *
+ * @param a, b the two sides, drawn from the same end; `mirrored` and `reversed` runs are kept as they are.
+ */
+export function sewWithPocket(
+  pen: Pen,
+  seam: { readonly id: string; readonly name: string; readonly smooth?: boolean },
+  a: Run,
+  b: Run,
+  mouth: PocketMouth,
+  length: number,
+): void {
+  const stretch = (run: Run, from: number, to: number): Run => ({ ...run, from, to })
+  const bag: Run = { piece: 'pocket-bag', edge: 'mouth' }
+  pen.sew({
+    ...seam,
+    id: `${seam.id}-above`,
+    name: `${seam.name}, above the pocket`,
+    a: [stretch(a, 0, mouth.from)],
+    b: [stretch(b, 0, mouth.from)],
+  })
+  pen.sew({
+    id: `${seam.id}-pocket-front`,
+    name: `${seam.name}, front to pocket bag`,
+    a: [stretch(a, mouth.from, mouth.to)],
+    b: [bag],
+  })
+  pen.sew({
+    id: `${seam.id}-pocket-back`,
+    name: `${seam.name}, back to pocket bag`,
+    a: [stretch(b, mouth.from, mouth.to)],
+    b: [{ ...bag, mirrored: true }],
+  })
+  pen.sew({
+    ...seam,
+    id: `${seam.id}-below`,
+    name: `${seam.name}, below the pocket`,
+    a: [stretch(a, mouth.to, length)],
+    b: [stretch(b, mouth.to, length)],
+  })
+  pen.sew({
+    id: 'pocket-bags',
+    name: 'Pocket bags round the edge',
+    a: [{ piece: 'pocket-bag', edge: 'outer' }],
+    b: [{ piece: 'pocket-bag', edge: 'outer', mirrored: true }],
+  })
+}

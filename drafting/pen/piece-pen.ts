@@ -1,0 +1,390 @@
+import type { Corner, Cutting, Dart, Edge, EdgeRole, InnerLine, Mark, Path, Point, Step } from '../contract'
+import {
+  add,
+  distance,
+  line,
+  magnitude,
+  nearestOn,
+  openPath,
+  pathLength,
+  pointAt,
+  scale,
+  startOf,
+  endOf,
+  subtract,
+} from '../geometry'
+import { letter } from './letters'
+import { nothing, type Mask } from './masks'
+import type { Pen } from './pen'
+
+/** A mark with what each of its coordinates depends on. */
+export interface PenMark {
+  readonly id: string
+  readonly at: Point
+  readonly x: Mask
+  readonly y: Mask
+}
+
+/** An edge as drawn, before its allowance is added. */
+export interface DrawnEdge {
+  readonly id: string
+  readonly role: EdgeRole
+  readonly finish: Edge['finish']
+  readonly path: Path
+  readonly allowance: number
+  readonly startCorner: Corner
+  readonly madeBy: string
+  readonly uses: Mask
+}
+
+export interface EdgeOptions {
+  readonly role: EdgeRole
+  /** Style value that gives the allowance; none on a fold. */
+  readonly allowance?: string
+  readonly corner?: Corner
+  readonly finish?: Edge['finish']
+  readonly say: string
+  /** Names and marks it follows from, beside its own ends. */
+  readonly uses?: readonly string[]
+  readonly through?: readonly string[]
+  readonly kind?: Step['kind']
+}
+
+export interface MarkOptions {
+  readonly stepKind?: Step['kind']
+  readonly say: string
+  readonly kind?: Mark['kind']
+  /** Style values that dragging this mark changes, one or two. */
+  readonly drag?: readonly string[]
+  /** Sewn neighbours hold the same mark in the same place, so a correction of one moves all of them. */
+  readonly shared?: boolean
+}
+
+const finishOf: Record<EdgeRole, Edge['finish']> = {
+  seam: 'seam',
+  fold: 'fold',
+  hem: 'turned',
+  neckline: 'seam',
+  armhole: 'seam',
+  waist: 'seam',
+  opening: 'turned',
+  dart: 'seam',
+  free: 'free',
+}
+
+const directions = {
+  right: { x: 1, y: 0 },
+  left: { x: -1, y: 0 },
+  down: { x: 0, y: 1 },
+  up: { x: 0, y: -1 },
+} as const
+
+export type Direction = keyof typeof directions
+
+/**
+ * Draws one piece the way a drafter says it: marks placed from other marks by the *name* of a rule or style value, and edges
+ * between them in clockwise order. Everything drawn is noted down as a step with what it follows from.
+ */
+export class PiecePen {
+  readonly marks = new Map<string, PenMark>()
+  readonly kinds = new Map<string, Mark['kind']>()
+  readonly drags = new Map<string, readonly string[]>()
+  readonly edges: DrawnEdge[] = []
+  readonly darts: Dart[] = []
+  readonly lines: InnerLine[] = []
+  readonly extraNotches: { id: string; edge: string; at: number; ticks: 1 | 2 }[] = []
+  cuttings: readonly Cutting[] = []
+  grainLine: { from: Point; to: Point } | undefined
+
+  constructor(
+    readonly pen: Pen,
+    readonly id: string,
+    readonly name: string,
+  ) {}
+
+  /** Where a mark stands. */
+  at(id: string): Point {
+    return this.mark(id).at
+  }
+
+  /** A mark with its dependencies. */
+  mark(id: string): PenMark {
+    const mark = this.marks.get(id)
+    if (!mark) throw new Error(`${this.id} has no mark “${id}” yet.`)
+    return mark
+  }
+
+  /** What the named marks follow from. */
+  usesOf(...ids: readonly string[]): Mask {
+    let mask = nothing
+    for (const id of ids) {
+      const mark = this.mark(id)
+      mask |= mark.x | mark.y
+    }
+    return mask
+  }
+
+  /** The first mark of a piece. */
+  start(id: string, at: Point, say: string): void {
+    this.put(id, at, nothing, nothing, { say, from: undefined })
+  }
+
+  /** From a mark, go so far in a direction: the length is the value of the named rule or style value. */
+  go(id: string, from: string, towards: Direction, by: string, options: MarkOptions): void {
+    const origin = this.mark(from)
+    const along = directions[towards]
+    const length = this.pen.length(by)
+    const uses = this.pen.values.mask(by)
+    const vertical = towards === 'down' || towards === 'up'
+    this.put(
+      id,
+      add(origin.at, scale(along, length)),
+      vertical ? origin.x : origin.x | uses,
+      vertical ? origin.y | uses : origin.y,
+      { ...options, from, direction: along, by, length },
+    )
+  }
+
+  /** Where the line down from one mark meets the level of another. */
+  square(id: string, below: string, level: string, options: MarkOptions): void {
+    const column = this.mark(below)
+    const row = this.mark(level)
+    this.put(id, { x: column.at.x, y: row.at.y }, column.x, row.y, { ...options, from: below })
+  }
+
+  /** From a mark, so far in any direction that follows from other marks or names. */
+  aim(
+    id: string,
+    from: string,
+    along: Point,
+    length: number,
+    options: MarkOptions & { by?: string; through?: readonly string[]; uses?: readonly string[] },
+  ): void {
+    const origin = this.mark(from)
+    const uses =
+      this.pen.usesOf([...(options.uses ?? []), ...(options.by ? [options.by] : [])]) |
+      this.usesOf(...(options.through ?? []))
+    this.put(id, add(origin.at, scale(along, length)), origin.x | uses, origin.y | uses, {
+      ...options,
+      from,
+      direction: along,
+      length,
+    })
+  }
+
+  /** A mark at a place worked out by construction from other marks and names. */
+  place(
+    id: string,
+    at: Point,
+    options: MarkOptions & {
+      through?: readonly string[]
+      uses?: readonly string[]
+      from?: string
+    },
+  ): void {
+    const uses = this.pen.usesOf(options.uses ?? []) | this.usesOf(...(options.through ?? []))
+    this.put(id, at, uses, uses, options)
+  }
+
+  /** The other side of an opened cut: so far from the first side, measured straight across the mouth. */
+  turnOpen(
+    id: string,
+    from: string,
+    at: Point,
+    options: MarkOptions & {
+      by: string
+      length: number
+      draws: Path
+      uses: readonly string[]
+      through: readonly string[]
+    },
+  ): void {
+    const uses = this.pen.usesOf(options.uses) | this.usesOf(...options.through)
+    this.put(id, at, uses, uses, { ...options, from, stepKind: 'turn' })
+  }
+
+  /** Traces a mark from another piece, in the same place. */
+  trace(id: string, source: PiecePen, uses: Mask = nothing): void {
+    const mark = source.mark(id)
+    this.kinds.set(id, 'construction')
+    this.marks.set(id, { ...mark, x: mark.x | uses, y: mark.y | uses })
+    this.pen.note({
+      id: `${this.id}.${id}`,
+      piece: this.id,
+      kind: 'copy',
+      say: `Trace the point from the ${source.name.toLowerCase()}`,
+      marks: [id],
+      uses: mark.x | mark.y | uses,
+      draws: [],
+    })
+  }
+
+  private put(
+    id: string,
+    at: Point,
+    x: Mask,
+    y: Mask,
+    options: MarkOptions & {
+      readonly from?: string | undefined
+      readonly direction?: Point
+      readonly by?: string
+      readonly length?: number
+      readonly draws?: Path
+    },
+  ): void {
+    const correction = this.pen.corrections.forMark(this.id, id, options.shared ?? false)
+    const own = correction ? `${id}-by-rule` : id
+    this.kinds.set(id, options.kind ?? 'construction')
+    if (options.drag) this.drags.set(id, options.drag)
+    this.marks.set(own, { id: own, at, x, y })
+    this.pen.note({
+      id: `${this.id}.${own}`,
+      piece: this.id,
+      kind: options.stepKind ?? (options.length === undefined && !options.from ? 'level' : 'mark'),
+      say: options.say,
+      ...(options.from ? { from: options.from } : {}),
+      ...(options.direction ? { direction: options.direction } : {}),
+      ...(options.by ? { by: options.by } : {}),
+      ...(options.length === undefined ? {} : { length: options.length }),
+      marks: [own],
+      uses: x | y,
+      draws: [
+        ...(options.draws ? [options.draws] : []),
+        ...(options.from ? [openPath([line(this.at(options.from), at)])] : []),
+      ],
+    })
+    if (!correction) return
+    const moved = add(at, correction.by)
+    this.kinds.set(own, 'construction')
+    this.marks.set(id, { id, at: moved, x, y })
+    this.pen.note({
+      id: `${this.id}.${id}`,
+      piece: this.id,
+      kind: 'mark',
+      say: correction.note ? `Correction: ${correction.note}` : 'Correction: move the mark',
+      from: own,
+      direction: correction.by,
+      length: magnitude(correction.by),
+      marks: [id],
+      uses: x | y,
+      draws: [openPath([line(at, moved)])],
+    })
+  }
+
+  /** A straight edge between two marks. */
+  line(id: string, from: string, to: string, options: EdgeOptions): void {
+    this.draw(id, openPath([line(this.at(from), this.at(to))]), 'line', options, this.usesOf(from, to))
+  }
+
+  /** A curved edge; its ends stand on two marks. */
+  curve(id: string, path: Path, from: string, to: string, options: EdgeOptions): void {
+    this.draw(id, path, 'curve', options, this.usesOf(from, to))
+  }
+
+  private draw(id: string, path: Path, kind: Step['kind'], options: EdgeOptions, ends: Mask): void {
+    const step = `${this.id}.${id}`
+    const uses =
+      ends |
+      this.pen.usesOf(options.uses ?? []) |
+      (options.through ? this.usesOf(...options.through) : nothing)
+    const allowance = options.allowance ? this.pen.allowance(options.allowance) : 0
+    this.edges.push({
+      id,
+      role: options.role,
+      finish: options.finish ?? finishOf[options.role],
+      path,
+      allowance,
+      startCorner: options.corner ?? 'mitre',
+      madeBy: step,
+      uses,
+    })
+    const sagitta = kind === 'curve' && this.pen.explains ? sagittaOf(path) : undefined
+    this.pen.note({
+      id: step,
+      piece: this.id,
+      kind: options.kind ?? kind,
+      say: options.say,
+      marks: [],
+      edge: id,
+      ...(sagitta === undefined ? {} : { sagitta }),
+      uses,
+      draws: [path],
+    })
+  }
+
+  /** A line inside the piece: a level, a turn line, a place for something. */
+  inner(
+    id: string,
+    kind: InnerLine['kind'],
+    path: Path,
+    say: string,
+    uses: Mask,
+    stepKind: Step['kind'] = 'level',
+  ): void {
+    this.lines.push({ id, kind, path })
+    this.pen.note({
+      id: `${this.id}.${id}`,
+      piece: this.id,
+      kind: stepKind,
+      say,
+      marks: [],
+      uses,
+      draws: [path],
+    })
+  }
+
+  /** A notch that belongs to no seam match: a zip end, a centre, a level. */
+  notch(id: string, edge: string, at: number, ticks: 1 | 2 = 1): void {
+    this.extraNotches.push({ id, edge, at, ticks })
+  }
+
+  /** An edge drawn before. */
+  edge(id: string): DrawnEdge {
+    const edge = this.edges.find((one) => one.id === id)
+    if (!edge) throw new Error(`${this.id} has no edge “${id}” yet.`)
+    return edge
+  }
+
+  /** Length of an edge, mm. */
+  lengthOf(edge: string): number {
+    return pathLength(this.edge(edge).path)
+  }
+
+  grain(from: Point, to: Point): void {
+    this.grainLine = { from, to }
+  }
+
+  cut(...cuttings: readonly Cutting[]): void {
+    this.cuttings = cuttings
+  }
+
+  /** The marks as they are given out, lettered in drafting order. */
+  finishedMarks(): Mark[] {
+    let index = 0
+    return [...this.marks.values()].map((mark) => ({
+      id: mark.id,
+      letter: letter(index++),
+      at: mark.at,
+      kind: this.kinds.get(mark.id) ?? 'construction',
+    }))
+  }
+}
+
+/** Depth of a curve at the middle of the straight line between its ends, mm. */
+function sagittaOf(path: Path): number {
+  const from = startOf(path)
+  const to = endOf(path)
+  if (distance(from, to) < 1e-9) return 0
+  const chord = openPath([line(from, to)])
+  return nearestOn(chord, pointAt(path, pathLength(path) / 2)).gap
+}
+
+/** The straight path between two points. */
+export function straight(from: Point, to: Point): Path {
+  return openPath([line(from, to)])
+}
+
+/** From one point to another, as a vector. */
+export function between(from: Point, to: Point): Point {
+  return subtract(to, from)
+}
