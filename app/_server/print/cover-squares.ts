@@ -27,12 +27,12 @@ export function drawSquares(
   context: CoverContext,
   at: { x: number; y: number },
 ): number {
-  content.box(at.x, at.y, 100, 100, square)
+  content.boxes([at], 100, 100, square)
   content.text('10 cm on each side', { x: at.x + inner, y: at.y + 10 }, { size: 5, weight: 600 })
   drawSteps(content, context, howToPrint, { x: at.x + inner, y: at.y + 18 }, 100 - 2 * inner)
 
   const below = { x: at.x, y: at.y + 100 + 5 }
-  content.box(below.x, below.y, 101.6, 101.6, square)
+  content.boxes([below], 101.6, 101.6, square)
   content.text('4 in on each side', { x: below.x + inner, y: below.y + 10 }, { size: 5, weight: 600 })
   const lines = howToTape.flatMap((text) => context.type.wrap(text, size, 101.6 - 2 * inner))
   const y = content.lines(lines, { x: below.x + inner, y: below.y + 17 }, leading, { size })

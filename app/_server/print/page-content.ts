@@ -22,10 +22,13 @@ const number = (value: number): string => String(Math.round(value * 100) / 100 |
 
 const share = (value: number): string => String(Math.round(value * 10_000) / 10_000 || 0)
 
-function colour(dye: Dye): string {
-  const hex = paperDyes[dye]
-  return [1, 3, 5].map((at) => share(parseInt(hex.slice(at, at + 2), 16) / 255)).join(' ')
-}
+/** The dyes as operands, worked out once. */
+const colours = Object.fromEntries(
+  Object.entries(paperDyes).map(([dye, hex]) => [
+    dye,
+    [1, 3, 5].map((at) => share(parseInt(hex.slice(at, at + 2), 16) / 255)).join(' '),
+  ]),
+) as Readonly<Record<Dye, string>>
 
 /**
  * The content stream of one page, written in millimetres from the top left corner of the paper with y going down, as drawings
@@ -78,11 +81,14 @@ export class PageContent {
     this.#operators.push(`${number(from.x)} ${number(from.y)} m ${number(to.x)} ${number(to.y)} l S`)
   }
 
-  /** An upright box, drawn or filled. */
-  box(x: number, y: number, width: number, height: number, style: Style): void {
+  /** Upright boxes of one size, drawn or filled. */
+  boxes(corners: readonly Point[], width: number, height: number, style: Style): void {
+    if (corners.length === 0) return
     if (style.stroke) this.#useStroke(style, 0)
     else this.#useFill(style.fill ?? 'ink')
-    this.#operators.push(`${[x, y, width, height].map(number).join(' ')} re ${style.stroke ? 'S' : 'f'}`)
+    const size = `${number(width)} ${number(height)} re`
+    const traced = corners.map(({ x, y }) => `${number(x)} ${number(y)} ${size}`)
+    this.#operators.push(`${traced.join(' ')} ${style.stroke ? 'S' : 'f'}`)
   }
 
   /** A circle as four cubics, off by less than 0.03 % of its radius. */
@@ -128,14 +134,14 @@ export class PageContent {
   #useStroke(style: Style, phase: number): void {
     const dash = style.dash ?? []
     const cap = dash.length > 0 ? 0 : 1
-    const stroke = `${colour(style.stroke ?? 'ink')} RG ${number(style.width ?? 0.3)} w ${cap} J [${dash.map(number).join(' ')}] ${number(phase)} d`
+    const stroke = `${colours[style.stroke ?? 'ink']} RG ${number(style.width ?? 0.3)} w ${cap} J [${dash.map(number).join(' ')}] ${number(phase)} d`
     if (stroke === this.#stroke) return
     this.#stroke = stroke
     this.#operators.push(stroke)
   }
 
   #useFill(dye: Dye): void {
-    const fill = `${colour(dye)} rg`
+    const fill = `${colours[dye]} rg`
     if (fill === this.#fill) return
     this.#fill = fill
     this.#operators.push(fill)

@@ -50,21 +50,33 @@ export function drawMap(
   const cell = { width: size.width / tiling.columns, height: size.height / tiling.rows }
   const gap = Math.min(cell.width, cell.height) * 0.08
   drawOutlines(content, tiling, at, cell.width / own(tiling).width, options.outlines ?? [])
-  for (const page of tiling.pages) {
-    if (page.blank) continue
-    const x = at.x + page.column * cell.width + gap / 2
-    const y = at.y + page.row * cell.height + gap / 2
-    const here = options.here?.name === page.name
-    content.box(x, y, cell.width - gap, cell.height - gap, here ? lit : outlined)
-    if (!options.names) continue
-    const em = Math.min(cell.width / 2.4, cell.height / 1.8, 4.2)
+  const box = { width: cell.width - gap, height: cell.height - gap }
+  const cornerOf = (page: TilePage) => ({
+    x: at.x + page.column * cell.width + gap / 2,
+    y: at.y + page.row * cell.height + gap / 2,
+  })
+  const printed = tiling.pages.filter((page) => !page.blank)
+  const [here, others] = [true, false].map((wanted) =>
+    printed.filter((page) => (page.name === options.here?.name) === wanted).map(cornerOf),
+  )
+  content.boxes(others ?? [], box.width, box.height, outlined)
+  content.boxes(here ?? [], box.width, box.height, lit)
+  if (options.names) drawNames(content, printed, cornerOf, box)
+}
+
+function drawNames(
+  content: PageContent,
+  pages: readonly TilePage[],
+  cornerOf: (page: TilePage) => { x: number; y: number },
+  { width, height }: { width: number; height: number },
+): void {
+  const size = Math.min(width / 2.4, height / 1.8, 4.2)
+  for (const page of pages) {
+    const corner = cornerOf(page)
     content.text(
       page.name,
-      { x: x + (cell.width - gap) / 2, y: y + (cell.height - gap) / 2 + em * 0.33 },
-      {
-        size: em,
-        align: 'middle',
-      },
+      { x: corner.x + width / 2, y: corner.y + height / 2 + size * 0.33 },
+      { size, align: 'middle' },
     )
   }
 }
