@@ -1,5 +1,5 @@
 export { formatLength, lengthDigits, type LengthFormat } from './format-length'
-export { fractionText, nearestFraction, type TapeFraction } from './fractions'
+export { fractionText, nearestFraction } from './fractions'
 export { readNumber, NumberTextError, type NumberText } from './number-text'
 export { parseLength } from './parse-length'
 export { roundToTape } from './round-to-tape'

@@ -1,6 +1,7 @@
 import type { Unit } from '../contract'
 import { lengthDigits, millimetresPer, roundToTape, type LengthFormat } from '../lengths'
 import type { Kinds } from './check-formula-kinds'
+import { evaluateFormula } from './evaluate-formula'
 import type { Formula, Kind, Values } from './formula'
 import { ShownSum, shownNumber } from './shown-sum'
 
@@ -42,6 +43,7 @@ export interface Explanation extends LengthFormat {
  * @param values by name, mm, degrees or bare
  * @param kinds what each name measures
  * @param result what the rule came to, mm; other than the sum itself when it was rounded to the tape
+ * @throws DraftingError 'bad-formula' when the sum cannot be worked out
  */
 export function explainFormula(
   formula: Formula,
@@ -51,7 +53,7 @@ export function explainFormula(
   result: number,
   { measures = 'length', ...format }: Explanation = {},
 ): string {
-  const exact = formula.run(values) / (measures === 'length' ? millimetresPer[unit] : 1)
+  const exact = evaluateFormula(formula, values) / (measures === 'length' ? millimetresPer[unit] : 1)
   const right = shownResult(result, measures, unit, format)
   let left = new ShownSum(values, kinds, unit, fewestDecimals).write(formula.root)
   for (let decimals = fewestDecimals + 1; decimals <= mostDecimals; decimals += 1) {

@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import type { Unit } from '@/drafting/contract'
+import { DraftingError } from '@/drafting/drafting-error'
 import { roundToTape } from '@/drafting/lengths'
 import { evaluateFormula, explainFormula, parseFormula } from '@/drafting/rules'
 import { evaluateArithmetic } from '../../support/arithmetic'
@@ -43,6 +44,10 @@ describe('the sum behind a rule', () => {
     )
     const share = parseFormula('waist / bust')
     expect(explainFormula(share, body, kinds, 'cm', 0.8, { measures: 'number' })).toBe('71.12 ÷ 88.9 = 0.8')
+  })
+
+  it('says what is missing instead of a sum', () => {
+    expect(() => explainFormula(parseFormula('hip / 4'), body, kinds, 'in', 250)).toThrow(DraftingError)
   })
 
   it('is true: worked out by hand it gives the length within its rounding', () => {

@@ -32,6 +32,18 @@ describe('rules worked out from each other', () => {
   })
 })
 
+describe('a stranger’s formula', () => {
+  it('is judged within 100 ms, however many names it misspells', () => {
+    const names = Array.from({ length: 200 }, (_, at) => `measurementNumber${at}OfAWorkroom`)
+    const kinds = Object.fromEntries(names.map((name) => [name, 'length' as const]))
+    const start = performance.now()
+    const text = names.map((name) => name.replace('Number', 'Nmuber')).join('+')
+    const problems = checkRule('depth', text.slice(0, 500), 'length', { kinds, formulas: {} })
+    expect(performance.now() - start).toBeLessThan(100)
+    expect(problems[0]?.message).toContain('Did you mean measurementNumber0OfAWorkroom')
+  })
+})
+
 describe('one new formula among the rules of a garment', () => {
   const surroundings = {
     kinds: { bust: 'length', depth: 'length', underarm: 'length', flare: 'angle' } as const,
