@@ -39,11 +39,11 @@ let ny = 0
 let factor = 1
 let bend = 0
 
-let out: Segment[] = []
+let out: { push(piece: CubicSegment): unknown } = []
 let turnsBack = false
 let careful = false
 
-const load = (s: CubicSegment, by_: number): void => {
+const load = (s: CubicSegment, aside: number): void => {
   const { from, control1, control2, to } = s
   px = from.x
   py = from.y
@@ -53,7 +53,7 @@ const load = (s: CubicSegment, by_: number): void => {
   by = 3 * (py - 2 * control1.y + control2.y)
   ax = to.x - px + 3 * (control1.x - control2.x)
   ay = to.y - py + 3 * (control1.y - control2.y)
-  distance = by_
+  distance = aside
 }
 
 /** Sets the parallel point (q), its velocity (v), the unit normal (n), the speed factor and the source's curvature at t. */
@@ -103,11 +103,11 @@ const chord = (): number => Math.hypot(ax + bx + cx, ay + by + cy)
  */
 export const offsetCubic = (
   s: CubicSegment,
-  by_: number,
+  aside: number,
   from: Point | undefined,
   into: Segment[],
 ): boolean => {
-  load(s, by_)
+  load(s, aside)
   const before = into.length
   out = into
   careful = false
@@ -118,9 +118,9 @@ export const offsetCubic = (
 }
 
 /** Parallel stretches between the places where it turns back, for a curve that is tighter than the distance. */
-export const offsetTightCubic = (s: CubicSegment, by_: number): Segment[][] => {
-  load(s, by_)
-  const runs: Segment[][] = []
+export const offsetTightCubic = (s: CubicSegment, aside: number): CubicSegment[][] => {
+  load(s, aside)
+  const runs: CubicSegment[][] = []
   const steps = 64
   let start = -1
   let last = 0
@@ -129,10 +129,12 @@ export const offsetTightCubic = (s: CubicSegment, by_: number): Segment[][] => {
     const forward = moves(t)
     if (forward && start < 0) start = i === 0 ? 0 : turning(last, t)
     if (start >= 0 && (!forward || i === steps)) {
-      out = []
+      const run: CubicSegment[] = []
+      out = run
       careful = true
+      turnsBack = false
       stretch(start, forward ? 1 : turning(last, t), undefined)
-      runs.push(out)
+      runs.push(run)
       start = -1
     }
     last = t

@@ -4,12 +4,13 @@ import { selfIntersections, type Intersection } from './intersect'
 import { nearestOn } from './nearest'
 import { slicePath } from './path'
 import { cubic, line } from './segment'
+import { endOf, startOf } from './ends'
 import { sweptOffset } from './swept'
 
 /**
  * A parallel before its loops are cut away. `gaps` are the numbers of straight bridges where it is not parallel to
- * anything: at inner corners, and where the source is tighter than the distance. `corners` are the first segments of outer
- * corners' second sides.
+ * anything: at inner corners, and where the source is tighter than the distance. `corners` are the numbers of the segments
+ * that start at an outer corner.
  */
 export interface RawOffset {
   readonly segments: Segment[]
@@ -21,39 +22,70 @@ export interface RawOffset {
 const NEAR = 0.02
 
 /**
- * Walks the raw parallel and, where it meets itself at the full distance from the source, steps over the loop between.
- * `clipped` unless each loop was that of a single inner corner. What cannot be settled so is swept out as an area.
+ * Walks the raw parallel and, wherever it meets itself outside the strip that it bounds, steps over the loop between. The
+ * strip's square ends walk along, so that a loop reaching past an end is cut there. `clipped` unless each loop was that of
+ * a single inner corner. What cannot be settled so is swept out as an area.
  */
 export const trimLoops = (
   source: Path,
   distance: number,
   raw: RawOffset,
 ): { path: Path; clipped: boolean } => {
-  const path: Path = { segments: raw.segments, closed: false }
-  const meetings = selfIntersections(path).filter((one) => isFullDistance(source, one.point, distance))
-  if (meetings.length === 0 && raw.gaps.length === 0) return { path, clipped: false }
+  const first = startOf(source)
+  const last = endOf(source)
+  const segments = [
+    line(first, raw.segments[0]!.from),
+    ...raw.segments,
+    line(raw.segments[raw.segments.length - 1]!.to, last),
+  ]
+  const path: Path = { segments, closed: false }
+  const ends = lengthsOf(path)
+  const reach = Math.abs(distance)
+  const meetings = selfIntersections(path).filter((one) => isOutside(source, one.point, distance))
   const stretches: Path[] = []
   let clipped = false
   let bridges = raw.gaps.length
   let at = 0
-  for (let next = firstFrom(meetings, at); next; next = firstFrom(meetings, at)) {
-    const skipped = within(path, raw, next.a, next.b)
+  let next = firstFrom(meetings, at)
+  let start = reach
+  let end = pathLength(path) - reach
+  // Where the path is too tight at its very end, and no loop closes there, the parallel starts beyond the stretch.
+  if (raw.gaps[0]?.index === 0 && (!next || next.a > ends[1]! - 1e-6)) {
+    start = at = ends[1]!
+    next = firstFrom(meetings, at)
+    clipped = true
+    bridges--
+  }
+  for (; next; next = firstFrom(meetings, at)) {
+    const skipped = within(ends, raw, next.a, next.b)
     clipped ||= skipped.tight > 0 || skipped.inner !== 1 || skipped.outer > 0
     bridges -= skipped.tight + skipped.inner
-    stretches.push(slicePath(path, at, next.a))
+    if (next.a > start) stretches.push(slicePath(path, Math.max(at, start), next.a))
     at = next.b
   }
+  const final = raw.segments.length - 1
+  if (bridges > 0 && raw.gaps[raw.gaps.length - 1]!.index === final && at <= ends[final]! + 1e-6) {
+    end = ends[final]!
+    clipped = true
+    bridges--
+  }
   if (bridges > 0) return { path: sweptOffset(source, distance), clipped: true }
-  stretches.push(slicePath(path, at, pathLength(path)))
-  return { path: weld(stretches), clipped }
+  if (at < end) stretches.push(slicePath(path, Math.max(at, start), end))
+  const kept = weld(stretches)
+  if (kept.segments.length > 0) return { path: kept, clipped }
+  return { path: slicePath(path, at, at), clipped: true }
 }
 
-const isFullDistance = (source: Path, point: Point, distance: number): boolean => {
+/** Whether a point is not inside the strip with square ends that the parallel bounds. */
+const isOutside = (source: Path, point: Point, distance: number): boolean => {
   const near = nearestOn(source, point)
-  if (near.gap < Math.abs(distance) - NEAR) return false
+  if (near.gap >= Math.abs(distance) - NEAR) return true
   const tangent = tangentOn(source, near.distance)
-  const side = tangent.x * (point.y - near.point.y) - tangent.y * (point.x - near.point.x)
-  return side * distance < 0
+  const x = point.x - near.point.x
+  const y = point.y - near.point.y
+  const along = tangent.x * x + tangent.y * y
+  if (near.distance <= 0 && along <= NEAR) return true
+  return near.distance >= pathLength(source) && along >= -NEAR
 }
 
 /** The first meeting at or after a place; of several there the one that steps furthest. */
@@ -66,16 +98,15 @@ const firstFrom = (meetings: readonly Intersection[], at: number): Intersection 
   return found
 }
 
-/** What lies wholly in the stretch between two distances along the raw parallel. */
+/** How many bridges and outer corners lie wholly in the stretch between two distances along the walk. */
 const within = (
-  path: Path,
+  ends: Float64Array,
   raw: RawOffset,
   from: number,
   to: number,
-): { tight: number; inner: number; outer: number } => {
-  const ends = lengthsOf(path)
-  const holds = (index: number): boolean =>
-    (index > 0 ? ends[index - 1]! : 0) >= from - 1e-6 && ends[index]! <= to + 1e-6
+): { readonly tight: number; readonly inner: number; readonly outer: number } => {
+  // The walk has one segment more in front: the strip's square start.
+  const holds = (index: number): boolean => ends[index]! >= from - 1e-6 && ends[index + 1]! <= to + 1e-6
   let tight = 0
   let inner = 0
   for (const gap of raw.gaps) {
@@ -83,23 +114,21 @@ const within = (
     if (gap.tight) tight++
     else inner++
   }
-  return { tight, inner, outer: raw.corners.filter(holds).length }
+  return { tight, inner, outer: raw.corners.filter((index) => holds(index)).length }
 }
 
 /** Joins stretches whose ends are one computed meeting, making them the very same point. */
-export const weld = (stretches: readonly Path[]): Path => {
+const weld = (stretches: readonly Path[]): Path => {
   const segments: Segment[] = []
   let end: Point | undefined
   for (const stretch of stretches) {
     for (const segment of stretch.segments) {
       const from: Point = end ?? segment.from
-      if (segment.kind === 'line') {
-        if (from.x === segment.to.x && from.y === segment.to.y && segments.length > 0) continue
+      if (segment.kind === 'cubic') {
+        const { control1, control2, to } = segment
+        segments.push(from === segment.from ? segment : cubic(from, control1, control2, to))
+      } else if (segments.length === 0 || from.x !== segment.to.x || from.y !== segment.to.y) {
         segments.push(from === segment.from ? segment : line(from, segment.to))
-      } else {
-        segments.push(
-          from === segment.from ? segment : cubic(from, segment.control1, segment.control2, segment.to),
-        )
       }
       end = segment.to
     }

@@ -1,8 +1,8 @@
-import type { Path, Point, Segment } from '../contract'
+import type { CubicSegment, Path, Point, Segment } from '../contract'
 import { movesAlong } from './intersect'
 import { offsetCubic, offsetTightCubic } from './offset-cubic'
 import { trimLoops, type RawOffset } from './offset-loops'
-import { line, tangentAt } from './segment'
+import { cubic, line, tangentAt } from './segment'
 
 /** A corner's mitre reaches at most so many times the distance; beyond that it is cut off square to its bisector. */
 export const MITRE_LIMIT = 2.5
@@ -74,18 +74,21 @@ const aside = (at: Point, tangent: Point, distance: number): Point => ({
 })
 
 /** The forward runs of a curve that is too tight, with straight bridges over what turns back. */
-const bridge = (raw: RawOffset, runs: readonly (readonly Segment[])[], from: Point, to: Point): void => {
+const bridge = (raw: RawOffset, runs: readonly (readonly CubicSegment[])[], from: Point, to: Point): void => {
+  const { segments } = raw
   let end = from
   const over = (next: Point): void => {
-    if (next.x === end.x && next.y === end.y) return
-    raw.gaps.push({ index: raw.segments.length, tight: true })
-    raw.segments.push(line(end, next))
+    if (Math.abs(next.x - end.x) + Math.abs(next.y - end.y) <= SMOOTH) return
+    raw.gaps.push({ index: segments.length, tight: true })
+    segments.push(line(end, next))
+    end = next
   }
   for (const run of runs) {
-    if (run.length === 0) continue
     over(run[0]!.from)
-    raw.segments.push(...run)
-    end = run[run.length - 1]!.to
+    for (const piece of run) {
+      segments.push(cubic(end, piece.control1, piece.control2, piece.to))
+      end = piece.to
+    }
   }
   over(to)
 }
