@@ -2,7 +2,7 @@ import { FillRule, unionD } from 'clipper2-ts'
 import type { Path, Point } from '../contract'
 import { flatten } from './flatten'
 import { polyline } from './path'
-import { unit } from './point'
+import { add, unit } from './point'
 
 /** mm that the swept outline may stray from the true one. */
 const FINENESS = 0.005
@@ -35,20 +35,51 @@ export const sweptOffset = (path: Path, distance: number): Path => {
   return polyline(stretch.length > 1 ? stretch : [ahead, behind])
 }
 
-/** The triangles that a bar beside each chord sweeps, and the wedge at each outer corner, all clockwise. */
+/**
+ * What a bar beside each chord sweeps, as areas that are simple and clockwise: long runs in which it moves forward as one,
+ * single triangles where it moves back. Wedges fill the outer corners.
+ */
 export const sweptAreas = (points: readonly Point[], distance: number): Polygon[] => {
   const areas: Polygon[] = []
-  let before: Point | undefined
+  let inner: Point[] = []
+  let outer: Point[] = []
+  let heading: Point | undefined
+  let previous: Point | undefined
+  const close = (): void => {
+    if (inner.length > 1) areas.push(clockwise([...inner, ...outer.reverse()]))
+    inner = []
+    outer = []
+  }
   for (let i = 1; i < points.length; i++) {
     const from = points[i - 1]!
     const to = points[i]!
     if (from.x === to.x && from.y === to.y) continue
+    const along = unit({ x: to.x - from.x, y: to.y - from.y })
     const near = beside(from, to, distance)
-    const far = { x: near.x + to.x - from.x, y: near.y + to.y - from.y }
-    areas.push(clockwise([from, near, far]), clockwise([from, far, to]))
-    if (before) areas.push(clockwise([from, before, near]))
-    before = far
+    const far = beside(to, to, distance, from)
+    const last = outer[outer.length - 1]
+    if (last && previous) {
+      const forward = (far.x - last.x) * along.x + (far.y - last.y) * along.y > 0
+      const smooth = along.x * previous.x + along.y * previous.y > 0.8
+      const onward = along.x * heading!.x + along.y * heading!.y > -0.5
+      if (forward && smooth && onward) {
+        // One point on the bisector instead of two that may overlap.
+        outer[outer.length - 1] = beside(from, add(from, add(along, previous)), distance)
+      } else {
+        areas.push(clockwise([from, last, near]))
+        close()
+      }
+    }
+    if (inner.length === 0) {
+      heading = along
+      inner.push(from)
+      outer.push(near)
+    }
+    inner.push(to)
+    outer.push(far)
+    previous = along
   }
+  close()
   return areas
 }
 

@@ -1,0 +1,116 @@
+import type { Point, Segment } from '../contract'
+import { intersections } from '../geometry/intersect'
+import { subtract, unit } from '../geometry/point'
+import { line } from '../geometry/segment'
+import { meetLine } from './meet-line'
+import { MITRE_LIMIT, type Side, type Turn } from './outline-edge'
+
+/** Ends closer than this (mm) are one point. */
+const SAME = 1e-4
+
+/** Both allowances run on until they meet; past 2.5 × the larger one the corner is cut square to its bisector. */
+export const mitre = (a: Side, b: Side, at: Point): Turn => {
+  const dx = b.start.x - a.end.x
+  const dy = b.start.y - a.end.y
+  const along = a.arriving.x * b.leaving.x + a.arriving.y * b.leaving.y
+  if (Math.abs(dx) + Math.abs(dy) <= SAME && (along > 0 || a.allowance + b.allowance === 0))
+    return straightOn(a, b)
+  const turn = a.arriving.x * b.leaving.y - a.arriving.y * b.leaving.x
+  if (turn < 0 && along > -1) {
+    const inner = innerCorner(a, b)
+    if (inner) return inner
+  }
+  if (Math.abs(turn) < 1e-9) return along > 0 ? stepOrAcross(a, b, at) : bevel(a, b)
+  const ahead = (dx * b.leaving.y - dy * b.leaving.x) / turn
+  const back = (a.arriving.x * dy - a.arriving.y * dx) / turn
+  if (ahead < 0 || back < 0) return crossing(a, b, at) ?? stepOrAcross(a, b, at)
+  // Along the side without allowance, so that a nett edge is only ever prolonged.
+  const meet =
+    b.allowance === 0
+      ? { x: b.start.x - b.leaving.x * back, y: b.start.y - b.leaving.y * back }
+      : { x: a.end.x + a.arriving.x * ahead, y: a.end.y + a.arriving.y * ahead }
+  const limit = MITRE_LIMIT * Math.max(a.allowance, b.allowance)
+  if (Math.hypot(meet.x - at.x, meet.y - at.y) > limit + 1e-9)
+    return turn > 0 ? bevel(a, b) : stepOrAcross(a, b, at)
+  return { joint: meet, lead: [line(meet, b.start)] }
+}
+
+/** The two sides go on from one another: one point. */
+const straightOn = (a: Side, b: Side): Turn => ({ joint: b.allowance === 0 ? b.start : a.end, lead: [] })
+
+/** At an inner corner the offsets cross: both are cut back to there. */
+const innerCorner = (a: Side, b: Side): Turn | undefined => {
+  const found = intersections(a.offset, b.offset)
+  const one = found[found.length - 1]
+  return one && { joint: one.point, leave: one.a, lead: [], enter: one.b }
+}
+
+/** One side is cut back by the other's straight continuation, unless that would take more than the mitre's limit. */
+const crossing = (a: Side, b: Side, at: Point): Turn | undefined => {
+  const limit = MITRE_LIMIT * Math.max(a.allowance, b.allowance)
+  const near = (p: Point): boolean => Math.hypot(p.x - at.x, p.y - at.y) <= limit
+  const onA = meetLine(a, false, b.start, b.leaving)
+  if (onA?.along !== undefined && near(onA.point) && behind(onA.point, b)) {
+    return { joint: onA.point, leave: onA.along, lead: [line(onA.point, b.start)] }
+  }
+  const onB = meetLine(b, true, a.end, a.arriving)
+  if (onB?.along !== undefined && near(onB.point) && ahead(onB.point, a)) {
+    return { joint: onB.point, lead: [], enter: onB.along }
+  }
+  return undefined
+}
+
+const behind = (p: Point, side: Side): boolean =>
+  (p.x - side.start.x) * side.leaving.x + (p.y - side.start.y) * side.leaving.y <= 0
+
+const ahead = (p: Point, side: Side): boolean =>
+  (p.x - side.end.x) * side.arriving.x + (p.y - side.end.y) * side.arriving.y >= 0
+
+/** A sharp corner cut off at 2.5 × the larger allowance, square to its bisector. */
+const bevel = (a: Side, b: Side): Turn => {
+  const limit = MITRE_LIMIT * Math.max(a.allowance, b.allowance)
+  // The bisector points out of the corner.
+  let ux = a.arriving.x - b.leaving.x
+  let uy = a.arriving.y - b.leaving.y
+  const size = Math.hypot(ux, uy)
+  if (size < 1e-9) return straightOn(a, b)
+  ux /= size
+  uy /= size
+  const cornerA = { x: a.end.x - a.arriving.y * a.allowance, y: a.end.y + a.arriving.x * a.allowance }
+  const outA = (a.end.x - cornerA.x) * ux + (a.end.y - cornerA.y) * uy
+  const outB = (b.start.x - cornerA.x) * ux + (b.start.y - cornerA.y) * uy
+  const runA = Math.max(0, (limit - outA) / (a.arriving.x * ux + a.arriving.y * uy))
+  const runB = Math.max(0, (limit - outB) / -(b.leaving.x * ux + b.leaving.y * uy))
+  const first = { x: a.end.x + a.arriving.x * runA, y: a.end.y + a.arriving.y * runA }
+  const second = { x: b.start.x - b.leaving.x * runB, y: b.start.y - b.leaving.y * runB }
+  return { joint: first, lead: [line(first, second), line(second, b.start)] }
+}
+
+/**
+ * A right-angled step at the corner point: the wider allowance keeps its full width to the very end, then drops straight to
+ * the narrower one. Where neither is the wider (equal allowances, a real corner), a mitre.
+ */
+export const step = (a: Side, b: Side, at: Point): Turn => stepIfUneven(a, b, at) ?? mitre(a, b, at)
+
+const stepIfUneven = (a: Side, b: Side, at: Point): Turn | undefined => {
+  const along = a.arriving.x * b.leaving.x + a.arriving.y * b.leaving.y
+  if (a.allowance * along > b.allowance) {
+    const met = meetLine(b, true, a.end, unit(subtract(at, a.end)))
+    if (met) return { joint: a.end, lead: leadTo(a.end, met.point, b, met.along), enter: met.along }
+  } else if (b.allowance * along > a.allowance) {
+    const met = meetLine(a, false, b.start, unit(subtract(at, b.start)))
+    if (met) return { joint: met.point, leave: met.along, lead: [line(met.point, b.start)] }
+  }
+  return undefined
+}
+
+/** The step, or where there is none a straight way across, which is no clean corner. */
+const stepOrAcross = (a: Side, b: Side, at: Point): Turn =>
+  stepIfUneven(a, b, at) ?? { joint: a.end, lead: [line(a.end, b.start)], failed: true }
+
+/** Straight from the joint to a meeting with the second offset, and along its continuation to its start. */
+const leadTo = (joint: Point, meet: Point, b: Side, along: number | undefined): Segment[] => {
+  const lead: Segment[] = [line(joint, meet)]
+  if (along === undefined) lead.push(line(meet, b.start))
+  return lead
+}
