@@ -68,7 +68,7 @@ function built(name: string, card: Card): NamedBody {
 export const extremeBodies: readonly NamedBody[] = [
   built('short and slight', { height: 1410, bust: 700, waist: 540, hip: 800 }),
   built('short and full', { height: 1480, bust: 1260, waist: 1160, hip: 1290 }),
-  built('tall and slight', { height: 1829, bust: 780, waist: 620, hip: 880 }),
+  built('tall and slight', { height: 1829, bust: 800, waist: 640, hip: 890, shoulderLength: 135 }),
   built('tall and full', { height: 1829, bust: 1266, waist: 1120, hip: 1300 }),
   built('full hips', { height: 1630, bust: 820, waist: 680, hip: 1040 }),
   built('full waist', { height: 1600, bust: 1080, waist: 1180, hip: 1130 }),
