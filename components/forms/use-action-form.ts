@@ -18,11 +18,15 @@ const unsent: readonly FormProblem[] = [
   },
 ]
 
+/** A problem with a part of a field is a problem with the field. */
+const concerns = (problem: FormProblem, field: string) =>
+  problem.field === field || problem.field.startsWith(`${field}.`)
+
 /** Puts the focus on the first field that is refused, so that a keyboard and a screen reader land where the work is. */
 function focusFirst(form: HTMLFormElement, problems: readonly FormProblem[]): void {
   const controls = [...form.elements].filter((element) => element instanceof HTMLElement)
-  const wrong = new Set(problems.map((problem) => problem.field))
-  controls.find((control) => wrong.has(control.getAttribute('name') ?? '-'))?.focus()
+  const isWrong = (name: string | null) => problems.some((problem) => name && concerns(problem, name))
+  controls.find((control) => isWrong(control.getAttribute('name')))?.focus()
 }
 
 /**
@@ -58,9 +62,9 @@ export function useActionForm<T>(
       if (!busy) void submit(event.currentTarget)
     },
     /** What is wrong with a field. */
-    errorOf: (field: string) => problems.find((problem) => problem.field === field)?.message,
+    errorOf: (field: string) => problems.find((problem) => concerns(problem, field))?.message,
     /** What is wrong with the whole, or with a field that is not among these. */
     errorBeside: (...fields: readonly string[]) =>
-      problems.find((problem) => !fields.includes(problem.field))?.message,
+      problems.find((problem) => !fields.some((field) => concerns(problem, field)))?.message,
   }
 }
