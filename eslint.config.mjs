@@ -39,7 +39,7 @@ const config = [
   {
     ignores: [
       'node_modules/**',
-      '.next/**',
+      '.next*/**',
       '.data/**',
       '.cache/**',
       'next-env.d.ts',
