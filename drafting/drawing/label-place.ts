@@ -13,9 +13,11 @@ type Stroke = readonly [Point, Point]
 
 /** Rows that are tried, as shares of the piece's height; the first that fits is taken, so that a label seldom jumps. */
 const rows = [0.4, 0.5, 0.32, 0.6, 0.7, 0.24, 0.8, 0.16, 0.88]
-const scales = [1, 0.8, 0.62, 0.48, 0.36, 0.27]
+const scales = [1, 0.75, 0.55, 0.4, 0.28]
 /** Clear of the lines around it, mm. */
 const clearance = 3
+/** Curves may be this far off, mm: within the clearance. */
+const tolerance = 1.5
 
 /**
  * Where a label of so many mm fits inside the stitch line of a piece, clear of its grain line, inner lines and darts: upright
@@ -23,13 +25,15 @@ const clearance = 3
  */
 export function labelPlace(piece: Piece, width: number, height: number): LabelPlace {
   const outline = stitchOutline(piece)
-  const wall = strokes(flatten(outline, 0.5))
+  const wall = strokes(flatten(outline, tolerance))
   const inner = innerStrokes(piece)
-  const turnedWall = wall.map(turnedStroke)
-  const turnedInner = inner.map(turnedStroke)
+  let turnedWall: readonly Stroke[] | undefined
+  let turnedInner: readonly Stroke[] | undefined
   for (const scale of scales) {
     const upright = search(wall, inner, width * scale, height * scale)
     if (upright) return { at: upright, turn: 0, scale }
+    turnedWall ??= wall.map(turnedStroke)
+    turnedInner ??= inner.map(turnedStroke)
     const turned = search(turnedWall, turnedInner, width * scale, height * scale)
     if (turned) return { at: turnedBack(turned), turn: -90, scale }
   }
@@ -40,7 +44,7 @@ export function labelPlace(piece: Piece, width: number, height: number): LabelPl
 
 function innerStrokes(piece: Piece): readonly Stroke[] {
   const paths = [...piece.lines.map((line) => line.path), ...piece.darts.flatMap((dart) => dart.legs)]
-  return [[piece.grain.from, piece.grain.to], ...paths.flatMap((path) => strokes(flatten(path, 0.5)))]
+  return [[piece.grain.from, piece.grain.to], ...paths.flatMap((path) => strokes(flatten(path, tolerance)))]
 }
 
 function strokes(points: readonly Point[]): Stroke[] {
@@ -76,10 +80,14 @@ function search(
 
 /** The widest stretch of the band y ± half that no line enters and that lies inside the wall. */
 function widestGap(wall: readonly Stroke[], inner: readonly Stroke[], y: number, half: number) {
-  const blocked = [...wall, ...inner]
-    .map((stroke) => shadow(stroke, y - half, y + half))
-    .filter((span) => span !== null)
-    .sort((a, b) => a.from - b.from)
+  const blocked: { from: number; to: number }[] = []
+  for (const strokes of [wall, inner]) {
+    for (const stroke of strokes) {
+      const span = shadow(stroke, y - half, y + half)
+      if (span) blocked.push(span)
+    }
+  }
+  blocked.sort((a, b) => a.from - b.from)
   let best: { from: number; to: number } | null = null
   let reach = blocked[0]?.to ?? 0
   for (const span of blocked) {
