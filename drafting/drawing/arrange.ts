@@ -2,7 +2,7 @@ import type { Draft, Piece } from '../contract'
 import { bounds } from '../geometry/path'
 import type { Place, Places } from './options'
 import { placePath } from './place'
-import { outline } from './stitch-outline'
+import { outline } from './outline'
 
 export interface ArrangeOptions {
   /** Where pieces lie now: a piece keeps its place unless it has grown into another. */

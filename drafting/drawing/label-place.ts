@@ -1,6 +1,6 @@
 import type { Piece, Point } from '../contract'
 import { bounds, flatten } from '../geometry/path'
-import { stitchOutline } from './stitch-outline'
+import { stitchLine } from '../pieces/stitch-line'
 
 export interface LabelPlace {
   readonly at: Point
@@ -24,7 +24,7 @@ const tolerance = 1.5
  * if it can be, else turned, else smaller. When nothing fits, the middle of the piece at the smallest size.
  */
 export function labelPlace(piece: Piece, width: number, height: number): LabelPlace {
-  const outline = stitchOutline(piece)
+  const outline = stitchLine(piece)
   const wall = strokes(flatten(outline, tolerance))
   const inner = innerStrokes(piece)
   let turnedWall: readonly Stroke[] | undefined

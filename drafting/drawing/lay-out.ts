@@ -6,7 +6,7 @@ import { printLayers } from './layers'
 import type { TitleBlock } from './options'
 import type { Paper } from './papers'
 import { placePath } from './place'
-import { outline } from './stitch-outline'
+import { outline } from './outline'
 import { tilePages } from './tile-pages'
 import type { Orientation, Tiling } from './tiling'
 

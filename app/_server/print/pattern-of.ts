@@ -1,0 +1,44 @@
+import 'server-only'
+import { draftGarment, garments } from '@/drafting'
+import type { Draft, DraftOrder } from '@/drafting/contract'
+import type { PatternTitle } from './pattern-title'
+
+/** A version of a draft, as far as its paper pattern needs it. */
+export interface Printable {
+  readonly name: string
+  /** As named by the drafter; absent when the version was saved by itself. */
+  readonly version?: string | null
+  readonly maker: string
+  readonly savedAt: string
+  /** Of the workroom; a visitor's paper says UTC. */
+  readonly timeZone?: string
+  readonly order: DraftOrder
+}
+
+/** The name of a garment as it is said. */
+export function garmentName(id: string): string {
+  return garments.find((garment) => garment.id === id)?.name ?? id
+}
+
+/** What stands on the sheets: the draft, its version, and when that was saved. The client is nowhere in it. */
+export function titleOf(printable: Printable): PatternTitle {
+  const { date, time } = inWords(new Date(printable.savedAt), printable.timeZone ?? 'UTC')
+  return {
+    name: printable.name,
+    garment: garmentName(printable.order.garment),
+    version: printable.version ?? `saved at ${time}`,
+    date,
+    maker: printable.maker,
+  }
+}
+
+function inWords(at: Date, timeZone: string): { date: string; time: string } {
+  const date = at.toLocaleDateString('en-GB', { day: 'numeric', month: 'short', year: 'numeric', timeZone })
+  const time = at.toLocaleTimeString('en-GB', { hour: '2-digit', minute: '2-digit', timeZone })
+  return { date, time: timeZone === 'UTC' ? `${time} UTC` : time }
+}
+
+/** The draft of a version, as it was kept when it was first printed, else drawn afresh. @throws DraftingError */
+export function draftOf(order: DraftOrder, kept: Draft | null): Draft {
+  return kept ?? draftGarment({ ...order, explain: true })
+}

@@ -1,0 +1,31 @@
+import 'server-only'
+import { getDraft } from '@/db/access/drafts'
+import { keepPrinted, keptDraft } from '@/db/access/kept-drafts'
+import { getRevision } from '@/db/access/revisions'
+import { getWorkroom } from '@/db/access/workrooms'
+import type { Actor } from '@/db/permissions'
+import type { Draft } from '@/drafting/contract'
+import { draftOf } from '@/app/_server/print/pattern-of'
+import type { Printable } from '@/app/_server/print/pattern-of'
+
+/**
+ * A version that the actor may read, ready for printing. It is marked as printed and its whole draft kept, so that what was cut
+ * can always be printed again.
+ * @throws AccessError not-found, DraftingError
+ */
+export async function printed(
+  actor: Actor,
+  revisionId: string,
+): Promise<{ printable: Printable; draft: Draft }> {
+  const revision = await getRevision(actor, revisionId)
+  const [details, kept, workroom] = await Promise.all([
+    getDraft(actor, revision.draftId),
+    keptDraft(actor, revisionId),
+    getWorkroom(actor),
+  ])
+  const draft = draftOf(revision.order, kept)
+  await keepPrinted(actor, { revisionId, draft })
+  const { savedAt, order } = revision
+  const { name: maker, timeZone } = workroom
+  return { printable: { name: details.name, version: revision.name, maker, timeZone, savedAt, order }, draft }
+}
