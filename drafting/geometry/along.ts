@@ -1,20 +1,16 @@
 import type { Path, Point } from '../contract'
 import { endOf, endTangent, startOf, startTangent } from './ends'
 import { parameterAt, segmentLength } from './length'
+import { recent } from './recent'
 import { evaluate, tangentAt } from './segment'
 
-const lengthTables = new WeakMap<Path, Float64Array>()
-
 /** Length so far after each segment; the last entry is the whole. */
-export const lengthsOf = (path: Path): Float64Array => {
-  const known = lengthTables.get(path)
-  if (known) return known
+export const lengthsOf = recent((path: Path): Float64Array => {
   const table = new Float64Array(path.segments.length)
   let sum = 0
   for (let i = 0; i < table.length; i++) table[i] = sum += segmentLength(path.segments[i]!)
-  lengthTables.set(path, table)
   return table
-}
+})
 
 /** Length in mm. */
 export const pathLength = (path: Path): number => {

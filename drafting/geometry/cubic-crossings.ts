@@ -56,18 +56,18 @@ const descend = (depth: number, t0: number, t1: number, u0: number, u1: number):
   const next = a + 16
   if (sizeA >= sizeB) {
     const t = (t0 + t1) / 2
-    pool.copyWithin(next + 8, b, b + 8)
+    keep(b, next + 8)
     halve(a, next, true)
     descend(depth + 1, t0, t, u0, u1)
-    pool.copyWithin(next + 8, b, b + 8)
+    keep(b, next + 8)
     halve(a, next, false)
     descend(depth + 1, t, t1, u0, u1)
   } else {
     const u = (u0 + u1) / 2
-    pool.copyWithin(next, a, a + 8)
+    keep(a, next)
     halve(b, next + 8, true)
     descend(depth + 1, t0, t1, u0, u)
-    pool.copyWithin(next, a, a + 8)
+    keep(a, next)
     halve(b, next + 8, false)
     descend(depth + 1, t0, t1, u, u1)
   }
@@ -144,6 +144,10 @@ const crossOnce = (a: number, b: number): boolean => {
   const by = pool[b + 7]! - pool[b + 1]!
   const between = Math.abs(ax * by - ay * bx) / Math.sqrt((ax * ax + ay * ay) * (bx * bx + by * by))
   return between > 1.2 * limit
+}
+
+const keep = (from: number, to: number): void => {
+  for (let i = 0; i < 8; i++) pool[to + i] = pool[from + i]!
 }
 
 /** Splits the curve at `from` at its middle and puts one half at `to`. */

@@ -2,7 +2,7 @@ import type { CubicSegment, Path, Point, Segment } from '../contract'
 import { lengthBefore, pathLength } from './along'
 import { crossings } from './crossings'
 import { lengthTo } from './length'
-import { evaluate } from './segment'
+import { evaluate, tangentAt } from './segment'
 
 /** A place where two paths (or two stretches of one) meet: mm along each, and the point. */
 export interface Intersection {
@@ -13,6 +13,8 @@ export interface Intersection {
 
 /** Meetings closer than this (mm) are one. */
 const SAME = 1e-6
+/** Boxes this close (mm) may touch. */
+const HAIR = 1e-9
 
 /**
  * Every place where two paths meet, sorted by the distance along the first; touching and shared end points count. Where
@@ -37,6 +39,36 @@ export const intersections = (a: Path, b: Path): Intersection[] => {
   return found.length < 2 ? found : distinct(found)
 }
 
+/** The box around each segment's controls, a hair wider: left, top, right, bottom. Grown as needed, used at once. */
+let boxes = new Float64Array(256)
+
+const fillBoxes = (segments: readonly Segment[]): void => {
+  if (boxes.length < segments.length * 4) boxes = new Float64Array(segments.length * 8)
+  for (let i = 0; i < segments.length; i++) {
+    const s = segments[i]!
+    const { from, to } = s
+    let left = from.x < to.x ? from.x : to.x
+    let right = from.x < to.x ? to.x : from.x
+    let top = from.y < to.y ? from.y : to.y
+    let bottom = from.y < to.y ? to.y : from.y
+    if (s.kind === 'cubic') {
+      const { control1: p, control2: q } = s
+      if (p.x < left) left = p.x
+      else if (p.x > right) right = p.x
+      if (q.x < left) left = q.x
+      else if (q.x > right) right = q.x
+      if (p.y < top) top = p.y
+      else if (p.y > bottom) bottom = p.y
+      if (q.y < top) top = q.y
+      else if (q.y > bottom) bottom = q.y
+    }
+    boxes[4 * i] = left - HAIR
+    boxes[4 * i + 1] = top - HAIR
+    boxes[4 * i + 2] = right + HAIR
+    boxes[4 * i + 3] = bottom + HAIR
+  }
+}
+
 /**
  * Every place where a path meets itself, once each with a < b. Joints of neighbouring segments, and the closing joint of a
  * closed path, do not count.
@@ -45,7 +77,7 @@ export const selfIntersections = (path: Path): Intersection[] => {
   const found: Intersection[] = []
   const { segments, closed } = path
   const count = segments.length
-  const whole = pathLength(path)
+  fillBoxes(segments)
   for (let i = 0; i < count; i++) {
     const s = segments[i]!
     if (s.kind === 'cubic') {
@@ -54,32 +86,40 @@ export const selfIntersections = (path: Path): Intersection[] => {
         found.push({ a: a + lengthTo(s, t), b: a + lengthTo(s, u), point: evaluate(s, t) })
       })
     }
+    const left = boxes[4 * i]!
+    const top = boxes[4 * i + 1]!
+    const right = boxes[4 * i + 2]!
+    const bottom = boxes[4 * i + 3]!
     for (let j = i + 1; j < count; j++) {
+      if (boxes[4 * j]! > right || boxes[4 * j + 2]! < left) continue
+      if (boxes[4 * j + 1]! > bottom || boxes[4 * j + 3]! < top) continue
       const r = segments[j]!
       const next = j === i + 1
       const round = closed && i === 0 && j === count - 1
-      if (boxesApart(s, r) || (next && goOnTogether(s, r)) || (round && goOnTogether(r, s))) continue
-      crossings(s, r, (t, u) => {
-        const a = lengthBefore(path, i) + lengthTo(s, t)
-        const b = lengthBefore(path, j) + lengthTo(r, u)
-        const apart = closed ? Math.min(b - a, whole - (b - a)) : b - a
-        if ((next || round || apart < 2 * SAME) && apart < 1e-4) return
-        if (apart > 2 * SAME) found.push({ a, b, point: evaluate(s, t) })
-      })
+      if ((next && onlyJoined(s, r)) || (round && onlyJoined(r, s))) continue
+      meetings(path, i, j, next || round, found)
     }
   }
   return found.length < 2 ? found : distinct(found)
 }
 
-const boxesApart = (a: Segment, b: Segment): boolean => {
-  const gap = 1e-9
-  return (
-    low(a, 'x') > high(b, 'x') + gap ||
-    low(b, 'x') > high(a, 'x') + gap ||
-    low(a, 'y') > high(b, 'y') + gap ||
-    low(b, 'y') > high(a, 'y') + gap
-  )
+/** Adds where two of a path's segments meet, other than at a joint that they share. */
+const meetings = (path: Path, i: number, j: number, neighbours: boolean, found: Intersection[]): void => {
+  const s = path.segments[i]!
+  const r = path.segments[j]!
+  crossings(s, r, (t, u) => {
+    const a = lengthBefore(path, i) + lengthTo(s, t)
+    const b = lengthBefore(path, j) + lengthTo(r, u)
+    const apart = path.closed ? Math.min(b - a, pathLength(path) - (b - a)) : b - a
+    if (apart > (neighbours ? 1e-4 : 2 * SAME)) found.push({ a, b, point: evaluate(s, t) })
+  })
 }
+
+const boxesApart = (a: Segment, b: Segment): boolean =>
+  low(a, 'x') > high(b, 'x') + HAIR ||
+  low(b, 'x') > high(a, 'x') + HAIR ||
+  low(a, 'y') > high(b, 'y') + HAIR ||
+  low(b, 'y') > high(a, 'y') + HAIR
 
 const low = (s: Segment, axis: 'x' | 'y'): number => {
   const ends = Math.min(s.from[axis], s.to[axis])
@@ -89,6 +129,40 @@ const low = (s: Segment, axis: 'x' | 'y'): number => {
 const high = (s: Segment, axis: 'x' | 'y'): number => {
   const ends = Math.max(s.from[axis], s.to[axis])
   return s.kind === 'line' ? ends : Math.max(ends, s.control1[axis], s.control2[axis])
+}
+
+/** Whether neighbours surely meet at their joint only: lines that do not double back, curves that keep going forward. */
+const onlyJoined = (a: Segment, b: Segment): boolean => {
+  if (a.kind === 'line' && b.kind === 'line') {
+    const ax = a.to.x - a.from.x
+    const ay = a.to.y - a.from.y
+    const bx = b.to.x - b.from.x
+    const by = b.to.y - b.from.y
+    const turn = ax * by - ay * bx
+    const along = ax * bx + ay * by
+    if (turn * turn > 1e-18 * along * along) return true
+  }
+  return goOnTogether(a, b) || goRoundTogether(a, b)
+}
+
+/** Whether two segments lie on opposite sides of some line through their joint. */
+const goRoundTogether = (a: Segment, b: Segment): boolean => {
+  // Across the bisector of the directions in which they come and go.
+  const back = tangentAt(a, 1)
+  const on = tangentAt(b, 0)
+  const x = back.x + on.x
+  const y = back.y + on.y
+  return x * x + y * y > 1e-6 && behind(a, a.to, x, y) && behind(b, b.from, -x, -y)
+}
+
+/** Whether all of a segment but the joint itself lies behind the joint, seen along a direction. */
+const behind = (s: Segment, joint: Point, x: number, y: number): boolean => {
+  const near = (p: Point): boolean => (p.x - joint.x) * x + (p.y - joint.y) * y < 0
+  if (!near(s.from === joint ? s.to : s.from)) return false
+  if (s.kind === 'line') return true
+  const first = s.from === joint ? s.control2 : s.control1
+  const last = s.from === joint ? s.control1 : s.control2
+  return near(first) && near(last)
 }
 
 /** Whether both segments keep moving forward in one common direction, so that they meet at their joint only. */

@@ -1,4 +1,5 @@
 import type { CubicSegment, Segment } from '../contract'
+import { recent } from './recent'
 
 /*
  * Arc length by Gauss–Legendre quadrature. The speed of a cubic is the square root of a polynomial whose complex zeros are
@@ -150,14 +151,13 @@ export const lengthTo = (segment: Segment, t: number): number => {
 
 /** Parameters in equal steps, for each the length so far: where a search for a distance starts. */
 const STEPS = 8
-const tables = new WeakMap<CubicSegment, Float64Array>()
 
-const makeTable = (segment: CubicSegment): Float64Array => {
+/** Of the loaded curve. */
+const tableOf = recent((_segment: CubicSegment): Float64Array => {
   const table = new Float64Array(STEPS + 1)
   for (let i = 1; i <= STEPS; i++) table[i] = table[i - 1]! + measure((i - 1) / STEPS, i / STEPS, DEEPEST)
-  tables.set(segment, table)
   return table
-}
+})
 
 const speedAt = (t: number): number => {
   const x = (ax * t + bx) * t + cx
@@ -176,7 +176,7 @@ export const parameterAt = (segment: Segment, distance: number): number => {
     return distance >= whole ? 1 : distance / whole
   }
   load(segment)
-  const table = tables.get(segment) ?? makeTable(segment)
+  const table = tableOf(segment)
   if (distance >= table[STEPS]!) return 1
   let i = 0
   while (table[i + 1]! <= distance) i++

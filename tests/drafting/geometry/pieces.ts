@@ -209,3 +209,11 @@ export const darted = (a: readonly number[], pressTo: OutlineDart['pressTo'], in
     darts: [{ edges: ['dart-left', 'dart-right'], pressTo }],
   }
 }
+
+export type CornerName = Corner
+
+/** The same shape with other corners, in order. */
+export const withCorners = (shape: Shape, corners: readonly Corner[]): Shape => ({
+  ...shape,
+  edges: shape.edges.map((one, i) => ({ ...one, startCorner: corners[i % corners.length]! })),
+})
