@@ -28,7 +28,7 @@ function contentPolicy(nonce: string): string {
 const publicPages = /^\/(?:$|about|legal|terms|privacy)/
 
 /** Pages opened by a link with a secret in it, which no other page may learn. */
-const secretLinks = /^\/(?:shared|reset|invitation|join)(?:\/|$)/
+const secretLinks = /^\/(?:s|api\/shared|reset|invitation|join)(?:\/|$)/
 
 /**
  * Headers of every page and answer. They are a second line: sessions, permissions and origins are checked where the

@@ -27,7 +27,10 @@ export interface SharedView {
   readonly name: string
   readonly garment: string
   readonly workroom: string
-  readonly savedAt: string
+  /** When the version was saved, in words. */
+  readonly saved: string
+  /** The unit that the drafter works in. */
+  readonly unit: Unit
   /** The drawing with its lengths in both units, as SVG text. */
   readonly svg: string
   readonly pieces: readonly { readonly name: string; readonly cut: readonly string[] }[]
@@ -57,7 +60,8 @@ export function sharedView(share: OpenedShare): SharedView {
     name: share.draftName,
     garment,
     workroom: share.workroomName,
-    savedAt: share.savedAt,
+    saved: savedInWords(share.savedAt),
+    unit: share.order.unit ?? 'cm',
     svg: sharedSvg(draft, `${share.draftName}: ${garment.toLowerCase()}`),
     pieces: draft.pieces.map(({ name, cut }) => ({ name, cut: cut.map(cuttingWords) })),
     tags: tagsOf(draft),
@@ -65,6 +69,12 @@ export function sharedView(share: OpenedShare): SharedView {
     sheets: { a4: sheets(draft, 'a4'), letter: sheets(draft, 'letter') },
     steps: share.scope === 'lesson' ? stepsOf(draft, draftGarment({ ...share.order, unit: 'in' })) : null,
   }
+}
+
+function savedInWords(savedAt: string): string {
+  const at = new Date(savedAt)
+  const words = at.toLocaleString('en-GB', { dateStyle: 'long', timeStyle: 'short', timeZone: 'UTC' })
+  return `${words} UTC`
 }
 
 function sharedSvg(draft: Draft, title: string): string {
