@@ -10,7 +10,7 @@ const limits = {
   'sign-in account': { tries: 10, minutes: 15 },
   'sign-in address': { tries: 60, minutes: 15 },
   'mail account': { tries: 5, minutes: 60 },
-  'mail address': { tries: 30, minutes: 60 },
+  'mail address': { tries: 60, minutes: 60 },
   'invitations of workroom': { tries: 50, minutes: 60 },
   'token address': { tries: 60, minutes: 15 },
 } as const

@@ -1,5 +1,5 @@
-export { type ActionResult, publicAction, signedInAction, workroomAction } from './action'
+export { type ActionResult, publicAction, signedInAction, workroomAction } from './workroom-action'
 export { currentSession, requireActor, requireSignedIn } from './current'
 export { forPage } from './for-page'
 export { actorForRequest } from './request'
-export { workroomRoute } from './route'
+export { workroomRoute } from './workroom-route'

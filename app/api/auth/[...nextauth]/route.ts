@@ -2,7 +2,7 @@ import NextAuth from 'next-auth'
 import type { NextRequest } from 'next/server'
 import { authOptions } from '@/app/_server/session/options'
 import { requireSameOrigin } from '@/app/_server/origin'
-import { refused } from '@/app/_server/session/route'
+import { refused } from '@/app/_server/session/workroom-route'
 import { notFound } from '@/db/access-error'
 
 interface Context {

@@ -1,0 +1,122 @@
+import { newId } from '@/db/new-id'
+import type { Role } from '@/db/permissions'
+
+/** Things of one workroom that requests name: each endpoint is tried on them by its own people and by strangers. */
+export interface Things {
+  readonly clientId: string
+  readonly cardId: string
+  readonly draftId: string
+  readonly headId: string
+  readonly shareId: string
+  readonly invitationId: string
+  readonly membershipId: string
+}
+
+/** Who gets through: anybody at all, anybody signed in, or these roles of the workroom (and nobody of another one). */
+type Access = 'anybody' | 'signed-in' | readonly Role[]
+
+export interface Endpoint {
+  readonly access: Access
+  /** A right input, naming things of the workroom. New for each call. */
+  readonly input: (things: Things) => Record<string, unknown>
+  /** What a stranger's owner meets: 'not-found' when the input names things, 'own' when it only touches their own workroom. */
+  readonly stranger?: 'not-found' | 'own'
+  /** Of a route handler: the address, with the things in it. */
+  readonly path?: (things: Things) => string
+  /** Answers something other than `{ok, value}` when it lets one through. */
+  readonly plain?: boolean
+}
+
+const nothing = () => ({})
+const owner = ['owner'] as const
+
+/**
+ * Every route handler (`METHOD /path`) and every server action (`file#name`) of the product, and who gets through.
+ * Written by hand on purpose: it must not follow from the table of permissions that it checks.
+ */
+export const endpoints: Readonly<Record<string, Endpoint>> = {
+  'GET /api/health': { access: 'anybody', input: nothing, path: () => '/api/health', plain: true },
+  'GET /api/auth/[...nextauth]': {
+    access: 'anybody',
+    input: nothing,
+    path: () => '/api/auth/csrf',
+    plain: true,
+  },
+  'POST /api/auth/[...nextauth]': {
+    access: 'anybody',
+    input: nothing,
+    path: () => '/api/auth/callback/credentials',
+    plain: true,
+  },
+
+  'app/(auth)/actions.ts#signOut': { access: 'anybody', input: nothing },
+  'app/(auth)/actions.ts#changeWorkroom': {
+    access: 'signed-in',
+    input: () => ({ workroomId: newId() }),
+    stranger: 'not-found',
+  },
+  'app/(auth)/join/actions.ts#join': {
+    access: 'anybody',
+    input: () => ({ email: `${newId()}@people.example`, name: 'Somebody', workroomName: 'Somewhere' }),
+  },
+  'app/(auth)/join/actions.ts#confirm': {
+    access: 'anybody',
+    input: () => ({ token: 'x', password: 'plum tree by the river', unit: 'in', timeZone: 'Africa/Lagos' }),
+  },
+  'app/(auth)/forgotten/actions.ts#askForReset': {
+    access: 'anybody',
+    input: () => ({ email: `${newId()}@people.example` }),
+  },
+  'app/(auth)/reset/actions.ts#reset': {
+    access: 'anybody',
+    input: () => ({ token: 'x', password: 'plum tree by the river' }),
+  },
+  'app/(auth)/invitation/actions.ts#accept': {
+    access: 'anybody',
+    input: () => ({ token: 'x', name: 'Somebody', password: 'plum tree by the river' }),
+  },
+  'app/(auth)/invitation/actions.ts#acceptKnown': { access: 'signed-in', input: () => ({ token: 'x' }) },
+
+  'app/(workroom)/account/actions.ts#setPassword': {
+    access: 'signed-in',
+    input: () => ({ current: 'not the password', next: 'plum tree by the river' }),
+  },
+  'app/(workroom)/members/actions.ts#invite': {
+    access: owner,
+    input: () => ({ id: newId(), email: `${newId()}@people.example`, roles: ['maker'] }),
+    stranger: 'own',
+  },
+  'app/(workroom)/members/actions.ts#withdraw': {
+    access: owner,
+    input: ({ invitationId }) => ({ id: invitationId }),
+    stranger: 'not-found',
+  },
+  'app/(workroom)/members/actions.ts#setRoles': {
+    access: owner,
+    input: ({ membershipId }) => ({ membershipId, roles: ['maker'] }),
+    stranger: 'not-found',
+  },
+  'app/(workroom)/members/actions.ts#setDisabled': {
+    access: owner,
+    input: ({ membershipId }) => ({ membershipId, disabled: false }),
+    stranger: 'not-found',
+  },
+  'app/(workroom)/settings/actions.ts#saveSettings': {
+    access: owner,
+    input: () => ({
+      name: 'Renamed',
+      note: '',
+      unit: 'in',
+      currency: 'GBP',
+      timeZone: 'Africa/Lagos',
+      typedIn: 'in',
+      'allowances.shoulder': '1/2',
+      'allowances.side': '1',
+      'allowances.centreBack': '1',
+      'allowances.neckline': '1 cm',
+      'allowances.armhole': '1 cm',
+      'allowances.hem': '1',
+    }),
+    stranger: 'own',
+  },
+}
