@@ -1,6 +1,6 @@
 'use client'
 
-import type { DesignValue } from '@/drafting/contract'
+import { isOffered, type DesignValue } from '@/drafting'
 import { Checkbox } from '@/components/ui/checkbox'
 import { Select } from '@/components/ui/select'
 import type { FieldRef } from '@/components/studio/field-ref'
@@ -19,11 +19,9 @@ export function wordsOf(id: string): string {
 export function Choices() {
   const { garment } = useStudio()
   const order = useStudioState((state) => state.order)
-  const offered = garment.design.filter((value) => {
-    if (!value.when) return true
-    const other = currentValue(garment, order, `design.${value.when.id}`)
-    return other !== undefined && value.when.is.includes(other)
-  })
+  const offered = garment.design.filter((value) =>
+    isOffered(value, (id) => currentValue(garment, order, `design.${id}`)),
+  )
   const parts = [...new Set(offered.map((value) => value.part))]
   return (
     <div className="grid gap-7 p-4">

@@ -55,7 +55,10 @@ export const ValueTag = memo(function ValueTag({
   /** On a phone the tag is a button that opens its editor above the keyboard. */
   readonly onOpen?: (field: FieldRef) => void
 }) {
-  const field = useField(ref, label)
+  const over = useStudioState(
+    (state) => state.draft?.dimensions.find((each) => each.id === dimension)?.over ?? 0,
+  )
+  const field = useField(ref, label, over)
   const id = `tag-${dimension}`
   const frame = classes(
     'rounded border bg-sheet text-ink',

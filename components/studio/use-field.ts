@@ -8,8 +8,11 @@ import { problemsAt } from './store'
 import { useStudio, useStudioState } from './use-store'
 import { currentValue, kindOf, nudged, parseValue, shownText, typedWithUnit, unitWord } from './values'
 
-/** What an input needs to be one field of the order: text, problems, and the handlers of the keyboard. */
-export function useField(ref: FieldRef, label: string) {
+/**
+ * What an input needs to be one field of the order: text, problems, and the handlers of the keyboard.
+ * @param over mm that the field shows on top of the value: a tag tells the whole length, of which the value may be a part
+ */
+export function useField(ref: FieldRef, label: string, over = 0) {
   const { store, garment, writable } = useStudio()
   const [editing, setEditing] = useState<string>()
   const kind = kindOf(garment, ref)
@@ -17,7 +20,9 @@ export function useField(ref: FieldRef, label: string) {
   const shown = useStudioState((state) => {
     const attempt = state.attempts[ref]
     if (attempt) return attempt.text
-    return shownText(kind, currentValue(garment, state.order, ref), state.typed[ref], state.unit)
+    const value = currentValue(garment, state.order, ref)
+    const whole = typeof value === 'number' ? value + over : value
+    return shownText(kind, whole, state.typed[ref], state.unit)
   })
   const problem = useStudioState((state) =>
     problemsAt(state, ref)
@@ -30,7 +35,7 @@ export function useField(ref: FieldRef, label: string) {
     setEditing(text)
     const { order } = store.get()
     try {
-      const value = parseValue(kind, text, unit, ref)
+      const value = parseValue(kind, text, unit, ref) - over
       if (value === currentValue(garment, order, ref)) store.putBack(ref)
       else store.put(ref, value, typedWithUnit(kind, text, unit))
     } catch (error) {
@@ -42,7 +47,7 @@ export function useField(ref: FieldRef, label: string) {
   function step(direction: 1 | -1, large: boolean) {
     const value = currentValue(garment, store.get().order, ref)
     if (typeof value !== 'number') return
-    const next = nudged(kind, value, unit, direction, large)
+    const next = nudged(kind, value + over, unit, direction, large) - over
     store.begin()
     store.put(ref, next)
     setEditing(undefined)

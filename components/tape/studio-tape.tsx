@@ -9,14 +9,14 @@ import { useStudio, useStudioState } from '@/components/studio/use-store'
 import { shownText } from '@/components/studio/values'
 import { lengthDigits } from '@/drafting/lengths'
 import { Figure } from './figure'
-import { bodyOrder } from './figure-places'
 import { TapeStrip } from './tape-strip'
 
 /** The measurements this draft is made from, in the order of the body. */
-function useDraftMeasurements(): readonly string[] {
+function useDraftMeasurements(definitions: readonly MeasurementDefinition[]): readonly string[] {
   const { garment } = useStudio()
   const given = useStudioState((state) => state.order.measurements)
-  return bodyOrder([...new Set([...garment.needs, ...garment.estimates, ...Object.keys(given)])])
+  const wanted = new Set([...garment.needs, ...garment.estimates, ...Object.keys(given)])
+  return definitions.map((definition) => definition.id).filter((id) => wanted.has(id))
 }
 
 /** The tape folded in: every measurement hangs at its height with its figure. */
@@ -27,7 +27,7 @@ function TapeRail({
   readonly definitions: readonly MeasurementDefinition[]
   readonly onOpen: (id: string | undefined) => void
 }) {
-  const ids = useDraftMeasurements()
+  const ids = useDraftMeasurements(definitions)
   return (
     <nav
       aria-label="Body measurements"
@@ -95,7 +95,7 @@ export function TapePanel({
   readonly focused: string | undefined
   readonly onClose?: () => void
 }) {
-  const ids = useDraftMeasurements()
+  const ids = useDraftMeasurements(definitions)
   const [at, setAt] = useState(focused)
   const definition = definitions.find((each) => each.id === at)
   const used = useStudioState((state) => state.draft?.used)

@@ -1,0 +1,48 @@
+import type { DraftOrder, GarmentDefinition } from '@/drafting/contract'
+import type { Allowances } from '@/db/shapes/workroom'
+import type { Length } from '@/db/shapes/length'
+
+/** The workroom's allowances by the names that garments give theirs. */
+const allowanceFields = {
+  shoulder: 'shoulderAllowance',
+  side: 'sideAllowance',
+  centreBack: 'centreBackAllowance',
+  neckline: 'neckAllowance',
+  armhole: 'armholeAllowance',
+  hem: 'hemAllowance',
+} as const satisfies Record<keyof Allowances, string>
+
+/**
+ * The order a draft starts from: every measurement of the card, the workroom's allowances where the garment has them and takes them, and the
+ * garment's own defaults for the rest. Texts stay as they were typed.
+ */
+export function firstOrder(
+  garment: GarmentDefinition,
+  card: { readonly unit: 'in' | 'cm'; readonly values: Readonly<Record<string, Length>> },
+  allowances: Allowances,
+): { readonly order: Omit<DraftOrder, 'corrections'>; readonly typed: Readonly<Record<string, string>> } {
+  const measured = Object.entries(card.values)
+  const own = Object.entries(allowanceFields).flatMap(([where, id]) => {
+    const value = garment.design.find((each) => each.id === id)
+    const wanted = allowances[where as keyof Allowances]
+    const within = value && wanted.mm >= (value.min ?? 0) && wanted.mm <= (value.max ?? Infinity)
+    return within && wanted.mm !== value.default ? [[id, wanted] as const] : []
+  })
+  return {
+    order: {
+      garment: garment.id,
+      measurements: Object.fromEntries(measured.map(([id, value]) => [id, value.mm])),
+      design: Object.fromEntries(own.map(([id, wanted]) => [id, wanted.mm])),
+      rules: {},
+      unit: card.unit,
+    },
+    typed: Object.fromEntries([
+      ...measured.map(([id, value]) => [`measurements.${id}`, withUnit(value)]),
+      ...own.map(([id, wanted]) => [`design.${id}`, withUnit(wanted)]),
+    ]),
+  }
+}
+
+function withUnit({ typed, unit }: Length): string {
+  return /[\d½⅓⅔¼¾⅛⅜⅝⅞]$/.test(typed) ? `${typed} ${unit}` : typed
+}

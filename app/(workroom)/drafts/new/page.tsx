@@ -1,0 +1,73 @@
+import type { Metadata } from 'next'
+import { forPage, requireActor } from '@/app/_server/session'
+import { ButtonLink } from '@/components/ui/button'
+import { EmptyState } from '@/components/ui/empty-state'
+import { Page } from '@/components/ui/page'
+import { listCards } from '@/db/access/cards'
+import { getClient, listClients } from '@/db/access/clients'
+import { may } from '@/db/permissions'
+import { garments } from '@/drafting'
+import { dayText } from '../../_data/dates'
+import { one, type SearchParams } from '../../_data/list-address'
+import { NewDraftForm } from '../_parts/new-draft-form'
+import { ClientChoice } from '../_parts/client-choice'
+
+export const metadata: Metadata = { title: 'New draft' }
+
+export default async function NewDraftPage({ searchParams }: { searchParams: SearchParams }) {
+  const actor = await requireActor('/drafts/new')
+  const asked = await searchParams
+  const clientId = one(asked.client)
+  const trail = [{ href: '/drafts', label: 'Drafts' }]
+  const withClients = may(actor, 'clients', 'write')
+
+  if (!clientId && withClients) {
+    const search = (one(asked.search) ?? '').slice(0, 100)
+    const clients = await forPage(listClients(actor, { search }))
+    return (
+      <Page title="New draft" trail={trail} lead="Who is it for?" narrow>
+        <ClientChoice clients={clients.items} search={search} />
+      </Page>
+    )
+  }
+
+  const [client, cards] = await forPage(
+    Promise.all([
+      clientId ? getClient(actor, clientId) : undefined,
+      may(actor, 'cards', 'read') ? listCards(actor, clientId ?? null) : [],
+    ]),
+  )
+  if (cards.length === 0) {
+    return (
+      <Page title="New draft" trail={trail} narrow>
+        <EmptyState
+          title="A draft starts from a measure card"
+          action={
+            <ButtonLink href={client ? `/clients/${client.id}/cards/new` : '/cards/new'} look="primary">
+              New measure card
+            </ButtonLink>
+          }
+        >
+          <p>
+            {client ? `${client.name} has none yet.` : 'You have none yet.'} Ten measurements are enough for a
+            dress.
+          </p>
+        </EmptyState>
+      </Page>
+    )
+  }
+  return (
+    <Page
+      title="New draft"
+      trail={trail}
+      lead={client ? `For ${client.name}` : 'On your own measurements'}
+      narrow
+    >
+      <NewDraftForm
+        garments={garments.map(({ id, name }) => ({ id, name }))}
+        cards={cards.map((card) => ({ id: card.id, name: `${card.name}, ${dayText(card.takenOn)}` }))}
+        cardId={one(asked.card)}
+      />
+    </Page>
+  )
+}
