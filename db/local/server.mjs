@@ -1,5 +1,6 @@
 import { spawn } from 'node:child_process'
 import { existsSync, openSync, readFileSync, closeSync } from 'node:fs'
+import { userInfo } from 'node:os'
 import { join } from 'node:path'
 import { setTimeout as sleep } from 'node:timers/promises'
 import { freePort, isFree } from '../../scripts/local/ports.mjs'
@@ -93,18 +94,29 @@ function runningPid(pidFile) {
   }
 }
 
+/** The server lets the system account that made it in by the socket, under its own name, as its administrator. */
+function account() {
+  return userInfo().username
+}
+
 async function isUp(socket) {
   if (!existsSync(socket)) return false
   const { code } = await attempt(findCommand('mariadb-admin'), [
     '--no-defaults',
     `--socket=${socket}`,
-    '--user=root',
+    `--user=${account()}`,
     'ping',
   ])
   return code === 0
 }
 
 async function sql(socket, text) {
-  const args = ['--no-defaults', `--socket=${socket}`, '--user=root', '--batch', '--skip-column-names']
+  const args = [
+    '--no-defaults',
+    `--socket=${socket}`,
+    `--user=${account()}`,
+    '--batch',
+    '--skip-column-names',
+  ]
   return (await run(findCommand('mariadb'), args, { quiet: true, input: text })).trim()
 }

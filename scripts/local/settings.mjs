@@ -11,8 +11,6 @@ import { newDemoPassword, newSecret } from './secrets.mjs'
  * @property {string} demoPassword of every demo sign-in
  * @property {{ port?: number, socketFolder?: string }} database
  * @property {{ smtpPort?: number, pagePort?: number }} mail
- * @property {{ port?: number }} files
- * @property {{ port?: number }} payments
  */
 
 /**
@@ -28,8 +26,6 @@ export function openSettings(folder) {
     demoPassword: newDemoPassword(),
     database: {},
     mail: {},
-    files: {},
-    payments: {},
     ...readJson(path),
   }
   function remember(changes) {
