@@ -8,6 +8,7 @@ export interface Things {
   readonly draftId: string
   readonly headId: string
   readonly shareId: string
+  readonly shareToken: string
   readonly invitationId: string
   readonly membershipId: string
 }
@@ -17,8 +18,10 @@ type Access = 'anybody' | 'signed-in' | readonly Role[]
 
 export interface Endpoint {
   readonly access: Access
-  /** A right input, naming things of the workroom. New for each call. */
+  /** A right input (of a GET: its query), naming things of the workroom. New for each call. */
   readonly input: (things: Things) => Record<string, unknown>
+  /** What the other roles of the workroom meet: forbidden, unless the thing is merely out of their reach. */
+  readonly otherRoles?: 'not-found'
   /** What a stranger's owner meets: 'not-found' when the input names things, 'own' when it only touches their own workroom. */
   readonly stranger?: 'not-found' | 'own'
   /** Of a route handler: the address, with the things in it. */
@@ -29,6 +32,7 @@ export interface Endpoint {
 
 const nothing = () => ({})
 const owner = ['owner'] as const
+const drafters = ['owner', 'drafter'] as const
 
 /**
  * Every route handler (`METHOD /path`) and every server action (`file#name`) of the product, and who gets through.
@@ -47,6 +51,33 @@ export const endpoints: Readonly<Record<string, Endpoint>> = {
     input: nothing,
     path: () => '/api/auth/callback/credentials',
     plain: true,
+  },
+  'GET /api/revisions/[id]/pattern.pdf': {
+    access: drafters,
+    otherRoles: 'not-found',
+    input: () => ({ paper: 'a4' }),
+    path: ({ headId }) => `/api/revisions/${headId}/pattern.pdf`,
+  },
+  'GET /api/revisions/[id]/pattern.svg': {
+    access: drafters,
+    otherRoles: 'not-found',
+    input: nothing,
+    path: ({ headId }) => `/api/revisions/${headId}/pattern.svg`,
+  },
+  'GET /api/shared/[token]': {
+    access: 'anybody',
+    input: nothing,
+    path: ({ shareToken }) => `/api/shared/${shareToken}`,
+  },
+  'GET /api/shared/[token]/pattern.pdf': {
+    access: 'anybody',
+    input: () => ({ paper: 'letter' }),
+    path: ({ shareToken }) => `/api/shared/${shareToken}/pattern.pdf`,
+  },
+  'GET /api/shared/[token]/pattern.svg': {
+    access: 'anybody',
+    input: nothing,
+    path: ({ shareToken }) => `/api/shared/${shareToken}/pattern.svg`,
   },
 
   'app/(auth)/actions.ts#signOut': { access: 'anybody', input: nothing },

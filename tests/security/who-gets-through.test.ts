@@ -28,10 +28,13 @@ async function visitorFor(caller: Caller, workroom: TestWorkroom): Promise<Visit
   return Visitor.signedIn(actor.sessionId)
 }
 
+const query = (input: Record<string, unknown>) =>
+  new URLSearchParams(Object.entries(input).map(([name, value]) => [name, String(value)])).toString()
+
 function call(visitor: Visitor, name: string, { path, input }: Endpoint, things: Things): Promise<Reply> {
   if (!path) return visitor.action(name, input(things))
   const [method = 'GET'] = name.split(' ')
-  if (method === 'GET') return visitor.get(path(things))
+  if (method === 'GET') return visitor.get(`${path(things)}?${query(input(things))}`)
   return visitor.json(method, path(things), input(things))
 }
 
@@ -46,13 +49,14 @@ function kindOf({ answer, status }: Reply): string {
   return 'through'
 }
 
-function expected(caller: Caller, { access, stranger }: Endpoint): string {
+function expected(caller: Caller, { access, stranger, otherRoles }: Endpoint): string {
   if (access === 'anybody') return 'through'
   if (caller === 'anonymous') return 'not signed in'
   if (access === 'signed-in') return stranger === 'not-found' ? 'not found' : 'through'
   if (caller === 'expelled') return 'forbidden'
   if (caller === 'stranger') return stranger === 'own' ? 'through' : 'not found'
-  return access.includes(caller) ? 'through' : 'forbidden'
+  if (access.includes(caller)) return 'through'
+  return otherRoles === 'not-found' ? 'not found' : 'forbidden'
 }
 
 const all = Object.entries(endpoints)

@@ -14,7 +14,7 @@ export async function makeThings(workroom: TestWorkroom, owner: Actor): Promise<
   const card = await createCard(owner, { ...cardInput(), clientId: client.id })
   const draft = await startDraft(owner, { clientId: client.id, cardId: card.id })
   const link = { draftId: draft.id, id: newId(), scope: 'lesson', expiresOn: '2027-03-01' } as const
-  const { share } = await createShare(owner, link)
+  const { share, token } = await createShare(owner, link)
   const invitation = { id: newId(), email: `${newId()}@people.example`, roles: ['maker'] }
   const spare = await workroom.person('maker')
   return {
@@ -23,6 +23,7 @@ export async function makeThings(workroom: TestWorkroom, owner: Actor): Promise<
     draftId: draft.id,
     headId: draft.head.id,
     shareId: share.id,
+    shareToken: token,
     invitationId: (await inviteMember(owner, invitation)).id,
     membershipId: spare.actor.membershipId,
   }

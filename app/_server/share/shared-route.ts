@@ -6,7 +6,7 @@ import { openShare } from '@/db/access/shares'
 import type { OpenedShare } from '@/db/access/shares'
 import { checkInput } from '@/db/check-input'
 import { requestAddress } from '../address'
-import { refused } from '../session/route'
+import { refused } from '../session/workroom-route'
 
 type Handler = (
   request: Request,
