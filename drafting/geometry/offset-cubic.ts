@@ -2,8 +2,9 @@ import type { CubicSegment, Point, Segment } from '../contract'
 import { cubic } from './segment'
 
 /*
- * A parallel curve to one cubic, as few cubics as keep within the tolerance. Each is a Hermite fit: its ends are exact, and
- * its handles are the source's, scaled by 1 + curvature × distance, which is how fast the parallel point moves.
+ * A parallel curve to one cubic, as few cubics as keep within the tolerance. Each is a Hermite fit: its ends and directions
+ * are exact, its handles are the source's scaled by 1 + curvature × distance (which is how fast the parallel point moves)
+ * and then a little more, so that the middle is exact too.
  */
 
 /** mm; checked at five places, the true worst lies a little higher. */
@@ -11,10 +12,11 @@ const TOLERANCE = 0.012
 /** A parallel curve that moves slower than this share of its source is on the brink of turning back. */
 const BRINK = 1e-3
 const DEEPEST = 6
+/** Share by which a handle may be lengthened or shortened to meet the middle. */
+const MOST_CHANGE = 0.3
 
-/** Bernstein weights at 1/6 … 5/6. */
-const CHECKS = [1, 2, 3, 4, 5].map((k) => {
-  const t = k / 6
+/** Bernstein weights where a fit is checked beside its middle. */
+const CHECKS = [0.14, 0.29, 0.71, 0.86].map((t) => {
   const u = 1 - t
   return { t, a: u * u * u + 3 * u * u * t, b: 3 * u * t * t + t * t * t, c: 3 * u * u * t, d: 3 * u * t * t }
 })
@@ -190,12 +192,32 @@ const fit = (
 ): void => {
   const width = t1 - t0
   const third = width / 3
-  const h0x = v0x * third
-  const h0y = v0y * third
-  const h1x = v1x * third
-  const h1y = v1y * third
+  let h0x = v0x * third
+  let h0y = v0y * third
+  let h1x = v1x * third
+  let h1y = v1y * third
+  locate(t0 + width / 2)
+  if (factor < BRINK && !careful) {
+    turnsBack = true
+    return
+  }
   let worst = 0
-  for (let k = 0; k < 5; k++) {
+  const missX = (from.x + to.x) / 2 + 0.375 * (h0x - h1x) - qx
+  const missY = (from.y + to.y) / 2 + 0.375 * (h0y - h1y) - qy
+  const miss = missX * nx + missY * ny
+  // What lengthening each handle moves the middle aside; the least change that takes the miss away.
+  const first = 0.375 * (h0x * nx + h0y * ny)
+  const second = -0.375 * (h1x * nx + h1y * ny)
+  const change = -miss / (first * first + second * second)
+  const a = change * first
+  const b = change * second
+  if (Math.abs(a) < MOST_CHANGE && Math.abs(b) < MOST_CHANGE) {
+    h0x *= 1 + a
+    h0y *= 1 + a
+    h1x *= 1 + b
+    h1y *= 1 + b
+  } else worst = Math.abs(miss)
+  for (let k = 0; k < 4; k++) {
     const check = CHECKS[k]!
     locate(t0 + width * check.t)
     if (factor < BRINK && !careful) {
@@ -207,15 +229,15 @@ const fit = (
     // A slip along the curve only counts by how much the curve bends over it.
     const across = Math.abs(ex * nx + ey * ny)
     const along = ex * ny - ey * nx
-    const miss = across + along * along * Math.abs(bend / Math.max(factor, 0.05))
-    if (miss > worst) worst = miss
+    const gap = across + (along * along * Math.abs(bend)) / Math.max(2 * factor, 0.1)
+    if (gap > worst) worst = gap
   }
   if (worst <= TOLERANCE || depth === 0) {
     out.push(cubic(from, { x: from.x + h0x, y: from.y + h0y }, { x: to.x - h1x, y: to.y - h1y }, to))
     return
   }
-  // The error falls with the fourth power of the width: that says how many parts to cut it into.
-  const parts = Math.min(6, Math.max(2, Math.ceil(Math.sqrt(Math.sqrt(worst / TOLERANCE)) * 1.05)))
+  // The error falls with about the fifth power of the width: that says how many parts to cut it into.
+  const parts = Math.min(6, Math.max(2, Math.ceil((worst / TOLERANCE) ** 0.2)))
   let t = t0
   let at = from
   let x = v0x
