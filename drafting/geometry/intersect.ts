@@ -82,8 +82,9 @@ export const selfIntersections = (path: Path): Intersection[] => {
     const s = segments[i]!
     if (s.kind === 'cubic') {
       ownLoop(s, (t, u) => {
-        const a = lengthBefore(path, i)
-        found.push({ a: a + lengthTo(s, t), b: a + lengthTo(s, u), point: evaluate(s, t) })
+        const a = lengthBefore(path, i) + lengthTo(s, t)
+        const b = lengthBefore(path, i) + lengthTo(s, u)
+        if (b - a > 2 * SAME) found.push({ a, b, point: evaluate(s, t) })
       })
     }
     const left = boxes[4 * i]!

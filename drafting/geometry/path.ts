@@ -67,7 +67,7 @@ export const slicePath = (path: Path, from: number, to: number): Path => {
   const whole = table.length > 0 ? table[table.length - 1]! : 0
   const low = from > 0 ? from : 0
   const high = to < whole ? to : whole
-  if (low === 0 && high === whole) return path.closed ? openPath(path.segments) : path
+  if ((low === 0 && high === whole) || whole <= 1e-9) return path.closed ? openPath(path.segments) : path
   const segments: Segment[] = []
   for (let i = 0; i < table.length; i++) {
     const start = i > 0 ? table[i - 1]! : 0

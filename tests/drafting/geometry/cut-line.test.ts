@@ -50,15 +50,20 @@ describe('the cut line of any piece', () => {
         { numRuns: 40 },
       )
     },
+    60_000,
   )
 
-  test.each(pieces)('%s: with corners of every kind', (_, piece) => {
-    fc.assert(
-      fc.property(piece, fc.array(corner, { minLength: 8, maxLength: 8 }), (shape, corners) => {
-        const turned = shapes.withCorners(shape, corners)
-        expect(cutLineFaults(turned, cutLine(turned.edges, turned.darts))).toEqual([])
-      }),
-      { numRuns: 40 },
-    )
-  })
+  test.each(pieces)(
+    '%s: with corners of every kind',
+    (_, piece) => {
+      fc.assert(
+        fc.property(piece, fc.array(corner, { minLength: 8, maxLength: 8 }), (shape, corners) => {
+          const turned = shapes.withCorners(shape, corners)
+          expect(cutLineFaults(turned, cutLine(turned.edges, turned.darts))).toEqual([])
+        }),
+        { numRuns: 40 },
+      )
+    },
+    60_000,
+  )
 })

@@ -188,20 +188,22 @@ export const keyhole = (a: readonly number[], radius = 25, slit = 12): Shape => 
 /** A skirt front with a waist dart. */
 export const darted = (a: readonly number[], pressTo: OutlineDart['pressTo'], intake = 24): Shape => {
   const half = intake / 2
-  // Both legs end at the same height: the waist dips towards the dart so that it is level when folded.
+  // The waist falls away beyond the dart by the dart's angle, so that it is one line when the dart is folded.
   const length = 100
   const y = Math.sqrt(length * length - half * half)
   const left = p(90 - half, 110 - y)
   const right = p(90 + half, 110 - y)
   const tip = p(90, 110)
+  const turn = 2 * Math.asin(half / length)
+  const side = p(right.x + 85 * Math.cos(turn), right.y + 85 * Math.sin(turn))
   return {
     name: 'skirt with a dart',
     edges: [
       edge('waist', 'waist', line(p(0, left.y), left), a[0]),
       edge('dart-left', 'dart', line(left, tip)),
       edge('dart-right', 'dart', line(tip, right)),
-      edge('waist-side', 'waist', line(right, p(190, right.y - 6)), a[0]),
-      edge('side', 'seam', cubic(p(190, right.y - 6), p(215, 60), p(225, 120), p(225, 200)), a[1]),
+      edge('waist-side', 'waist', line(right, side), a[0]),
+      edge('side', 'seam', cubic(side, p(215, side.y + 50), p(225, 150), p(225, 200)), a[1]),
       edge('side-low', 'seam', line(p(225, 200), p(250, 600)), a[1], 'step'),
       edge('hem', 'hem', line(p(250, 600), p(0, 610)), a[2], 'turned'),
       edge('centre', 'fold', line(p(0, 610), p(0, left.y))),
