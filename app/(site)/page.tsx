@@ -17,7 +17,10 @@ const typed = '36 1/2'
 const example = exampleDraft(36.5)
 const first = heroDraft(36.5 * 25.4)
 const sheets = layOut({ draft: example, paper: paperOf('a4'), orientation: 'fewest', allowances: true })
-const sums = example.steps.filter((step) => step.piece === 'front' && step.arithmetic).slice(0, 6)
+/** Those that come out in eighths by themselves; the rest carry decimals that say little at a glance. */
+const sums = example.steps
+  .filter((step) => step.piece === 'front' && step.length && !/\d\.\d/.test(step.arithmetic ?? ''))
+  .slice(0, 7)
 
 /** The door: a dress that redraws, what the work is, and the way in. Everything drawn here comes from the engine. */
 export default function Landing() {

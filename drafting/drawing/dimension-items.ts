@@ -7,10 +7,15 @@ import type { DrawingOptions } from './options'
 import { readable } from './place'
 import { typesetFractions } from './typeset'
 
+/** mm; less is nothing that could be seen. */
+const shortest = 0.5
+/** mm; the middle of longer ones is left to the words on the fold, which they often run along. */
+const longLine = 300
+
 /** The lengths a drafter would write on the drawing, in the wanted unit. */
 export function dimensionItems(piece: Piece, draft: Draft, options: DrawingOptions): readonly DrawingItem[] {
   return draft.dimensions
-    .filter((dimension) => dimension.piece === piece.id)
+    .filter((dimension) => dimension.piece === piece.id && dimension.length >= shortest)
     .flatMap((dimension) => dimensionOf(piece, dimension, options))
 }
 
@@ -23,7 +28,7 @@ function dimensionOf(piece: Piece, dimension: Dimension, options: DrawingOptions
   const along = long > 1 ? unit(subtract(to, from)) : { x: 1, y: 0 }
   const turn = readable((Math.atan2(along.y, along.x) * 180) / Math.PI)
   const up = perpendicular({ x: -Math.cos((turn * Math.PI) / 180), y: -Math.sin((turn * Math.PI) / 180) })
-  const at = add(lerp(from, to, 0.5), scale(up, size * 0.27))
+  const at = add(lerp(from, to, long > longLine ? 0.3 : 0.5), scale(up, size * 0.27))
   const label = textItem(piece, 'dimension', `${dimension.id}-text`, 'dimension-text', text, at, size, turn)
   return long > 1 ? [line, label] : [label]
 }

@@ -1,6 +1,7 @@
 import { DraftingError, draftGarment, parseLength } from '@/drafting'
 import type { Draft } from '@/drafting/contract'
 import { arrange, drawing, toSvg, typesetFractions } from '@/drafting/drawing'
+import type { Layer } from '@/drafting/drawing'
 
 /** What the top of the page shows for one bust girth. */
 export interface HeroDraft {
@@ -60,7 +61,7 @@ function bodyFor(bust: number): Record<string, number> {
   const share = (bust / inch - small.bust) / (large.bust - small.bust)
   const between = Object.entries(small).map(([id, value]) => [
     id,
-    (value + (large[id as keyof typeof large] - value) * share) * inch,
+    Math.round((value + (large[id as keyof typeof large] - value) * share) * 8) * (inch / 8),
   ])
   return { ...Object.fromEntries(between), bust }
 }
@@ -95,12 +96,18 @@ function heroSvg(draft: Draft): string {
     'dimension',
   ] as const
   const places = arrange(draft, { gap: 60 })
-  return toSvg(drawing(draft, { layers, places, unit: 'in', textScale: 4.4 }), {
-    title: 'Front and back of a flared dress, drafted from the bust girth beside it',
-    for: 'screen',
-    margin: 24,
-    dye: (dye) => `var(--${dye})`,
-  })
+  const drawn = drawing(draft, { layers, places, unit: 'in', textScale: 4.4 })
+  // Words that would be too small to read here say nothing.
+  const items = drawn.items.filter((item) => item.style !== 'label-small')
+  return toSvg(
+    { ...drawn, items },
+    {
+      title: 'Front and back of a flared dress, drafted from the bust girth beside it',
+      for: 'screen',
+      margin: 24,
+      dye: (dye) => `var(--${dye})`,
+    },
+  )
 }
 
 function sumsOf(draft: Draft): HeroDraft['sums'] {

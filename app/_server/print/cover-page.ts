@@ -24,7 +24,11 @@ export function drawCover(content: PageContent, context: CoverContext): void {
   const left = 10.5
   const right = paper.width - 10.5
   const printed = tiling.pages.filter((page) => !page.blank).length
-  content.text(title.name, { x: left, y: 17 }, { size: 8, weight: 600 })
+  content.text(
+    context.type.shortened(title.name, 8, right - left, 600),
+    { x: left, y: 17 },
+    { size: 8, weight: 600 },
+  )
   const facts = [
     title.garment,
     title.version,
@@ -32,7 +36,11 @@ export function drawCover(content: PageContent, context: CoverContext): void {
     `${paper.name}, ${printed} ${printed === 1 ? 'sheet' : 'sheets'} after this one`,
     context.allowances ? 'allowances included' : 'nett: no allowances',
   ].filter(Boolean)
-  content.text(facts.join(' · '), { x: left, y: 22.5 }, { size: 3.6, dye: 'walnut' })
+  content.text(
+    context.type.shortened(facts.join(' · '), 3.6, right - left),
+    { x: left, y: 22.5 },
+    { size: 3.6, dye: 'walnut' },
+  )
   content.line({ x: left, y: 26 }, { x: right, y: 26 }, { stroke: 'ink', width: 0.35 })
   const bottomOfSquares = drawSquares(content, context, { x: left, y: 30.5 })
   const column = { x: left + 101.6 + 7, width: right - left - 101.6 - 7 }

@@ -8,7 +8,7 @@ import { drawCover } from './cover-page'
 import { PageContent, pointsPerMm } from './page-content'
 import { placedItems } from './page-items'
 import type { PatternTitle } from './pattern-title'
-import { drawTile, textsOf } from './tile-page'
+import { captionWidth, drawTile, textsOf } from './tile-page'
 import { TypeSetter } from './type-setter'
 
 export interface PatternRequest {
@@ -36,10 +36,11 @@ export async function documentOf(request: PatternRequest, laidOut: LaidOut): Pro
   const { title, paper } = request
   const document = await PDFDocument.create({ updateMetadata: false })
   describe(document, request)
-  const caption = [title.name, title.version, title.date].filter(Boolean).join(' · ')
+  const saved = [title.version, title.date].filter(Boolean).join(' · ')
   const texts = [
     ...textsOf(drawing),
-    caption,
+    title.name,
+    saved,
     title.garment,
     title.maker,
     ...request.draft.pieces.map(({ name }) => name),
@@ -57,7 +58,7 @@ export async function documentOf(request: PatternRequest, laidOut: LaidOut): Pro
   const context = {
     tiling,
     items: placedItems(drawing),
-    caption: caption.length > 44 ? `${caption.slice(0, 43)}…` : caption,
+    caption: [title.name, saved].map((line) => type.shortened(line, 3, captionWidth)),
     sheets: new Map(printed.map((page, index) => [page.name, index + 1])),
   }
   for (const page of printed) {

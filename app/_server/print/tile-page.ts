@@ -12,14 +12,17 @@ const trim: Style = { stroke: 'walnut', width: 0.2 }
 const lay: Style = { stroke: 'walnut', width: 0.15, dash: [2, 2] }
 const mark: Style = { stroke: 'ink', width: 0.2 }
 
+/** Room for the caption beside the map, mm. */
+export const captionWidth = 44
+
 /** Half of the widest line, kept inside the safe edge, mm. */
 const inset = 0.1
 
 export interface TileContext {
   readonly tiling: Tiling
   readonly items: readonly Placed[]
-  /** One line that tells this pattern from another. */
-  readonly caption: string
+  /** Lines that tell this pattern from another. */
+  readonly caption: readonly string[]
   /** Of the printed pages, by name. */
   readonly sheets: ReadonlyMap<string, number>
 }
@@ -85,7 +88,7 @@ function drawMark(content: PageContent, match: MatchMark, window: PageWindow, ma
 function drawName(content: PageContent, page: TilePage, context: TileContext, printable: PageWindow): void {
   const { tiling } = context
   const map = mapSize(tiling, { width: 26, height: 22 })
-  const box = { width: 62, height: Math.max(map.height, 15) }
+  const box = { width: map.width + 3 + captionWidth, height: Math.max(map.height, 19) }
   const clear = tiling.overlap / 2 + 3
   const corners = [
     { x: clear, y: clear },
@@ -117,7 +120,7 @@ function drawName(content: PageContent, page: TilePage, context: TileContext, pr
     { x: text, y: y + 10.6 },
     { size: 3, dye: 'walnut' },
   )
-  content.text(context.caption, { x: text, y: y + 14.4 }, { size: 3, dye: 'walnut' })
+  content.lines(context.caption, { x: text, y: y + 14.4 }, 3.8, { size: 3, dye: 'walnut' })
 }
 
 /** Everything that a drawing's pages write besides the drawing itself, so that its characters can be looked up beforehand. */

@@ -94,6 +94,15 @@ export class TypeSetter {
     return this.set(text, weight).width * size
   }
 
+  /** A text cut off with an ellipsis where it would be wider than `width` mm. */
+  shortened(text: string, size: number, width: number, weight: FontWeight = 400): string {
+    if (this.width(text, size, weight) <= width) return text
+    let shorter = text
+    while (shorter && this.width(`${shorter}…`, size, weight) > width)
+      shorter = shorter.slice(0, -1).trimEnd()
+    return `${shorter}…`
+  }
+
   /** Breaks a text into lines of at most `width` mm; a single longer word stands alone. */
   wrap(text: string, size: number, width: number, weight: FontWeight = 400): readonly string[] {
     const space = this.width(' ', size, weight)

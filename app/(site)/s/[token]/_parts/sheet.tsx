@@ -23,7 +23,7 @@ export function Sheet({ svg, unit }: { readonly svg: string; readonly unit: Unit
         )}
       >
         <div
-          className="min-w-160 [&>svg]:block [&>svg]:w-full"
+          className={classes('min-w-160 [&>svg]:block [&>svg]:w-full', step === 0 && '[&>svg]:max-h-[74dvh]')}
           style={{ width: `${zoom * 100}%` }}
           // Written by our own server, which escapes every name in it.
           dangerouslySetInnerHTML={{ __html: svg }}
