@@ -1,7 +1,6 @@
 import { DraftingError, draftGarment, parseLength } from '@/drafting'
 import type { Draft } from '@/drafting/contract'
 import { arrange, drawing, toSvg, typesetFractions } from '@/drafting/drawing'
-import type { Layer } from '@/drafting/drawing'
 
 /** What the top of the page shows for one bust girth. */
 export interface HeroDraft {
