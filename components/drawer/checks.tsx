@@ -43,8 +43,8 @@ export function Checks({
       {draft.cautions.length > 0 && (
         <section className="grid gap-2">
           <h3 className="font-semibold">Worth a look</h3>
-          {draft.cautions.map((caution) => (
-            <Note key={`${caution.code}:${caution.fields.join()}`} kind="caution" className="text-sm">
+          {draft.cautions.map((caution, index) => (
+            <Note key={`${caution.code}:${index}`} kind="caution" className="text-sm">
               {typeset(caution.message)}
             </Note>
           ))}

@@ -11,6 +11,7 @@ import {
   type Ref,
 } from 'react'
 import type { Handle } from '@/drafting/contract'
+import { boundsOf } from '@/drafting/drawing/bounds'
 import { arrange, drawing, placePath, placeTransform, type Layer, type Places } from '@/drafting/drawing'
 import { applyTo } from '@/drafting/geometry/transform'
 import { classes } from '@/components/ui/classes'
@@ -22,7 +23,9 @@ import { Points } from './points'
 import { ScaleBar } from './scale-bar'
 import { createStage, type Emphasis, type Stage } from './stage'
 import { ResultTag, ValueTag } from './tag'
-import { tagWishes, writeTagPlaces } from './tag-writing'
+import { placeTagElements } from './tag-writing'
+import type { Box } from './tag-places'
+import { markAt } from './drag-point'
 import { fitView, toScreen, trueScale, zoomAt, type View } from './view'
 
 /** What the bar and the keyboard may ask of the sheet. */
@@ -44,6 +47,13 @@ export interface SheetProps {
   /** Present on a phone: a tag opens its editor instead of being one. */
   readonly onOpenTag?: (field: FieldRef) => void
 }
+
+/** px about a point that tags leave free. */
+const pointRoom = 8
+
+/** Size of a piece's name on paper, mm, and the least it is shown at, px. */
+const nameSize = 9
+const readable = 14
 
 /** The table: the drawing, its tags and points, under a window that pans and zooms. */
 export function Sheet(props: SheetProps) {
@@ -96,21 +106,24 @@ export function Sheet(props: SheetProps) {
     const { draft } = store.get()
     if (!box || !draft) return
     stage.current?.look(view.current)
-    writeTagPlaces(box, tagWishes(box, draft, places.current, view.current))
-    for (const handle of box.querySelectorAll<HTMLElement>('[data-point]')) {
-      const own = handles.find((each) => each.id === handle.dataset.point)
-      const mark = draft.pieces
-        .find((piece) => piece.id === own?.piece)
-        ?.marks.find((each) => each.id === own?.mark)
+    const points: Box[] = []
+    for (const element of box.querySelectorAll<HTMLElement>('[data-point]')) {
+      const own = handles.find((each) => each.id === element.dataset.point)
+      const mark = own && markAt(draft, own.piece, own.mark)
+      element.hidden = !mark
       if (!own || !mark) continue
-      const at = toScreen(view.current, applyTo(placeTransform(places.current[own.piece]), mark.at))
-      handle.style.transform = `translate(${at.x}px, ${at.y}px)`
+      const at = toScreen(view.current, applyTo(placeTransform(places.current[own.piece]), mark))
+      element.style.transform = `translate(${at.x}px, ${at.y}px)`
+      points.push({ x: at.x - pointRoom, y: at.y - pointRoom, width: 2 * pointRoom, height: 2 * pointRoom })
     }
+    placeTagElements(box, draft, places.current, view.current, points)
   }, [handles, store])
 
+  const moved = useRef(false)
   const setView = useCallback(
     (next: View) => {
       view.current = next
+      moved.current = true
       position()
       setScale(next.scale)
     },
@@ -121,7 +134,12 @@ export function Sheet(props: SheetProps) {
     const { draft, unit } = store.get()
     if (!draft || !stage.current) return
     places.current = arrange(draft, { kept: places.current })
-    const list = drawing(draft, { layers, places: places.current, unit })
+    const list = drawing(draft, {
+      layers,
+      places: places.current,
+      unit,
+      textScale: textScaleAt(view.current.scale),
+    })
     const shown = list.items.filter(
       (item) =>
         !(item.layer === 'dimension' && item.kind === 'text') && !(item.piece && hidden.has(item.piece)),
@@ -130,15 +148,23 @@ export function Sheet(props: SheetProps) {
     position()
   }, [hidden, layers, position, replaying, store])
 
-  const fit = useCallback(() => {
-    const box = area.current
-    const { draft } = store.get()
-    if (!box || !draft) return
-    const { bounds } = drawing(draft, { layers: ['cut', 'stitch'], places: places.current })
-    setView(
-      fitView(bounds, { width: box.clientWidth, height: box.clientHeight }, box.clientWidth < 600 ? 20 : 56),
-    )
-  }, [setView, store])
+  const textScale = textScaleAt(scale)
+  useLayoutEffect(() => draw(), [draw, textScale])
+
+  /** Shows all pieces, or one. */
+  const fit = useCallback(
+    (piece?: string) => {
+      const box = area.current
+      const { draft } = store.get()
+      if (!box || !draft) return
+      const list = drawing(draft, { layers: ['cut', 'stitch', 'fold'], places: places.current })
+      const own = piece ? boundsOf(list.items.filter((item) => item.piece === piece)) : list.bounds
+      const size = { width: box.clientWidth, height: box.clientHeight }
+      setView(fitView(own, size, size.width < 600 ? 36 : 56))
+      moved.current = false
+    },
+    [setView, store],
+  )
 
   useLayoutEffect(() => {
     if (!svg.current) return
@@ -161,17 +187,17 @@ export function Sheet(props: SheetProps) {
     )
   }, [emphasis])
 
-  const fitted = useRef(false)
+  const phone = onOpenTag !== undefined
+  const firstPiece = useStudioState((state) => state.draft?.pieces[0]?.id)
   useEffect(() => {
     const box = area.current
     if (!box) return
     const watch = new ResizeObserver(() => {
-      if (!fitted.current) fit()
-      fitted.current = box.clientWidth > 0
+      if (!moved.current) fit(phone ? firstPiece : undefined)
     })
     watch.observe(box)
     return () => watch.disconnect()
-  }, [fit])
+  }, [firstPiece, fit, phone])
 
   useEffect(() => {
     if (!area.current) return
@@ -184,7 +210,7 @@ export function Sheet(props: SheetProps) {
       y: (area.current?.clientHeight ?? 0) / 2,
     })
     return {
-      fit,
+      fit: () => fit(),
       actual: () => setView(zoomAt(view.current, middle(), trueScale / view.current.scale)),
       zoom: (factor) => setView(zoomAt(view.current, middle(), factor)),
       focusTag: (step) => {
@@ -232,4 +258,11 @@ export function Sheet(props: SheetProps) {
       <ScaleBar scale={scale} unit={unit} />
     </div>
   )
+}
+
+/** Labels grow as the sheet is shown smaller, in steps, so that a piece's name can be read at any zoom. */
+function textScaleAt(scale: number): number {
+  const wanted = readable / (nameSize * scale)
+  const step = Math.round(Math.log2(Math.min(5, Math.max(1, wanted))) * 2) / 2
+  return 2 ** step
 }

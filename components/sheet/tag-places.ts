@@ -18,7 +18,7 @@ export interface TagPlace {
   readonly folded: boolean
 }
 
-interface Box {
+export interface Box {
   readonly x: number
   readonly y: number
   readonly width: number
@@ -28,33 +28,62 @@ interface Box {
 /** Size of the dot a tag folds into: the least that a finger or pointer can take. */
 export const foldedSize = 24
 
-/** Where along its line a tag may sit, tried in this order. */
-const shares = [0.5, 0.35, 0.65, 0.2, 0.8]
+/** Where along its line a tag may sit, and on which side of it (0: on it), tried in this order. */
+const seats = [
+  [0.5, 0],
+  [0.35, 0],
+  [0.65, 0],
+  [0.5, 1],
+  [0.5, -1],
+  [0.2, 0],
+  [0.8, 0],
+  [0.2, 1],
+  [0.2, -1],
+  [0.8, 1],
+  [0.8, -1],
+] as const
 const gap = 2
 
 /**
- * Sets every tag on its own line without covering another. Earlier tags choose first, so give those that can be typed in first. A tag that
- * finds no room on its line folds into a dot.
+ * Sets every tag on its own line, or close beside it, without covering another. Earlier tags choose first, so give those that can be typed in
+ * first. A tag that finds no room folds into a dot.
+ * @param taken what must not be covered, such as points
+ * @param frame the window: a tag whose line is in it stays in it
  */
-export function placeTags(wishes: readonly TagWish[]): readonly TagPlace[] {
-  const taken: Box[] = []
+export function placeTags(
+  wishes: readonly TagWish[],
+  taken: readonly Box[] = [],
+  frame?: { readonly width: number; readonly height: number },
+): readonly TagPlace[] {
+  const full = [...taken]
   return wishes.map((wish) => {
-    const open = shares
-      .map((share) => boxAt(wish, share, wish.width, wish.height))
-      .find((box) => !taken.some((other) => overlaps(box, other)))
-    const box = open ?? boxAt(wish, 0.5, foldedSize, foldedSize)
-    taken.push(box)
+    const middle = boxAt(wish, 0.5, 0, 0, 0)
+    const held = frame && within(middle, frame) ? frame : undefined
+    const open = seats
+      .map(([share, side]) => boxAt(wish, share, side, wish.width, wish.height))
+      .find((box) => (!held || within(box, held)) && !full.some((other) => overlaps(box, other)))
+    const box = open ?? boxAt(wish, 0.5, 0, foldedSize, foldedSize)
+    full.push(box)
     return { id: wish.id, x: box.x, y: box.y, folded: !open }
   })
 }
 
-function boxAt(wish: TagWish, share: number, width: number, height: number): Box {
+function boxAt(wish: TagWish, share: number, side: number, width: number, height: number): Box {
+  const dx = wish.to.x - wish.from.x
+  const dy = wish.to.y - wish.from.y
+  const length = Math.hypot(dx, dy) || 1
+  const normal = { x: dy / length, y: -dx / length }
+  const off = side * (Math.abs(normal.x) * (width / 2) + Math.abs(normal.y) * (height / 2) + 4)
   return {
-    x: wish.from.x + (wish.to.x - wish.from.x) * share - width / 2,
-    y: wish.from.y + (wish.to.y - wish.from.y) * share - height / 2,
+    x: wish.from.x + dx * share + normal.x * off - width / 2,
+    y: wish.from.y + dy * share + normal.y * off - height / 2,
     width,
     height,
   }
+}
+
+function within(box: Box, frame: { readonly width: number; readonly height: number }): boolean {
+  return box.x >= 0 && box.y >= 0 && box.x + box.width <= frame.width && box.y + box.height <= frame.height
 }
 
 function overlaps(a: Box, b: Box): boolean {

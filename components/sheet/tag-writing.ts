@@ -1,7 +1,7 @@
 import type { Draft } from '@/drafting/contract'
 import { placeTransform, type Places } from '@/drafting/drawing'
 import { applyTo } from '@/drafting/geometry/transform'
-import { placeTags, type TagPlace, type TagWish } from './tag-places'
+import { placeTags, type Box, type TagWish } from './tag-places'
 import { toScreen, type View } from './view'
 
 /** px: a tag's figures are this wide each, and its frame adds this much. */
@@ -9,10 +9,13 @@ const figure = 7.2
 const frame = 18
 const height = 26
 
-/** Where the tags below `box` want to sit in this view. Those that can be typed in come first. */
-export function tagWishes(box: HTMLElement, draft: Draft, places: Places, view: View): readonly TagWish[] {
+/** px from the window's edge within which a tag's words open inwards. */
+const nearEdge = 130
+
+/** Where the tags below `area` want to sit in this view. Those that can be typed in come first. */
+function tagWishes(area: HTMLElement, draft: Draft, places: Places, view: View): readonly TagWish[] {
   const dimensions = new Map(draft.dimensions.map((dimension) => [dimension.id, dimension]))
-  const wishes = [...box.querySelectorAll<HTMLElement>('[data-tag]')].flatMap((element) => {
+  const wishes = [...area.querySelectorAll<HTMLElement>('[data-tag]')].flatMap((element) => {
     const dimension = dimensions.get(element.dataset.tag ?? '')
     if (!dimension) return []
     const transform = placeTransform(places[dimension.piece])
@@ -35,14 +38,23 @@ function textLength(element: HTMLElement): number {
   return input ? input.value.length + 1 : (element.querySelector('span')?.textContent?.length ?? 4)
 }
 
-/** Puts each tag at its place, without asking React. */
-export function writeTagPlaces(box: HTMLElement, wishes: readonly TagWish[]): void {
-  const places = new Map<string, TagPlace>(placeTags(wishes).map((place) => [place.id, place]))
-  for (const element of box.querySelectorAll<HTMLElement>('[data-tag]')) {
-    const place = places.get(element.dataset.tag ?? '')
+/** Puts each tag below `area` at its place, clear of the points, without asking React. */
+export function placeTagElements(
+  area: HTMLElement,
+  draft: Draft,
+  places: Places,
+  view: View,
+  points: readonly Box[],
+): void {
+  const size = { width: area.clientWidth, height: area.clientHeight }
+  const placed = placeTags(tagWishes(area, draft, places, view), points, size)
+  const byId = new Map(placed.map((place) => [place.id, place]))
+  for (const element of area.querySelectorAll<HTMLElement>('[data-tag]')) {
+    const place = byId.get(element.dataset.tag ?? '')
     element.hidden = !place
     if (!place) continue
     element.style.transform = `translate(${Math.round(place.x)}px, ${Math.round(place.y)}px)`
     element.toggleAttribute('data-folded', place.folded)
+    element.dataset.edge = place.x < nearEdge ? 'left' : place.x > size.width - nearEdge ? 'right' : ''
   }
 }

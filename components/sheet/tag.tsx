@@ -12,6 +12,11 @@ import { formatLength } from '@/drafting/lengths'
 const shape =
   'group absolute top-0 left-0 text-tag pointer-events-auto data-folded:z-0 z-10 focus-within:z-30 hover:z-20'
 
+/** Words that open over a tag: centred on it, or inwards where the window ends. */
+const words =
+  'absolute left-1/2 z-40 -translate-x-1/2 group-data-[edge=left]:left-0 group-data-[edge=left]:translate-x-0 ' +
+  'group-data-[edge=right]:right-0 group-data-[edge=right]:left-auto group-data-[edge=right]:translate-x-0'
+
 /** A length that follows from others, written where a drafter would write it. */
 export const ResultTag = memo(function ResultTag({
   id,
@@ -98,14 +103,20 @@ export const ValueTag = memo(function ValueTag({
       )}
       <span
         aria-hidden
-        className="pointer-events-none absolute bottom-full left-1/2 hidden -translate-x-1/2 bg-ink px-1.5 py-px text-tag whitespace-nowrap text-ground group-focus-within:block group-hover:block"
+        className={classes(
+          words,
+          'pointer-events-none bottom-full hidden bg-ink px-1.5 py-px text-tag whitespace-nowrap text-ground group-focus-within:block group-hover:block',
+        )}
       >
         {label}
       </span>
       {field.problem && (
         <p
           id={`${id}-problem`}
-          className="absolute top-full left-1/2 z-40 mt-1 w-60 -translate-x-1/2 border-l-3 border-madder bg-sheet px-2.5 py-1.5 text-sm text-ink shadow-float"
+          className={classes(
+            words,
+            'top-full mt-1 hidden w-60 border-l-3 border-madder bg-sheet px-2.5 py-1.5 text-sm text-ink shadow-float group-focus-within:block group-hover:block',
+          )}
         >
           {field.problem}{' '}
           {field.refused && (

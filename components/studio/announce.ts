@@ -1,10 +1,27 @@
-import type { Dimension, Draft } from '@/drafting/contract'
+import type { Dimension, Draft, EdgeRole } from '@/drafting/contract'
+import { pathLength } from '@/drafting/geometry/path'
 import { lengthInWords } from './lengths-in-words'
 import type { Unit } from './state'
 
+/** Less than this, mm, has not moved. */
+const still = 0.05
+
+/** Edges whose length a dressmaker listens for, and what they are called. */
+const heard: Partial<Record<EdgeRole, string>> = {
+  neckline: 'neckline',
+  armhole: 'armhole',
+  waist: 'waist edge',
+  hem: 'hem',
+}
+
+interface Said {
+  readonly name: string
+  readonly length: number
+}
+
 /**
  * What a change did, for the ear: 'Neck depth 4½ inches; front neckline 11¼ inches'. Names the values that changed first, then at most
- * two results that followed.
+ * two lengths that followed.
  */
 export function changeInWords(
   label: string,
@@ -13,20 +30,35 @@ export function changeInWords(
   unit: Unit,
 ): string {
   if (!after) return label
-  const old = new Map(before?.dimensions.map((dimension) => [dimension.id, dimension.length]))
-  const moved = after.dimensions.filter((dimension) => {
-    const was = old.get(dimension.id)
-    return was === undefined || Math.abs(was - dimension.length) > 0.05
-  })
-  const said = [
-    ...moved.filter((dimension) => dimension.shows === 'value').slice(0, 2),
-    ...moved.filter((dimension) => dimension.shows === 'result').slice(0, 2),
-  ]
-  if (said.length === 0) return label
-  return said.map((dimension) => dimensionInWords(dimension, unit)).join('; ')
+  const values = moved(before && valuesOf(before), valuesOf(after)).slice(0, 2)
+  const results = moved(before && resultsOf(before), resultsOf(after)).slice(0, 2)
+  const words = [...values, ...results].map(({ name, length }) => `${name} ${lengthInWords(length, unit)}`)
+  return words.length > 0 ? words.join('; ') : label
 }
 
-/** 'Front neckline 11¼ inches'. */
-export function dimensionInWords(dimension: Dimension, unit: Unit): string {
-  return `${dimension.label} ${lengthInWords(dimension.length, unit)}`
+function moved(before: readonly Said[] | undefined, after: readonly Said[]): readonly Said[] {
+  const old = new Map(before?.map((each) => [each.name, each.length]))
+  const changed = after.filter(({ name, length }) => Math.abs((old.get(name) ?? -Infinity) - length) > still)
+  return [...new Map(changed.map((each) => [each.name, each])).values()]
 }
+
+function valuesOf(draft: Draft): readonly Said[] {
+  return draft.dimensions.filter((each) => each.shows === 'value').map(said)
+}
+
+function resultsOf(draft: Draft): readonly Said[] {
+  const edges = draft.pieces.slice(0, 4).flatMap((piece) =>
+    piece.edges.flatMap((edge) => {
+      const part = heard[edge.role]
+      if (!part) return []
+      const name =
+        piece.id === 'sleeve' && edge.role === 'armhole'
+          ? 'sleeve head'
+          : `${piece.name.toLowerCase()} ${part}`
+      return [{ name, length: pathLength(edge.path) }]
+    }),
+  )
+  return [...draft.dimensions.filter((each) => each.shows === 'result').map(said), ...edges]
+}
+
+const said = ({ label, length }: Dimension): Said => ({ name: label, length })

@@ -133,7 +133,7 @@ export function createStudioStore({ engine, order, typed = {}, unit }: StoreOpti
     /** Keeps a text that cannot be drafted at its field; the drawing stays the last good one. */
     refuse(ref: FieldRef, text: string, problems: readonly Problem[], value?: FieldValue) {
       const attempt: Attempt = { text, problems, ...(value === undefined ? {} : { value }) }
-      set({ attempts: { ...state.attempts, [ref]: attempt }, said: problems[0]?.message ?? '' })
+      set({ attempts: { ...state.attempts, [ref]: attempt } })
     },
 
     /** Drops a refused text: the field shows again what is drawn. */
@@ -148,7 +148,15 @@ export function createStudioStore({ engine, order, typed = {}, unit }: StoreOpti
       before = undefined
       const changed = start.order !== state.order && !sameOrder(start, state)
       if (!changed) {
-        set({ gesture: false, order: start.order, typed: start.typed, draft: start.draft ?? state.draft })
+        const refused = Object.values(state.attempts).at(-1)?.problems[0]?.message
+        const said = refused ? { said: refused } : {}
+        set({
+          gesture: false,
+          order: start.order,
+          typed: start.typed,
+          draft: start.draft ?? state.draft,
+          ...said,
+        })
         return
       }
       past = [...past, { label, snapshot: { order: start.order, typed: start.typed } }]

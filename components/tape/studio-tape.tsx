@@ -7,9 +7,16 @@ import { typeset } from '@/components/ui/typeset'
 import { ValueField } from '@/components/studio/value-field'
 import { useStudio, useStudioState } from '@/components/studio/use-store'
 import { shownText } from '@/components/studio/values'
+import { estimates } from '@/drafting/body'
 import { lengthDigits } from '@/drafting/lengths'
 import { Figure } from './figure'
 import { TapeStrip } from './tape-strip'
+
+/** 'head-from-height' → 'Estimated: head from height'. */
+function estimateName(id: string): string {
+  const name = Object.values(estimates).find((each) => each.id === id)?.name ?? id
+  return `Estimated: ${name.charAt(0).toLowerCase()}${name.slice(1)}`
+}
 
 /** The measurements this draft is made from, in the order of the body. */
 function useDraftMeasurements(definitions: readonly MeasurementDefinition[]): readonly string[] {
@@ -79,7 +86,7 @@ function RailEntry({
         className="relative block min-h-11 w-full px-1.5 py-0.5 text-left hover:text-indigo"
       >
         <span className="measure block font-semibold">{text ? typeset(text) : '–'}</span>
-        <span className="block truncate pr-3 text-[12px] leading-4 text-walnut">{name}</span>
+        <span className="line-clamp-2 block pr-3 text-[12px] leading-3.5 text-walnut">{name}</span>
       </button>
     </li>
   )
@@ -133,7 +140,7 @@ export function TapePanel({
                 key={id}
                 field={`measurements.${id}`}
                 label={definitions.find((each) => each.id === id)?.name ?? id}
-                hint={estimate ? `Estimated: ${estimate}` : undefined}
+                hint={estimate ? `Not measured. ${estimateName(estimate)}.` : undefined}
                 onFocus={() => setAt(id)}
               />
             )
