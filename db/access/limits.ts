@@ -4,6 +4,7 @@ import { QueryTypes } from 'sequelize'
 import { AccessError } from '../access-error'
 import { connection } from '../connection'
 import { Attempt } from '../models/attempt'
+import { inTransaction } from '../transactions'
 
 /** How many tries a window allows. All limits of the product stand here. */
 const limits = {
@@ -18,23 +19,19 @@ export type Limit = keyof typeof limits
 
 const subjectHash = (subject: string) => createHash('sha256').update(subject).digest('hex')
 
-/** Counts a try in one statement, so that two at once are two. @returns tries in this window and when it ends */
+/** Counts a try. The row stays locked until it is read, so that of several at once each gets a number of its own. */
 async function count(limit: Limit, subject: string): Promise<{ count: number; windowEnds: Date }> {
-  const replacements = {
-    scope: limit,
-    subject: subjectHash(subject),
-    now: new Date(),
-    ends: new Date(Date.now() + limits[limit].minutes * 60_000),
-  }
-  await connection.query(
-    `INSERT INTO attempts (scope, subject, windowEnds, count) VALUES (:scope, :subject, :ends, 1)
-     ON DUPLICATE KEY UPDATE count = IF(windowEnds <= :now, 1, count + 1),
-       windowEnds = IF(windowEnds <= :now, :ends, windowEnds)`,
-    { replacements, type: QueryTypes.INSERT },
-  )
-  return Attempt.findOne({
-    where: { scope: limit, subject: replacements.subject },
-    rejectOnEmpty: true,
+  const where = { scope: limit, subject: subjectHash(subject) }
+  const now = new Date()
+  const replacements = { ...where, now, ends: new Date(now.getTime() + limits[limit].minutes * 60_000) }
+  return inTransaction(async (transaction) => {
+    await connection.query(
+      `INSERT INTO attempts (scope, subject, windowEnds, count) VALUES (:scope, :subject, :ends, 1)
+       ON DUPLICATE KEY UPDATE count = IF(windowEnds <= :now, 1, count + 1),
+         windowEnds = IF(windowEnds <= :now, :ends, windowEnds)`,
+      { replacements, type: QueryTypes.INSERT, transaction },
+    )
+    return Attempt.findOne({ where, rejectOnEmpty: true, transaction })
   })
 }
 

@@ -32,19 +32,19 @@ const leet: Readonly<Record<string, string>> = {
   '7': 't',
 }
 
-const wordOf = (text: string) => text.replace(/^[^a-z]+|[^a-z]+$/g, '')
+/** The letters that signs and digits stand for. */
+const unmasked = (text: string) => text.replace(/[@01357$]/g, (sign) => leet[sign] ?? sign)
+const wordOf = (text: string) => text.replace(/^\P{L}+|\P{L}+$/gu, '')
 
 /** One of the guesses that are tried first: a common word with digits around it, a run of keys, a repetition. */
 export function isCommonPassword(password: string): boolean {
   const text = password.toLowerCase()
-  const plainLeet = text.replace(/[@01357$]/g, (letter) => leet[letter] ?? letter)
-  const words = [
-    wordOf(text),
-    wordOf(plainLeet),
-    wordOf(plainLeet.replace(/[^a-z]+/g, '')),
-    wordOf(text.replace(/[^a-z]+/g, '')),
-  ]
-  if (words.some((word) => word === '' || commonWords.has(word))) return true
+  const inside = wordOf(text)
+  const words = [inside, unmasked(inside), unmasked(text)].flatMap((word) => [
+    wordOf(word),
+    word.replace(/\P{L}+/gu, ''),
+  ])
+  if (words.some((word) => commonWords.has(word)) || (inside === '' && text.length < 16)) return true
   if (/^(.{1,5})\1+.{0,4}$/.test(text)) return true
   return runs.some((run) => run.includes(text) || [...run].reverse().join('').includes(text))
 }
