@@ -25,6 +25,9 @@ export default defineConfig({
           name: 'unit',
           include: ['tests/{drafting,components,app,db,scripts}/**/*.test.{ts,tsx}'],
           environment: 'node',
+          setupFiles: ['tests/support/properties.ts'],
+          // Property tests share two cores with whatever else the machine does.
+          testTimeout: 30_000,
         },
       },
       {
@@ -33,6 +36,7 @@ export default defineConfig({
           name: 'laws',
           include: ['tests/{laws,reference}/**/*.test.ts'],
           environment: 'node',
+          setupFiles: ['tests/support/properties.ts'],
           testTimeout: 300_000,
         },
       },
