@@ -53,31 +53,37 @@ export const circleSkirt = garment({
   ],
   rules: [
     lengthRule('waistEdge', 'Waist edge', 'waist + waistEase', geometry),
-    lengthRule('radius', 'Radius of the waist', 'waistEdge / (2 * 3.14159265358979 * circleShare)', geometry),
+    lengthRule('radius', 'Radius of the waist', 'waistEdge / (2 * pi * circleShare)', geometry),
     lengthRule('hemRadius', 'Radius of the hem', 'radius + length', geometry),
-    angleRule('panelAngle', 'Angle of a panel', 'circleAngle / panels', geometry),
+    angleRule('panelAngle', 'Angle of a panel', 'circleAngle / panelCount', geometry),
     ...waistbandRules,
   ],
-  found: { circleShare: 'number', circleAngle: 'angle' },
+  found: { circleShare: 'number', circleAngle: 'angle', panelCount: 'number' },
   draft(pen) {
     const share = shares[String(pen.chosen('share'))] as number
     pen.find('circleShare', share, pen.usesOf(['share']))
     pen.find('circleAngle', share * 360, pen.usesOf(['share']))
-    const panels = pen.value('panels')
-    if (share / panels > 0.5) {
-      const least = Math.ceil(share * 2)
-      pen.refuse({
-        field: 'panels',
-        code: 'impossible-shape',
-        message: `One panel would span more than half a circle. Use at least ${least} panels.`,
-        min: least,
-      })
-    }
+    const panels = enoughPanels(pen, share)
+    pen.find('panelCount', panels, pen.usesOf(['share', 'panels']))
     const pieces = panelNames(panels).map(([id, name]) => drawPanel(pen, id, name))
     sewPanels(pen, pieces, panels)
     fitSkirt(pen, pieces, panels)
   },
 })
+
+/** A panel spans at most half a circle: with fewer panels asked for, the fewest that will do are drawn, and it is said. */
+function enoughPanels(pen: Pen, share: number): number {
+  const asked = pen.value('panels')
+  const least = Math.ceil(share * 2)
+  if (asked >= least) return asked
+  pen.caution(
+    'panels-added',
+    `A panel spans at most half a circle, so this skirt is drawn in ${least} panels instead of ${asked}.`,
+    'panels',
+    'share',
+  )
+  return least
+}
 
 /** One drawn panel for every mirrored pair, and one that is its own mirror image when their number is odd. */
 function panelNames(panels: number): readonly (readonly [string, string])[] {
@@ -212,7 +218,7 @@ function sewPanels(pen: Pen, pieces: readonly PiecePen[], panels: number): void 
       const a = right(pieces[index - 1] as PiecePen)
       const b = reversed(left(pieces[index] as PiecePen))
       const seam = { id: `seam-${index}`, name: `Panel ${index} to panel ${index + 1}`, smooth: true }
-      if (withPocket && index === 1 && !single) sewWithPocket(pen, seam, a, b, withPocket, long)
+      if (withPocket && index === 1) sewWithPocket(pen, seam, a, b, withPocket, long)
       else pen.sew({ ...seam, a: [a], b: [b] })
     }
     plain('last', 'Last seam, with the opening', right(last), mirrored(right(last)))
@@ -231,16 +237,16 @@ function sewPanels(pen: Pen, pieces: readonly PiecePen[], panels: number): void 
   }
 }
 
-/** Where a pocket goes: into the seam between the first two panels, or the first seam of two. */
+/** Where a pocket goes: into the seam between the first two panels, or the first seam of two. With an odd number one side has it. */
 function choosePocket(pen: Pen, first: PiecePen, panels: number): ReturnType<typeof pocketMouth> {
   if (!pen.chosen('pockets')) return undefined
-  if (panels === 1 || hasSingle(panels)) {
-    pen.doubt({
-      field: 'pockets',
-      code: 'impossible-shape',
-      message:
-        'An odd number of panels has no pair of side seams for pockets. Use an even number, or leave pockets out.',
-    })
+  if (panels === 1) {
+    pen.caution(
+      'pockets-left-out',
+      'One panel has one seam, and the opening is in it: no pockets are drawn.',
+      'pockets',
+      'panels',
+    )
     return undefined
   }
   const side = first.edge('right').path

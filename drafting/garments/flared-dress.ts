@@ -35,7 +35,7 @@ export const flaredDress = garment({
   ],
   design: [
     choice('neckShape', 'Neck shape', 'neckline', ['round', 'V', 'square', 'boat']),
-    length('neckWidening', 'Neck wider by', 'neckline', { default: 0, min: 0, max: 100 }),
+    length('neckWidening', 'Neck wider by', 'neckline', { default: 0, min: 0, max: 80 }),
     length('frontNeckDrop', 'Front neck lower by', 'neckline', { default: 0, min: 0, max: 200 }),
     length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 250 }),
     length('facingDepth', 'Facing depth', 'neckline', { default: 50.8, min: 30, max: 90 }),
@@ -45,7 +45,7 @@ export const flaredDress = garment({
     length('backHollow', 'Back armhole hollow', 'armhole', { default: 12.7, min: 5, max: 25 }),
     length('bustEase', 'Bust ease', 'body', { default: 80, min: 40, max: 200 }),
     share('flare', 'Flare, share of a circle', 'skirt', { default: 0.25, min: 0.125, max: 0.5 }),
-    length('length', 'Length from the shoulder', 'skirt', { default: 1050, min: 700, max: 1600 }),
+    length('length', 'Length from the shoulder', 'skirt', { default: 1050, min: 600, max: 1600 }),
     choice('hemWay', 'Way of drawing the hem', 'skirt', ['equal drop', 'swung']),
     length(
       'sideLift',
@@ -82,6 +82,16 @@ export const flaredDress = garment({
     lengthRule('armholeDepth', 'Armhole depth', 'bust / 6 + 1.5in'),
     lengthRule('sleevedLowering', 'Lower for a sleeve', '0.5in + armholeDrop'),
     lengthRule('quarterBust', 'Quarter bust', '(bust + bustEase) / 4'),
+    lengthRule(
+      'frontHollowIn',
+      'Front hollow, inside the underarm',
+      'max(frontHollow, halfShoulder - quarterBust + 3.2cm)',
+    ),
+    lengthRule(
+      'backHollowIn',
+      'Back hollow, inside the underarm',
+      'max(backHollow, halfShoulder - quarterBust + 3.2cm)',
+    ),
     angleRule('flareAngle', 'Angle of the side seam', 'flare * 90°', geometry),
     lengthRule('sideLength', 'Length of the side seam', 'hemDrop - sideLift * flare * 4'),
     lengthRule('swungSide', 'Length of the side seam, swung', 'hemDrop - swingLoss', geometry),

@@ -120,7 +120,8 @@ const measure = (t0: number, t1: number, depth: number): number => {
   const first = clearance(r1, i1, t0, t1)
   const second = clearance(r2, i2, t0, t1)
   const least = first < second ? first : second
-  if (least >= ENOUGH_FOR_8) return integrate(t0, t1, NODES_8, WEIGHTS_8)
+  // Written so that what is no number comes back as no number instead of being halved for ever.
+  if (!(least < ENOUGH_FOR_8)) return integrate(t0, t1, NODES_8, WEIGHTS_8)
   if (least >= ENOUGH_FOR_16 || depth === 0) return integrate(t0, t1, NODES_16, WEIGHTS_16)
   const r = first < second ? r1 : r2
   const width = t1 - t0

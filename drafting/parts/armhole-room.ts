@@ -27,7 +27,7 @@ export function deepenArmhole(pen: Pen, side: Point): void {
     return pathLength(armholeCurve(tip, middle, underarm, shoulder, side))
   }
   const spare = (more: number): number =>
-    half(level + more, 'frontHollow') + half(level + more, 'backHollow') - wanted
+    half(level + more, 'frontHollowIn') + half(level + more, 'backHollowIn') - wanted
   checkShoulder(pen, tip, across, neck)
   if (spare(0) >= 0) {
     pen.find('armholeDeepening', 0, 0n)
@@ -59,7 +59,7 @@ export function deepenArmhole(pen: Pen, side: Point): void {
   )
 }
 
-/** The hollow must lie inside the quarter, and the shoulder must not reach past it, or the armhole would turn outwards. */
+/** The shoulders must be wider than the neck and not much wider than the quarter, or the armhole would turn outwards. */
 function checkShoulder(pen: Pen, tip: Point, across: number, neck: Point): void {
   if (tip.x - neck.x < 40) {
     pen.refuse({
@@ -69,13 +69,24 @@ function checkShoulder(pen: Pen, tip: Point, across: number, neck: Point): void 
       min: 2 * neck.x + 80,
     })
   }
-  const inside = tip.x - pen.length('backHollow')
-  if (across - inside < 15) {
+  const beyond = tip.x - across
+  if (beyond > 35) {
     pen.refuse({
       field: 'acrossShoulders',
       code: 'impossible-shape',
-      message: `The shoulders are too wide for this bust: the armhole would turn outwards. Give more bust ease, or measure across the shoulders again.`,
-      max: 2 * (across - 15 + pen.length('backHollow')),
+      message: `The shoulders are too wide for this bust: the armhole would turn outwards. Give at least ${pen.say(pen.value('bustEase') + 4 * (beyond - 35))} bust ease, or measure across the shoulders again.`,
+      max: 2 * (across + 35),
     })
+  }
+  if (
+    pen.value('backHollowIn') > pen.value('backHollow') ||
+    pen.value('frontHollowIn') > pen.value('frontHollow')
+  ) {
+    pen.caution(
+      'hollow-deepened',
+      'The shoulders are wide for this bust, so the armhole is hollowed more than the style says to end inside the underarm. Check the measurement across the shoulders, or give more bust ease.',
+      'acrossShoulders',
+      'bustEase',
+    )
   }
 }

@@ -16,6 +16,8 @@ export function armholeCurve(tip: Point, hollow: Point, underarm: Point, shoulde
   const fall = underarm.y - hollow.y
   const run = underarm.x - hollow.x
   const leaves = perpendicular(shoulder)
+  // Long enough to dip under the arm on a slight body, short enough not to hang there on a full one.
+  const reach = Math.min(Math.max(run * 0.5, Math.min(run * 0.9, 40)), 75)
   // Square to the side seam, outwards: the seam's direction turned a quarter back.
   const arrives = { x: side.y, y: -side.x }
   return openPath([
@@ -23,7 +25,7 @@ export function armholeCurve(tip: Point, hollow: Point, underarm: Point, shoulde
     cubic(
       hollow,
       { x: hollow.x, y: hollow.y + fall * 0.66 },
-      add(underarm, scale(arrives, -run * 0.5)),
+      add(underarm, scale(arrives, -reach)),
       underarm,
     ),
   ])

@@ -10,7 +10,7 @@ export const openingDesign: readonly DesignValue[] = [
     'zipLength',
     'Zip length',
     'opening',
-    { default: 380, min: 150, max: 600 },
+    { default: 380, min: 150, max: 500 },
     { id: 'backOpening', is: ['zip'] },
   ),
 ]

@@ -1,11 +1,48 @@
-import type { Path } from '../contract'
-import { endOf, offsetPath, reversePath, startOf, startTangent, unit } from '../geometry'
+import type { Path, Point } from '../contract'
+import {
+  distance,
+  endOf,
+  intersections,
+  offsetPath,
+  reversePath,
+  startOf,
+  startTangent,
+  unit,
+} from '../geometry'
 import type { Pen } from '../pen/pen'
-import { between, type PiecePen } from '../pen/piece-pen'
+import { between, straight, type PiecePen } from '../pen/piece-pen'
 import { fairCurve } from './hem'
+import { armholeCurve } from './armhole'
+import { neckCurve } from './neckline'
 import { trimBetween } from './trim'
 
 const down = { x: 0, y: 1 }
+
+/**
+ * The outer edge of a band of even depth beside a neckline, from the centre to the shoulder. It leaves the shoulder exactly
+ * at the depth, so that front and back facing meet there. Where the neckline bends too sharply for an even band, the outer
+ * edge is a plain neck curve of its own.
+ */
+function evenBand(neckline: Path, depth: number, body: PiecePen, shoulder: Point): Path {
+  const centre = body.at('centreNeck')
+  const side = body.at('sideNeck')
+  const end = { x: side.x + shoulder.x * depth, y: side.y + shoulder.y * depth }
+  const beside = offsetPath(neckline, -depth)
+  const even = beside.clipped
+    ? undefined
+    : trimBetween(beside.path, { at: centre, along: down }, { at: side, along: shoulder })
+  const last = even?.segments.at(-1)
+  if (even && last && distance(last.to, end) < 0.3) {
+    return { closed: false, segments: [...even.segments.slice(0, -1), { ...last, to: end }] }
+  }
+  return neckCurve(
+    { x: centre.x, y: Math.max(centre.y, end.y) + depth },
+    end,
+    { x: -shoulder.y, y: shoulder.x },
+    0.52,
+    0.5,
+  )
+}
 
 /** Facings are cut once in the cloth and once in interfacing. */
 function cutFacing(facing: PiecePen, onFold: boolean): void {
@@ -27,21 +64,11 @@ export function neckFacing(pen: Pen, body: PiecePen, depth: number, onFold: bool
   const facing = pen.piece(`${body.id}-neck-facing`, `${body.name} neck facing`)
   const neckline = body.edge('neckline')
   const shoulder = unit(between(body.at('sideNeck'), body.at('shoulderTip')))
-  const inside = trimBetween(
-    offsetPath(neckline.path, -depth).path,
-    { at: body.at('centreNeck'), along: down },
-    { at: body.at('sideNeck'), along: shoulder },
-  )
-  if (!inside) {
-    pen.refuse({
-      field: 'facingDepth',
-      code: 'impossible-shape',
-      message: `A facing ${pen.say(depth)} deep does not fit inside this neckline. Make it shallower.`,
-    })
-  }
+  const inside = evenBand(neckline.path, depth, body, shoulder)
   const names = ['facingDepth']
   const through = ['centreNeck', 'sideNeck', 'shoulderTip']
-  copyMarks(facing, body, through, neckline.uses)
+  copyMarks(facing, body, ['centreNeck', 'sideNeck'], neckline.uses)
+  facing.aid('shoulderTip', body)
   facing.place('shoulderEdge', endOf(inside), {
     say: 'Along the shoulder come out the depth of the facing',
     from: 'sideNeck',
@@ -87,21 +114,20 @@ export function armholeFacing(pen: Pen, body: PiecePen, depth: number): PiecePen
   const armhole = body.edge('armhole')
   const shoulder = unit(between(body.at('sideNeck'), body.at('shoulderTip')))
   const side = startTangent(body.edge('side').path)
-  const inside = trimBetween(
-    offsetPath(armhole.path, -depth).path,
-    { at: body.at('shoulderTip'), along: shoulder },
-    { at: body.at('underarm'), along: side },
+  const tip = body.at('shoulderTip')
+  const hollow = body.at('hollow')
+  const underarm = body.at('underarm')
+  const inside = armholeCurve(
+    { x: tip.x - shoulder.x * depth, y: tip.y - shoulder.y * depth },
+    { x: hollow.x - depth, y: hollow.y },
+    { x: underarm.x + side.x * depth, y: underarm.y + side.y * depth },
+    shoulder,
+    side,
   )
-  if (!inside) {
-    pen.refuse({
-      field: 'facingDepth',
-      code: 'impossible-shape',
-      message: `A facing ${pen.say(depth)} deep does not fit inside this armhole. Make it shallower.`,
-    })
-  }
   const names = ['facingDepth']
   const through = ['sideNeck', 'shoulderTip', 'hollow', 'underarm']
-  copyMarks(facing, body, through, armhole.uses)
+  copyMarks(facing, body, ['shoulderTip', 'hollow', 'underarm'], armhole.uses)
+  facing.aid('sideNeck', body)
   facing.place('shoulderEdge', startOf(inside), {
     say: 'Along the shoulder come in the depth of the facing',
     from: 'shoulderTip',
@@ -141,8 +167,9 @@ export function armholeFacing(pen: Pen, body: PiecePen, depth: number): PiecePen
     { cloth: 'main', count: 2, onFold: false, handed: true },
     { cloth: 'interfacing', count: 2, onFold: false, handed: true },
   )
-  const end = facing.at('sideEdge')
-  facing.grain({ x: end.x - 12, y: end.y - depth }, { x: end.x - 12, y: end.y - 6 })
+  const middle = facing.at('hollow').x - depth / 2
+  const level = facing.at('hollow').y
+  facing.grain({ x: middle, y: level - depth * 0.6 }, { x: middle, y: level + depth * 0.6 })
   return facing
 }
 
@@ -254,7 +281,10 @@ function finishFacing(facing: PiecePen, onFold: boolean): void {
   const top = facing.at('centreNeck')
   const bottom = facing.at('centreEdge')
   const inset = Math.min(14, Math.abs(facing.at('sideNeck').x) / 3)
-  facing.grain({ x: inset, y: top.y + 6 }, { x: inset, y: bottom.y - 4 })
+  const column = straight({ x: inset, y: -200 }, { x: inset, y: 2000 })
+  const upper = intersections(facing.edge('neckline').path, column)[0]?.point.y ?? top.y
+  const lower = intersections(facing.edge('outer').path, column)[0]?.point.y ?? bottom.y
+  facing.grain({ x: inset, y: upper + 5 }, { x: inset, y: Math.max(upper + 15, lower - 5) })
   // A zip needs the facing a little clear of its teeth; the turn is marked, the neckline stays whole.
   if (!onFold && facing.at('centreEdge').y - top.y > 10) {
     facing.inner(

@@ -133,7 +133,7 @@ export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): v
     },
   )
   const hollow = side === 'front' ? 'frontHollow' : 'backHollow'
-  piece.go('hollow', 'halfDepth', 'left', hollow, {
+  piece.go('hollow', 'halfDepth', 'left', `${hollow}In`, {
     say: 'Come in by the hollow of the armhole',
     drag: [hollow],
   })
@@ -143,6 +143,7 @@ export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): v
     to: 'hollow',
     label: `${side === 'front' ? 'Front' : 'Back'} hollow`,
     value: hollow,
+    over: pen.length(`${hollow}In`) - pen.value(hollow),
   })
 }
 

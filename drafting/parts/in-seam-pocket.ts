@@ -1,5 +1,5 @@
 import type { DesignValue, Path, Run } from '../contract'
-import { intersections, pathLength } from '../geometry'
+import { endOf, intersections, pathLength } from '../geometry'
 import { length, yesNo } from '../pen/design'
 import type { Pen } from '../pen/pen'
 import { straight, type PiecePen } from '../pen/piece-pen'
@@ -28,24 +28,32 @@ export interface PocketMouth {
  * Finds the mouth on a side seam: its top so far below the waist, measured down the body.
  *
  * @param waistLevel y of the waist on the piece, mm.
- * @returns undefined, after noting why, where the seam is too short for it.
+ * @returns undefined, with a caution, where the seam is too short for any.
  */
 export function pocketMouth(pen: Pen, seam: Path, waistLevel: number): PocketMouth | undefined {
-  const level = waistLevel + pen.length('pocketTop')
-  const top = intersections(seam, straight({ x: -50, y: level }, { x: 3000, y: level }))[0]
+  const reach = (y: number): number =>
+    intersections(seam, straight({ x: -50, y }, { x: 3000, y }))[0]?.a ?? (y > endOf(seam).y ? Infinity : 0)
   const opening = pen.length('pocketOpening')
-  const whole = pathLength(seam)
-  const room = top ? whole - top.a - aboveHem : -1
-  if (!top || room < opening) {
-    pen.doubt({
-      field: 'pocketTop',
-      code: 'impossible-shape',
-      message: `There is no room for the pocket above the hem. Make the garment longer, set the pocket higher, or leave pockets out.`,
-      ...(top ? { max: Math.max(0, pen.value('pocketTop') + room - opening) } : {}),
-    })
+  const wanted = pen.onTape(reach(waistLevel + pen.length('pocketTop')))
+  const lowest = pathLength(seam) - aboveHem - opening
+  if (wanted <= lowest) return { from: wanted, to: wanted + opening }
+  const raised = pen.tape ? Math.floor(lowest / pen.tape) * pen.tape : lowest
+  if (raised < reach(waistLevel)) {
+    pen.caution(
+      'pockets-left-out',
+      `Between the waist and the hem there is no room for a pocket, so none is drawn. Make the garment longer for pockets.`,
+      'pockets',
+      'length',
+    )
     return undefined
   }
-  return { from: pen.onTape(top.a), to: pen.onTape(top.a) + opening }
+  pen.caution(
+    'pocket-raised',
+    `The pocket is set ${pen.say(wanted - raised)} higher than asked, to stay clear of the hem.`,
+    'pocketTop',
+    'length',
+  )
+  return { from: raised, to: raised + opening }
 }
 
 /**

@@ -37,7 +37,7 @@ export function neckCurve(centre: Point, side: Point, leaves: Point, flat: numbe
 
 /** Round: square at the centre for a short way, widest low, square to the shoulder. */
 export const round: DrawNeckline = (centre, side, shoulder) => ({
-  path: neckCurve(centre, side, perpendicular(shoulder), 0.54, 0.5),
+  path: neckCurve(centre, side, perpendicular(shoulder), 0.52, 0.5),
   angle: 90,
 })
 
@@ -79,5 +79,5 @@ export const necklines: Readonly<Record<string, DrawNeckline>> = {
 
 /** The back neckline that runs on from a front neckline: flat for a third, then up. */
 export function backNeckline(centre: Point, side: Point, shoulder: Point, frontAngle: number): Path {
-  return neckCurve(centre, side, rotate(shoulder, 180 - frontAngle), 0.6, 0.5)
+  return neckCurve(centre, side, rotate(shoulder, 180 - frontAngle), 0.48, 0.85)
 }

@@ -13,7 +13,7 @@ const worn = { id: 'sleeve', is: ['plain', 'flared'] }
 const flared = { id: 'sleeve', is: ['flared'] }
 
 export const sleeveDesign: readonly DesignValue[] = [
-  length('sleeveLength', 'Sleeve length', 'sleeve', { default: 300, min: 200, max: 700 }, worn),
+  length('sleeveLength', 'Sleeve length', 'sleeve', { default: 350, min: 250, max: 700 }, worn),
   length('sleeveEase', 'Ease round the arm', 'sleeve', { default: 50, min: 40, max: 120 }, worn),
   length('sleeveHeadEase', 'Ease of the sleeve head', 'sleeve', { default: 10, min: 0, max: 40 }, worn),
   length(
@@ -34,14 +34,14 @@ export const sleeveDesign: readonly DesignValue[] = [
 
 export const sleeveRules: readonly RuleDefinition[] = [
   lengthRule('biceps', 'Sleeve girth at the underarm', 'upperArm + sleeveEase'),
-  lengthRule('leastArmhole', 'Least armhole for the arm', '(upperArm + sleeveEase) * 1.15'),
+  lengthRule('leastArmhole', 'Least armhole for the arm', '(upperArm + sleeveEase) * 1.1'),
   lengthRule('frontHeadEase', 'Ease in the front of the head', 'sleeveHeadEase * 0.45'),
   lengthRule('backHeadEase', 'Ease in the back of the head', 'sleeveHeadEase * 0.55'),
 ]
 
 /** Bounds of a sleeve head's height as a share of the armhole. Common practice: a shirt's is the lowest. */
 const lowestHead = 0.18
-const highestHead = 0.34
+const highestHead = 0.33
 
 /**
  * A sleeve set into the armholes of a front and a back: its head is solved so that each half has the length of its armhole
@@ -121,10 +121,12 @@ function solveShape(
   const shapes = { front: frontFullness, back: backFullness }
   let girth = pen.value('biceps')
   let solved = solveHead(girth, head.front, head.back, shapes)
-  if (solved && solved.height > highestHead * armhole) {
+  // The front half is the shorter: it too must keep some width.
+  const bound = Math.min(highestHead * armhole, 0.66 * Math.min(head.front, head.back))
+  if (solved && solved.height > bound) {
     // Height falls as girth grows, so a few secant steps on girth bring the height to its bound.
-    for (let round = 0; round < 12 && solved && solved.height > highestHead * armhole + 0.01; round += 1) {
-      girth += (solved.height - highestHead * armhole) * 2
+    for (let round = 0; round < 12 && solved && solved.height > bound + 0.01; round += 1) {
+      girth += (solved.height - bound) * 2
       solved = solveHead(girth, head.front, head.back, shapes)
     }
     pen.caution(
@@ -139,7 +141,7 @@ function solveShape(
       field: 'sleeveEase',
       code: 'impossible-shape',
       message: `A sleeve ${pen.say(girth)} round does not fit an armhole of ${pen.say(armhole)}. Lower the armhole or give the sleeve less ease.`,
-      max: Math.max(0, armhole / 1.13 - pen.value('upperArm')),
+      max: Math.max(0, armhole / 1.1 - pen.value('upperArm')),
     })
   }
   return solved

@@ -5,7 +5,7 @@ import { add, cubic, openPath, scale } from '../geometry'
 export interface Fullness {
   /** Where the curve crosses its chord, share from the crown. */
   readonly cross: number
-  /** How much steeper than the chord it crosses it, share of the chord's own angle. */
+  /** How much steeper than the chord it crosses it: the part of `leanUnit` at the chord's angle. */
   readonly lean: number
   /** Roundness of the part above the chord, 0…1. */
   readonly out: number
@@ -14,8 +14,11 @@ export interface Fullness {
 }
 
 /** Common practice, no published source: guide points 1.8 out and 1.3 in on the front chord, 1.6 out and 0.6 in on the back. */
-export const frontFullness: Fullness = { cross: 0.53, lean: 0.8, out: 0.72, scoop: 0.62 }
-export const backFullness: Fullness = { cross: 0.55, lean: 0.66, out: 0.74, scoop: 0.5 }
+export const frontFullness: Fullness = { cross: 0.53, lean: 0.84, out: 0.72, scoop: 0.62 }
+export const backFullness: Fullness = { cross: 0.55, lean: 0.7, out: 0.74, scoop: 0.5 }
+
+/** The lean for a chord at an angle (radians): nothing for a level chord and for an upright one, so the head never leans over. */
+export const leanUnit = (chord: number): number => Math.sin(2 * chord) / 2
 
 /**
  * One half of a sleeve head, drawn to the right from the crown to the underarm: level at the crown, crossing its chord once,
@@ -31,7 +34,7 @@ export function headHalf(crown: Point, underarm: Point, arrives: Point, fullness
   const dy = underarm.y - crown.y
   const chord = Math.atan2(dy, dx)
   const end = chord - Math.atan2(arrives.y, arrives.x)
-  const lean = fullness.lean * chord
+  const lean = fullness.lean * leanUnit(chord)
   const at = { x: crown.x + dx * fullness.cross, y: crown.y + dy * fullness.cross }
   const through = { x: Math.cos(chord + lean), y: Math.sin(chord + lean) }
   const upper = Math.hypot(dx, dy) * fullness.cross

@@ -1,25 +1,8 @@
 import type { Path, Point } from '../contract'
-import { pathLength } from '../geometry'
+import { segmentLength } from '../geometry'
 import { solveBetween } from '../pen/solve'
-import { headHalf, type Fullness } from './sleeve-head'
-
-const level = { x: 1, y: 0 }
-
-/** The half girth of a sleeve at which a head of one length and height is reached, mm; undefined when there is none. */
-function widthFor(
-  height: number,
-  length: number,
-  arrives: (width: number) => Point,
-  fullness: Fullness,
-): number | undefined {
-  return solveBetween(
-    (width) =>
-      pathLength(headHalf({ x: 0, y: 0 }, { x: width, y: height }, arrives(width), fullness)) - length,
-    height * 0.25,
-    length,
-    1e-7,
-  )
-}
+import { headWidth, highest, lowest } from './head-table'
+import { headHalf, leanUnit, type Fullness } from './sleeve-head'
 
 /**
  * The height of a sleeve head and how its girth divides into front and back, so that each half of the head has its length.
@@ -34,18 +17,20 @@ export function solveHead(
   back: number,
   shapes: { readonly front: Fullness; readonly back: Fullness },
 ): { readonly height: number; readonly front: number; readonly back: number } | undefined {
-  const flat = (): Point => level
-  const spare = (height: number): number => {
-    const f = widthFor(height, front, flat, shapes.front)
-    const b = widthFor(height, back, flat, shapes.back)
-    return (f ?? 0) + (b ?? 0) - girth
-  }
-  const shorter = Math.min(front, back)
-  const height = solveBetween(spare, shorter * 0.08, shorter * 0.93, 1e-6)
+  const width = (height: number): number =>
+    headWidth(front, height, shapes.front) + headWidth(back, height, shapes.back)
+  const height = solveBetween(
+    (value) => width(value) - girth,
+    Math.max(front, back) * lowest,
+    Math.min(front, back) * highest,
+    1e-9,
+  )
   if (height === undefined) return undefined
-  const f = widthFor(height, front, flat, shapes.front)
-  const b = widthFor(height, back, flat, shapes.back)
-  return f === undefined || b === undefined ? undefined : { height, front: f, back: b }
+  return {
+    height,
+    front: headWidth(front, height, shapes.front),
+    back: headWidth(back, height, shapes.back),
+  }
 }
 
 /**
@@ -62,9 +47,30 @@ export function fitHead(
 ): Path | undefined {
   if (underarm.y - crown.y < 0.04 * (underarm.x - crown.x)) return undefined
   const drawn = (lean: number): Path => headHalf(crown, underarm, arrives, { ...shape, lean })
+  const over = (lean: number): number => {
+    const half = drawn(lean)
+    let sum = -length
+    for (const segment of half.segments) sum += segmentLength(segment)
+    return sum
+  }
   const chord = Math.atan2(underarm.y - crown.y, underarm.x - crown.x)
   // Past a right angle the head would lean over itself.
-  const most = (Math.PI * 0.47 - chord) / chord
-  const lean = solveBetween((value) => pathLength(drawn(value)) - length, 0.02, most, 1e-9)
+  const least = 0.02
+  const most = (Math.PI * 0.47 - chord) / leanUnit(chord)
+  let before = shape.lean
+  let now = before * 1.02
+  if (now < most) {
+    let fBefore = over(before)
+    for (let round = 0; round < 8; round += 1) {
+      const fNow = over(now)
+      if (Math.abs(fNow) < 1e-9) return drawn(now)
+      const next = now - (fNow * (now - before)) / (fNow - fBefore)
+      if (!(next > least && next < most)) break
+      before = now
+      fBefore = fNow
+      now = next
+    }
+  }
+  const lean = solveBetween(over, least, most, 1e-9)
   return lean === undefined ? undefined : drawn(lean)
 }

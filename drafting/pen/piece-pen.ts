@@ -89,6 +89,8 @@ export class PiecePen {
   readonly marks = new Map<string, PenMark>()
   readonly kinds = new Map<string, Mark['kind']>()
   readonly drags = new Map<string, readonly string[]>()
+  /** Marks traced from another piece only to draw by; they are not on this one. */
+  private readonly aids = new Set<string>()
   readonly edges: DrawnEdge[] = []
   readonly darts: Dart[] = []
   readonly lines: InnerLine[] = []
@@ -201,6 +203,13 @@ export class PiecePen {
   ): void {
     const uses = this.pen.usesOf(options.uses) | this.usesOf(...options.through)
     this.put(id, at, uses, uses, { ...options, from, stepKind: 'turn' })
+  }
+
+  /** Notes a mark of another piece to draw by, without putting it on this one. */
+  aid(id: string, source: PiecePen, uses: Mask = nothing): void {
+    const mark = source.mark(id)
+    this.aids.add(id)
+    this.marks.set(id, { ...mark, x: mark.x | uses, y: mark.y | uses })
   }
 
   /** Traces a mark from another piece, in the same place. */
@@ -361,7 +370,8 @@ export class PiecePen {
   /** The marks as they are given out, lettered in drafting order. */
   finishedMarks(): Mark[] {
     let index = 0
-    return [...this.marks.values()].map((mark) => ({
+    const own = [...this.marks.values()].filter((mark) => !this.aids.has(mark.id))
+    return own.map((mark) => ({
       id: mark.id,
       letter: letter(index++),
       at: mark.at,

@@ -1,5 +1,6 @@
 import type { Step } from '../contract'
 import { explainFormula } from '../rules'
+import { lengthDigits } from '../lengths'
 import type { Pen } from './pen'
 
 /** Turns what the pen noted down into steps with words and sums. Without explanations the words and sums are left out. */
@@ -11,7 +12,7 @@ export function writeSteps(pen: Pen): Step[] {
       pen.explains && record.by && record.length !== undefined
         ? formula
           ? explainFormula(formula, pen.values.numbers, rules.kinds, pen.unit, record.length)
-          : undefined
+          : lengthDigits(record.length, pen.unit)
         : undefined
     return {
       id: record.id,

@@ -23,7 +23,8 @@ export const mitre = (a: Side, b: Side, at: Point): Turn => {
   if (Math.abs(turn) < 1e-9) return along > 0 ? stepOrAcross(a, b, at) : bevel(a, b)
   const ahead = (dx * b.leaving.y - dy * b.leaving.x) / turn
   const back = (a.arriving.x * dy - a.arriving.y * dx) / turn
-  if (ahead < 0 || back < 0) return crossing(a, b, at) ?? stepOrAcross(a, b, at)
+  // A joint that is met to within rounding is met.
+  if (ahead < -SAME || back < -SAME) return crossing(a, b, at) ?? stepOrAcross(a, b, at)
   // Along the side without allowance, so that a nett edge is only ever prolonged.
   const meet =
     b.allowance === 0
