@@ -2,19 +2,15 @@
  * `npm test -- [suite …] [part of a file name …] [--keep] [--dev]`: brings up what the suites need beside whatever
  * runs already, runs them and counts. The last line is `N passed, M failed`.
  */
-import { openSync } from 'node:fs'
-import { join } from 'node:path'
-import { ensureBuild } from './local/build.mjs'
 import { ensureModules } from './local/modules.mjs'
 import { runMain, say, SetUpError } from './local/say.mjs'
-import { seedDemo } from './local/seed.mjs'
-import { serve } from './local/serve.mjs'
 import { createStopping } from './local/stopping.mjs'
 import { readArguments } from './testing/arguments.mjs'
 import { runSuite } from './testing/run-suite.mjs'
 import { takeSlot } from './testing/slot.mjs'
 import { total } from './testing/tally.mjs'
-import { bringUpDatabase, testDistDir, testEnvironment } from './testing/test-database.mjs'
+import { bringUpApp } from './testing/test-app.mjs'
+import { bringUpDatabase, testEnvironment } from './testing/test-database.mjs'
 
 await runMain(async () => {
   const asked = readArguments(process.argv.slice(2))
@@ -30,7 +26,7 @@ await runMain(async () => {
     let served = false
     for (const suite of asked.suites) {
       if (!served && (suite === 'security' || suite === 'e2e')) {
-        await bringUpApp(asked, slot.folder, env, stopping)
+        await bringUpApp({ folder: slot.folder, env, stopping, dev: asked.dev })
         served = true
       }
       say(`\n── ${suite}`)
@@ -38,24 +34,14 @@ await runMain(async () => {
       if (stopping.stopping) break
     }
   } catch (error) {
-    if (!(error instanceof SetUpError)) throw error
     // What could not be brought up has failed, and is counted.
-    process.stderr.write(`\n${error.message}\n`)
+    process.stderr.write(`\n${error instanceof SetUpError ? error.message : error.stack}\n`)
     tallies.push({ passed: 0, failed: 1, skipped: 0 })
   } finally {
     await stopping.stop()
   }
   return conclude(total(tallies), asked.filters)
 })
-
-async function bringUpApp(asked, folder, env, stopping) {
-  await seedDemo(env)
-  if (!asked.dev) await ensureBuild(testDistDir, env)
-  const output = openSync(join(folder, 'app.log'), 'w', 0o600)
-  const mode = asked.dev ? 'dev' : 'start'
-  const app = await serve({ mode, port: Number(env.PORT), host: '127.0.0.1', env, output })
-  stopping.onStop(app.stop)
-}
 
 function conclude({ passed, failed, skipped }, filters) {
   if (passed + failed === 0 && filters.length > 0) say(`No test file matches ${filters.join(', ')}.`)
