@@ -73,6 +73,7 @@ function usedMeasurements(garment: Garment, ready: ReadyOrder): Draft['used'] {
   const used: Record<string, { mm: number; estimatedBy?: string }> = {}
   for (const id of [...garment.definition.needs, ...garment.definition.estimates]) {
     const estimatedBy = ready.estimatedBy[id]
+    if (ready.measurements[id] === undefined) continue
     used[id] = { mm: ready.measurements[id] as number, ...(estimatedBy ? { estimatedBy } : {}) }
   }
   return used

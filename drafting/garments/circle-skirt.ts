@@ -58,7 +58,7 @@ export const circleSkirt = garment({
     angleRule('panelAngle', 'Angle of a panel', 'circleAngle / panelCount', geometry),
     ...waistbandRules,
   ],
-  found: { circleShare: 'number', circleAngle: 'angle', panelCount: 'number' },
+  found: { circleShare: 'number', circleAngle: 'angle', panelCount: 'number', waistDrawn: 'length' },
   draft(pen) {
     const share = shares[String(pen.chosen('share'))] as number
     pen.find('circleShare', share, pen.usesOf(['share']))
@@ -227,7 +227,7 @@ function sewPanels(pen: Pen, pieces: readonly PiecePen[], panels: number): void 
     const zip = pen.length('zipLength')
     last.notch('zip-end', 'right', Math.min(zip, long), 2)
     pen.notion({ kind: 'zip', length: zip, count: 1 })
-  } else if (pen.value('waistEdge') < pen.value('hip')) {
+  } else if (pen.has('hip') && pen.value('waistEdge') < pen.value('hip')) {
     pen.caution(
       'no-opening',
       'Without an opening the waist does not go over the hip. Choose a zip, or make the waist of stretch cloth.',
@@ -274,6 +274,7 @@ function fitSkirt(pen: Pen, pieces: readonly PiecePen[], panels: number): void {
     }))
   const waist = over('waist')
   const drawn = waist.reduce((sum, one) => sum + one.times * one.length, 0)
+  pen.find('waistDrawn', drawn, pen.usesOf(['waistEdge', 'panelAngle']))
   const asked = pen.tape ? drawn - pen.value('waist') : pen.value('waistEase')
   pen.fit(fitAcross('waist', 'equal', asked, pen.value('waist'), waist))
   pen.fit(fitAcross('hem', 'shown', 0, undefined, over('hem')))
@@ -288,6 +289,14 @@ function fitSkirt(pen: Pen, pieces: readonly PiecePen[], panels: number): void {
 
 /** At the hip the level is an arc. Too narrow there is drawn all the same, and said. */
 function fitHip(pen: Pen, pieces: readonly PiecePen[], times: (index: number) => number): void {
+  if (!pen.has('hip')) {
+    pen.caution(
+      'hip-unknown',
+      'The hip was not measured, so nobody can say whether the skirt is wide enough there. Measure the hip.',
+      'hip',
+    )
+    return
+  }
   const down = pen.value('waistToHip')
   if (down >= pen.length('length')) return
   const radius = pen.length('radius') + down

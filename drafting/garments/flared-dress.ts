@@ -6,6 +6,7 @@ import type { PiecePen } from '../pen/piece-pen'
 import { armholeFacing, neckFacing, shoulderFacing } from '../parts/facing'
 import { deepenArmhole } from '../parts/armhole-room'
 import { drawHalf, flareDirection, hemOf, lowerMarks, upperMarks } from '../parts/flared-half'
+import { neckLeans } from '../parts/neck-lean'
 import { fitLevels } from '../parts/levels'
 import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/in-seam-pocket'
 import { setInSleeve, sleeveDesign, sleeveRules } from '../parts/set-in-sleeve'
@@ -36,8 +37,8 @@ export const flaredDress = garment({
   design: [
     choice('neckShape', 'Neck shape', 'neckline', ['round', 'V', 'square', 'boat']),
     length('neckWidening', 'Neck wider by', 'neckline', { default: 0, min: 0, max: 80 }),
-    length('frontNeckDrop', 'Front neck lower by', 'neckline', { default: 0, min: 0, max: 200 }),
-    length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 250 }),
+    length('frontNeckDrop', 'Front neck lower by', 'neckline', { default: 0, min: 0, max: 150 }),
+    length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 150 }),
     length('facingDepth', 'Facing depth', 'neckline', { default: 50.8, min: 30, max: 90 }),
     length('shoulderSlope', 'Shoulder slope', 'shoulder', { default: 38.1, min: 15, max: 60 }),
     length('armholeDrop', 'Armhole lower by', 'armhole', { default: 0, min: 0, max: 80 }),
@@ -77,7 +78,8 @@ export const flaredDress = garment({
       'Boat neck: opening along the shoulder',
       '(halfShoulder - neckWidth) * 0.35 + neckWidening',
     ),
-    lengthRule('boatNeckDepth', 'Boat neck: front depth', 'neckBase / 5 - 1cm + frontNeckDrop'),
+    lengthRule('boatNeckDepth', 'Boat neck: front depth', '4cm + neckFall + frontNeckDrop'),
+    lengthRule('vNeckDepth', 'V neck: front depth', 'neckBase / 5 + 6cm + frontNeckDrop'),
     lengthRule('halfShoulder', 'Half the shoulders', 'acrossShoulders / 2'),
     lengthRule('armholeDepth', 'Armhole depth', 'bust / 6 + 1.5in'),
     lengthRule('sleevedLowering', 'Lower for a sleeve', '0.5in + armholeDrop'),
@@ -130,8 +132,10 @@ export const flaredDress = garment({
       lowerMarks(pen, piece, direction)
     }
     checkLength(pen, front)
-    const shape = drawHalf(pen, front, 'front', 90)
-    drawHalf(pen, back, 'back', shape.neckAngle)
+    const leans = neckLeans(pen, front, back)
+    const necks = front.usesOf('centreNeck', 'sideNeck') | back.usesOf('centreNeck')
+    drawHalf(pen, front, 'front', leans.front, necks)
+    drawHalf(pen, back, 'back', leans.back, necks)
     drawFrontHem(pen, front, direction)
     hemOf(pen, back, 'lengthMark', direction)
     front.line('centre', hemCentre(pen), 'centreNeck', {

@@ -20,8 +20,12 @@ export function armholeCurve(tip: Point, hollow: Point, underarm: Point, shoulde
   const reach = Math.min(Math.max(run * 0.5, Math.min(run * 0.9, 40)), 75)
   // Square to the side seam, outwards: the seam's direction turned a quarter back.
   const arrives = { x: side.y, y: -side.x }
+  // A sloping shoulder must not carry the curve past its own hollow.
+  const inwards = -leaves.x
+  const hollowed = tip.x - hollow.x
+  const start = inwards > 1e-9 ? Math.min(upper * 0.36, (0.6 * hollowed) / inwards) : upper * 0.36
   return openPath([
-    cubic(tip, add(tip, scale(leaves, upper * 0.36)), { x: hollow.x, y: hollow.y - upper * 0.36 }, hollow),
+    cubic(tip, add(tip, scale(leaves, start)), { x: hollow.x, y: hollow.y - upper * 0.36 }, hollow),
     cubic(
       hollow,
       { x: hollow.x, y: hollow.y + fall * 0.66 },

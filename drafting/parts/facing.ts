@@ -13,7 +13,7 @@ import type { Pen } from '../pen/pen'
 import { between, straight, type PiecePen } from '../pen/piece-pen'
 import { fairCurve } from './hem'
 import { armholeCurve } from './armhole'
-import { neckCurve } from './neckline'
+import { neckCurve } from './necklines'
 import { trimBetween } from './trim'
 
 const down = { x: 0, y: 1 }

@@ -1,18 +1,18 @@
 import type { Path, Point } from '../contract'
 import { unit, add, scale, magnitude, cubic, openPath } from '../geometry'
+import type { Mask } from '../pen/masks'
 import type { Pen } from '../pen/pen'
 import { between, type PiecePen } from '../pen/piece-pen'
 import { armholeCurve } from './armhole'
 import { fairCurve } from './hem'
-import { backNeckline, necklines } from './neckline'
+import { backNeckline, leaning, necklines } from './necklines'
+import type { Neckline } from './necklines/neckline'
 
 /** Directions that the whole of one half is drawn by. */
 export interface HalfShape {
   readonly shoulder: Point
   /** Down the side seam. */
   readonly side: Point
-  /** Angle between front shoulder and neckline, degrees. */
-  readonly neckAngle: number
 }
 
 /** Unit direction of a flared side seam: so many degrees out of the vertical. */
@@ -21,17 +21,24 @@ export function flareDirection(degrees: number): Point {
   return { x: Math.sin(turn), y: Math.cos(turn) }
 }
 
+function neckShape(pen: Pen): Neckline {
+  const shape = necklines[String(pen.chosen('neckShape'))]
+  if (!shape) throw new Error('Every neck shape offered has a neckline.')
+  return shape
+}
+
 /**
  * The upper part of one half of a freehand dress: neck, shoulder, armhole level, hollow and underarm, in the order in which
  * they are chalked.
  */
 export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): void {
-  const boat = pen.chosen('neckShape') === 'boat'
+  const shape = neckShape(pen)
   const sleeved = pen.chosen('sleeve') !== 'none'
-  const widening = boat ? 'boatWidening' : 'neckWidening'
+  const { widening } = shape
   piece.start('neckLevel', { x: 0, y: 0 }, 'Fold the cloth; mark the level of the side neck on the centre')
   piece.go('neckPoint', 'neckLevel', 'right', 'neckWidth', {
     say: 'From the centre go across the width of the neck',
+    up: true,
     shared: true,
   })
   piece.go('shoulderEnd', 'neckLevel', 'right', 'halfShoulder', {
@@ -63,7 +70,7 @@ export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): v
     })
   }
   pen.find('neckFall', piece.at('sideNeck').y, piece.mark('sideNeck').y)
-  const depth = side === 'back' ? 'backNeckDepth' : boat ? 'boatNeckDepth' : 'frontNeckDepth'
+  const depth = side === 'back' ? 'backNeckDepth' : shape.depth
   const drop = side === 'front' ? 'frontNeckDrop' : 'backNeckDrop'
   piece.go('centreNeck', 'neckLevel', 'down', depth, {
     say: `From the level of the side neck come down the depth of the ${side} neck`,
@@ -176,15 +183,23 @@ export function lowerMarks(pen: Pen, piece: PiecePen, direction: Point): void {
   })
 }
 
-/** Neck, shoulder, armhole, side and hem of one half, clockwise from the centre neck. */
-export function drawHalf(pen: Pen, piece: PiecePen, side: 'front' | 'back', frontAngle: number): HalfShape {
+/**
+ * Neck, shoulder, armhole and side of one half, clockwise from the centre neck.
+ *
+ * @param lean how its neckline leaves the side neck, degrees from the vertical, inwards.
+ * @param necks what both necklines follow from, as each leans with the other.
+ */
+export function drawHalf(
+  pen: Pen,
+  piece: PiecePen,
+  side: 'front' | 'back',
+  lean: number,
+  necks: Mask,
+): HalfShape {
   const at = (id: string): Point => piece.at(id)
   const shoulder = unit(between(at('sideNeck'), at('shoulderTip')))
-  const draw = necklines[String(pen.chosen('neckShape'))]
-  if (!draw) throw new Error('Every neck shape offered has a neckline.')
-  const front = draw(at('centreNeck'), at('sideNeck'), shoulder)
-  const neckline =
-    side === 'front' ? front.path : backNeckline(at('centreNeck'), at('sideNeck'), shoulder, frontAngle)
+  const ends = [at('centreNeck'), at('sideNeck'), leaning(lean)] as const
+  const neckline = side === 'front' ? neckShape(pen).draw(...ends) : backNeckline(...ends)
   const sidePath = takenIn(pen, piece, at('underarm'), at('sideHem'))
   const first = sidePath.segments[0]
   const down =
@@ -200,6 +215,7 @@ export function drawHalf(pen: Pen, piece: PiecePen, side: 'front' | 'back', fron
         ? 'Draw the front neckline'
         : 'Draw the back neckline: flat at first, then up to the shoulder',
     through: neckMarks,
+    mask: necks,
   })
   piece.line('shoulder', 'sideNeck', 'shoulderTip', {
     role: 'seam',
@@ -224,7 +240,7 @@ export function drawHalf(pen: Pen, piece: PiecePen, side: 'front' | 'back', fron
     say: 'Draw the side seam',
     kind: 'line',
   })
-  return { shoulder, side: down, neckAngle: front.angle }
+  return { shoulder, side: down }
 }
 
 /** The side seam: straight, or curved through what corrections take in or let out at their levels. */

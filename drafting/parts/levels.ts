@@ -12,6 +12,8 @@ function across(piece: PiecePen, y: number): Path | undefined {
 /** The girths of a dress in quarters at bust, waist and hip, with the levels drawn where they lie. */
 export function fitLevels(pen: Pen, front: PiecePen, back: PiecePen): void {
   const pieces = [front, back]
+  // A neck lower than the bust leaves no whole girth there to measure.
+  const whole = pieces.every((piece) => piece.at('centreNeck').y < piece.at('underarm').y)
   const bust = pieces.map((piece) => {
     const end = piece.at('underarm')
     return { piece: piece.id, path: straight({ x: 0, y: end.y }, end), times: 2, length: end.x }
@@ -20,7 +22,7 @@ export function fitLevels(pen: Pen, front: PiecePen, back: PiecePen): void {
   const drawn = bust.reduce((sum, one) => sum + one.times * one.length, 0)
   const asked = pen.tape ? drawn - pen.value('bust') : pen.value('bustEase')
   const corrected = Math.abs(drawn - pen.value('bust') - asked) > 0.5
-  pen.fit(fitAcross('bust', corrected ? 'shown' : 'equal', asked, pen.value('bust'), bust))
+  if (whole) pen.fit(fitAcross('bust', corrected ? 'shown' : 'equal', asked, pen.value('bust'), bust))
   for (const [id, rule] of [
     ['waist', 'waistLevel'],
     ['hip', 'hipLevel'],
@@ -77,7 +79,17 @@ export function fitLevels(pen: Pen, front: PiecePen, back: PiecePen): void {
         })),
       ),
     )
-  around('neck', 'neckline', 'at-least', 0, pen.value('neckBase'))
+  const neck = 2 * (front.lengthOf('neckline') + back.lengthOf('neckline'))
+  const chokes = neck < pen.value('neckBase')
+  around('neck', 'neckline', chokes ? 'shown' : 'at-least', 0, pen.value('neckBase'))
+  if (chokes) {
+    pen.caution(
+      'neck-tight',
+      `The neckline is ${pen.say(neck)} round, the neck ${pen.say(pen.value('neckBase'))}: open it wider or deeper.`,
+      'neckWidening',
+      'frontNeckDrop',
+    )
+  }
   around('hem', 'hem', 'shown', 0)
   acrossArmholes(pen, front, 'acrossFront')
   acrossArmholes(pen, back, 'acrossBack')
@@ -103,6 +115,7 @@ function armholeFit(pen: Pen, front: PiecePen, back: PiecePen): void {
 /** The width between the armholes where they are deepest, against the body's. */
 function acrossArmholes(pen: Pen, piece: PiecePen, measurement: 'acrossFront' | 'acrossBack'): void {
   const end = piece.at('hollow')
+  if (piece.at('centreNeck').y > end.y) return
   pen.fit(
     fitAcross(measurement, 'shown', 0, pen.value(measurement), [
       { piece: piece.id, path: straight({ x: 0, y: end.y }, end), times: 2, length: end.x },

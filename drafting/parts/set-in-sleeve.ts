@@ -86,10 +86,12 @@ export function setInSleeve(pen: Pen, front: PiecePen, back: PiecePen): PiecePen
   sleeve.go('frontUnderarm', 'underarmLevel', 'right', 'frontGirth', {
     say: 'Go out to the front by the front part of the girth',
     drag: ['sleeveEase'],
+    up: true,
     stepKind: 'solve',
   })
   sleeve.go('backUnderarm', 'underarmLevel', 'left', 'backGirth', {
     say: 'Go out to the back by the back part of the girth',
+    up: true,
     stepKind: 'solve',
   })
   sleeve.go('hemLevel', 'crown', 'down', 'sleeveLength', {
@@ -149,7 +151,7 @@ function solveShape(
 
 /** A plain sleeve: each side comes in by the taper. */
 function taper(pen: Pen, sleeve: PiecePen): SleeveCorners {
-  const narrowest = Math.min(pen.length('frontGirth'), pen.length('backGirth')) - 55
+  const narrowest = Math.max(0, Math.min(pen.length('frontGirth'), pen.length('backGirth')) - 55)
   if (pen.length('sleeveTaper') > narrowest) {
     pen.refuse({
       field: 'sleeveTaper',
@@ -231,7 +233,7 @@ function drawSleeve(
   })
   sleeve.cut({ cloth: 'main', count: 2, onFold: false, handed: true })
   const long = sleeve.at('hemLevel').y
-  sleeve.grain({ x: 0, y: long * 0.35 }, { x: 0, y: long * 0.85 })
+  sleeve.grain({ x: 0, y: long * 0.35 }, { x: 0, y: long * 0.8 })
 }
 
 /** Square to an underarm seam, outwards: the direction in which the head reaches it. */

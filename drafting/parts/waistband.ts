@@ -13,7 +13,7 @@ export const waistbandDesign: readonly DesignValue[] = [
 ]
 
 export const waistbandRules: readonly RuleDefinition[] = [
-  lengthRule('waistbandLength', 'Waistband without underlap', 'waist + waistEase - waistEasedIn'),
+  lengthRule('waistbandLength', 'Waistband without underlap', 'waistDrawn - waistEasedIn'),
   lengthRule('waistbandFold', 'Waistband, cut depth', 'waistbandDepth * 2'),
 ]
 
@@ -32,7 +32,9 @@ export function waistband(pen: Pen, runs: readonly Run[]): void {
     say: 'Come down twice the finished depth',
     drag: ['waistbandDepth'],
   })
-  band.go('meets', 'end', 'right', 'waistbandLength', { say: 'Go along the waist with its ease' })
+  band.go('meets', 'end', 'right', 'waistbandLength', {
+    say: 'Go along as far as the waist of the skirt measures',
+  })
   band.go('lapEnd', 'meets', 'right', 'underlap', { say: 'Go on by the underlap', drag: ['underlap'] })
   band.square('lowMeets', 'meets', 'lowEnd', { say: 'Square down to the lower edge' })
   band.square('lowLapEnd', 'lapEnd', 'lowEnd', { say: 'Square down to the lower edge' })
@@ -48,7 +50,7 @@ export function waistband(pen: Pen, runs: readonly Run[]): void {
     allowance: 'waistbandAllowance',
     say: 'The edge that the skirt is sewn to',
   })
-  band.line('end', 'lowEnd', 'end', { ...turned, say: 'The end that meets the opening' })
+  band.line('short-end', 'lowEnd', 'end', { ...turned, say: 'The end that meets the opening' })
   const fold = band.at('foldEnd')
   const end = { x: band.at('lapEnd').x, y: fold.y }
   band.inner(

@@ -86,16 +86,7 @@ function checkCard(
   }
   if (!good) return undefined
   const completed = completeCard(card, estimates)
-  for (const id of estimates) {
-    if (isNumber(completed.card[id])) continue
-    good = false
-    problems.push({
-      field: id,
-      code: 'missing-measurement',
-      message: `${measurementById(id)?.name ?? id} is missing and nothing else on the card tells it. Take it and put it on the card.`,
-    })
-  }
-  return good ? { measurements: completed.card, estimatedBy: completed.estimatedBy } : undefined
+  return { measurements: completed.card, estimatedBy: completed.estimatedBy }
 }
 
 /** What is wrong with one style value, or nothing. */

@@ -81,6 +81,18 @@ export class Pen {
     return this.onTape(value)
   }
 
+  /** A length as it is measured out, mm: rounded up to the tape when there is one. */
+  lengthUp(name: string): number {
+    const value = this.length(name)
+    const exact = this.values.number(name)
+    return this.tape && value < exact - 1e-9 ? value + this.tape : value
+  }
+
+  /** Whether a measurement is known or could be estimated. */
+  has(name: string): boolean {
+    return this.values.numbers[name] !== undefined
+  }
+
   /** Rounds to the tape, when there is one. */
   onTape(length: number): number {
     return this.tape ? Math.round(length / this.tape) * this.tape : length

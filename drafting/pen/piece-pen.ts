@@ -47,10 +47,13 @@ export interface EdgeOptions {
   /** Names and marks it follows from, beside its own ends. */
   readonly uses?: readonly string[]
   readonly through?: readonly string[]
+  readonly mask?: Mask
   readonly kind?: Step['kind']
 }
 
 export interface MarkOptions {
+  /** A girth that must not come out too small: with a tape it is rounded up. */
+  readonly up?: boolean
   readonly stepKind?: Step['kind']
   readonly say: string
   readonly kind?: Mark['kind']
@@ -135,7 +138,7 @@ export class PiecePen {
   go(id: string, from: string, towards: Direction, by: string, options: MarkOptions): void {
     const origin = this.mark(from)
     const along = directions[towards]
-    const length = this.pen.length(by)
+    const length = options.up ? this.pen.lengthUp(by) : this.pen.length(by)
     const uses = this.pen.values.mask(by)
     const vertical = towards === 'down' || towards === 'up'
     this.put(
@@ -295,7 +298,8 @@ export class PiecePen {
     const uses =
       ends |
       this.pen.usesOf(options.uses ?? []) |
-      (options.through ? this.usesOf(...options.through) : nothing)
+      (options.through ? this.usesOf(...options.through) : nothing) |
+      (options.mask ?? nothing)
     const allowance = options.allowance ? this.pen.allowance(options.allowance) : 0
     this.edges.push({
       id,

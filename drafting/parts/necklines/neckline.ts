@@ -1,0 +1,42 @@
+import type { Path, Point } from '../../contract'
+import { add, cubic, openPath, scale } from '../../geometry'
+
+/** A shape of neckline over one half of a front, drawn from the centre to the side neck point. */
+export interface Neckline {
+  /** Rules that give its depth below the side neck level and its opening along the shoulder. */
+  readonly depth: string
+  readonly widening: string
+  /** How far from the vertical, inwards, it would leave the side neck of a shoulder with this slope. Degrees. */
+  readonly lean: (slope: number) => number
+  /** The most that it may lean there without bending both ways, for a width and depth in mm. Degrees. */
+  readonly mostLean: (width: number, depth: number) => number
+  /** @param leaves unit direction in which it leaves the side neck. */
+  readonly draw: (centre: Point, side: Point, leaves: Point) => Path
+}
+
+/** A lean from the vertical, inwards, as a direction. */
+export function leaning(degrees: number): Point {
+  const turn = (degrees * Math.PI) / 180
+  return { x: -Math.sin(turn), y: Math.cos(turn) }
+}
+
+/** The lean at which a curve square to the centre would only just not bend both ways: a little short of its own corner. */
+export function mostCurvedLean(width: number, depth: number): number {
+  return (Math.atan2(0.8 * width, depth) * 180) / Math.PI
+}
+
+/**
+ * A curve square to the centre that leaves the side neck in a given direction and bends one way only.
+ *
+ * @param flat how far it runs level from the centre, share of the width.
+ * @param fall how far it runs on from the side neck, share of the depth.
+ */
+export function neckCurve(centre: Point, side: Point, leaves: Point, flat: number, fall: number): Path {
+  const width = side.x - centre.x
+  const depth = centre.y - side.y
+  const reach = Math.min(fall, 0.9) * (leaves.y > 1e-9 ? depth / leaves.y : depth)
+  // Where the two end directions cross: the level part must stop short of it.
+  const corner = leaves.y > 1e-9 ? width + (leaves.x * depth) / leaves.y : width
+  const run = Math.min(flat * width, 0.9 * corner)
+  return openPath([cubic(centre, { x: centre.x + run, y: centre.y }, add(side, scale(leaves, reach)), side)])
+}
