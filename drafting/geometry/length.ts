@@ -1,5 +1,4 @@
 import type { CubicSegment, Segment } from '../contract'
-import { recent } from './recent'
 
 /*
  * Arc length by Gauss–Legendre quadrature. The speed of a cubic is the square root of a polynomial whose complex zeros are
@@ -24,8 +23,8 @@ const WEIGHTS_16 = Float64Array.from([
 ])
 
 /** Sum of the distances from a zero to the ends of an interval, over its width: beyond these the rule is exact to 1e-10. */
-const ENOUGH_FOR_8 = 2.3
-const ENOUGH_FOR_16 = 1.35
+const ENOUGH_FOR_8 = 1.9
+const ENOUGH_FOR_16 = 1.2
 const DEEPEST = 30
 
 // Velocity a·t² + b·t + c of the curve being measured, and the two complex zeros of its speed. Module state instead of
@@ -51,7 +50,6 @@ const load = (s: CubicSegment): void => {
   by = 2 * (my - cy)
   ax = cx - 2 * mx + 3 * (to.x - control2.x)
   ay = cy - 2 * my + 3 * (to.y - control2.y)
-  findZeros()
 }
 
 /** Zeros of (ax + i·ay)t² + (bx + i·by)t + (cx + i·cy); a zero at infinity stands far away. */
@@ -138,6 +136,7 @@ export const segmentLength = (segment: Segment): number => {
     return Math.sqrt(x * x + y * y)
   }
   load(segment)
+  findZeros()
   return measure(0, 1, DEEPEST)
 }
 
@@ -147,18 +146,48 @@ export const lengthTo = (segment: Segment, t: number): number => {
   if (t >= 1) return segmentLength(segment)
   if (segment.kind === 'line') return segmentLength(segment) * t
   load(segment)
+  findZeros()
   return measure(0, t, DEEPEST)
 }
 
-/** Parameters in equal steps, for each the length so far: where a search for a distance starts. */
-const STEPS = 8
+/** Equal steps of the parameter, for each of which the length so far and the speed are kept: where a search starts. */
+const STEPS = 4
+/** A table holds the lengths, then the speeds, then the two zeros of the speed. */
+const SPEEDS = STEPS + 1
+const ZEROS = SPEEDS + STEPS + 1
+const SIZE = ZEROS + 4
+/** The last few curves asked about: a draft asks for several places on one and then never more. */
+const KEPT = 16
+const tables = new Float64Array(KEPT * SIZE)
+const keys: (CubicSegment | undefined)[] = new Array<CubicSegment | undefined>(KEPT).fill(undefined)
+let oldest = 0
 
-/** Of the loaded curve. */
-const tableOf = recent((_segment: CubicSegment): Float64Array => {
-  const table = new Float64Array(STEPS + 1)
-  for (let i = 1; i <= STEPS; i++) table[i] = table[i - 1]! + measure((i - 1) / STEPS, i / STEPS, DEEPEST)
-  return table
-})
+/** Loads a curve and answers where its table starts. */
+const loadWithTable = (segment: CubicSegment): number => {
+  load(segment)
+  for (let k = 0; k < KEPT; k++) {
+    if (keys[k] !== segment) continue
+    const at = k * SIZE
+    r1 = tables[at + ZEROS]!
+    i1 = tables[at + ZEROS + 1]!
+    r2 = tables[at + ZEROS + 2]!
+    i2 = tables[at + ZEROS + 3]!
+    return at
+  }
+  const at = oldest * SIZE
+  keys[oldest] = segment
+  oldest = (oldest + 1) % KEPT
+  findZeros()
+  tables[at + ZEROS] = r1
+  tables[at + ZEROS + 1] = i1
+  tables[at + ZEROS + 2] = r2
+  tables[at + ZEROS + 3] = i2
+  let sum = 0
+  tables[at] = 0
+  for (let i = 1; i <= STEPS; i++) tables[at + i] = sum += measure((i - 1) / STEPS, i / STEPS, DEEPEST)
+  for (let i = 0; i <= STEPS; i++) tables[at + SPEEDS + i] = speedAt(i / STEPS)
+  return at
+}
 
 const speedAt = (t: number): number => {
   const x = (ax * t + bx) * t + cx
@@ -176,18 +205,38 @@ export const parameterAt = (segment: Segment, distance: number): number => {
     const whole = segmentLength(segment)
     return distance >= whole ? 1 : distance / whole
   }
-  load(segment)
-  const table = tableOf(segment)
-  if (distance >= table[STEPS]!) return 1
+  const table = loadWithTable(segment)
+  if (distance >= tables[table + STEPS]!) return 1
   let i = 0
-  while (table[i + 1]! <= distance) i++
-  return solve(i / STEPS, (i + 1) / STEPS, table[i]!, table[i + 1]!, distance)
+  while (tables[table + i + 1]! <= distance) i++
+  const at = table + i
+  const speeds = at + SPEEDS
+  return solve(i / STEPS, tables[at]!, tables[at + 1]!, tables[speeds]!, tables[speeds + 1]!, distance)
 }
 
-const solve = (from: number, to: number, before: number, after: number, distance: number): number => {
+/** The parameter by the lengths and speeds at both ends of its step: a cubic through the inverse of the length. */
+const guess = (share: number, width: number, length: number, speed: number, next: number): number => {
+  const steepest = (3 * width) / length
+  const m0 = speed * steepest > 1 ? 1 / speed : steepest
+  const m1 = next * steepest > 1 ? 1 / next : steepest
+  const rest = 1 - share
+  return share * share * (3 - 2 * share) * width + share * rest * length * (rest * m0 - share * m1)
+}
+
+const solve = (
+  from: number,
+  before: number,
+  after: number,
+  speedBefore: number,
+  speedAfter: number,
+  distance: number,
+): number => {
+  const to = from + 1 / STEPS
+  const length = after - before
+  const slow = 0.2 * length * STEPS
   let low = from
   let high = to
-  let t = low + ((high - low) * (distance - before)) / (after - before)
+  let t = from + guess((distance - before) / length, 1 / STEPS, length, speedBefore, speedAfter)
   // Length is measured from the last accepted parameter on, so that each step integrates a shorter stretch.
   let base = from
   let reached = before
@@ -198,13 +247,13 @@ const solve = (from: number, to: number, before: number, after: number, distance
     const miss = reached - distance
     if (miss > 0) high = t
     else low = t
-    const speed = speedAt(t)
-    const step = speed > 0 ? miss / speed : Infinity
     // Second order: the speed at the middle of the step stands for the whole of it.
-    const middle = t - step / 2
-    const next = middle > from && middle < to ? t - miss / speedAt(middle) : t - step
-    if (Math.abs(miss) < 1e-9) return next > low && next < high ? next : t
-    t = next > low && next < high ? next : (low + high) / 2
+    const speed = speedAt(t)
+    const middle = t - miss / (2 * speed)
+    const next = middle > from && middle < to ? t - miss / speedAt(middle) : t
+    const sound = next >= low && next <= high
+    if (Math.abs(miss) < 1e-9 || (Math.abs(miss) < 1e-3 && speed > slow && sound)) return sound ? next : t
+    t = sound && next !== t ? next : (low + high) / 2
     if (high - low < 1e-15) return t
   }
   return t
