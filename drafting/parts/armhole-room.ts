@@ -42,6 +42,9 @@ export function deepenArmhole(pen: Pen, side: Point): void {
     'shoulderSlope',
     'armholeDepth',
     'quarterBust',
+    'frontHollowIn',
+    'backHollowIn',
+    'flareAngle',
   ])
   if (more === undefined) {
     pen.refuse({
