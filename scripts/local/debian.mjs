@@ -3,7 +3,7 @@ import { attempt, findCommand, run } from './processes.mjs'
 import { say, SetUpError } from './say.mjs'
 
 /** Commands that running or testing needs, with the Debian package that brings each. */
-export const needs = {
+const needs = {
   mariadbd: 'mariadb-server',
   'mariadb-dump': 'mariadb-client',
   chromium: 'chromium',
@@ -13,13 +13,14 @@ export const needs = {
 
 /**
  * Installs the packages of those commands that are missing.
- * @param {(keyof typeof needs)[]} commands
+ * @param {string[]} commands
+ * @param {Record<string, string>} packageOf
  * @throws {SetUpError} naming the line to type when this account may not install, or this is not Debian
  */
-export async function ensureCommands(commands) {
+export async function ensureCommands(commands, packageOf = needs) {
   const missing = commands.filter((command) => !findCommand(command))
   if (missing.length === 0) return
-  const packages = [...new Set(missing.map((command) => needs[command]))]
+  const packages = [...new Set(missing.map((command) => packageOf[command]))]
   const byHand = `Missing: ${missing.join(', ')}. Install with: sudo apt-get install --no-install-recommends ${packages.join(' ')}`
   if (!existsSync('/etc/debian_version') || !findCommand('apt-get')) {
     throw new SetUpError(
@@ -46,5 +47,5 @@ async function installer() {
   if (process.getuid?.() === 0) return []
   if (!findCommand('sudo')) return undefined
   const { code } = await attempt('sudo', ['-n', 'true'])
-  return code === 0 ? ['sudo', '-n'] : undefined
+  return code === 0 ? ['sudo', '-n', 'env', 'DEBIAN_FRONTEND=noninteractive'] : undefined
 }

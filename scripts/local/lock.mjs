@@ -1,7 +1,7 @@
 import { mkdirSync, rmSync, writeFileSync } from 'node:fs'
 import { dirname } from 'node:path'
 import { readJson } from './json-file.mjs'
-import { isAlive } from './processes.mjs'
+import { beginningOf, isAlive } from './processes.mjs'
 
 /**
  * Takes a folder or a task for this process. A lock left by a process that has died is taken over.
@@ -12,21 +12,26 @@ export function takeLock(path) {
   mkdirSync(dirname(path), { recursive: true, mode: 0o700 })
   for (let attempt = 0; attempt < 2; attempt++) {
     try {
-      writeFileSync(path, JSON.stringify({ pid: process.pid }), { flag: 'wx', mode: 0o600 })
+      writeFileSync(path, JSON.stringify({ pid: process.pid, began: beginningOf(process.pid) }), {
+        flag: 'wx',
+        mode: 0o600,
+      })
       return { release: () => rmSync(path, { force: true }) }
     } catch (error) {
       if (error.code !== 'EEXIST') throw error
     }
-    const holder = holderOf(path)
-    if (holder !== undefined && isAlive(holder)) return { holder }
+    const holder = livingHolder(path)
+    if (holder !== undefined) return { holder }
     rmSync(path, { force: true })
   }
-  return { holder: holderOf(path) ?? 0 }
+  return { holder: livingHolder(path) ?? 0 }
 }
 
-function holderOf(path) {
+/** Id of the process that has the lock, unless it has died and, perhaps, its number gone to another. */
+function livingHolder(path) {
   try {
-    return readJson(path)?.pid
+    const { pid, began } = readJson(path)
+    return isAlive(pid) && beginningOf(pid) === began ? pid : undefined
   } catch {
     return undefined
   }

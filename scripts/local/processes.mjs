@@ -68,6 +68,18 @@ export function isAlive(pid) {
   }
 }
 
+/**
+ * What tells a process from a later one that got the same number: when it began, in the system's own count.
+ * Undefined where the system does not say.
+ */
+export function beginningOf(pid) {
+  try {
+    return readFileSync(`/proc/${pid}/stat`, 'utf8').split(') ').at(-1).split(' ')[19]
+  } catch {
+    return undefined
+  }
+}
+
 /** Asks a process to end, waits, and kills it when it has not ended in time. */
 export async function endProcess(pid, { patience = 20_000, group = false } = {}) {
   const target = group ? -pid : pid

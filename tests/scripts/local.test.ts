@@ -45,7 +45,13 @@ describe('lock', () => {
     const path = join(folder, 'x.lock')
     writeFileSync(path, JSON.stringify({ pid: 2 ** 22 + 1 }))
     expect(takeLock(path)).toHaveProperty('release')
-    expect(JSON.parse(readFileSync(path, 'utf8'))).toEqual({ pid: process.pid })
+    expect(JSON.parse(readFileSync(path, 'utf8'))).toMatchObject({ pid: process.pid })
+  })
+
+  test('one whose number has gone to another process since is taken over', () => {
+    const path = join(folder, 'x.lock')
+    writeFileSync(path, JSON.stringify({ pid: process.pid, began: '1' }))
+    expect(takeLock(path)).toHaveProperty('release')
   })
 })
 
