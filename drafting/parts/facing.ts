@@ -8,6 +8,8 @@ import {
   startOf,
   startTangent,
   unit,
+  cross,
+  endTangent,
 } from '../geometry'
 import type { Pen } from '../pen/pen'
 import { between, straight, type PiecePen } from '../pen/piece-pen'
@@ -19,14 +21,16 @@ import { trimBetween } from './trim'
 const down = { x: 0, y: 1 }
 
 /**
- * The outer edge of a band of even depth beside a neckline, from the centre to the shoulder. It leaves the shoulder exactly
- * at the depth, so that front and back facing meet there. Where the neckline bends too sharply for an even band, the outer
+ * The outer edge of a band of even depth beside a neckline, from the centre to the shoulder. It meets the shoulder at
+ * exactly the same distance in front and back. Where the neckline bends too sharply for an even band, the outer
  * edge is a plain neck curve of its own.
  */
 function evenBand(neckline: Path, depth: number, body: PiecePen, shoulder: Point): Path {
   const centre = body.at('centreNeck')
   const side = body.at('sideNeck')
-  const end = { x: side.x + shoulder.x * depth, y: side.y + shoulder.y * depth }
+  // A neckline that is not square to the shoulder crosses it slanting; front and back do so alike, so they still meet.
+  const along = depth / Math.abs(cross(shoulder, endTangent(neckline)))
+  const end = { x: side.x + shoulder.x * along, y: side.y + shoulder.y * along }
   const beside = offsetPath(neckline, -depth)
   const even = beside.clipped
     ? undefined

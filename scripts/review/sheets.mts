@@ -1,0 +1,55 @@
+import { join } from 'node:path'
+import sharp from 'sharp'
+import { draftGarment, drawing, type DraftOrder } from '../../drafting'
+import { arrange, patternLayers, toSvg } from '../../drafting/drawing'
+import { sanityBodies } from '../../tests/support/bodies'
+
+const folder = process.argv[2] ?? '.'
+
+/** Two invented bodies, the ends of the published sizes, and one beyond them. mm */
+const bodies: Readonly<Record<string, DraftOrder['measurements']>> = {
+  one: sanityBodies.one,
+  two: sanityBodies.two,
+  smallest: { bust: 791, waist: 606, hip: 856, neckBase: 337 },
+  largest: { bust: 1520, waist: 1360, hip: 1550 },
+  beyond: { bust: 1640, waist: 1700, hip: 1600, height: 1500 },
+}
+
+const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design']>>>> = {
+  'flared-dress': {
+    default: {},
+    flaredSleeve: { sleeve: 'flared', neckShape: 'V', neckWidening: 20 },
+    bare: { sleeve: 'none', neckShape: 'boat', hemWay: 'swung' },
+    square: { neckShape: 'square', frontNeckDrop: 40, neckWidening: 30, sleeveLength: 560, flare: 0.125 },
+    narrowShoulder: { sleeve: 'none', neckWidening: 70, frontNeckDrop: 80, backOpening: 'none', flare: 0.5 },
+  },
+  'circle-skirt': {
+    default: {},
+    full: { share: '1', panels: 4, pockets: true },
+    wide: { share: '1 1/2', panels: 3, waistband: false },
+    quarter: { share: '1/4', panels: 1 },
+  },
+}
+
+const layers = [...patternLayers, 'construction', 'dimension'] as const
+
+for (const [garment, ways] of Object.entries(styles)) {
+  for (const [way, design] of Object.entries(ways)) {
+    for (const [body, measurements] of Object.entries(bodies)) {
+      const name = `${garment}-${way}-${body}`
+      try {
+        const draft = draftGarment({ garment, measurements, design, unit: 'cm' })
+        const sheet = drawing(draft, { places: arrange(draft), unit: 'cm', layers, title: { name } })
+        const svg = Buffer.from(toSvg(sheet, { title: name }))
+        await sharp(svg, { density: 30, limitInputPixels: false })
+          .resize({ width: 1800 })
+          .flatten({ background: '#fffdf8' })
+          .png()
+          .toFile(join(folder, `${name}.png`))
+        console.log(name, draft.cautions.map((caution) => caution.code).join(' '))
+      } catch (error) {
+        console.log(name, 'refused:', error instanceof Error ? error.message : error)
+      }
+    }
+  }
+}
