@@ -40,6 +40,8 @@ export function proxy(request: NextRequest): NextResponse {
   const headers = new Headers(request.headers)
   headers.set('x-nonce', nonce)
   headers.set('content-security-policy', policy)
+  // For the way back after signing in.
+  headers.set('x-page', `${request.nextUrl.pathname}${request.nextUrl.search}`)
   const response = NextResponse.next({ request: { headers } })
   response.headers.set('content-security-policy', policy)
   response.headers.set('x-content-type-options', 'nosniff')

@@ -38,14 +38,17 @@ describe('signing in', () => {
   it('takes about as long for an unknown address as for a known one', async () => {
     const { email } = await person()
     const [known, unknown]: [number[], number[]] = [[], []]
-    for (let each = 0; each < 8; each += 1) {
+    for (let each = 0; each < 20; each += 1) {
+      await forgetTries()
       known.push(await timed(() => signIn({ email, password: wrong }, place())))
-      unknown.push(await timed(() => signIn({ email: 'nobody@people.example', password: wrong }, place())))
+      unknown.push(
+        await timed(() => signIn({ email: `${newId()}@people.example`, password: wrong }, place())),
+      )
     }
     // The quickest of each: a busy machine makes some slower, never quicker.
     const ratio = Math.min(...unknown) / Math.min(...known)
-    expect(ratio).toBeGreaterThan(0.6)
-    expect(ratio).toBeLessThan(1.7)
+    expect(ratio).toBeGreaterThan(0.5)
+    expect(ratio).toBeLessThan(2)
   })
 })
 

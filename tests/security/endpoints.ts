@@ -20,8 +20,8 @@ export interface Endpoint {
   readonly access: Access
   /** A right input (of a GET: its query), naming things of the workroom. New for each call. */
   readonly input: (things: Things) => Record<string, unknown>
-  /** What the other roles of the workroom meet: forbidden, unless the thing is merely out of their reach. */
-  readonly otherRoles?: 'not-found'
+  /** Other roles are forbidden it; to these the thing is merely out of reach, and so does not exist. */
+  readonly outOfReach?: readonly Role[]
   /** What a stranger's owner meets: 'not-found' when the input names things, 'own' when it only touches their own workroom. */
   readonly stranger?: 'not-found' | 'own'
   /** Of a route handler: the address, with the things in it. */
@@ -54,15 +54,57 @@ export const endpoints: Readonly<Record<string, Endpoint>> = {
   },
   'GET /api/revisions/[id]/pattern.pdf': {
     access: drafters,
-    otherRoles: 'not-found',
+    outOfReach: ['tutor', 'maker', 'student'],
     input: () => ({ paper: 'a4' }),
     path: ({ headId }) => `/api/revisions/${headId}/pattern.pdf`,
   },
   'GET /api/revisions/[id]/pattern.svg': {
     access: drafters,
-    otherRoles: 'not-found',
+    outOfReach: ['tutor', 'maker', 'student'],
     input: nothing,
     path: ({ headId }) => `/api/revisions/${headId}/pattern.svg`,
+  },
+  'GET /api/drafts/[id]/revisions': {
+    access: drafters,
+    outOfReach: ['tutor', 'maker', 'student'],
+    input: nothing,
+    path: ({ draftId }) => `/api/drafts/${draftId}/revisions`,
+  },
+  'POST /api/drafts/[id]/revisions': {
+    access: drafters,
+    outOfReach: ['tutor', 'student'],
+    input: ({ headId }) => ({
+      revisionId: newId(),
+      basedOn: headId,
+      order: { garment: 'flared-dress', measurements: { bust: 930 } },
+      typed: {},
+      kind: 'auto',
+    }),
+    path: ({ draftId }) => `/api/drafts/${draftId}/revisions`,
+  },
+  'GET /api/drafts/[id]/revisions/[revisionId]': {
+    access: drafters,
+    outOfReach: ['tutor', 'maker', 'student'],
+    input: nothing,
+    path: ({ draftId, headId }) => `/api/drafts/${draftId}/revisions/${headId}`,
+  },
+  'GET /api/drafts/[id]/shares': {
+    access: drafters,
+    outOfReach: ['tutor'],
+    input: nothing,
+    path: ({ draftId }) => `/api/drafts/${draftId}/shares`,
+  },
+  'POST /api/drafts/[id]/shares': {
+    access: drafters,
+    outOfReach: ['tutor'],
+    input: () => ({ shareId: newId(), scope: 'drawing', expiresOn: '2027-03-01' }),
+    path: ({ draftId }) => `/api/drafts/${draftId}/shares`,
+  },
+  'DELETE /api/drafts/[id]/shares/[shareId]': {
+    access: drafters,
+    outOfReach: ['tutor'],
+    input: nothing,
+    path: ({ draftId, shareId }) => `/api/drafts/${draftId}/shares/${shareId}`,
   },
   'GET /api/shared/[token]': {
     access: 'anybody',
@@ -149,5 +191,50 @@ export const endpoints: Readonly<Record<string, Endpoint>> = {
       'allowances.hem': '1',
     }),
     stranger: 'own',
+  },
+
+  'app/(workroom)/clients/actions.ts#saveClient': {
+    access: drafters,
+    input: ({ clientId }) => ({
+      id: clientId,
+      name: 'Renamed',
+      email: '',
+      phone: '',
+      note: '',
+      isNew: false,
+    }),
+  },
+  'app/(workroom)/clients/actions.ts#archiveClient': {
+    access: drafters,
+    input: ({ clientId }) => ({ id: clientId, archived: true }),
+  },
+  'app/(workroom)/cards/actions.ts#saveCard': {
+    access: drafters,
+    input: ({ clientId }) => ({
+      id: newId(),
+      clientId,
+      name: 'Second fitting',
+      takenOn: '2026-11-20',
+      unit: 'in',
+      note: '',
+      values: {},
+      isNew: true,
+    }),
+  },
+  'app/(workroom)/drafts/actions.ts#startDraft': {
+    access: drafters,
+    outOfReach: ['maker', 'student'],
+    input: ({ cardId }) => ({
+      id: newId(),
+      revisionId: newId(),
+      name: 'Another dress',
+      garment: 'flared-dress',
+      cardId,
+    }),
+  },
+  'app/(workroom)/drafts/actions.ts#renameDraft': {
+    access: drafters,
+    outOfReach: ['tutor', 'student'],
+    input: ({ draftId }) => ({ id: draftId, name: 'Renamed' }),
   },
 }

@@ -49,14 +49,14 @@ function kindOf({ answer, status }: Reply): string {
   return 'through'
 }
 
-function expected(caller: Caller, { access, stranger, otherRoles }: Endpoint): string {
+function expected(caller: Caller, { access, stranger, outOfReach = [] }: Endpoint): string {
   if (access === 'anybody') return 'through'
   if (caller === 'anonymous') return 'not signed in'
   if (access === 'signed-in') return stranger === 'not-found' ? 'not found' : 'through'
   if (caller === 'expelled') return 'forbidden'
   if (caller === 'stranger') return stranger === 'own' ? 'through' : 'not found'
   if (access.includes(caller)) return 'through'
-  return otherRoles === 'not-found' ? 'not found' : 'forbidden'
+  return outOfReach.includes(caller) ? 'not found' : 'forbidden'
 }
 
 const all = Object.entries(endpoints)
