@@ -9,7 +9,7 @@ import { mitre, step } from './mitre'
 import type { OutlineDart, OutlineEdge, Side, Turn } from './outline-edge'
 import { square } from './square'
 import { turned } from './turned'
-import { untangle } from './untangle'
+import { isSound, untangle } from './untangle'
 
 export type { OutlineDart, OutlineEdge } from './outline-edge'
 
@@ -43,7 +43,9 @@ export const cutLine = (edges: readonly OutlineEdge[], darts: readonly OutlineDa
     cuts.push(cutOf(hasOwnCut(sides[i]!) ? sides[i] : undefined, turn, next))
   }
   const line = joined(cuts)
-  if (!tangled && selfIntersections(line).length === 0) return { cuts, cutLine: line, clipped: [...clipped] }
+  // Where no allowance fell short the parallels and corners cannot leave the stitch line outside: only crossings are left.
+  const sound = !tangled && (clipped.size > 0 ? isSound(sides, cuts) : selfIntersections(line).length === 0)
+  if (sound) return { cuts, cutLine: line, clipped: [...clipped] }
   const loose = untangle(sides, cuts)
   for (const id of loose.clipped) clipped.add(id)
   return { cuts: loose.cuts, cutLine: joined(loose.cuts), clipped: [...clipped] }

@@ -1,6 +1,7 @@
 import type { Point, Segment } from '../contract'
 import { intersections } from '../geometry/intersect'
-import { subtract, unit } from '../geometry/point'
+import { endOf, pathLength, startOf } from '../geometry/path'
+import { distance, subtract, unit } from '../geometry/point'
 import { line } from '../geometry/segment'
 import { meetLine } from './meet-line'
 import { MITRE_LIMIT, type Side, type Turn } from './outline-edge'
@@ -20,7 +21,7 @@ export const mitre = (a: Side, b: Side, at: Point): Turn => {
     const inner = innerCorner(a, b)
     if (inner) return inner
   }
-  if (Math.abs(turn) < 1e-9) return along > 0 ? stepOrAcross(a, b, at) : bevel(a, b)
+  if (Math.abs(turn) < 1e-9) return along > 0 ? stepOrAcross(a, b, at) : bevel(a, b, at, a.arriving)
   const ahead = (dx * b.leaving.y - dy * b.leaving.x) / turn
   const back = (a.arriving.x * dy - a.arriving.y * dx) / turn
   // A joint that is met to within rounding is met.
@@ -32,7 +33,7 @@ export const mitre = (a: Side, b: Side, at: Point): Turn => {
       : { x: a.end.x + a.arriving.x * ahead, y: a.end.y + a.arriving.y * ahead }
   const limit = MITRE_LIMIT * Math.max(a.allowance, b.allowance)
   if (Math.hypot(meet.x - at.x, meet.y - at.y) > limit + 1e-9)
-    return turn > 0 ? bevel(a, b) : stepOrAcross(a, b, at)
+    return turn > 0 ? bevel(a, b, at, subtract(meet, at)) : stepOrAcross(a, b, at)
   return { joint: meet, lead: [line(meet, b.start)] }
 }
 
@@ -43,7 +44,11 @@ const straightOn = (a: Side, b: Side): Turn => ({ joint: b.allowance === 0 ? b.s
 const innerCorner = (a: Side, b: Side): Turn | undefined => {
   const found = intersections(a.offset, b.offset)
   const one = found[found.length - 1]
-  return one && { joint: one.point, leave: one.a, lead: [], enter: one.b }
+  if (!one) return undefined
+  // Two edges that make a whole piece meet at their other corner too.
+  const ring = distance(startOf(a.edge.path), endOf(b.edge.path)) < SAME
+  if (ring && one.a < pathLength(a.offset) / 2) return undefined
+  return { joint: one.point, leave: one.a, lead: [], enter: one.b }
 }
 
 /** One side is cut back by the other's straight continuation, unless that would take more than the mitre's limit. */
@@ -67,21 +72,17 @@ const behind = (p: Point, side: Side): boolean =>
 const ahead = (p: Point, side: Side): boolean =>
   (p.x - side.end.x) * side.arriving.x + (p.y - side.end.y) * side.arriving.y >= 0
 
-/** A sharp corner cut off at 2.5 × the larger allowance, square to its bisector. */
-const bevel = (a: Side, b: Side): Turn => {
+/**
+ * A sharp corner cut off at 2.5 × the larger allowance, square to the line from the corner to where the mitre would be: with
+ * equal allowances the bisector.
+ */
+const bevel = (a: Side, b: Side, at: Point, towardsMitre: Point): Turn => {
   const limit = MITRE_LIMIT * Math.max(a.allowance, b.allowance)
-  // The bisector points out of the corner.
-  let ux = a.arriving.x - b.leaving.x
-  let uy = a.arriving.y - b.leaving.y
-  const size = Math.hypot(ux, uy)
-  if (size < 1e-9) return straightOn(a, b)
-  ux /= size
-  uy /= size
-  const cornerA = { x: a.end.x - a.arriving.y * a.allowance, y: a.end.y + a.arriving.x * a.allowance }
-  const outA = (a.end.x - cornerA.x) * ux + (a.end.y - cornerA.y) * uy
-  const outB = (b.start.x - cornerA.x) * ux + (b.start.y - cornerA.y) * uy
-  const runA = Math.max(0, (limit - outA) / (a.arriving.x * ux + a.arriving.y * uy))
-  const runB = Math.max(0, (limit - outB) / -(b.leaving.x * ux + b.leaving.y * uy))
+  const { x, y } = unit(towardsMitre)
+  const outA = (a.end.x - at.x) * x + (a.end.y - at.y) * y
+  const outB = (b.start.x - at.x) * x + (b.start.y - at.y) * y
+  const runA = Math.max(0, (limit - outA) / (a.arriving.x * x + a.arriving.y * y))
+  const runB = Math.max(0, (limit - outB) / -(b.leaving.x * x + b.leaving.y * y))
   const first = { x: a.end.x + a.arriving.x * runA, y: a.end.y + a.arriving.y * runA }
   const second = { x: b.start.x - b.leaving.x * runB, y: b.start.y - b.leaving.y * runB }
   return { joint: first, lead: [line(first, second), line(second, b.start)] }

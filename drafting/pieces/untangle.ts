@@ -3,7 +3,7 @@ import { lengthsOf, pathLength, tangentOn } from '../geometry/along'
 import { flatten } from '../geometry/flatten'
 import { selfIntersections, type Intersection } from '../geometry/intersect'
 import { nearestOn } from '../geometry/nearest'
-import { containsPoint, isClockwise, openPath, polyline, slicePath } from '../geometry/path'
+import { containsPoint, isClockwise, openPath, polyline, slicePath, startOf } from '../geometry/path'
 import { line } from '../geometry/segment'
 import { largest, sweptAreas, unionOf } from '../geometry/swept'
 import type { Side } from './outline-edge'
@@ -154,8 +154,8 @@ const stitched = (cuts: readonly Path[]): Path[] => {
   })
 }
 
-/** Simple, clockwise and around every corner and middle of the stitch edges that it does not run along. */
-const isSound = (sides: readonly Side[], cuts: readonly Path[]): boolean => {
+/** Simple, clockwise, and around the stitch line wherever it does not run along it. */
+export const isSound = (sides: readonly Side[], cuts: readonly Path[]): boolean => {
   const path: Path = { segments: cuts.flatMap((cut) => cut.segments), closed: true }
   if (!isClockwise(path) || selfIntersections(path).length > 0) return false
   for (const { edge } of sides) {
@@ -174,7 +174,7 @@ const swept = (sides: readonly Side[], cuts: readonly Path[]): Untangled => {
   )
   const rim = largest(unionOf([outline, ...areas]))
   if (rim.length < 3) return { cuts, clipped: sides.map(({ edge }) => edge.id) }
-  const starts = cuts.map((cut) => nearestIndex(rim, cut.segments[0]!.from))
+  const starts = sides.map(({ edge }) => nearestIndex(rim, startOf(edge.path)))
   const origin = starts[0]!
   let at = 0
   const places = starts.map((start) => {

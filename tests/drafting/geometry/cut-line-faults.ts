@@ -29,7 +29,10 @@ export const cutLineFaults = (shape: Shape, { cuts, cutLine, clipped }: CutLine)
     const mitred = edge.startCorner === 'mitre' && after.startCorner === 'mitre'
     const widest = Math.max(before.allowance, edge.allowance, after.allowance)
     const margin = (mitred ? 2.6 : 4) * widest + 1
-    faults.push(...allowanceFaults(edge.id, edge.path, edge.allowance, cuts[index]!, margin))
+    const others = shape.edges.filter((one) => one !== edge && one.allowance > 0)
+    const taken = (p: Point): boolean =>
+      others.some((one) => gapTo(dense(one.path, 1), p) < one.allowance - TOLERANCE)
+    faults.push(...allowanceFaults(edge.id, edge.path, edge.allowance, cuts[index]!, margin, taken))
   })
   return faults
 }
@@ -52,8 +55,15 @@ const jointFaults = (cuts: readonly Path[], cutLine: Path): string[] => {
   return faults
 }
 
-/** Away from its corners an edge's cut is the allowance from it, all along. */
-const allowanceFaults = (id: string, path: Path, allowance: number, cut: Path, margin: number): string[] => {
+/** Away from its corners an edge's cut is the allowance from it, all along, save where another's allowance covers it. */
+const allowanceFaults = (
+  id: string,
+  path: Path,
+  allowance: number,
+  cut: Path,
+  margin: number,
+  taken: (p: Point) => boolean,
+): string[] => {
   const stitch = dense(path, 0.5)
   const from = stitch[0]!
   const to = stitch[stitch.length - 1]!
@@ -64,7 +74,7 @@ const allowanceFaults = (id: string, path: Path, allowance: number, cut: Path, m
   for (const { at, from: foot } of parallelPoints(path, allowance, 3)) {
     if (!clear(at) || !clear(foot) || gapTo(stitch, at) < allowance - 0.005) continue
     const gap = gapTo(own, at)
-    if (gap > TOLERANCE)
+    if (gap > TOLERANCE && !taken(at))
       return [...faults, `the cut of ${id} is ${gap.toFixed(3)} from where it belongs, ${place(at)}`]
   }
   for (const p of own) {
