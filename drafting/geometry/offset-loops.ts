@@ -41,14 +41,19 @@ export const trimLoops = (
   const path: Path = { segments, closed: false }
   const ends = lengthsOf(path)
   const reach = Math.abs(distance)
-  const meetings = selfIntersections(path).filter((one) => isOutside(source, one.point, distance))
+  // The two square ends of a ring lie on one another: that is where it closes.
+  const ring = Math.abs(first.x - last.x) + Math.abs(first.y - last.y) < 1e-6
+  const far = pathLength(path) - reach
+  const meetings = selfIntersections(path).filter(
+    (one) => !(ring && one.a < reach + 1e-6 && one.b > far - 1e-6) && isOutside(source, one.point, distance),
+  )
   const stretches: Path[] = []
   let clipped = false
   let bridges = raw.gaps.length
   let at = 0
   let next = firstFrom(meetings, at)
   let start = reach
-  let end = pathLength(path) - reach
+  let end = far
   // Where the path is too tight at its very end, and no loop closes there, the parallel starts beyond the stretch.
   if (raw.gaps[0]?.index === 0 && (!next || next.a > ends[1]! - 1e-6)) {
     start = at = ends[1]!

@@ -165,6 +165,7 @@ describe('corners of a cut line', () => {
     const { cutLine: path } = cutLine([
       shapes.edge('ring', 'seam', geometry.arcPath(p(0, 0), 50, 0, 360), 10),
     ])
+    expect(Math.abs(geometry.signedArea(path) / 3600 - Math.PI)).toBeLessThan(0.001)
     for (const at of dense(path, 1)) expect(Math.abs(geometry.magnitude(at) - 60)).toBeLessThan(0.02)
   })
 })
