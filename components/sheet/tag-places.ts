@@ -42,6 +42,19 @@ const seats = [
   [0.8, 1],
   [0.8, -1],
 ] as const
+
+/** Ways out from the middle of a line that is too short for its tag. */
+const aside = [
+  [0, -1],
+  [1, 0],
+  [-1, 0],
+  [0, 1],
+  [1, -1],
+  [-1, -1],
+  [1, 1],
+  [-1, 1],
+] as const
+const reaches = [10, 22, 34]
 const gap = 2
 
 /**
@@ -59,13 +72,29 @@ export function placeTags(
   return wishes.map((wish) => {
     const middle = boxAt(wish, 0.5, 0, 0, 0)
     const held = frame && within(middle, frame) ? frame : undefined
-    const open = seats
-      .map(([share, side]) => boxAt(wish, share, side, wish.width, wish.height))
-      .find((box) => (!held || within(box, held)) && !full.some((other) => overlaps(box, other)))
-    const box = open ?? boxAt(wish, 0.5, 0, foldedSize, foldedSize)
+    const free = (box: Box) => (!held || within(box, held)) && !full.some((other) => overlaps(box, other))
+    const open = candidates(wish, wish.width, wish.height).find(free)
+    const box =
+      open ??
+      candidates(wish, foldedSize, foldedSize).find(free) ??
+      boxAt(wish, 0.5, 0, foldedSize, foldedSize)
     full.push(box)
     return { id: wish.id, x: box.x, y: box.y, folded: !open }
   })
+}
+
+/** Every box a tag of this size would take, the best first. */
+function candidates(wish: TagWish, width: number, height: number): readonly Box[] {
+  const own = seats.map(([share, side]) => boxAt(wish, share, side, width, height))
+  const middle = boxAt(wish, 0.5, 0, width, height)
+  const near = reaches.flatMap((reach) =>
+    aside.map(([x, y]) => ({
+      ...middle,
+      x: middle.x + x * (width / 2 + reach),
+      y: middle.y + y * (height / 2 + reach),
+    })),
+  )
+  return [...own, ...near]
 }
 
 function boxAt(wish: TagWish, share: number, side: number, width: number, height: number): Box {

@@ -96,7 +96,7 @@ export const ValueTag = memo(function ValueTag({
           aria-describedby={field.problem ? `${id}-problem` : undefined}
           className={classes(
             frame,
-            'measure min-h-6 px-1.5 text-center leading-5 focus:border-indigo',
+            'measure min-h-6 min-w-10 px-2 text-center leading-5 [field-sizing:content] focus:border-indigo',
             'group-data-folded:not-focus:w-6 group-data-folded:not-focus:rounded-full group-data-folded:not-focus:px-0 group-data-folded:not-focus:text-[0px]',
           )}
         />

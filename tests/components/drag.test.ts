@@ -49,8 +49,18 @@ describe('tags on the drawing', () => {
     expect(Math.abs((first?.y ?? 0) - (second?.y ?? 0))).toBeGreaterThanOrEqual(26)
   })
 
-  it('fold into a dot when the line has no room for them', () => {
-    const places = placeTags([wish('a', 100, 20), wish('b', 110, 20), wish('c', 120, 20)])
-    expect(places.map((place) => place.folded)).toEqual([false, true, true])
+  it('fold into a dot when there is no room near their line', () => {
+    const crowd = Array.from({ length: 40 }, (_, index) => wish(`tag ${index}`, 100 + index, 20))
+    const places = placeTags(crowd)
+    expect(places[0]?.folded).toBe(false)
+    expect(places.at(-1)?.folded).toBe(true)
+  })
+
+  it('leave points free and stay inside the window', () => {
+    const point = { x: 92, y: 92, width: 16, height: 16 }
+    const [place] = placeTags([wish('a', 100, 200)], [point], { width: 140, height: 300 })
+    expect(place?.folded).toBe(false)
+    expect(place && (place.y + 26 <= 92 || place.y >= 108)).toBe(true)
+    expect(place && place.x >= 0 && place.x + 50 <= 140).toBe(true)
   })
 })

@@ -1,7 +1,5 @@
-import { Scissors } from 'lucide-react'
 import type { Metadata } from 'next'
 import { forPage, requireActor } from '@/app/_server/session'
-import { ButtonLink } from '@/components/ui/button'
 import { Page } from '@/components/ui/page'
 import { getCard } from '@/db/access/cards'
 import { getClient } from '@/db/access/clients'
@@ -23,23 +21,13 @@ export default async function CardPage({ params }: { params: Promise<{ id: strin
       ]
     : [{ href: '/cards', label: 'My measurements' }]
   return (
-    <Page
-      title={card.name}
-      trail={trail}
-      actions={
-        may(actor, 'drafts', 'write') && (
-          <ButtonLink href={`/drafts/new?card=${id}${client ? `&client=${client.id}` : ''}`} look="primary">
-            <Scissors size={18} aria-hidden />
-            Draft from this card
-          </ButtonLink>
-        )
-      }
-    >
+    <Page title={card.name} trail={trail}>
       <CardForm
         card={card}
         isNew={false}
         readOnly={!may(actor, 'cards', 'write')}
         usual={usualMeasurements()}
+        draftable={may(actor, 'drafts', 'write')}
       />
     </Page>
   )

@@ -1,8 +1,9 @@
 'use client'
 
-import { Check } from 'lucide-react'
+import { Check, Scissors } from 'lucide-react'
 import { useCallback, useMemo, useState } from 'react'
 import { CardTape } from '@/components/tape/card-tape'
+import { ButtonLink } from '@/components/ui/button'
 import { classes } from '@/components/ui/classes'
 import { ErrorNote } from '@/components/ui/error-note'
 import { Field, TextField } from '@/components/ui/field'
@@ -43,10 +44,13 @@ export function CardForm({
   isNew,
   readOnly,
   usual,
+  draftable,
 }: {
   readonly card: OpenCard
   readonly isNew: boolean
   readonly readOnly: boolean
+  /** The person may draft from it. */
+  readonly draftable: boolean
   /** Measurements that our garments ask for; the others are shown on request. */
   readonly usual: readonly string[]
 }) {
@@ -116,15 +120,20 @@ export function CardForm({
           onChange={(event) => keep({ details: { ...details, takenOn: event.target.value } })}
         />
         <UnitChoice unit={unit} onUnit={(next) => keep({ details: { ...details, unit: next } })} />
-        {!readOnly && (
-          <p
-            role="status"
-            className={classes('ml-auto flex min-h-10 items-center gap-1.5 text-sm', tone(state))}
-          >
-            {state.kind === 'saved' && <Check size={16} aria-hidden />}
-            {words[state.kind]}
-          </p>
-        )}
+        <div className="ml-auto flex flex-wrap items-center gap-4">
+          {!readOnly && (
+            <p role="status" className={classes('flex min-h-10 items-center gap-1.5 text-sm', tone(state))}>
+              {state.kind === 'saved' && <Check size={16} aria-hidden />}
+              {words[state.kind]}
+            </p>
+          )}
+          {draftable && state.kind !== 'new' && (
+            <ButtonLink href={draftAddress(card)} look="primary">
+              <Scissors size={18} aria-hidden />
+              Draft from this card
+            </ButtonLink>
+          )}
+        </div>
       </div>
       <ErrorNote>{others.map((each) => each.message).join(' ')}</ErrorNote>
       <CardTape
@@ -158,6 +167,10 @@ export function CardForm({
       />
     </div>
   )
+}
+
+function draftAddress({ id, clientId }: OpenCard): string {
+  return `/drafts/new?card=${id}${clientId ? `&client=${clientId}` : ''}`
 }
 
 function tone(state: CardSaving): string {

@@ -3,6 +3,7 @@ import { forPage, requireActor } from '@/app/_server/session'
 import { Page } from '@/components/ui/page'
 import { getWorkroom } from '@/db/access/workrooms'
 import { newId } from '@/db/new-id'
+import { may } from '@/db/permissions'
 import { today } from '../../_data/dates'
 import { usualMeasurements } from '../../_data/usual-measurements'
 import { CardForm } from '../_parts/card-form'
@@ -23,7 +24,13 @@ export default async function NewOwnCardPage() {
   }
   return (
     <Page title="New measure card" trail={[{ href: '/cards', label: 'My measurements' }]}>
-      <CardForm card={card} isNew readOnly={false} usual={usualMeasurements()} />
+      <CardForm
+        card={card}
+        isNew
+        readOnly={false}
+        usual={usualMeasurements()}
+        draftable={may(actor, 'drafts', 'write')}
+      />
     </Page>
   )
 }

@@ -4,6 +4,7 @@ import { Page } from '@/components/ui/page'
 import { getClient } from '@/db/access/clients'
 import { getWorkroom } from '@/db/access/workrooms'
 import { newId } from '@/db/new-id'
+import { may } from '@/db/permissions'
 import { usualMeasurements } from '../../../../_data/usual-measurements'
 import { today } from '../../../../_data/dates'
 import { CardForm } from '../../../../cards/_parts/card-form'
@@ -33,7 +34,13 @@ export default async function NewCardPage({ params }: { params: Promise<{ id: st
       trail={trail}
       lead="From the head down to the floor. Write lengths as you say them: 36 1/2, 36½, 92.7 cm."
     >
-      <CardForm card={card} isNew readOnly={false} usual={usualMeasurements()} />
+      <CardForm
+        card={card}
+        isNew
+        readOnly={false}
+        usual={usualMeasurements()}
+        draftable={may(actor, 'drafts', 'write')}
+      />
     </Page>
   )
 }
