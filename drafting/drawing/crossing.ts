@@ -54,8 +54,8 @@ export function crosses(ink: Ink, window: PageWindow): boolean {
   )
 }
 
-/** Liang and Barsky's test: what is left of the stroke after clipping by the four sides. */
-function strokeCrosses(from: Point, to: Point, window: PageWindow): boolean {
+/** Whether a straight stroke touches a window. Liang and Barsky's test: what is left of the stroke after clipping by the four sides. */
+export function strokeCrosses(from: Point, to: Point, window: PageWindow): boolean {
   const dx = to.x - from.x
   const dy = to.y - from.y
   let enter = 0
@@ -79,7 +79,8 @@ function strokeCrosses(from: Point, to: Point, window: PageWindow): boolean {
   return true
 }
 
-function encloses(points: readonly Point[], at: Point): boolean {
+/** Whether a closed polygon holds a point. */
+export function encloses(points: readonly Point[], at: Point): boolean {
   let inside = false
   for (let index = 1; index < points.length; index += 1) {
     const from = points[index - 1]

@@ -17,7 +17,7 @@ export function placeItem(item: DrawingItem, place: Place | undefined): DrawingI
   if (!place) return item
   const transform = placeTransform(place)
   if (item.kind === 'path') return { ...item, path: transformPath(transform, item.path) }
-  return { ...item, at: applyTo(transform, item.at), turn: readable(item.turn + (place.turn ?? 0)) }
+  return { ...item, at: applyTo(transform, item.at), turn: item.turn + (place.turn ?? 0) }
 }
 
 /** A path as it lies at its piece's place. */

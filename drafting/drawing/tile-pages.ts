@@ -1,17 +1,11 @@
 import type { Drawing, Point } from '../contract'
-import { crosses, inkOf, inkOfPoints } from './crossing'
-import type { Ink, PageWindow } from './crossing'
+import { inkOf, inkOfPoints } from './crossing'
+import type { Ink } from './crossing'
+import { inkedCells } from './inked-cells'
 import { matchMarks } from './match-marks'
+import { corner } from './page-grid'
+import type { PageGrid } from './page-grid'
 import type { TileOptions, TilePage, Tiling } from './tiling'
-
-interface Grid {
-  readonly origin: Point
-  readonly rows: number
-  readonly columns: number
-  readonly printable: { readonly width: number; readonly height: number }
-  readonly step: { readonly x: number; readonly y: number }
-  readonly overlap: number
-}
 
 /** Places of the grid that are tried within its slack: fewer pages may be needed when it is moved a little. */
 const shifts = [0.5, 0, 0.25, 0.75, 1]
@@ -47,15 +41,19 @@ function tile(
   const height = orientation === 'portrait' ? long : short
   const printable = { width: width - 2 * margin, height: height - 2 * margin }
   const grid = bestGrid(drawing, inks, printable, overlap)
-  const inked = inkedCells(grid, inks)
-  const pages = cells(grid).map(({ row, column }): TilePage => ({
-    name: pageName(row, column),
-    row,
-    column,
-    window: { ...corner(grid, row, column), ...printable },
-    blank: !inked.has(key(row, column)),
-    marks: [],
-  }))
+  const { cells } = inkedCells(grid, inks)
+  const pages = cells.map((inked, index): TilePage => {
+    const row = Math.floor(index / grid.columns)
+    const column = index % grid.columns
+    return {
+      name: pageName(row, column),
+      row,
+      column,
+      window: { ...corner(grid, row, column), ...printable },
+      blank: !inked,
+      marks: [],
+    }
+  })
   const marks = matchMarks(pages, overlap)
   return {
     pages: pages.map((page) => ({ ...page, marks: marks.get(page.name) ?? [] })),
@@ -81,7 +79,7 @@ function bestGrid(
   inks: readonly Ink[],
   printable: { width: number; height: number },
   overlap: number,
-): Grid {
+): PageGrid {
   const { min, max } = drawing.bounds
   const step = { x: printable.width - overlap, y: printable.height - overlap }
   // Half a heaviest line of room on every side.
@@ -90,61 +88,14 @@ function bestGrid(
   const columns = Math.max(1, Math.ceil((wide - overlap) / step.x))
   const rows = Math.max(1, Math.ceil((high - overlap) / step.y))
   const slack = { x: columns * step.x + overlap - wide, y: rows * step.y + overlap - high }
-  let best: { grid: Grid; count: number } | null = null
+  let best: { grid: PageGrid; count: number } | null = null
   for (const down of shifts) {
     for (const across of shifts) {
       const origin = { x: min.x - 0.5 - slack.x * across, y: min.y - 0.5 - slack.y * down }
       const grid = { origin, rows, columns, printable, step, overlap }
-      const count = inkedCells(grid, inks).size
+      const count = inkedCells(grid, inks).count
       if (!best || count < best.count) best = { grid, count }
     }
   }
   return best ? best.grid : { origin: min, rows, columns, printable, step, overlap }
-}
-
-function corner(grid: Grid, row: number, column: number): Point {
-  return { x: grid.origin.x + column * grid.step.x, y: grid.origin.y + row * grid.step.y }
-}
-
-const key = (row: number, column: number) => row * 10_000 + column
-
-function cells(grid: Grid): readonly { row: number; column: number }[] {
-  return Array.from({ length: grid.rows * grid.columns }, (_, index) => ({
-    row: Math.floor(index / grid.columns),
-    column: index % grid.columns,
-  }))
-}
-
-/** The cells in which something is drawn. A cell reaches from trim line to trim line; the outermost reach to the end of their page. */
-function inkedCells(grid: Grid, inks: readonly Ink[]): ReadonlySet<number> {
-  const found = new Set<number>()
-  for (const ink of inks) {
-    const first = cellAt(grid, ink.min)
-    const last = cellAt(grid, ink.max)
-    for (let row = first.row; row <= last.row; row += 1) {
-      for (let column = first.column; column <= last.column; column += 1) {
-        if (!found.has(key(row, column)) && crosses(ink, cell(grid, row, column))) found.add(key(row, column))
-      }
-    }
-  }
-  return found
-}
-
-function cellAt(grid: Grid, at: Point): { row: number; column: number } {
-  const half = grid.overlap / 2
-  const within = (value: number, count: number) => Math.min(count - 1, Math.max(0, Math.floor(value)))
-  return {
-    row: within((at.y - grid.origin.y - half) / grid.step.y, grid.rows),
-    column: within((at.x - grid.origin.x - half) / grid.step.x, grid.columns),
-  }
-}
-
-function cell(grid: Grid, row: number, column: number): PageWindow {
-  const { x, y } = corner(grid, row, column)
-  const half = grid.overlap / 2
-  const left = column === 0 ? x : x + half
-  const top = row === 0 ? y : y + half
-  const right = x + grid.printable.width - (column === grid.columns - 1 ? 0 : half)
-  const bottom = y + grid.printable.height - (row === grid.rows - 1 ? 0 : half)
-  return { x: left, y: top, width: right - left, height: bottom - top }
 }
