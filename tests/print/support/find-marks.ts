@@ -62,21 +62,27 @@ export function findMarks(picture: PagePicture): readonly Spot[] {
   return found.map(({ x, y }) => ({ x: armMiddle(picture, x, y, false), y: armMiddle(picture, x, y, true) }))
 }
 
-/** The middle of a level (or upright) arm's thickness, between circle and centre, on both sides of the centre; mm. */
+/**
+ * The middle of a level (or upright) arm's thickness, mm: the median of what is read at many places between circle and centre,
+ * so that a line of the pattern that runs across the mark does not pull it.
+ */
 function armMiddle(picture: PagePicture, x: number, y: number, level: boolean): number {
-  let weight = 0
-  let sum = 0
-  for (let step = 0.8; step <= 2.4; step += 0.08) {
+  const middles: number[] = []
+  for (let step = 0.6; step <= 2.5; step += 0.08) {
     for (const side of [-1, 1]) {
       const along = Math.round((level ? x : y) + side * step * picture.perMm)
       const middle = level ? y : x
+      let weight = 0
+      let sum = 0
       for (let across = middle - 4; across <= middle + 4; across += 1) {
         const dark =
           picture.dark[level ? across * picture.width + along : along * picture.width + across] ?? 0
         weight += dark
         sum += dark * (across + 0.5)
       }
+      if (weight > 0) middles.push(sum / weight)
     }
   }
-  return sum / weight / picture.perMm
+  middles.sort((a, b) => a - b)
+  return (middles[Math.floor(middles.length / 2)] ?? NaN) / picture.perMm
 }

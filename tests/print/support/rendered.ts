@@ -1,8 +1,7 @@
 import { execFileSync } from 'node:child_process'
-import { mkdtempSync, readdirSync, rmSync, writeFileSync } from 'node:fs'
+import { mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import path from 'node:path'
-import sharp from 'sharp'
 
 /** A page as a printer would lay it down: darkness of each dot, 0 white to 255 black. */
 export interface PagePicture {
@@ -31,26 +30,22 @@ function inFolder<T>(pdf: Uint8Array, work: (file: string, folder: string) => T)
 }
 
 /** Every page at 300 dpi. */
-export async function rendered(pdf: Uint8Array): Promise<readonly PagePicture[]> {
-  const { folder } = inFolder(pdf, (file, folder) => {
-    execFileSync('pdftoppm', ['-r', String(dpi), '-gray', '-png', file, path.join(folder, 'page')])
-    return { folder }
+export function rendered(pdf: Uint8Array): readonly PagePicture[] {
+  return inFolder(pdf, (file, folder) => {
+    execFileSync('pdftoppm', ['-r', String(dpi), '-gray', file, path.join(folder, 'page')])
+    const files = readdirSync(folder).filter((name) => name.endsWith('.pgm'))
+    const pictures = files.sort().map((name) => pictureOf(readFileSync(path.join(folder, name))))
+    rmSync(folder, { recursive: true })
+    return pictures
   })
-  const files = readdirSync(folder)
-    .filter((name) => name.endsWith('.png'))
-    .sort()
-  const pictures: PagePicture[] = []
-  for (const name of files) {
-    const { data, info } = await sharp(path.join(folder, name))
-      .grayscale()
-      .raw()
-      .toBuffer({ resolveWithObject: true })
-    const dark = new Uint8Array(data.length)
-    for (let index = 0; index < data.length; index += 1) dark[index] = 255 - (data[index] ?? 255)
-    pictures.push({ width: info.width, height: info.height, dark, perMm })
-  }
-  rmSync(folder, { recursive: true })
-  return pictures
+}
+
+/** Reads a portable graymap: 'P5', width, height, 255, then a byte a dot from white (255) to black (0). */
+function pictureOf(bytes: Uint8Array): PagePicture {
+  const header = /^P5\s+(\d+)\s+(\d+)\s+255\s/.exec(Buffer.from(bytes.subarray(0, 64)).toString('latin1'))
+  if (!header) throw new Error('pdftoppm wrote something other than a graymap')
+  const dark = bytes.subarray(header[0].length).map((light) => 255 - light)
+  return { width: Number(header[1]), height: Number(header[2]), dark, perMm }
 }
 
 /** The words of every page with their places, as they can be selected and read aloud. */

@@ -18,5 +18,5 @@ const sent = z.strictObject({
 /** Makes a link. The same id again gives the same link. */
 export const POST = workroomRoute(sent, async (actor, { id, shareId, scope, expiresOn }) => {
   const { share, token } = await createShare(actor, { id: shareId, draftId: id, scope, expiresOn })
-  return { share, url: `${appOrigin()}/shared/${token}` }
+  return { share, url: `${appOrigin()}/s/${token}` }
 })
