@@ -59,7 +59,10 @@ const steps = [
     ],
   },
   { name: 'unused files, exports and packages', commands: [[bin('knip'), '--no-progress']] },
-  { name: 'unit tests', commands: [[bin('vitest'), 'run', '--project=unit', '--reporter=dot']] },
+  {
+    name: 'unit tests',
+    commands: [[bin('vitest'), 'run', '--project=unit', '--reporter=dot', '--silent=passed-only']],
+  },
 ]
 
 await runMain(async () => {
@@ -79,7 +82,10 @@ await runMain(async () => {
 async function passes({ name, commands }) {
   const started = Date.now()
   for (const [command, ...args] of commands) {
-    const { code, stdout, stderr } = await attempt(command, args, { cwd: root })
+    const { code, stdout, stderr } = await attempt(command, args, {
+      cwd: root,
+      env: { ...process.env, NO_COLOR: '1' },
+    })
     if (code === 0) continue
     say(`✗ ${name}\n${(stdout + stderr).trim()}\n`)
     return false
