@@ -58,7 +58,10 @@ export function Ribbon({
 
   const share = end === 0 ? 1 : now / end
   return (
-    <div className="flex h-14 items-stretch gap-3 border-t border-rule bg-ground px-3">
+    <section
+      aria-label="Ribbon"
+      className="flex h-14 shrink-0 items-stretch gap-3 border-t border-rule bg-ground px-3"
+    >
       <div
         role="slider"
         tabIndex={0}
@@ -111,7 +114,7 @@ export function Ribbon({
           Finished pattern
         </button>
       )}
-    </div>
+    </section>
   )
 }
 

@@ -172,7 +172,9 @@ test('two tabs on one draft: both versions are kept, and the person chooses', as
   await neckDepth(other).fill('5')
   await other.keyboard.press('Enter')
   await expect(saved(other)).toHaveText(/Two versions/)
-  await expect(other.getByRole('alert')).toContainText('Both versions are kept')
+  await expect(other.getByRole('alert').filter({ hasText: 'changed elsewhere' })).toContainText(
+    'Both versions are kept',
+  )
   await other.getByRole('button', { name: 'The one on this table' }).click()
   await expect(saved(other)).toHaveText('Saved')
   await other.getByRole('button', { name: 'Versions' }).click()
@@ -205,7 +207,7 @@ test('a version gets a name, and an old one comes back', async ({ page }) => {
   await page.getByLabel('Name this version').fill('As measured')
   await page.getByRole('button', { name: 'Save it' }).click()
   await expect(page.getByRole('listitem').filter({ hasText: 'As measured' })).toContainText('On the table')
-  await page.getByRole('button', { name: 'Close' }).click()
+  await page.getByRole('button', { name: 'Close', exact: true }).click()
   await neckDepth(page).fill('5')
   await page.keyboard.press('Enter')
   await expect(saved(page)).toHaveText('Saved')
