@@ -13,11 +13,11 @@ export const garments: readonly GarmentDefinition[] = all.map((garment) => garme
 export function findGarment(order: Pick<DraftOrder, 'garment'>): Garment {
   const garment = all.find((one) => one.definition.id === order?.garment)
   if (garment) return garment
+  const asked: unknown = order?.garment
+  const named =
+    typeof asked === 'string' ? `There is no garment “${asked.slice(0, 60)}”.` : 'No garment is named.'
+  const choices = all.map((one) => one.definition.id).join(', ')
   throw new DraftingError([
-    {
-      field: 'garment',
-      code: 'unknown-garment',
-      message: `There is no garment “${String(order?.garment).slice(0, 60)}”. Choose one of ${all.map((one) => one.definition.id).join(', ')}.`,
-    },
+    { field: 'garment', code: 'unknown-garment', message: `${named} Choose one of ${choices}.` },
   ])
 }

@@ -73,6 +73,13 @@ export function pocketBag(pen: Pen, least: number): PiecePen {
       'pocketDepth',
       'length',
     )
+  } else if (depth > wanted + 0.01) {
+    pen.caution(
+      'pocket-bag-deepened',
+      `The pocket bag is cut ${pen.say(depth)} deep, so that it holds more below its opening.`,
+      'pocketDepth',
+      'pocketOpening',
+    )
   }
   const names = ['pocketOpening', 'pocketDepth']
   bag.start('mouthTop', { x: 0, y: 0 }, 'Mark the top of the mouth')

@@ -24,8 +24,10 @@ const isRecord = (value: unknown): value is Record<string, unknown> =>
  */
 export function checkOrder(garment: Garment, order: DraftOrder, problems: Problem[]): ReadyOrder | undefined {
   const before = problems.length
-  const card = checkCard(garment, order.measurements, problems, order.unit ?? 'cm')
-  const design = checkDesign(garment, order.design, problems, order.unit ?? 'cm')
+  // A wrong unit is a problem of its own; the others are still said in one that people know.
+  const unit = order.unit === 'in' ? 'in' : 'cm'
+  const card = checkCard(garment, order.measurements, problems, unit)
+  const design = checkDesign(garment, order.design, problems, unit)
   checkRuleNames(garment, order.rules, problems)
   const rules = problems.some(
     (problem) => problem.code === 'unknown-field' && problem.field.startsWith('rules.'),

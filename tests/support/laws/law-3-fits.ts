@@ -1,0 +1,76 @@
+import type { Draft, Fit } from '@/drafting/contract'
+import { chordsOf, endOfPath, lengthOfPath, startOfPath } from './curves'
+import { garmentOf, numberOf } from './formulas'
+import { closedChain, ringOf, stitchPath, type Chain } from './outline'
+import { Findings, type DraftLaw } from './violation'
+
+/** Which body measurement and which ease each fit is about. */
+const about: Readonly<Record<string, { readonly body: string; readonly ease?: string }>> = {
+  bust: { body: 'bust', ease: 'bustEase' },
+  biceps: { body: 'upperArm', ease: 'sleeveEase' },
+  neck: { body: 'neckBase' },
+  armhole: { body: 'upperArm' },
+}
+const aboutSkirt: typeof about = {
+  waist: { body: 'waist', ease: 'waistEase' },
+  hip: { body: 'hip', ease: 'hipEase' },
+}
+
+/** Each fit is what is drawn, ends on the stitch line and keeps its promise to the body. */
+export const fits: DraftLaw = (draft, order, engine) => {
+  const found = new Findings(3)
+  const lines = new Map<string, Chain>()
+  const garment = garmentOf(order, engine.garments)
+  const meanings = order.garment === 'circle-skirt' ? aboutSkirt : about
+  for (const fit of draft.fits) {
+    measured(found, draft, fit, lines)
+    const meaning = meanings[fit.id]
+    const asked = (name: string | undefined): number | undefined =>
+      name === undefined ? undefined : numberOf(name, order, garment, draft.used)
+    const body = asked(meaning?.body)
+    if (body !== undefined)
+      found.atMost(fit.id, 'body against the card', Math.abs((fit.body ?? NaN) - body), 1e-6)
+    const ease = asked(meaning?.ease)
+    if (ease !== undefined && !order.tape) {
+      found.atMost(fit.id, 'ease against the style', Math.abs(fit.ease - ease), 1e-6)
+    }
+    promise(found, fit)
+  }
+  return found.all
+}
+
+function measured(found: Findings, draft: Draft, fit: Fit, lines: Map<string, Chain>): void {
+  let sum = 0
+  for (const { piece: id, path, times } of fit.across) {
+    sum += times * lengthOfPath(path)
+    const piece = draft.pieces.find((one) => one.id === id)
+    if (!piece) {
+      found.add(fit.id, `runs across ${id}, which is not drawn`)
+      continue
+    }
+    let line = lines.get(id)
+    if (!line) lines.set(id, (line = closedChain(ringOf(stitchPath(piece), 0.0005))))
+    for (const end of [startOfPath(path), endOfPath(path)]) {
+      found.atMost(`${fit.id} on ${id}`, 'end off the stitch line', line.gap(end), 0.01)
+    }
+    if (draft.garment === 'circle-skirt' && ['waist', 'hip', 'hem'].includes(fit.id))
+      sagging(found, fit, path)
+  }
+  found.atMost(fit.id, 'length as stated against measured', Math.abs(fit.length - sum), 0.01)
+}
+
+/** On a circle skirt a level is an arc about the point of the circle, not a horizontal. */
+function sagging(found: Findings, fit: Fit, path: Parameters<typeof chordsOf>[0]): void {
+  const heights = chordsOf(path).map((point) => point.y)
+  const ends = Math.abs((heights[0] as number) - (heights[heights.length - 1] as number))
+  const sag = Math.max(...heights) - (heights[0] as number)
+  if (!(ends < 0.05 && sag > 0.5)) found.add(fit.id, 'is no arc about the point of the circle')
+}
+
+function promise(found: Findings, fit: Fit): void {
+  if (fit.relation === 'shown') return
+  if (fit.body === undefined) return found.add(fit.id, 'promises something without a body')
+  const wanted = fit.body + fit.ease
+  if (fit.relation === 'equal') found.atMost(fit.id, 'off body and ease', Math.abs(fit.length - wanted), 1)
+  else found.atMost(fit.id, 'short of body and ease', wanted - fit.length, 1e-6)
+}

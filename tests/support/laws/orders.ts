@@ -1,0 +1,199 @@
+import fc from 'fast-check'
+import type {
+  Correction,
+  DesignChoice,
+  DesignValue,
+  DraftOrder,
+  GarmentDefinition,
+} from '@/drafting/contract'
+import { extremeBodies, plausibleBody, sanityBodies, sizeBodies, type NamedBody } from '../bodies'
+
+export type Design = Readonly<Record<string, DesignChoice>>
+
+/** Lengths to a tenth of a millimetre, shares to a thousandth: what people type. */
+function within(value: DesignValue): fc.Arbitrary<DesignChoice> {
+  const { min = 0, max = 0 } = value
+  switch (value.kind) {
+    case 'choice':
+      return fc.constantFrom(...(value.choices ?? []))
+    case 'yes-no':
+      return fc.boolean()
+    case 'count':
+      return fc.integer({ min, max })
+    case 'share':
+      return fc
+        .integer({ min: Math.ceil(min * 1000), max: Math.floor(max * 1000) })
+        .map((share) => share / 1000)
+    case 'length':
+    case 'angle':
+      return fc.integer({ min: Math.ceil(min * 10), max: Math.floor(max * 10) }).map((tenths) => tenths / 10)
+  }
+}
+
+/** The ends of a value's range, or all its choices. */
+function ends(value: DesignValue): fc.Arbitrary<DesignChoice> {
+  if (value.kind === 'choice' || value.kind === 'yes-no') return within(value)
+  return fc.constantFrom(value.min ?? 0, value.max ?? 0)
+}
+
+/** Leaves out what is not offered with the other choices. */
+function offered(garment: GarmentDefinition, design: Design): Design {
+  const chosen = (id: string): DesignChoice | undefined =>
+    design[id] ?? garment.design.find((one) => one.id === id)?.default
+  return Object.fromEntries(
+    Object.entries(design).filter(([id]) => {
+      const condition = garment.design.find((one) => one.id === id)?.when
+      if (!condition) return true
+      const other = chosen(condition.id)
+      return other !== undefined && condition.is.includes(other)
+    }),
+  )
+}
+
+function styles(
+  garment: GarmentDefinition,
+  value: (one: DesignValue) => fc.Arbitrary<DesignChoice>,
+  often: number,
+): fc.Arbitrary<Design> {
+  const entries = garment.design.map(
+    (one) => [one.id, fc.option(value(one), { nil: undefined, freq: often })] as const,
+  )
+  return fc
+    .record(Object.fromEntries(entries))
+    .map((all) =>
+      Object.fromEntries(
+        Object.entries(all).filter((pair): pair is [string, DesignChoice] => pair[1] !== undefined),
+      ),
+    )
+    .map((design) => offered(garment, design))
+}
+
+/** Styles with every value somewhere in its range, or now and then left at its default. */
+export const anyStyle = (garment: GarmentDefinition): fc.Arbitrary<Design> => styles(garment, within, 3)
+
+/** Styles at the ends of their ranges. */
+export const cornerStyle = (garment: GarmentDefinition): fc.Arbitrary<Design> => styles(garment, ends, 2)
+
+/** How a draft is asked for: words in inches or centimetres, sometimes on a tape. */
+const manner = fc.record({
+  unit: fc.constantFrom<'in' | 'cm'>('in', 'cm'),
+  tape: fc.option(fc.constantFrom(1, 3.175, 5, 6.35), { nil: undefined, freq: 1 }),
+})
+
+function asked(
+  garment: string,
+  measurements: DraftOrder['measurements'],
+  design: Design,
+  { unit, tape }: { unit: 'in' | 'cm'; tape: number | undefined },
+): DraftOrder {
+  return { garment, measurements, design, unit, ...(tape ? { tape } : {}) }
+}
+
+/** Some of a full card: what a garment cannot do without is always there. */
+function partOf(
+  garment: GarmentDefinition,
+  card: Readonly<Record<string, number>>,
+): fc.Arbitrary<Record<string, number>> {
+  return fc
+    .subarray(garment.estimates as string[])
+    .map((kept) =>
+      Object.fromEntries(
+        Object.entries(card).filter(([id]) => garment.needs.includes(id) || kept.includes(id)),
+      ),
+    )
+}
+
+/** Any plausible body, full or sparse cards. */
+export function anyCard(garment: GarmentDefinition): fc.Arbitrary<Record<string, number>> {
+  return plausibleBody().chain((card) =>
+    fc.oneof(
+      { weight: 3, arbitrary: fc.constant({ ...card }) },
+      { weight: 1, arbitrary: partOf(garment, card) },
+    ),
+  )
+}
+
+/** Plausible bodies with random styles. */
+export function randomOrder(garment: GarmentDefinition): fc.Arbitrary<DraftOrder> {
+  return fc
+    .tuple(anyCard(garment), anyStyle(garment), manner)
+    .map(([card, design, how]) => asked(garment.id, card, design, how))
+}
+
+/** Named bodies with styles at the ends of their ranges. */
+export function cornerOrder(garment: GarmentDefinition): fc.Arbitrary<DraftOrder> {
+  return fc
+    .tuple(fc.constantFrom(...namedBodies), cornerStyle(garment), manner)
+    .map(([body, design, how]) => asked(garment.id, body.card, design, how))
+}
+
+/** Mostly random, a quarter at the corners. */
+export function anyOrder(garment: GarmentDefinition): fc.Arbitrary<DraftOrder> {
+  return fc.oneof(
+    { weight: 3, arbitrary: randomOrder(garment) },
+    { weight: 1, arbitrary: cornerOrder(garment) },
+  )
+}
+
+/** Every body that has a name: published sizes, the two of the sanity figures, and the edges of what is accepted. */
+export const namedBodies: readonly NamedBody[] = [
+  ...Object.entries(sanityBodies).map(([name, card]) => ({ name: `body ${name}`, card: { ...card } })),
+  ...sizeBodies,
+  ...extremeBodies,
+]
+
+/** Each named body with the default style, in centimetres and on a tape in inches. */
+export function namedOrders(
+  garment: GarmentDefinition,
+): { readonly name: string; readonly order: DraftOrder }[] {
+  return namedBodies.flatMap(({ name, card }) => [
+    { name, order: { garment: garment.id, measurements: card } },
+    {
+      name: `${name}, on an inch tape`,
+      order: { garment: garment.id, measurements: card, unit: 'in' as const, tape: 3.175 },
+    },
+  ])
+}
+
+const small = fc.integer({ min: -100, max: 100 }).map((tenths) => tenths / 10)
+
+/** Small corrections of marks of the body pieces, and the side seam taken in or let out. */
+export function corrections(garment: GarmentDefinition): fc.Arbitrary<readonly Correction[]> {
+  if (garment.id !== 'flared-dress') {
+    return fc
+      .tuple(small, small)
+      .map(([x, y]) => [{ id: 'one', on: { piece: 'panel', mark: 'hemMiddle' }, by: { x, y } }])
+  }
+  const mark = fc.constantFrom(
+    'shoulderTip',
+    'sideNeck',
+    'centreNeck',
+    'hollow',
+    'underarm',
+    'sideHem',
+    'neckPoint',
+    'lengthMark',
+  )
+  const piece = fc.constantFrom('front', 'back')
+  const onMark = fc.tuple(piece, mark, small, small).map(([on, at, x, y], index = 0): Correction => ({
+    id: `mark-${index}`,
+    on: { piece: on, mark: at },
+    // Marks of the centre stay on the fold.
+    by: { x: at === 'centreNeck' || at === 'lengthMark' ? 0 : x, y },
+  }))
+  const onSeam = fc
+    .tuple(fc.integer({ min: 350, max: 700 }), small)
+    .map(([level, by]): Correction => ({ id: 'taken-in', on: { seam: 'side', level }, by }))
+  return fc.oneof(
+    onMark.map((one) => [one]),
+    onSeam.map((one) => [one]),
+    fc.tuple(onMark, onSeam).map(([one, other]) => [one, other]),
+  )
+}
+
+/** Orders with corrections on top. */
+export function correctedOrder(garment: GarmentDefinition): fc.Arbitrary<DraftOrder> {
+  return fc
+    .tuple(randomOrder(garment), corrections(garment))
+    .map(([order, list]) => ({ ...order, corrections: list }))
+}
