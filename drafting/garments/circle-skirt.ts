@@ -274,7 +274,7 @@ function fitSkirt(pen: Pen, pieces: readonly PiecePen[], panels: number): void {
     }))
   const waist = over('waist')
   const drawn = waist.reduce((sum, one) => sum + one.times * one.length, 0)
-  pen.find('waistDrawn', drawn, pen.usesOf(['waistEdge', 'panelAngle']))
+  pen.find('waistDrawn', drawn, pen.usesOf(['radius', 'panelAngle']))
   const asked = pen.tape ? drawn - pen.value('waist') : pen.value('waistEase')
   pen.fit(fitAcross('waist', 'equal', asked, pen.value('waist'), waist))
   pen.fit(fitAcross('hem', 'shown', 0, undefined, over('hem')))

@@ -3,13 +3,14 @@ import { angleRule, garment, geometry, lengthRule } from '../pen/garment'
 import { choice, length, share } from '../pen/design'
 import type { Pen } from '../pen/pen'
 import type { PiecePen } from '../pen/piece-pen'
-import { armholeFacing, neckFacing, shoulderFacing } from '../parts/facing'
+import { faceNeckAndArmholes } from '../parts/facings'
+import { facedBody } from '../parts/facing'
 import { deepenArmhole } from '../parts/armhole-room'
 import { drawHalf, flareDirection, hemOf, lowerMarks, upperMarks } from '../parts/flared-half'
 import { neckLeans } from '../parts/neck-lean'
 import { fitLevels } from '../parts/levels'
 import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/in-seam-pocket'
-import { setInSleeve, sleeveDesign, sleeveRules } from '../parts/set-in-sleeve'
+import { setInSleeve, sleeveDesign, sleeveRules, wholeArmhole } from '../parts/set-in-sleeve'
 import { backOpening, openingDesign, openingRules } from '../parts/back-opening'
 
 /**
@@ -136,8 +137,8 @@ export const flaredDress = garment({
     const necks = front.usesOf('centreNeck', 'sideNeck') | back.usesOf('centreNeck')
     drawHalf(pen, front, 'front', leans.front, necks)
     drawHalf(pen, back, 'back', leans.back, necks)
-    drawFrontHem(pen, front, direction)
-    hemOf(pen, back, 'lengthMark', direction)
+    drawFrontHem(pen, front)
+    hemOf(pen, back, 'lengthMark')
     front.line('centre', hemCentre(pen), 'centreNeck', {
       role: 'fold',
       say: 'The centre front lies on the fold',
@@ -159,11 +160,9 @@ export const flaredDress = garment({
     })
     sewSides(pen, front)
     fitLevels(pen, front, back)
-    if (pen.chosen('sleeve') === 'none') bareArmholes(pen, front, back, onFold)
-    else {
-      setInSleeve(pen, front, back)
-      neckFacings(pen, front, back, onFold, false)
-    }
+    const bare = pen.chosen('sleeve') === 'none'
+    if (!bare) setInSleeve(pen, wholeArmhole(front), wholeArmhole(back))
+    faceNeckAndArmholes(pen, [facedBody(front), true], [facedBody(back), onFold], bare)
     sayWhatIsOdd(pen)
   },
 })
@@ -184,13 +183,13 @@ function checkLength(pen: Pen, front: PiecePen): void {
 }
 
 /** The front is longer over the bust; a swung hem has no place for that. */
-function drawFrontHem(pen: Pen, front: PiecePen, direction: { x: number; y: number }): void {
+function drawFrontHem(pen: Pen, front: PiecePen): void {
   if (!swung(pen)) {
     front.go('centreHem', 'lengthMark', 'down', 'frontDip', {
       say: 'Lower the centre front by what the bust takes up',
     })
   }
-  hemOf(pen, front, hemCentre(pen), direction)
+  hemOf(pen, front, hemCentre(pen))
 }
 
 function sewSides(pen: Pen, front: PiecePen): void {
@@ -205,79 +204,6 @@ function sewSides(pen: Pen, front: PiecePen): void {
   const whole = pathLength(front.edge('side').path)
   pocketBag(pen, whole - mouth.from - 40)
   sewWithPocket(pen, seam, a, b, mouth, whole)
-}
-
-function neckFacings(pen: Pen, front: PiecePen, back: PiecePen, onFold: boolean, bare: boolean): void {
-  const shoulder = front.lengthOf('shoulder')
-  const together = bare && shoulder < 70
-  const depth = Math.min(pen.length('facingDepth'), shoulder - 12)
-  if (!together && depth < pen.length('facingDepth')) {
-    pen.caution(
-      'facing-narrowed',
-      `The shoulder is only ${pen.say(shoulder)} long, so the neck facing is cut ${pen.say(depth)} deep.`,
-      'facingDepth',
-      'neckWidening',
-    )
-  }
-  for (const [piece, fold] of [
-    [front, true],
-    [back, onFold],
-  ] as const) {
-    const facing = together
-      ? shoulderFacing(pen, piece, pen.length('facingDepth'), fold)
-      : neckFacing(pen, piece, depth, fold)
-    pen.sew({
-      id: `${piece.id}-neck-facing`,
-      name: `${piece.name} neckline to its facing`,
-      a: [{ piece: piece.id, edge: 'neckline' }],
-      b: [{ piece: facing.id, edge: 'neckline' }],
-      join: 'faced',
-    })
-    if (together) {
-      pen.sew({
-        id: `${piece.id}-armhole-facing`,
-        name: `${piece.name} armhole to its facing`,
-        a: [{ piece: piece.id, edge: 'armhole' }],
-        b: [{ piece: facing.id, edge: 'armhole' }],
-        join: 'faced',
-      })
-    }
-  }
-  const shoulderAndSide = together ? ['shoulder', 'side'] : ['shoulder']
-  for (const edge of shoulderAndSide) {
-    pen.sew({
-      id: `neck-facing-${edge}`,
-      name: edge === 'side' ? 'Facing sides' : 'Facing shoulders',
-      a: [{ piece: 'front-neck-facing', edge }],
-      b: [{ piece: 'back-neck-facing', edge }],
-      smooth: true,
-    })
-  }
-}
-
-function bareArmholes(pen: Pen, front: PiecePen, back: PiecePen, onFold: boolean): void {
-  neckFacings(pen, front, back, onFold, true)
-  if (front.lengthOf('shoulder') < 70) return
-  const depth = Math.min(pen.length('facingDepth'), front.lengthOf('shoulder') - 12)
-  for (const piece of [front, back]) {
-    const facing = armholeFacing(pen, piece, depth)
-    pen.sew({
-      id: `${piece.id}-armhole-facing`,
-      name: `${piece.name} armhole to its facing`,
-      a: [{ piece: piece.id, edge: 'armhole' }],
-      b: [{ piece: facing.id, edge: 'armhole' }],
-      join: 'faced',
-    })
-  }
-  for (const edge of ['shoulder', 'side']) {
-    pen.sew({
-      id: `armhole-facing-${edge}`,
-      name: edge === 'side' ? 'Armhole facing sides' : 'Armhole facing shoulders',
-      a: [{ piece: 'front-armhole-facing', edge }],
-      b: [{ piece: 'back-armhole-facing', edge }],
-      smooth: true,
-    })
-  }
 }
 
 function sayWhatIsOdd(pen: Pen): void {

@@ -11,11 +11,13 @@ import {
   cross,
   endTangent,
 } from '../geometry'
+import type { Mask } from '../pen/masks'
 import type { Pen } from '../pen/pen'
 import { between, straight, type PiecePen } from '../pen/piece-pen'
 import { fairCurve } from './hem'
 import { armholeCurve } from './armhole'
-import { neckCurve } from './necklines'
+import { leaning, neckCurve } from './necklines'
+import { mostCurvedLean } from './necklines/neckline'
 import { trimBetween } from './trim'
 
 const down = { x: 0, y: 1 }
@@ -39,13 +41,33 @@ function evenBand(neckline: Path, depth: number, body: PiecePen, shoulder: Point
   if (even && last && distance(last.to, end) < 0.3) {
     return { closed: false, segments: [...even.segments.slice(0, -1), { ...last, to: end }] }
   }
-  return neckCurve(
-    { x: centre.x, y: Math.max(centre.y, end.y) + depth },
-    end,
-    { x: -shoulder.y, y: shoulder.x },
-    0.52,
-    0.5,
-  )
+  const low = { x: centre.x, y: Math.max(centre.y, end.y) + depth }
+  const square = (Math.atan2(shoulder.y, shoulder.x) * 180) / Math.PI
+  const lean = Math.min(square, mostCurvedLean(end.x - low.x, low.y - end.y))
+  return neckCurve(low, end, leaning(lean), 0.52, 0.5)
+}
+
+/** What a facing is traced from: a body with its darts closed. */
+export interface Faced {
+  readonly piece: PiecePen
+  readonly neckline: Path
+  readonly armhole: Path
+  /** Unit direction of the side seam at the underarm, downwards. */
+  readonly side: Point
+  readonly uses: Mask
+}
+
+/** A body without darts, as it lies. */
+export function facedBody(piece: PiecePen): Faced {
+  const neckline = piece.edge('neckline')
+  const armhole = piece.edge('armhole')
+  return {
+    piece,
+    neckline: neckline.path,
+    armhole: armhole.path,
+    side: startTangent(piece.edge('side').path),
+    uses: neckline.uses | armhole.uses,
+  }
 }
 
 /** Facings are cut once in the cloth and once in interfacing. */
@@ -64,14 +86,14 @@ function cutFacing(facing: PiecePen, onFold: boolean): void {
  * @param depth mm.
  * @param onFold whether the centre lies on the fold; otherwise it is turned in beside the zip.
  */
-export function neckFacing(pen: Pen, body: PiecePen, depth: number, onFold: boolean): PiecePen {
+export function neckFacing(pen: Pen, faced: Faced, depth: number, onFold: boolean): PiecePen {
+  const body = faced.piece
   const facing = pen.piece(`${body.id}-neck-facing`, `${body.name} neck facing`)
-  const neckline = body.edge('neckline')
   const shoulder = unit(between(body.at('sideNeck'), body.at('shoulderTip')))
-  const inside = evenBand(neckline.path, depth, body, shoulder)
+  const inside = evenBand(faced.neckline, depth, body, shoulder)
   const names = ['facingDepth']
   const through = ['centreNeck', 'sideNeck', 'shoulderTip']
-  copyMarks(facing, body, ['centreNeck', 'sideNeck'], neckline.uses)
+  copyMarks(facing, body, ['centreNeck', 'sideNeck'], faced.uses)
   facing.aid('shoulderTip', body)
   facing.place('shoulderEdge', endOf(inside), {
     say: 'Along the shoulder come out the depth of the facing',
@@ -85,7 +107,7 @@ export function neckFacing(pen: Pen, body: PiecePen, depth: number, onFold: bool
     uses: names,
     through,
   })
-  facing.curve('neckline', neckline.path, 'centreNeck', 'sideNeck', {
+  facing.curve('neckline', faced.neckline, 'centreNeck', 'sideNeck', {
     role: 'neckline',
     allowance: 'neckAllowance',
     kind: 'copy',
@@ -113,11 +135,11 @@ export function neckFacing(pen: Pen, body: PiecePen, depth: number, onFold: bool
  *
  * @param depth mm.
  */
-export function armholeFacing(pen: Pen, body: PiecePen, depth: number): PiecePen {
+export function armholeFacing(pen: Pen, faced: Faced, depth: number): PiecePen {
+  const body = faced.piece
   const facing = pen.piece(`${body.id}-armhole-facing`, `${body.name} armhole facing`)
-  const armhole = body.edge('armhole')
   const shoulder = unit(between(body.at('sideNeck'), body.at('shoulderTip')))
-  const side = startTangent(body.edge('side').path)
+  const { side } = faced
   const tip = body.at('shoulderTip')
   const hollow = body.at('hollow')
   const underarm = body.at('underarm')
@@ -130,7 +152,7 @@ export function armholeFacing(pen: Pen, body: PiecePen, depth: number): PiecePen
   )
   const names = ['facingDepth']
   const through = ['sideNeck', 'shoulderTip', 'hollow', 'underarm']
-  copyMarks(facing, body, ['shoulderTip', 'hollow', 'underarm'], armhole.uses)
+  copyMarks(facing, body, ['shoulderTip', 'hollow', 'underarm'], faced.uses)
   facing.aid('sideNeck', body)
   facing.place('shoulderEdge', startOf(inside), {
     say: 'Along the shoulder come in the depth of the facing',
@@ -149,7 +171,7 @@ export function armholeFacing(pen: Pen, body: PiecePen, depth: number): PiecePen
     allowance: 'shoulderAllowance',
     say: 'Trace the end of the shoulder',
   })
-  facing.curve('armhole', armhole.path, 'shoulderTip', 'underarm', {
+  facing.curve('armhole', faced.armhole, 'shoulderTip', 'underarm', {
     role: 'armhole',
     allowance: 'armholeAllowance',
     kind: 'copy',
@@ -183,13 +205,12 @@ export function armholeFacing(pen: Pen, body: PiecePen, depth: number): PiecePen
  *
  * @param depth how far below the underarm and the neckline it ends, mm.
  */
-export function shoulderFacing(pen: Pen, body: PiecePen, depth: number, onFold: boolean): PiecePen {
+export function shoulderFacing(pen: Pen, faced: Faced, depth: number, onFold: boolean): PiecePen {
+  const body = faced.piece
   const facing = pen.piece(`${body.id}-neck-facing`, `${body.name} facing, neck and armhole`)
-  const through = ['centreNeck', 'sideNeck', 'shoulderTip', 'hollow', 'underarm', 'sideHem']
-  const neckline = body.edge('neckline')
-  const armhole = body.edge('armhole')
-  const side = startTangent(body.edge('side').path)
-  copyMarks(facing, body, through.slice(0, 5), neckline.uses | armhole.uses)
+  const through = ['centreNeck', 'sideNeck', 'shoulderTip', 'hollow', 'underarm']
+  const { side } = faced
+  copyMarks(facing, body, through, faced.uses)
   const underarm = body.at('underarm')
   const sideEdge = { x: underarm.x + side.x * depth, y: underarm.y + side.y * depth }
   const lowest = Math.max(body.at('centreNeck').y + depth, underarm.y + depth + 5)
@@ -210,7 +231,7 @@ export function shoulderFacing(pen: Pen, body: PiecePen, depth: number, onFold: 
       through: ['underarm', 'centreNeck'],
     },
   )
-  facing.curve('neckline', neckline.path, 'centreNeck', 'sideNeck', {
+  facing.curve('neckline', faced.neckline, 'centreNeck', 'sideNeck', {
     role: 'neckline',
     allowance: 'neckAllowance',
     kind: 'copy',
@@ -221,7 +242,7 @@ export function shoulderFacing(pen: Pen, body: PiecePen, depth: number, onFold: 
     allowance: 'shoulderAllowance',
     say: 'Trace the shoulder',
   })
-  facing.curve('armhole', armhole.path, 'shoulderTip', 'underarm', {
+  facing.curve('armhole', faced.armhole, 'shoulderTip', 'underarm', {
     role: 'armhole',
     allowance: 'armholeAllowance',
     kind: 'copy',

@@ -1,5 +1,5 @@
 import type { Path, Point } from '../contract'
-import { unit, add, scale, magnitude, cubic, openPath } from '../geometry'
+import { unit, add, scale, magnitude, cubic, openPath, endTangent } from '../geometry'
 import type { Mask } from '../pen/masks'
 import type { Pen } from '../pen/pen'
 import { between, type PiecePen } from '../pen/piece-pen'
@@ -282,7 +282,8 @@ function takenIn(pen: Pen, piece: PiecePen, top: Point, bottom: Point): Path {
 }
 
 /** The hem of one half, from the side to the centre, square to both. */
-export function hemOf(pen: Pen, piece: PiecePen, centre: string, direction: Point): void {
+export function hemOf(pen: Pen, piece: PiecePen, centre: string): void {
+  const direction = endTangent(piece.edge('side').path)
   const side = piece.at('sideHem')
   const middle = piece.at(centre)
   const hem = fairCurve(side, { x: -direction.y, y: direction.x }, middle, { x: -1, y: 0 })

@@ -10,7 +10,7 @@ export const pocketDesign: readonly DesignValue[] = [
   yesNo('pockets', 'Pockets in the side seams', 'pockets', true),
   length('pocketTop', 'Pocket below the waist', 'pockets', { default: 65, min: 20, max: 150 }, worn),
   length('pocketOpening', 'Pocket opening', 'pockets', { default: 165, min: 120, max: 200 }, worn),
-  length('pocketDepth', 'Depth of the bag', 'pockets', { default: 310, min: 220, max: 360 }, worn),
+  length('pocketDepth', 'Depth of the bag', 'pockets', { default: 310, min: 250, max: 360 }, worn),
   length('pocketAllowance', 'Pocket bag allowance', 'allowances', { default: 12.7, min: 0, max: 30 }, worn),
 ]
 

@@ -1,7 +1,8 @@
-import type { DesignValue, Path, Point, RuleDefinition } from '../contract'
+import type { DesignValue, Path, Point, RuleDefinition, Run } from '../contract'
 import { endOf, mirrorX, pathLength, reversePath, transformPath } from '../geometry'
 import { lengthRule } from '../pen/garment'
 import { count, length } from '../pen/design'
+import { nothing, type Mask } from '../pen/masks'
 import { fitAcross, type Pen } from '../pen/pen'
 import { straight, type PiecePen } from '../pen/piece-pen'
 import { fairCurve } from './hem'
@@ -43,22 +44,34 @@ export const sleeveRules: readonly RuleDefinition[] = [
 const lowestHead = 0.18
 const highestHead = 0.33
 
+/** An armhole as a sleeve sees it: the edges that make it, from the shoulder to the underarm. */
+export interface Armhole {
+  readonly piece: PiecePen
+  readonly edges: readonly string[]
+}
+
+/** The armhole of a piece that has it in one edge. */
+export const wholeArmhole = (piece: PiecePen): Armhole => ({ piece, edges: ['armhole'] })
+
+const lengthOf = ({ piece, edges }: Armhole): number =>
+  edges.reduce((sum, edge) => sum + piece.lengthOf(edge), 0)
+const usesOf = ({ piece, edges }: Armhole): Mask =>
+  edges.reduce((mask, edge) => mask | piece.edge(edge).uses, nothing)
+const runsOf = ({ piece, edges }: Armhole): Run[] => edges.map((edge) => ({ piece: piece.id, edge }))
+
 /**
  * A sleeve set into the armholes of a front and a back: its head is solved so that each half has the length of its armhole
  * and its share of the ease. Flared, it is then cut from the hem to the head and spread.
  */
-export function setInSleeve(pen: Pen, front: PiecePen, back: PiecePen): PiecePen {
+export function setInSleeve(pen: Pen, front: Armhole, back: Armhole): PiecePen {
   const sleeve = pen.piece('sleeve', 'Sleeve')
   const isFlared = pen.chosen('sleeve') === 'flared'
-  const armhole = { front: front.lengthOf('armhole'), back: back.lengthOf('armhole') }
+  const armhole = { front: lengthOf(front), back: lengthOf(back) }
   const head = {
     front: armhole.front + pen.value('frontHeadEase'),
     back: armhole.back + pen.value('backHeadEase'),
   }
-  const uses =
-    front.edge('armhole').uses |
-    back.edge('armhole').uses |
-    pen.usesOf(['biceps', 'frontHeadEase', 'backHeadEase'])
+  const uses = usesOf(front) | usesOf(back) | pen.usesOf(['biceps', 'frontHeadEase', 'backHeadEase'])
   const shape = solveShape(pen, armhole.front + armhole.back, head)
 
   pen.find('headHeight', shape.height, uses)
@@ -267,8 +280,8 @@ function sleeveHem(pen: Pen, sleeve: PiecePen, ends: SleeveCorners): Path {
 function sewSleeve(
   pen: Pen,
   sleeve: PiecePen,
-  front: PiecePen,
-  back: PiecePen,
+  front: Armhole,
+  back: Armhole,
   head: { front: number; back: number },
   armhole: { front: number; back: number },
 ): void {
@@ -280,7 +293,7 @@ function sewSleeve(
     id: 'armhole-front',
     name: 'Sleeve into front armhole',
     a: [{ piece: 'sleeve', edge: 'head-front' }],
-    b: [{ piece: front.id, edge: 'armhole' }],
+    b: runsOf(front),
     join: 'eased',
     easeFrom: 'frontHeadEase',
     matches: [
@@ -293,7 +306,7 @@ function sewSleeve(
     id: 'armhole-back',
     name: 'Sleeve into back armhole',
     a: [{ piece: 'sleeve', edge: 'head-back', reversed: true }],
-    b: [{ piece: back.id, edge: 'armhole' }],
+    b: runsOf(back),
     join: 'eased',
     easeFrom: 'backHeadEase',
     matches: [

@@ -325,6 +325,32 @@ export class PiecePen {
     })
   }
 
+  /** A dart whose two legs are edges drawn before; they are sewn to each other. */
+  dart(id: string, edges: readonly [string, string], at: Point, pressTo: Dart['pressTo']): void {
+    const [first, second] = edges.map((edge) => this.edge(edge).path) as [Path, Path]
+    this.darts.push({
+      id,
+      legs: [first, second],
+      point: at,
+      edges,
+      pressTo,
+      intake: distance(startOf(first), endOf(second)),
+    })
+    this.marks.set(`${id}-drill`, {
+      id: `${id}-drill`,
+      at: drillPoint(first, second, at),
+      x: nothing,
+      y: nothing,
+    })
+    this.kinds.set(`${id}-drill`, 'drill')
+    this.pen.sew({
+      id: `${this.id}-${id}`,
+      name: `${this.name}, ${id.replaceAll('-', ' ')}`,
+      a: [{ piece: this.id, edge: edges[0] }],
+      b: [{ piece: this.id, edge: edges[1], reversed: true }],
+    })
+  }
+
   /** A line inside the piece: a level, a turn line, a place for something. */
   inner(
     id: string,
@@ -382,6 +408,14 @@ export class PiecePen {
       kind: this.kinds.get(mark.id) ?? 'construction',
     }))
   }
+}
+
+/** Inside a dart's point, so that the hole is hidden when it is sewn: 13 mm (seen: extension circulars). */
+function drillPoint(first: Path, second: Path, point: Point): Point {
+  const mouth = { x: (startOf(first).x + endOf(second).x) / 2, y: (startOf(first).y + endOf(second).y) / 2 }
+  const long = distance(mouth, point)
+  const share = long > 26 ? 13 / long : 0.25
+  return { x: point.x + (mouth.x - point.x) * share, y: point.y + (mouth.y - point.y) * share }
 }
 
 /** Depth of a curve at the middle of the straight line between its ends, mm. */

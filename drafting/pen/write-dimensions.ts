@@ -7,8 +7,10 @@ export function writeDimensions(pen: Pen): Dimension[] {
   return pen.tags.map((plan) => {
     const piece = pen.pieces.find((one) => one.id === plan.piece)
     if (!piece) throw new Error(`A tag names the piece “${plan.piece}”, which was not drawn.`)
-    const from = piece.at(plan.from)
-    const to = piece.at(plan.to)
+    // A tag shows what the rules and the style say: where a mark was corrected, the place that they gave it.
+    const byRule = (id: string): string => (piece.marks.has(`${id}-by-rule`) ? `${id}-by-rule` : id)
+    const from = piece.at(byRule(plan.from))
+    const to = piece.at(byRule(plan.to))
     return {
       id: `${plan.piece}.${plan.from}-${plan.to}`,
       piece: plan.piece,

@@ -20,9 +20,9 @@ export function leaning(degrees: number): Point {
   return { x: -Math.sin(turn), y: Math.cos(turn) }
 }
 
-/** The lean at which a curve square to the centre would only just not bend both ways: a little short of its own corner. */
+/** The lean at which a curve square to the centre would still come round at the centre without bending both ways. */
 export function mostCurvedLean(width: number, depth: number): number {
-  return (Math.atan2(0.8 * width, depth) * 180) / Math.PI
+  return (Math.atan2(0.65 * width, depth) * 180) / Math.PI
 }
 
 /**

@@ -1,0 +1,68 @@
+import type { Run } from '../contract'
+import { distance } from '../geometry'
+import type { Pen } from '../pen/pen'
+import { armholeFacing, neckFacing, shoulderFacing, type Faced } from './facing'
+
+/** A body to be faced, and whether its centre lies on the fold. */
+export type FacedHalf = readonly [Faced, boolean]
+
+/** Shorter shoulders, mm, carry one facing for neck and armhole together. Common practice. */
+const narrowShoulder = 70
+
+/**
+ * Faces the neck, and the armholes where there is no sleeve, of a front and a back.
+ *
+ * @param bare whether the armholes have no sleeve.
+ * @param runs the edges that a neckline or armhole consists of, where a dart divides it; one edge of that name otherwise.
+ */
+export function faceNeckAndArmholes(
+  pen: Pen,
+  front: FacedHalf,
+  back: FacedHalf,
+  bare: boolean,
+  runs: (piece: string, edge: string) => Run[] = (piece, edge) => [{ piece, edge }],
+): void {
+  const body = front[0].piece
+  const shoulder = distance(body.at('sideNeck'), body.at('shoulderTip'))
+  const together = bare && shoulder < narrowShoulder
+  const asked = pen.length('facingDepth')
+  const depth = Math.min(asked, shoulder - 12)
+  if (!together && depth < asked) {
+    pen.caution(
+      'facing-narrowed',
+      `The shoulder is only ${pen.say(shoulder)} long, so the facing is cut ${pen.say(depth)} deep.`,
+      'facingDepth',
+      'neckWidening',
+    )
+  }
+  const sewOn = (edge: string, faced: Faced, facing: string): void =>
+    pen.sew({
+      id: `${faced.piece.id}-${edge}-facing`,
+      name: `${faced.piece.name} ${edge} to its facing`,
+      a: runs(faced.piece.id, edge),
+      b: [{ piece: facing, edge }],
+      join: 'faced',
+    })
+  for (const [faced, onFold] of [front, back]) {
+    const neck = together ? shoulderFacing(pen, faced, asked, onFold) : neckFacing(pen, faced, depth, onFold)
+    sewOn('neckline', faced, neck.id)
+    if (together) sewOn('armhole', faced, neck.id)
+  }
+  joinFacings(pen, 'neck-facing', together ? ['shoulder', 'side'] : ['shoulder'])
+  if (!bare || together) return
+  for (const [faced] of [front, back]) sewOn('armhole', faced, armholeFacing(pen, faced, depth).id)
+  joinFacings(pen, 'armhole-facing', ['shoulder', 'side'])
+}
+
+function joinFacings(pen: Pen, facing: string, edges: readonly string[]): void {
+  const names: Record<string, string> = { 'neck-facing': 'Neck facing', 'armhole-facing': 'Armhole facing' }
+  for (const edge of edges) {
+    pen.sew({
+      id: `${facing}-${edge}`,
+      name: `${names[facing]}, ${edge}`,
+      a: [{ piece: `front-${facing}`, edge }],
+      b: [{ piece: `back-${facing}`, edge }],
+      smooth: true,
+    })
+  }
+}
