@@ -1,5 +1,6 @@
 import type { Point } from '../contract'
 import { pathLength } from '../geometry/path'
+import { dot, subtract } from '../geometry/point'
 import { line } from '../geometry/segment'
 import { meetLine } from './meet-line'
 import { mitre } from './mitre'
@@ -15,7 +16,7 @@ export const foldCorner = (a: Side, b: Side, at: Point): Turn => {
   const along = aIsFold ? a.arriving : b.leaving
   const met = aIsFold ? meetLine(b, true, at, along) : meetLine(a, false, at, along)
   if (!met) return mitre(a, b, at)
-  const past = (met.point.x - at.x) * along.x + (met.point.y - at.y) * along.y
+  const past = dot(subtract(met.point, at), along)
   if (aIsFold) {
     const leave = past < 0 ? pathLength(a.offset) + past : undefined
     return {

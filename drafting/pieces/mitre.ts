@@ -1,7 +1,7 @@
 import type { Point, Segment } from '../contract'
 import { intersections } from '../geometry/intersect'
 import { endOf, pathLength, startOf } from '../geometry/path'
-import { distance, subtract, unit } from '../geometry/point'
+import { cross, distance, dot, subtract, unit } from '../geometry/point'
 import { line } from '../geometry/segment'
 import { meetLine } from './meet-line'
 import { MITRE_LIMIT, type Side, type Turn } from './outline-edge'
@@ -13,10 +13,10 @@ const SAME = 1e-4
 export const mitre = (a: Side, b: Side, at: Point): Turn => {
   const dx = b.start.x - a.end.x
   const dy = b.start.y - a.end.y
-  const along = a.arriving.x * b.leaving.x + a.arriving.y * b.leaving.y
+  const along = dot(a.arriving, b.leaving)
   if (Math.abs(dx) + Math.abs(dy) <= SAME && (along > 0 || a.allowance + b.allowance === 0))
     return straightOn(a, b)
-  const turn = a.arriving.x * b.leaving.y - a.arriving.y * b.leaving.x
+  const turn = cross(a.arriving, b.leaving)
   if (turn < 0 && along > -1) {
     const inner = innerCorner(a, b)
     if (inner) return inner
@@ -32,7 +32,7 @@ export const mitre = (a: Side, b: Side, at: Point): Turn => {
       ? { x: b.start.x - b.leaving.x * back, y: b.start.y - b.leaving.y * back }
       : { x: a.end.x + a.arriving.x * ahead, y: a.end.y + a.arriving.y * ahead }
   const limit = MITRE_LIMIT * Math.max(a.allowance, b.allowance)
-  if (Math.hypot(meet.x - at.x, meet.y - at.y) > limit + 1e-9)
+  if (distance(meet, at) > limit + 1e-9)
     return turn > 0 ? bevel(a, b, at, subtract(meet, at)) : stepOrAcross(a, b, at)
   return { joint: meet, lead: [line(meet, b.start)] }
 }
@@ -54,7 +54,7 @@ const innerCorner = (a: Side, b: Side): Turn | undefined => {
 /** One side is cut back by the other's straight continuation, unless that would take more than the mitre's limit. */
 const crossing = (a: Side, b: Side, at: Point): Turn | undefined => {
   const limit = MITRE_LIMIT * Math.max(a.allowance, b.allowance)
-  const near = (p: Point): boolean => Math.hypot(p.x - at.x, p.y - at.y) <= limit
+  const near = (p: Point): boolean => distance(p, at) <= limit
   const onA = meetLine(a, false, b.start, b.leaving)
   if (onA?.along !== undefined && near(onA.point) && behind(onA.point, b)) {
     return { joint: onA.point, leave: onA.along, lead: [line(onA.point, b.start)] }
@@ -66,11 +66,9 @@ const crossing = (a: Side, b: Side, at: Point): Turn | undefined => {
   return undefined
 }
 
-const behind = (p: Point, side: Side): boolean =>
-  (p.x - side.start.x) * side.leaving.x + (p.y - side.start.y) * side.leaving.y <= 0
+const behind = (p: Point, side: Side): boolean => dot(subtract(p, side.start), side.leaving) <= 0
 
-const ahead = (p: Point, side: Side): boolean =>
-  (p.x - side.end.x) * side.arriving.x + (p.y - side.end.y) * side.arriving.y >= 0
+const ahead = (p: Point, side: Side): boolean => dot(subtract(p, side.end), side.arriving) >= 0
 
 /**
  * A sharp corner cut off at 2.5 × the larger allowance, square to the line from the corner to where the mitre would be: with
@@ -95,7 +93,7 @@ const bevel = (a: Side, b: Side, at: Point, towardsMitre: Point): Turn => {
 export const step = (a: Side, b: Side, at: Point): Turn => stepIfUneven(a, b, at) ?? mitre(a, b, at)
 
 const stepIfUneven = (a: Side, b: Side, at: Point): Turn | undefined => {
-  const along = a.arriving.x * b.leaving.x + a.arriving.y * b.leaving.y
+  const along = dot(a.arriving, b.leaving)
   if (a.allowance * along > b.allowance) {
     const met = meetLine(b, true, a.end, unit(subtract(at, a.end)))
     if (met) return { joint: a.end, lead: leadTo(a.end, met.point, b, met.along), enter: met.along }

@@ -1,4 +1,5 @@
 import type { Point } from '../contract'
+import { dot, subtract } from '../geometry/point'
 import { line } from '../geometry/segment'
 import { meetLine } from './meet-line'
 import { mitre } from './mitre'
@@ -16,7 +17,7 @@ export const square = (a: Side, b: Side, at: Point): Turn => {
   const onward = seamEnds ? a.arriving : { x: -b.leaving.x, y: -b.leaving.y }
   const met = seamEnds ? meetLine(b, true, at, onward) : meetLine(a, false, at, onward)
   if (!met) return mitre(a, b, at)
-  const run = (met.point.x - at.x) * onward.x + (met.point.y - at.y) * onward.y
+  const run = dot(subtract(met.point, at), onward)
   if (run < 0 || run > limit) return mitre(a, b, at)
   if (seamEnds) {
     const corner: Point = { x: a.end.x + onward.x * run, y: a.end.y + onward.y * run }

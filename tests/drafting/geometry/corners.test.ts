@@ -2,6 +2,7 @@ import { describe, expect, test } from 'vitest'
 import type { Corner, EdgeRole, Path, Point } from '../../../drafting/contract'
 import * as geometry from '../../../drafting/geometry'
 import { cutLine, type OutlineEdge } from '../../../drafting/pieces/cut-line'
+import { cutLineFaults } from './cut-line-faults'
 import * as shapes from './pieces'
 import { dense, gapTo } from './reference'
 
@@ -129,6 +130,26 @@ describe('corners of a cut line', () => {
     const { clipped, cutLine: path } = cutLine(shape.edges)
     expect(clipped).toEqual(['neckline'])
     expect(geometry.containsPoint(path, p(0, 100))).toBe(true)
+  })
+
+  test('a short edge whose neighbours would run into one another beyond it keeps its allowance, and is named', () => {
+    const curve = (...at: [Point, Point, Point, Point]) => geometry.cubic(...at)
+    const shape: shapes.Shape = {
+      name: 'short edge',
+      edges: [
+        shapes.edge('short', 'seam', line(p(29, 6), p(-21, 57)), 40),
+        shapes.edge('nett', 'neckline', curve(p(-21, 57), p(-75, 50), p(-107, 22), p(-112, -35)), 0),
+        shapes.edge('long', 'seam', curve(p(-112, -35), p(-71, -80), p(-27, -121), p(22, -158)), 10),
+        shapes.edge('top', 'free', curve(p(22, -158), p(45, -193), p(76, -202), p(114, -185)), 25),
+        shapes.edge('back', 'hem', curve(p(114, -185), p(54, -137), p(48, -63), p(29, 6)), 5),
+      ],
+      darts: [],
+    }
+    const result = cutLine(shape.edges)
+    expect(cutLineFaults(shape, result)).toEqual([])
+    expect(result.clipped).toContain('short')
+    const middle = p(4 + 40 * Math.SQRT1_2, 31.5 + 40 * Math.SQRT1_2)
+    expect(gapTo(dense(result.cuts[0]!, 0.5), middle)).toBeLessThan(0.5)
   })
 
   test('odd input gives finite lines and no error', () => {

@@ -2,6 +2,7 @@ import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import type { Path, Point } from '../../../drafting/contract'
 import * as geometry from '../../../drafting/geometry'
+import { sweptOffset } from '../../../drafting/geometry/swept'
 import { anyPath } from './arbitrary'
 import { dense, gapTo, parallelPoints } from './reference'
 
@@ -100,6 +101,19 @@ describe('a parallel edge', () => {
     for (const at of dense(parallel, 0.5)) expect(gapTo(source, at)).toBeGreaterThan(15 - 0.02)
     expect(geometry.startOf(parallel)).toEqual(p(0, -15))
     expect(geometry.endOf(parallel)).toEqual(p(40, -60))
+  })
+
+  test('swept out as an area it is the same line, in short chords', () => {
+    const path = openPath([cubic(p(0, 0), p(-20, 60), p(-30, 150), p(70, 190)), line(p(70, 190), p(70, 120))])
+    for (const distance of [12, -12]) {
+      const swept = dense(sweptOffset(path, distance), 1)
+      const fitted = dense(offsetPath(path, distance).path, 0.5)
+      // But for the inner corner's rounding, and the outer one's mitre, which sweeping leaves flat.
+      const off = swept.filter((at) => geometry.distance(at, p(70, 190)) > 32).map((at) => gapTo(fitted, at))
+      expect(Math.max(...off)).toBeLessThan(0.03)
+      expect(geometry.distance(swept[0]!, fitted[0]!)).toBeLessThan(0.03)
+      expect(geometry.distance(swept.at(-1)!, fitted.at(-1)!)).toBeLessThan(0.03)
+    }
   })
 
   test('whatever the path, the answer is finite, joined and never throws', () => {
