@@ -47,7 +47,7 @@ describe('the cut line of any piece', () => {
         fc.property(piece, (shape) => {
           expect(cutLineFaults(shape, cutLine(shape.edges, shape.darts))).toEqual([])
         }),
-        { numRuns: 40 },
+        { numRuns: 25 },
       )
     },
     60_000,
@@ -61,7 +61,7 @@ describe('the cut line of any piece', () => {
           const turned = shapes.withCorners(shape, corners)
           expect(cutLineFaults(turned, cutLine(turned.edges, turned.darts))).toEqual([])
         }),
-        { numRuns: 40 },
+        { numRuns: 25 },
       )
     },
     60_000,
