@@ -1,6 +1,8 @@
 import type { Path, Point } from '../contract'
-import { intersections } from '../geometry/intersect'
-import { polyline } from '../geometry/path'
+import { lengthBefore } from '../geometry/along'
+import { zeros } from '../geometry/crossings'
+import { lengthTo } from '../geometry/length'
+import { evaluate } from '../geometry/segment'
 import type { Side } from './outline-edge'
 
 /** Where a side's offset, run on straight past its end, meets a line; `along` when that lies on the offset itself. */
@@ -37,15 +39,27 @@ export const meetLine = (
 
 /** The crossing of a path with the line through a point that lies nearest to the path's start (or end). */
 const meetCurve = (path: Path, atStart: boolean, through: Point, direction: Point): Meeting | undefined => {
-  const found = intersections(
-    path,
-    polyline([
-      { x: through.x - direction.x * FAR, y: through.y - direction.y * FAR },
-      { x: through.x + direction.x * FAR, y: through.y + direction.y * FAR },
-    ]),
-  )
-  const one = atStart ? found[0] : found[found.length - 1]
-  return one && { point: onLine(one.point, through, direction), along: one.a }
+  const off = (p: Point): number => (p.x - through.x) * direction.y - (p.y - through.y) * direction.x
+  const count = path.segments.length
+  for (let n = 0; n < count; n++) {
+    const index = atStart ? n : count - 1 - n
+    const segment = path.segments[index]!
+    let t = -1
+    const note = (found: number): void => {
+      if (t < 0 || (atStart ? found < t : found > t)) t = found
+    }
+    const d0 = off(segment.from)
+    const d3 = off(segment.to)
+    if (segment.kind === 'cubic') zeros(d0, off(segment.control1), off(segment.control2), d3, note)
+    else if (d0 * d3 <= 0 && d0 !== d3) note(d0 / (d0 - d3))
+    if (t >= 0) {
+      return {
+        point: onLine(evaluate(segment, t), through, direction),
+        along: lengthBefore(path, index) + lengthTo(segment, t),
+      }
+    }
+  }
+  return undefined
 }
 
 /** The point moved the last bit onto the line, exactly where the line is upright or level. */
