@@ -45,7 +45,7 @@ export interface SheetProps {
   readonly replaying: boolean
   readonly showTags: boolean
   /** Present on a phone: a tag opens its editor instead of being one. */
-  readonly onOpenTag?: (field: FieldRef) => void
+  readonly onOpenTag?: (dimension: string) => void
 }
 
 /** px about a point that tags leave free. */

@@ -2,6 +2,7 @@
 
 import { ChevronLeft, ChevronRight } from 'lucide-react'
 import { useEffect, useRef, type PointerEvent, type ReactNode } from 'react'
+import type { Dimension } from '@/drafting/contract'
 import type { FieldRef } from '@/components/studio/field-ref'
 import { useField } from '@/components/studio/use-field'
 import { useStudioState } from '@/components/studio/use-store'
@@ -12,17 +13,17 @@ const eighths = ['0', '1/8', '1/4', '3/8', '1/2', '5/8', '3/4', '7/8'] as const
 
 /** On a phone: the focused tag, docked above the keyboard, with keys for whole inches and eighths. */
 export function TagDock({
-  field: ref,
-  label,
+  dimension,
   onNext,
   onDone,
 }: {
-  readonly field: FieldRef
-  readonly label: string
+  readonly dimension: Dimension
   readonly onNext: (step: 1 | -1) => void
   readonly onDone: () => void
 }) {
-  const field = useField(ref, label)
+  const { label, value, over } = dimension
+  const ref: FieldRef = `design.${value ?? ''}`
+  const field = useField(ref, label, over)
   const unit = useStudioState((state) => state.unit)
   const box = useRef<HTMLInputElement>(null)
   useEffect(() => box.current?.focus(), [ref])

@@ -58,7 +58,7 @@ export const ValueTag = memo(function ValueTag({
   readonly label: string
   readonly field: FieldRef
   /** On a phone the tag is a button that opens its editor above the keyboard. */
-  readonly onOpen?: (field: FieldRef) => void
+  readonly onOpen?: (dimension: string) => void
 }) {
   const over = useStudioState(
     (state) => state.draft?.dimensions.find((each) => each.id === dimension)?.over ?? 0,
@@ -74,7 +74,7 @@ export const ValueTag = memo(function ValueTag({
       {onOpen ? (
         <button
           type="button"
-          onClick={() => onOpen(ref)}
+          onClick={() => onOpen(dimension)}
           aria-label={`${label}, ${field.input.value} ${field.unit}`}
           className={classes(
             frame,

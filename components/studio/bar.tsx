@@ -74,7 +74,7 @@ export function StudioBar({
       <p
         role="status"
         className={classes(
-          'min-w-0 truncate pl-2 text-sm',
+          'shrink-0 pl-2 text-sm whitespace-nowrap max-sm:max-w-32 max-sm:whitespace-normal max-sm:leading-4',
           saving.kind === 'saved' ? 'text-walnut' : needsLook(saving) ? 'text-weld' : 'text-walnut',
         )}
       >

@@ -16,7 +16,6 @@ import { buttonClass } from '@/components/ui/button'
 import { StudioBar, UnitSwitch } from './bar'
 import { Drawer } from './drawer'
 import { chosenEmphasis, stepEmphasis } from './emphasis'
-import { partsOf, type FieldRef } from './field-ref'
 import { KeysDialog } from './keys-dialog'
 import { OpeningProblems } from './opening-problems'
 import type { SaveState } from './save-state'
@@ -48,7 +47,7 @@ export function Studio({ studio, ...rest }: StudioProps & { readonly studio: Stu
 }
 
 function Table({ definitions, name, back, saving, notice, onVersions, onShare, onPrint }: StudioProps) {
-  const { store, garment, writable } = useStudio()
+  const { store, writable } = useStudio()
   const narrow = useNarrow()
   const sheet = useRef<SheetControl>(null)
   const draft = useStudioState((state) => state.draft)
@@ -61,7 +60,7 @@ function Table({ definitions, name, back, saving, notice, onVersions, onShare, o
   const [tags, setTags] = useState(true)
   const [chosen, setChosen] = useState<string>()
   const [at, setAt] = useState<number>()
-  const [docked, setDocked] = useState<FieldRef>()
+  const [docked, setDocked] = useState<string>()
   const [keys, setKeys] = useState(false)
   const commands = useCommands({ store, sheet, writable, onPrint, onVersions })
 
@@ -85,13 +84,10 @@ function Table({ definitions, name, back, saving, notice, onVersions, onShare, o
   )
   const ribbon = <Ribbon steps={draft?.steps ?? []} at={step} onMove={setAt} />
 
-  const fields = (draft?.dimensions ?? []).flatMap((each) =>
-    each.shows === 'value' && each.value ? [`design.${each.value}` as FieldRef] : [],
-  )
-  function moveDock(by: 1 | -1) {
-    if (!docked) return
-    setDocked(fields[(fields.indexOf(docked) + by + fields.length) % fields.length])
-  }
+  const values = (draft?.dimensions ?? []).filter((each) => each.shows === 'value' && each.value)
+  const dock = values.findIndex((each) => each.id === docked)
+  const dimension = values[dock]
+  const moveDock = (by: 1 | -1) => setDocked(values[(dock + by + values.length) % values.length]?.id)
 
   return (
     <div className="flex h-dvh flex-col overflow-hidden">
@@ -137,7 +133,9 @@ function Table({ definitions, name, back, saving, notice, onVersions, onShare, o
           {thumb === 'pieces' && pieces}
           {thumb === 'more' && (
             <div className="grid gap-3 p-4">
-              <UnitSwitch />
+              <div className="justify-self-start">
+                <UnitSwitch />
+              </div>
               <button type="button" className={buttonClass('primary', 'min-h-11')} onClick={onPrint}>
                 <Printer size={18} aria-hidden />
                 Print
@@ -157,13 +155,8 @@ function Table({ definitions, name, back, saving, notice, onVersions, onShare, o
           )}
         </ThumbBar>
       )}
-      {narrow && docked && (
-        <TagDock
-          field={docked}
-          label={garment.design.find((value) => value.id === partsOf(docked).id)?.name ?? ''}
-          onNext={moveDock}
-          onDone={() => setDocked(undefined)}
-        />
+      {narrow && dimension && (
+        <TagDock dimension={dimension} onNext={moveDock} onDone={() => setDocked(undefined)} />
       )}
       <p aria-live="polite" className="sr-only">
         {said}

@@ -29,7 +29,7 @@ export function SearchForm({
         defaultValue={search}
         aria-label={label}
         placeholder={label}
-        className={`${controlClass} max-w-80`}
+        className={`${controlClass} min-w-0 flex-1 sm:max-w-80`}
       />
       <Button type="submit">
         <Search size={18} aria-hidden />

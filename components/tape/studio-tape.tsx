@@ -108,9 +108,9 @@ export function TapePanel({
   const used = useStudioState((state) => state.draft?.used)
   return (
     <section aria-label="Body measurements" className="flex min-h-0 flex-1 flex-col bg-panel">
-      <header className="flex min-h-11 items-center justify-between gap-2 border-b hairline px-4">
-        <h2 className="font-semibold">Tape</h2>
-        {onClose && (
+      {onClose && (
+        <header className="flex min-h-11 items-center justify-between gap-2 border-b hairline px-4">
+          <h2 className="font-semibold">Tape</h2>
           <button
             type="button"
             onClick={onClose}
@@ -119,8 +119,8 @@ export function TapePanel({
             <PanelLeftClose size={16} aria-hidden />
             Fold in
           </button>
-        )}
-      </header>
+        </header>
+      )}
       <div className="flex items-center gap-3 border-b hairline px-4 py-2">
         <Figure focused={at} className="h-40 shrink-0" />
         <p className="text-sm text-walnut">

@@ -4,6 +4,7 @@ import { classes } from './classes'
 export interface Column<Row> {
   readonly id: string
   readonly head: ReactNode
+  /** Nothing is shown as a dash; on a phone it takes no room. */
   readonly cell: (row: Row) => ReactNode
   /** Set when the column is sorted by; shown by an arrow and said by aria-sort. */
   readonly sorted?: 'ascending' | 'descending'
@@ -50,6 +51,7 @@ export function Table<Row>({
           >
             {columns.map((column, index) => {
               const Cell = index === 0 ? 'th' : 'td'
+              const content = column.cell(row)
               return (
                 <Cell
                   key={column.id}
@@ -58,9 +60,10 @@ export function Table<Row>({
                     'px-0 font-normal sm:px-3 sm:py-3.5 sm:first:pl-0 sm:last:pr-0',
                     column.end ? 'text-left sm:text-right' : 'text-left',
                     index > 0 && 'text-sm text-walnut sm:text-base sm:text-ink',
+                    !content && 'max-sm:hidden',
                   )}
                 >
-                  {column.cell(row)}
+                  {content || '–'}
                 </Cell>
               )
             })}

@@ -69,8 +69,8 @@ export default async function ClientsPage({ searchParams }: { searchParams: Sear
                 </Link>
               ),
             },
-            { id: 'phone', head: 'Telephone', cell: (client) => client.phone || '–' },
-            { id: 'email', head: 'E-mail', cell: (client) => client.email || '–' },
+            { id: 'phone', head: 'Telephone', cell: (client) => client.phone },
+            { id: 'email', head: 'E-mail', cell: (client) => client.email },
             {
               id: 'updatedAt',
               head: <SortLink label="Last change" sorted={sorting('updatedAt')} href={turned('updatedAt')} />,
