@@ -1,5 +1,5 @@
 import type { DesignValue, Path, Point, RuleDefinition, Run } from '../contract'
-import { endOf, mirrorX, pathLength, reversePath, transformPath } from '../geometry'
+import { endOf, intersections, mirrorX, pathLength, reversePath, transformPath } from '../geometry'
 import { lengthRule } from '../pen/garment'
 import { count, length } from '../pen/design'
 import { nothing, type Mask } from '../pen/masks'
@@ -337,6 +337,20 @@ function sewSleeve(
   pen.fit(
     fitAcross('sleeve-hem', 'shown', 0, undefined, [
       { piece: 'sleeve', path: hemEdge.path, times: 1, length: pathLength(hemEdge.path) },
+    ]),
+  )
+  fitLength(pen, sleeve, hemEdge.path)
+}
+
+/** The finished length down the grain, beside the length of the arm. */
+function fitLength(pen: Pen, sleeve: PiecePen, hem: Path): void {
+  const crown = sleeve.at('crown')
+  const met = intersections(hem, straight(crown, { x: crown.x, y: crown.y + 2000 }))[0]
+  if (!met) return
+  const down = straight(crown, met.point)
+  pen.fit(
+    fitAcross('sleeve-length', 'shown', 0, pen.value('armLength'), [
+      { piece: 'sleeve', path: down, times: 1, length: pathLength(down) },
     ]),
   )
 }

@@ -7,7 +7,7 @@ import { cutLines } from './law-6-cut-lines'
 import { sleeves } from './law-7-sleeves'
 import { circles } from './law-8-circles'
 import { onlyWhatUsesIt, sameAgain } from './law-9-same-again'
-import { nothingClamped, refusesWell } from './law-10-refusals'
+import { nothingClamped, outOfRange, refusesWell } from './law-10-refusals'
 import { dragsArrive, handlesTrue } from './law-11-handles'
 import { steps } from './law-12-steps'
 import { continuity } from './law-13-continuity'
@@ -39,6 +39,7 @@ export const orderLaws: readonly OrderLaw[] = [
   sameAgain,
   onlyWhatUsesIt,
   refusesWell,
+  outOfRange,
   handlesTrue,
   dragsArrive,
   continuity,

@@ -213,3 +213,26 @@ function depthOfArmhole(
   if (Math.abs(underarm.at.x - number('quarterBust')) > 1e-6)
     found.add('underarm', 'is not a quarter of bust and ease from the centre')
 }
+
+/** Every measurement and style value beyond its range is refused by its name, with the range. */
+export const outOfRange: OrderLaw = (order, engine) => {
+  const found = new Findings(10)
+  const garment = garmentOf(order, engine.garments)
+  const refuses = (field: string, tried: DraftOrder): void => {
+    const result = attempt(tried, engine)
+    const named =
+      result instanceof Error &&
+      result.problems.some((one) => one.field === field && one.code === 'out-of-range')
+    if (!named) found.add(field, 'is drafted beyond its range')
+  }
+  for (const value of garment.design) {
+    if (!offers(order, garment, value.id)) continue
+    if (value.min !== undefined) refuses(value.id, withStyle(order, value.id, value.min - 1))
+    if (value.max !== undefined) refuses(value.id, withStyle(order, value.id, value.max + 1))
+    if (value.kind === 'choice') refuses(value.id, withStyle(order, value.id, 'another'))
+  }
+  for (const id of [...garment.needs, ...garment.estimates]) {
+    for (const mm of [1, 5000]) refuses(id, withMeasurement(order, id, mm))
+  }
+  return found.all
+}

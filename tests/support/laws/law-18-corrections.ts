@@ -10,7 +10,10 @@ export const switchedOff: OrderLaw = (order, engine) => {
   const off = drafted({ ...bare, corrections: corrections.map((one) => ({ ...one, off: true })) }, engine)
   if (JSON.stringify(off) !== JSON.stringify(plain))
     found.add('corrections', 'switched off still change the draft')
-  const on = drafted(order, engine)
+  const moving = corrections.some(
+    ({ by, off: without }) => !without && (typeof by === 'number' ? by : by.x || by.y) !== 0,
+  )
+  const on = moving ? drafted(order, engine) : undefined
   if (on && JSON.stringify(on.pieces) === JSON.stringify(plain.pieces))
     found.add('corrections', 'change nothing')
   return found.all

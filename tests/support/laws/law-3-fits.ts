@@ -16,6 +16,15 @@ const aboutSkirt: typeof about = {
   hip: { body: 'hip', ease: 'hipEase' },
 }
 
+const promised = {
+  bust: 'equal',
+  waist: 'at-least',
+  hip: 'at-least',
+  biceps: 'at-least',
+  armhole: 'at-least',
+}
+const promisedSkirt = { waist: 'equal' }
+
 /** Each fit is what is drawn, ends on the stitch line and keeps its promise to the body. */
 export const fits: DraftLaw = (draft, order, engine) => {
   const found = new Findings(3)
@@ -35,6 +44,12 @@ export const fits: DraftLaw = (draft, order, engine) => {
       found.atMost(fit.id, 'ease against the style', Math.abs(fit.ease - ease), 1e-6)
     }
     promise(found, fit)
+  }
+  // What the rules promise is promised, unless somebody changed them or the marks.
+  if (order.rules || order.corrections?.some((one) => !one.off)) return found.all
+  for (const [id, relation] of Object.entries(order.garment === 'circle-skirt' ? promisedSkirt : promised)) {
+    const fit = draft.fits.find((one) => one.id === id)
+    if (fit && fit.relation !== relation) found.add(id, `is only “${fit.relation}”, “${relation}” is due`)
   }
   return found.all
 }

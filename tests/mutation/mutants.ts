@@ -1,0 +1,313 @@
+/** A fault put into the engine on purpose, and the law that must notice it. */
+export interface Mutant {
+  readonly law: number
+  readonly name: string
+  /** Below `drafting/`. */
+  readonly file: string
+  /** Stands in the file exactly once; otherwise the mutant is out of date. */
+  readonly find: string
+  readonly put: string
+}
+
+type Row = readonly [name: string, file: string, find: string, put: string]
+
+const onlyOnMarks = 'return this.onTape(value)'
+
+const byLaw: Readonly<Record<number, readonly Row[]>> = {
+  1: [
+    [
+      'an arc’s end no longer stands on its mark',
+      'garments/circle-skirt.ts',
+      '...(index === last ? { to } : {}),',
+      '',
+    ],
+    [
+      'the cut line loses its first stretch',
+      'pieces/finish.ts',
+      'cutLine: cut.cutLine,',
+      'cutLine: { ...cut.cutLine, segments: cut.cutLine.segments.slice(1) },',
+    ],
+    [
+      'a corner of the waistband is no number',
+      'parts/waistband.ts',
+      "band.square('lowMeets', 'meets', 'lowEnd',",
+      "band.place('lowMeets', { x: NaN, y: 0 },",
+    ],
+  ],
+  2: [
+    [
+      'the back’s side seam is 1 mm longer',
+      'parts/flared-half.ts',
+      'direction, pen.length(by), {',
+      "direction, pen.length(by) + (piece.id === 'back' ? 1 : 0), {",
+    ],
+    [
+      'the shoulder seam is dropped',
+      'pen/pen.ts',
+      'this.seams.push(plan)',
+      "if (plan.id !== 'shoulder') this.seams.push(plan)",
+    ],
+    [
+      'seams claim 2 mm more ease than their rule gives',
+      'pieces/seams.ts',
+      'pen.value(plan.easeFrom) : 0',
+      'pen.value(plan.easeFrom) + 2 : 0',
+    ],
+    [
+      'notches are moved 3 mm on',
+      'pieces/runs.ts',
+      'from + length - within : from + within }',
+      'from + length - within + 3 : from + within + 3 }',
+    ],
+    [
+      'a stretch beside the pocket is sewn twice',
+      'parts/in-seam-pocket.ts',
+      'a: [stretch(a, mouth.to, length)],',
+      'a: [stretch(a, mouth.to - 5, length)],',
+    ],
+  ],
+  3: [
+    [
+      'levels stop short of the side',
+      'parts/levels.ts',
+      'straight({ x: 0, y }, met.point)',
+      'straight({ x: 0, y }, { x: met.point.x - 1, y })',
+    ],
+    [
+      'fits claim more than is drawn',
+      'pen/pen.ts',
+      'sum + one.times * one.length, 0),',
+      'sum + one.times * one.length, 5),',
+    ],
+    [
+      'quarters are 1 mm narrow',
+      'garments/flared-dress.ts',
+      "'(bust + bustEase) / 4'",
+      "'(bust + bustEase) / 4 - 0.1cm'",
+    ],
+  ],
+  4: [
+    [
+      'necklines meet the fold slanting',
+      'parts/necklines/neckline.ts',
+      '{ x: centre.x + run, y: centre.y }',
+      '{ x: centre.x + run, y: centre.y - run * 0.04 }',
+    ],
+    [
+      'hems meet the side at 87°',
+      'parts/flared-half.ts',
+      '{ x: -direction.y, y: direction.x }, middle',
+      '{ x: -direction.y, y: direction.x + 0.05 }, middle',
+    ],
+  ],
+  5: [
+    [
+      'the back neckline turns 8° at the shoulder',
+      'parts/neck-lean.ts',
+      'back: ofBack }',
+      'back: ofBack + 8 }',
+    ],
+    [
+      'armholes meet the side seam slanting',
+      'parts/armhole.ts',
+      '{ x: side.y, y: -side.x }',
+      '{ x: side.y, y: -side.x + 0.08 }',
+    ],
+  ],
+  6: [
+    [
+      'allowances are 0.2 mm wide',
+      'pieces/cut-line.ts',
+      'offsetPath(edge.path, allowance)',
+      'offsetPath(edge.path, allowance && allowance + 0.2)',
+    ],
+    [
+      'allowances lie inside the piece',
+      'pieces/cut-line.ts',
+      'offsetPath(edge.path, allowance)',
+      'offsetPath(edge.path, -allowance)',
+    ],
+    [
+      'offsets are fitted loosely',
+      'geometry/offset-cubic.ts',
+      'const TOLERANCE = 0.012',
+      'const TOLERANCE = 0.5',
+    ],
+    ['no caution says that an allowance was too wide', 'pieces/finish.ts', "'allowance-clipped',", "'',"],
+  ],
+  7: [
+    [
+      'the front of the head is 1 mm short',
+      'parts/set-in-sleeve.ts',
+      "armhole.front + pen.value('frontHeadEase'),",
+      "armhole.front + pen.value('frontHeadEase') - 1,",
+    ],
+    [
+      'cuts are spread 2 mm less',
+      'parts/slash-and-spread.ts',
+      'Math.asin(spread / 2 /',
+      'Math.asin((spread - 2) / 2 /',
+    ],
+  ],
+  8: [
+    [
+      'the waist is swung 0.5 mm wide',
+      'garments/circle-skirt.ts',
+      'arcPath(apex, radius, from, to)',
+      'arcPath(apex, radius + 0.5, from, to)',
+    ],
+    ['π is 3.14', 'garments/circle-skirt.ts', '2 * pi *', '2 * 3.14 *'],
+  ],
+  9: [
+    [
+      'steps leave out what rules follow from',
+      'pen/values.ts',
+      'mask |= this.mask(inner)',
+      'mask |= this.mask(inner) & 0n',
+    ],
+    [
+      'inches are drawn a little larger',
+      'pen/pen.ts',
+      onlyOnMarks,
+      "return this.onTape(this.unit === 'in' ? value + 0.01 : value)",
+    ],
+    [
+      'a draft remembers the one before it',
+      'pen/pen.ts',
+      onlyOnMarks,
+      'const kept = globalThis as { drawn?: number }\n    kept.drawn = (kept.drawn ?? 0) + 1\n    return this.onTape(value + kept.drawn * 1e-7)',
+    ],
+  ],
+  10: [
+    ['cautions are dropped', 'pen/pen.ts', 'this.cautions.push({ code, message, fields })', ''],
+    [
+      'what is out of range is drawn',
+      'pen/check-order.ts',
+      'const { min = -Infinity, max = Infinity } = value\n',
+      "const { min = -Infinity, max = Infinity } = value\n  if (value.kind === 'length' && isNumber(given)) return undefined\n",
+    ],
+    [
+      'long dresses are clamped silently',
+      'pen/check-order.ts',
+      'design[id] = given[id] as DesignChoice',
+      "design[id] = id === 'length' ? Math.min(given[id] as number, 900) : (given[id] as DesignChoice)",
+    ],
+  ],
+  11: [
+    [
+      'handles pull the wrong way',
+      'handles.ts',
+      'x: (to.x - from.x) / moved,',
+      'x: (from.x - to.x) / moved,',
+    ],
+    [
+      'handles are 5 % too strong',
+      'handles.ts',
+      'perMm: near.change / moved,',
+      'perMm: (near.change / moved) * 1.05,',
+    ],
+  ],
+  12: [
+    ['steps make no mark', 'pen/piece-pen.ts', 'marks: [own],', 'marks: [],'],
+    [
+      'steps say 2 mm more than they draw',
+      'pen/write-steps.ts',
+      '{ length: record.length }',
+      '{ length: record.length + 2 }',
+    ],
+    [
+      'edges name a step that drew something else',
+      'pen/piece-pen.ts',
+      'madeBy: step,',
+      "madeBy: this.pen.steps[0]?.id ?? '',",
+    ],
+  ],
+  13: [
+    [
+      'lengths jump every fifth of a millimetre',
+      'pen/pen.ts',
+      onlyOnMarks,
+      'return this.onTape(value > 300 && Math.floor(value * 5) % 2 ? value + 6 : value)',
+    ],
+  ],
+  14: [
+    [
+      'armholes have a kink at the hollow',
+      'parts/armhole.ts',
+      '{ x: hollow.x, y: hollow.y + fall * 0.66 }',
+      '{ x: hollow.x - 3, y: hollow.y + fall * 0.66 }',
+    ],
+    [
+      'necklines bend both ways',
+      'parts/necklines/neckline.ts',
+      '{ x: centre.x + run, y: centre.y }',
+      '{ x: centre.x + run * 0.1, y: centre.y - depth * 0.9 }',
+    ],
+  ],
+  15: [
+    [
+      'a measurement counts without being declared',
+      'draft-garment.ts',
+      'new Values(ready.rules, ready.measurements,',
+      'new Values(ready.rules, { ...ready.measurements, waist: (ready.measurements.waist ?? 0) + (order.measurements.bustSpan ?? 0) / 100 },',
+    ],
+    [
+      'a measurement is asked for and not used',
+      'garments/flared-dress.ts',
+      "'armLength',",
+      "'armLength', 'wrist',",
+    ],
+  ],
+  17: [
+    [
+      'slits are half as long as they must be',
+      'parts/back-opening.ts',
+      'Math.max(60, Math.ceil(short / 2 / 5) * 5)',
+      'Math.ceil(short / 4)',
+    ],
+    [
+      'the close neck is much wider than the neck',
+      'garments/flared-dress.ts',
+      "'neckBase / 5 - 0.35cm'",
+      "'neckBase / 5 + 0.35cm'",
+    ],
+  ],
+  18: [
+    [
+      'the side seam is taken in on the front only',
+      'parts/flared-half.ts',
+      "pen.corrections.forSeam('side')",
+      "pen.corrections.forSeam('side').filter(() => piece.id === 'front')",
+    ],
+    [
+      'a shared mark is corrected on one side only',
+      'pen/corrections.ts',
+      'if (correction.on.piece !== piece && !shared) continue',
+      'if (correction.on.piece !== piece) continue',
+    ],
+    [
+      'corrections switched off are still made',
+      'pen/corrections.ts',
+      "if (correction.off || typeof correction.by === 'number') continue",
+      "if (typeof correction.by === 'number') continue",
+    ],
+  ],
+  19: [
+    [
+      'the tape is not read',
+      'pen/pen.ts',
+      'return this.tape ? Math.round(length / this.tape) * this.tape : length',
+      'return length',
+    ],
+    [
+      'sums on a tape end beside the distance',
+      'pen/write-steps.ts',
+      'pen.unit, record.length)\n',
+      'pen.unit, record.length + (pen.tape ?? 0))\n',
+    ],
+  ],
+}
+
+export const mutants: readonly Mutant[] = Object.entries(byLaw).flatMap(([law, rows]) =>
+  rows.map(([name, file, find, put]) => ({ law: Number(law), name, file, find, put })),
+)
