@@ -167,7 +167,7 @@ describe('signing in over HTTP', () => {
       const page = await new Visitor(cookie ?? '').get(
         `/sign-in?callbackUrl=${encodeURIComponent(callbackUrl)}`,
       )
-      expect([page.status, page.headers.get('location')]).toEqual([307, '/clients'])
+      expect([page.status, page.headers.get('location')]).toEqual([307, '/home'])
     },
   )
 

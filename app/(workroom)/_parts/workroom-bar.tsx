@@ -24,7 +24,7 @@ export function WorkroomBar({
         Skip to the page
       </a>
       <div className="mx-auto flex max-w-280 flex-wrap items-center gap-x-6 gap-y-1 px-4 pt-2.5 pb-3.5 sm:px-8">
-        <Link href="/clients" aria-label="Chalkfold, start" className="rounded">
+        <Link href="/home" aria-label="Chalkfold, start" className="rounded">
           <Wordmark />
         </Link>
         <nav

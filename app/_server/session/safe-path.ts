@@ -1,5 +1,5 @@
-/** Where people land when nothing better is known. */
-export const homePath = '/clients'
+/** Where people land when nothing better is known: it leads on to where their work begins. */
+export const homePath = '/home'
 
 /**
  * A place inside Chalkfold to go to after signing in. Whatever would leave the origin (another host, `//host`, `/\host`,

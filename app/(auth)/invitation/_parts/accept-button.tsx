@@ -1,5 +1,6 @@
 'use client'
 
+import { homePath } from '@/app/_server/session/safe-path'
 import { useActionForm } from '@/components/forms/use-action-form'
 import { Button } from '@/components/ui/button'
 import { ErrorNote } from '@/components/ui/error-note'
@@ -7,7 +8,7 @@ import { enter } from '../../_parts/sign-in-with'
 import { acceptKnown } from '../actions'
 
 export function AcceptButton({ token }: { readonly token: string }) {
-  const form = useActionForm(acceptKnown, () => enter('/clients'))
+  const form = useActionForm(acceptKnown, () => enter(homePath))
   return (
     <form method="post" onSubmit={form.onSubmit} className="grid gap-5">
       <ErrorNote>{form.errorBeside()}</ErrorNote>

@@ -1,5 +1,6 @@
 'use client'
 
+import { homePath } from '@/app/_server/session/safe-path'
 import { PasswordField } from '@/components/forms/password-field'
 import { useActionForm } from '@/components/forms/use-action-form'
 import { Button } from '@/components/ui/button'
@@ -16,7 +17,7 @@ export function AcceptForm({ token, email }: { readonly token: string; readonly 
     },
     async (_done, fields) => {
       await signInWith(email, String(fields.get('password')))
-      enter('/clients')
+      enter(homePath)
     },
   )
   return (

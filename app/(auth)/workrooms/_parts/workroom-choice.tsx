@@ -1,5 +1,6 @@
 'use client'
 
+import { homePath } from '@/app/_server/session/safe-path'
 import { ChevronRight } from 'lucide-react'
 import { useState } from 'react'
 import { ErrorNote } from '@/components/ui/error-note'
@@ -19,7 +20,7 @@ export function WorkroomChoice({
 
   async function choose(workroomId: string) {
     const answer = await changeWorkroom({ workroomId }).catch(() => null)
-    if (answer?.ok) return enter('/clients')
+    if (answer?.ok) return enter(homePath)
     setProblem(answer?.problems[0]?.message ?? 'This could not be sent. Check the connection and try again.')
   }
 
