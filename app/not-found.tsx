@@ -5,6 +5,7 @@ export default function NotFound() {
   return (
     <main className="grid min-h-[70dvh] place-items-center">
       <EmptyState
+        level={1}
         title="There is nothing on this page"
         action={<ButtonLink href="/">Go to the start</ButtonLink>}
       >

@@ -5,6 +5,7 @@ import { EmptyState } from '@/components/ui/empty-state'
 export default function NoSuchLink() {
   return (
     <EmptyState
+      level={1}
       title="This link shows nothing now"
       action={<ButtonLink href="/">See what Chalkfold is</ButtonLink>}
     >
