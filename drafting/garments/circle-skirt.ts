@@ -251,7 +251,8 @@ function choosePocket(pen: Pen, first: PiecePen, panels: number): ReturnType<typ
   }
   const side = first.edge('right').path
   const mouth = pocketMouth(pen, alongFromTop(side), 0)
-  if (mouth) pocketBag(pen, pathLength(side) - mouth.from - 40)
+  if (mouth)
+    pocketBag(pen, pathLength(side) - mouth.from - 40, first.edge('right').uses | pen.usesOf(['pocketTop']))
   return mouth
 }
 

@@ -202,7 +202,7 @@ function sewSides(pen: Pen, front: PiecePen): void {
   pen.settle()
   if (!mouth) return pen.sew({ ...seam, a: [a], b: [b] })
   const whole = pathLength(front.edge('side').path)
-  pocketBag(pen, whole - mouth.from - 40)
+  pocketBag(pen, whole - mouth.from - 40, front.edge('side').uses | pen.usesOf(['waistLevel', 'pocketTop']))
   sewWithPocket(pen, seam, a, b, mouth, whole)
 }
 

@@ -1,10 +1,11 @@
 import type { DraftOrder, GarmentDefinition } from '../contract'
 import { DraftingError } from '../drafting-error'
 import type { Garment } from '../pen/garment'
+import { bodice } from './bodice'
 import { circleSkirt } from './circle-skirt'
 import { flaredDress } from './flared-dress'
 
-const all: readonly Garment[] = [flaredDress, circleSkirt]
+const all: readonly Garment[] = [flaredDress, circleSkirt, bodice]
 
 /** Every garment that can be drafted. */
 export const garments: readonly GarmentDefinition[] = all.map((garment) => garment.definition)

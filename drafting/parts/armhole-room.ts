@@ -1,5 +1,5 @@
 import type { Point } from '../contract'
-import { pathLength, unit } from '../geometry'
+import { pathLength, rotate, towards, unit } from '../geometry'
 import type { Pen } from '../pen/pen'
 import { solveBetween } from '../pen/solve'
 import { armholeCurve } from './armhole'
@@ -59,6 +59,91 @@ export function deepenArmhole(pen: Pen, side: Point): void {
     `The armhole is ${pen.say(more)} deeper than its rule, so that there is room for the arm.`,
     'upperArm',
     'armholeDrop',
+  )
+}
+
+/**
+ * The same for a fitted bodice with a sleeve: its halves end at the underarm of the block, the front's swung up by the bust
+ * dart. Close enough to the drawn armholes, which lean a little with their side seams.
+ */
+export function deepenFitted(pen: Pen): void {
+  pen.find('armholeDeepening', 0, 0n)
+  for (const side of ['back', 'front'] as const) {
+    const out = Math.cos((pen.value(`${side}Slope`) * Math.PI) / 180) * pen.value(`${side}Shoulder`)
+    pen.find(
+      `${side}Tip`,
+      pen.value(`${side}NeckWidth`) + out,
+      pen.usesOf([`${side}Slope`, `${side}Shoulder`, `${side}NeckWidth`]),
+    )
+  }
+  if (pen.chosen('sleeve') === 'none') return
+  const down = { x: 0, y: 1 }
+  const half = (neck: number, slope: number, long: number, across: number, underarm: Point): number => {
+    const shoulder = towards(slope)
+    const tip = { x: neck + shoulder.x * long, y: shoulder.y * long }
+    return pathLength(armholeCurve(tip, { x: across, y: (tip.y + underarm.y) / 2 }, underarm, shoulder, down))
+  }
+  const levels = { back: pen.value('scyeLine') + pen.value('napeDepth'), front: pen.value('frontScye') }
+  const bust = { x: pen.value('bustPointOut'), y: pen.value('bustHeight') }
+  const spare = (more: number): number => {
+    const swung = rotate(
+      { x: pen.value('frontQuarter'), y: levels.front + more },
+      -pen.value('bustDartAngle'),
+      bust,
+    )
+    return (
+      half(
+        pen.value('backNeckWidth'),
+        pen.value('backSlope'),
+        pen.value('backShoulder'),
+        pen.value('backHalf'),
+        {
+          x: pen.value('backQuarter'),
+          y: levels.back + more,
+        },
+      ) +
+      half(
+        pen.value('frontNeckWidth'),
+        pen.value('frontSlope'),
+        pen.value('frontShoulder'),
+        pen.value('frontHalf'),
+        swung,
+      ) -
+      pen.value('leastArmhole') -
+      6
+    )
+  }
+  if (spare(0) >= 0) return
+  const more = solveBetween(spare, 0, deepest, 1e-7)
+  if (more === undefined) {
+    pen.refuse({
+      field: 'upperArm',
+      code: 'impossible-shape',
+      message:
+        'The arm is too large for an armhole on this body. Check the upper arm and the bust, or leave the sleeve out.',
+    })
+  }
+  const uses = [
+    'leastArmhole',
+    'frontScye',
+    'backQuarter',
+    'frontQuarter',
+    'backHalf',
+    'frontHalf',
+    'bustDartAngle',
+    'bustPointOut',
+    'bustHeight',
+    'backSlope',
+    'frontSlope',
+    'backShoulder',
+    'frontShoulder',
+  ]
+  pen.refind('armholeDeepening', pen.tape ? Math.ceil(more / pen.tape) * pen.tape : more, pen.usesOf(uses))
+  pen.caution(
+    'armhole-deepened',
+    `The armhole is ${pen.say(more)} deeper than its rule, so that there is room for the arm.`,
+    'upperArm',
+    'sleeveEase',
   )
 }
 

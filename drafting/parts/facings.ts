@@ -13,6 +13,7 @@ const narrowShoulder = 70
  * Faces the neck, and the armholes where there is no sleeve, of a front and a back.
  *
  * @param bare whether the armholes have no sleeve.
+ * @param shoulderEase the rule by which the back shoulder is longer, where the facing covers the whole of it.
  * @param runs the edges that a neckline or armhole consists of, where a dart divides it; one edge of that name otherwise.
  */
 export function faceNeckAndArmholes(
@@ -20,7 +21,10 @@ export function faceNeckAndArmholes(
   front: FacedHalf,
   back: FacedHalf,
   bare: boolean,
-  runs: (piece: string, edge: string) => Run[] = (piece, edge) => [{ piece, edge }],
+  {
+    runs = (piece, edge) => [{ piece, edge }],
+    shoulderEase,
+  }: { runs?: (piece: string, edge: string) => Run[]; shoulderEase?: string } = {},
 ): void {
   const body = front[0].piece
   const shoulder = distance(body.at('sideNeck'), body.at('shoulderTip'))
@@ -48,20 +52,26 @@ export function faceNeckAndArmholes(
     sewOn('neckline', faced, neck.id)
     if (together) sewOn('armhole', faced, neck.id)
   }
-  joinFacings(pen, 'neck-facing', together ? ['shoulder', 'side'] : ['shoulder'])
+  joinFacings(
+    pen,
+    'neck-facing',
+    together ? ['shoulder', 'side'] : ['shoulder'],
+    together ? shoulderEase : undefined,
+  )
   if (!bare || together) return
   for (const [faced] of [front, back]) sewOn('armhole', faced, armholeFacing(pen, faced, depth).id)
   joinFacings(pen, 'armhole-facing', ['shoulder', 'side'])
 }
 
-function joinFacings(pen: Pen, facing: string, edges: readonly string[]): void {
+function joinFacings(pen: Pen, facing: string, edges: readonly string[], shoulderEase?: string): void {
   const names: Record<string, string> = { 'neck-facing': 'Neck facing', 'armhole-facing': 'Armhole facing' }
   for (const edge of edges) {
     pen.sew({
       id: `${facing}-${edge}`,
       name: `${names[facing]}, ${edge}`,
-      a: [{ piece: `front-${facing}`, edge }],
-      b: [{ piece: `back-${facing}`, edge }],
+      a: [{ piece: `back-${facing}`, edge }],
+      b: [{ piece: `front-${facing}`, edge }],
+      ...(edge === 'shoulder' && shoulderEase ? { join: 'eased' as const, easeFrom: shoulderEase } : {}),
       smooth: true,
     })
   }

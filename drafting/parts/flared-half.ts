@@ -38,7 +38,7 @@ export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): v
   piece.start('neckLevel', { x: 0, y: 0 }, 'Fold the cloth; mark the level of the side neck on the centre')
   piece.go('neckPoint', 'neckLevel', 'right', 'neckWidth', {
     say: 'From the centre go across the width of the neck',
-    up: true,
+    round: 'up',
     shared: true,
   })
   piece.go('shoulderEnd', 'neckLevel', 'right', 'halfShoulder', {

@@ -1,6 +1,7 @@
 import type { DesignValue, Path, Run } from '../contract'
 import { endOf, intersections, pathLength } from '../geometry'
 import { length, yesNo } from '../pen/design'
+import { nothing, type Mask } from '../pen/masks'
 import type { Pen } from '../pen/pen'
 import { straight, type PiecePen } from '../pen/piece-pen'
 
@@ -59,9 +60,10 @@ export function pocketMouth(pen: Pen, seam: Path, waistLevel: number): PocketMou
 /**
  * A pocket bag whose mouth is a copy of the side seam; two of them hang in each side seam.
  *
+ * @param uses what the seam that it hangs in follows from.
  * @param least how deep the bag may hang before it shows below the hem, mm.
  */
-export function pocketBag(pen: Pen, least: number): PiecePen {
+export function pocketBag(pen: Pen, least: number, uses: Mask): PiecePen {
   const bag = pen.piece('pocket-bag', 'Pocket bag')
   const opening = pen.length('pocketOpening')
   const wanted = pen.length('pocketDepth')
@@ -82,6 +84,7 @@ export function pocketBag(pen: Pen, least: number): PiecePen {
     )
   }
   const names = ['pocketOpening', 'pocketDepth']
+  const mask = depth < wanted ? uses : nothing
   bag.start('mouthTop', { x: 0, y: 0 }, 'Mark the top of the mouth')
   bag.go('mouthEnd', 'mouthTop', 'down', 'pocketOpening', {
     say: 'Come down the opening; it is a copy of the side seam',
@@ -96,8 +99,8 @@ export function pocketBag(pen: Pen, least: number): PiecePen {
   })
   const low = { x: -bagWidth * 0.5, y: depth }
   const far = { x: -bagWidth, y: depth * 0.5 }
-  bag.place('bottom', low, { say: 'Mark the bottom of the bag', uses: names })
-  bag.place('inside', far, { say: 'Mark the inner edge of the bag', uses: names })
+  bag.place('bottom', low, { say: 'Mark the bottom of the bag', uses: names, mask })
+  bag.place('inside', far, { say: 'Mark the inner edge of the bag', uses: names, mask })
   bag.line('mouth', 'mouthTop', 'mouthEnd', {
     role: 'seam',
     allowance: 'sideAllowance',
@@ -140,6 +143,7 @@ export function pocketBag(pen: Pen, least: number): PiecePen {
       say: 'Draw round the bag in one sweep',
       uses: names,
       through: ['bottom', 'inside'],
+      mask,
     },
   )
   bag.cut({ cloth: 'main', count: 4, onFold: false, handed: true })

@@ -1,34 +1,43 @@
 import type { Point } from '../contract'
 import type { Pen } from '../pen/pen'
+import { solveBetween } from '../pen/solve'
 import { between, type PiecePen } from '../pen/piece-pen'
 import { necklines } from './necklines'
 import { mostCurvedLean } from './necklines/neckline'
 
 /**
  * How the front and back necklines leave the side neck, degrees from the vertical, inwards. Laid together at the shoulder
- * they must run on without a corner, which their leans do when they add up to twice the slope. Each would rather be square to
+ * they must run on without a corner, which their leans do when they add up to both slopes. Each would rather be square to
  * the shoulder; a deep neck can lean less than that without bending both ways, and then the other leans more.
  */
 export function neckLeans(pen: Pen, front: PiecePen, back: PiecePen): { front: number; back: number } {
   const shape = necklines[String(pen.chosen('neckShape'))]
   if (!shape) throw new Error('Every neck shape offered has a neckline.')
-  const shoulder = between(front.at('sideNeck'), front.at('shoulderTip'))
-  const slope = (Math.atan2(shoulder.y, shoulder.x) * 180) / Math.PI
+  const slopeOf = (piece: PiecePen): number => {
+    const shoulder = between(piece.at('sideNeck'), piece.at('shoulderTip'))
+    return (Math.atan2(shoulder.y, shoulder.x) * 180) / Math.PI
+  }
+  const slope = { front: slopeOf(front), back: slopeOf(back) }
+  const together = slope.front + slope.back
   const size = (piece: PiecePen): Point => between(piece.at('centreNeck'), piece.at('sideNeck'))
   const most = {
     front: shape.mostLean(size(front).x, -size(front).y),
     back: mostCurvedLean(size(back).x, -size(back).y),
   }
-  const ofFront = Math.min(shape.lean(slope), most.front)
-  const ofBack = Math.min(2 * slope - ofFront, most.back)
-  const left = 2 * slope - ofBack
+  const ofFront = Math.min(shape.lean(slope.front), most.front)
+  const ofBack = Math.min(together - ofFront, most.back)
+  const left = together - ofBack
   if (left <= most.front + 1e-9) return { front: left, back: ofBack }
+  // The shallowest drop that would do, if any: the most lean falls as the neck gets deeper.
+  const drop = pen.value('frontNeckDrop')
+  const depth = -size(front).y
+  const fits = (less: number): number => shape.mostLean(size(front).x, depth - less) - left
+  const less = solveBetween(fits, 0, Math.min(drop, depth - 5), 1e-6)
   pen.refuse({
-    field: 'frontNeckDrop',
+    field: less === undefined ? 'neckWidening' : 'frontNeckDrop',
     code: 'impossible-shape',
     message:
       'A neck so deep in front and back and so narrow makes a corner at the shoulder. Open it wider, or make front or back less deep.',
-    min: 0,
-    max: Math.max(0, pen.value('frontNeckDrop') - 20),
+    ...(less === undefined ? {} : { min: 0, max: Math.max(0, Math.floor((drop - less) * 10) / 10) }),
   })
 }

@@ -94,17 +94,18 @@ export function setInSleeve(pen: Pen, front: Armhole, back: Armhole): PiecePen {
   sleeve.start('crown', { x: 0, y: 0 }, 'Mark the top of the sleeve on a line that lies with the grain')
   sleeve.go('underarmLevel', 'crown', 'down', 'headHeight', {
     say: 'Come down the height of the head, found so that the head fits the armhole',
+    round: 'down',
     stepKind: 'solve',
   })
   sleeve.go('frontUnderarm', 'underarmLevel', 'right', 'frontGirth', {
     say: 'Go out to the front by the front part of the girth',
     drag: ['sleeveEase'],
-    up: true,
+    round: 'up',
     stepKind: 'solve',
   })
   sleeve.go('backUnderarm', 'underarmLevel', 'left', 'backGirth', {
     say: 'Go out to the back by the back part of the girth',
-    up: true,
+    round: 'up',
     stepKind: 'solve',
   })
   sleeve.go('hemLevel', 'crown', 'down', 'sleeveLength', {
@@ -164,12 +165,13 @@ function solveShape(
 
 /** A plain sleeve: each side comes in by the taper. */
 function taper(pen: Pen, sleeve: PiecePen): SleeveCorners {
-  const narrowest = Math.max(0, Math.min(pen.length('frontGirth'), pen.length('backGirth')) - 55)
+  const girth = Math.min(pen.length('frontGirth'), pen.length('backGirth')) - 55
+  const narrowest = Math.max(0, Math.min(girth, pen.value('underarmLength') * 0.4))
   if (pen.length('sleeveTaper') > narrowest) {
     pen.refuse({
       field: 'sleeveTaper',
       code: 'impossible-shape',
-      message: `So much taper leaves no room for the hand. Take in at most ${pen.say(narrowest)} a side.`,
+      message: `So much taper is too much for this sleeve. Take in at most ${pen.say(narrowest)} a side.`,
       max: narrowest,
     })
   }
@@ -324,6 +326,7 @@ function sewSleeve(
   })
   sleeve.notch('crown', 'head-front', 0)
   const hemEdge = sleeve.edge('hem')
+  lengthFit(pen, sleeve)
   const from = sleeve.edge('underarm-back')
   const across = straight(
     endOf(from.path),
@@ -353,4 +356,27 @@ function fitLength(pen: Pen, sleeve: PiecePen, hem: Path): void {
       { piece: 'sleeve', path: down, times: 1, length: pathLength(down) },
     ]),
   )
+}
+
+/** The sleeve against the arm: from the crown straight down to the hem. */
+function lengthFit(pen: Pen, sleeve: PiecePen): void {
+  const crown = sleeve.at('crown')
+  const deep = { x: crown.x, y: sleeve.at('hemLevel').y + 200 }
+  const foot =
+    intersections(sleeve.edge('hem').path, straight(crown, deep))[0]?.point ?? sleeve.at('hemLevel')
+  const path = straight(crown, { x: crown.x, y: foot.y })
+  pen.fit(
+    fitAcross('sleeve-length', 'shown', 0, pen.value('armLength'), [
+      { piece: 'sleeve', path, times: 1, length: pathLength(path) },
+    ]),
+  )
+  const over = pathLength(path) - pen.value('armLength')
+  if (over > 30) {
+    pen.caution(
+      'sleeve-long',
+      `The sleeve is ${pen.say(over)} longer than the arm. Shorten it, or let it gather at the wrist.`,
+      'sleeveLength',
+      'armLength',
+    )
+  }
 }

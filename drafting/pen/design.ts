@@ -15,6 +15,17 @@ export function length(
   return { id, name, part, kind: 'length', ...range, ...when(condition) }
 }
 
+/** An angle among the style's values, degrees. */
+export function angle(
+  id: string,
+  name: string,
+  part: string,
+  range: { default: number; min: number; max: number },
+  condition?: When,
+): DesignValue {
+  return { id, name, part, kind: 'angle', ...range, ...when(condition) }
+}
+
 /** A share of a whole, such as the share of a circle. */
 export function share(
   id: string,

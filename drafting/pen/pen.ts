@@ -81,11 +81,13 @@ export class Pen {
     return this.onTape(value)
   }
 
-  /** A length as it is measured out, mm: rounded up to the tape when there is one. */
-  lengthUp(name: string): number {
+  /** A length as it is measured out, mm: rounded one way to the tape when there is one. */
+  lengthRounded(name: string, way: 'up' | 'down'): number {
     const value = this.length(name)
     const exact = this.values.number(name)
-    return this.tape && value < exact - 1e-9 ? value + this.tape : value
+    if (!this.tape) return value
+    if (way === 'up' && value < exact - 1e-9) return value + this.tape
+    return way === 'down' && value > exact + 1e-9 ? value - this.tape : value
   }
 
   /** Whether a measurement is known or could be estimated. */
@@ -109,6 +111,12 @@ export class Pen {
 
   /** States a value found so that something fits, with the sum of what it follows from. */
   find(name: string, value: number, uses: Mask): void {
+    this.values.find(name, value, uses)
+  }
+
+  /** States a found value anew; every rule that was worked out with the old one is worked out again. */
+  refind(name: string, value: number, uses: Mask): void {
+    this.values.forget()
     this.values.find(name, value, uses)
   }
 

@@ -52,8 +52,8 @@ export interface EdgeOptions {
 }
 
 export interface MarkOptions {
-  /** A girth that must not come out too small: with a tape it is rounded up. */
-  readonly up?: boolean
+  /** Which way a tape rounds it, where the nearest would do harm: a girth must not come out too small. */
+  readonly round?: 'up' | 'down'
   readonly stepKind?: Step['kind']
   readonly say: string
   readonly kind?: Mark['kind']
@@ -138,7 +138,7 @@ export class PiecePen {
   go(id: string, from: string, towards: Direction, by: string, options: MarkOptions): void {
     const origin = this.mark(from)
     const along = directions[towards]
-    const length = options.up ? this.pen.lengthUp(by) : this.pen.length(by)
+    const length = options.round ? this.pen.lengthRounded(by, options.round) : this.pen.length(by)
     const uses = this.pen.values.mask(by)
     const vertical = towards === 'down' || towards === 'up'
     this.put(
@@ -185,9 +185,13 @@ export class PiecePen {
       through?: readonly string[]
       uses?: readonly string[]
       from?: string
+      mask?: Mask
     },
   ): void {
-    const uses = this.pen.usesOf(options.uses ?? []) | this.usesOf(...(options.through ?? []))
+    const uses =
+      this.pen.usesOf(options.uses ?? []) |
+      this.usesOf(...(options.through ?? [])) |
+      (options.mask ?? nothing)
     this.put(id, at, uses, uses, options)
   }
 
@@ -336,13 +340,11 @@ export class PiecePen {
       pressTo,
       intake: distance(startOf(first), endOf(second)),
     })
-    this.marks.set(`${id}-drill`, {
-      id: `${id}-drill`,
-      at: drillPoint(first, second, at),
-      x: nothing,
-      y: nothing,
+    this.place(`${id}-drill`, drillPoint(first, second, at), {
+      say: 'Drill inside the point, where the hole is hidden when the dart is sewn',
+      kind: 'drill',
+      mask: this.edge(edges[0]).uses | this.edge(edges[1]).uses,
     })
-    this.kinds.set(`${id}-drill`, 'drill')
     this.pen.sew({
       id: `${this.id}-${id}`,
       name: `${this.name}, ${id.replaceAll('-', ' ')}`,

@@ -49,6 +49,11 @@ export class Values {
     this.masks.clear()
   }
 
+  /** Forgets every rule that was worked out. */
+  forget(): void {
+    for (const id of this.rules.formulas.keys()) delete this.numbers[id]
+  }
+
   /** Everything that a name follows from, itself included. */
   mask(name: string): Mask {
     const known = this.masks.get(name)

@@ -23,6 +23,13 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     square: { neckShape: 'square', frontNeckDrop: 40, neckWidening: 30, sleeveLength: 560, flare: 0.125 },
     narrowShoulder: { sleeve: 'none', neckWidening: 70, frontNeckDrop: 80, backOpening: 'none', flare: 0.5 },
   },
+  bodice: {
+    side: {},
+    shoulder: { dartTo: 'shoulder', sleeve: 'plain' },
+    armhole: { dartTo: 'armhole', neckShape: 'V' },
+    neck: { dartTo: 'neck', sleeve: 'flared' },
+    waist: { dartTo: 'waist', sleeve: 'plain', backOpening: 'none' },
+  },
   'circle-skirt': {
     default: {},
     full: { share: '1', panels: 4, pockets: true },
