@@ -30,6 +30,8 @@ function vitest(suite, filters, report) {
     `--project=${suite}`,
     '--reporter=default',
     '--reporter=json',
+    // What a passing test prints (a database killed on purpose, say) would only bury what a failing one does.
+    '--silent=passed-only',
     `--outputFile.json=${report}`,
     // A suite without a file of this name is no failure when several suites are asked; test.mjs sees to "none at all".
     '--passWithNoTests',
