@@ -5,7 +5,7 @@ import { Checkbox } from '@/components/ui/checkbox'
 import { Select } from '@/components/ui/select'
 import type { FieldRef } from '@/components/studio/field-ref'
 import { problemsAt } from '@/components/studio/store'
-import { useStudio, useStudioState } from '@/components/studio/use-store'
+import { useStudio, useStudioList, useStudioState } from '@/components/studio/use-store'
 import { ValueField } from '@/components/studio/value-field'
 import { currentValue } from '@/components/studio/values'
 
@@ -18,9 +18,10 @@ export function wordsOf(id: string): string {
 /** The style: what was chosen about the garment, by its parts. What a choice rules out is not shown. */
 export function Choices() {
   const { garment } = useStudio()
-  const order = useStudioState((state) => state.order)
-  const offered = garment.design.filter((value) =>
-    isOffered(value, (id) => currentValue(garment, order, `design.${id}`)),
+  const offered = useStudioList((state) =>
+    garment.design.filter((value) =>
+      isOffered(value, (id) => currentValue(garment, state.order, `design.${id}`)),
+    ),
   )
   const parts = [...new Set(offered.map((value) => value.part))]
   return (

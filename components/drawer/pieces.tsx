@@ -33,7 +33,7 @@ export function Pieces({
   readonly tags: boolean
   readonly onTags: (on: boolean) => void
 }) {
-  const pieces = useStudioState((state) => state.draft?.pieces)
+  const pieces = useStudioState((state) => state.resting?.pieces)
   return (
     <div className="grid gap-6 p-4">
       <fieldset className="grid gap-1">

@@ -1,10 +1,9 @@
 'use client'
 
-import { useRef, useState, type KeyboardEvent, type PointerEvent } from 'react'
+import { useRef, type KeyboardEvent, type PointerEvent } from 'react'
 import type { Handle, Point } from '@/drafting/contract'
 import { placeTransform, type Places } from '@/drafting/drawing'
 import { applyTo } from '@/drafting/geometry/transform'
-import { typeset } from '@/components/ui/typeset'
 import { lengthInWords } from '@/components/studio/lengths-in-words'
 import { useStudio } from '@/components/studio/use-store'
 import {
@@ -17,6 +16,7 @@ import {
 } from '@/components/studio/values'
 import type { FieldRef } from '@/components/studio/field-ref'
 import { markAt } from './drag-point'
+import { showLive } from './live-length'
 import { solveDrag } from './solve-drag'
 import { toScreen, toSheet, type View } from './view'
 
@@ -51,7 +51,7 @@ export function Points({
 }) {
   const { store, garment, engine, writable } = useStudio()
   const drag = useRef<Drag>(undefined)
-  const [live, setLive] = useState<{ id: string; words: string }>()
+  const chip = useRef<HTMLSpanElement>(null)
   const nameOf = (id: string) => garment.design.find((value) => value.id === id)?.name ?? id
 
   function wordsFor(handle: Handle, stopped: string): string {
@@ -75,14 +75,13 @@ export function Points({
     const pointer = { x: now.pointer.x - box.left + now.grip.x, y: now.pointer.y - box.top + now.grip.y }
     const target = intoPiece(toSheet(view(), pointer), place)
     const setting = { draftGarment: engine.draftGarment, garment, unit, onTape: !now.free }
-    const asked = solveDrag(setting, order, now.handle, at, target)
-    if (asked.length === 0) return
-    store.putAll(
-      asked.map(({ ref, value }) => ({ ref, value, text: textFor(ref, value) })),
-      false,
-    )
-    const stopped = asked.some((one) => one.stopped) ? ' · as far as it goes' : ''
-    setLive({ id: now.handle.id, words: wordsFor(now.handle, stopped) })
+    const step = solveDrag(setting, order, now.handle, at, target)
+    if (step) {
+      const fields = step.asked.map(({ ref, value }) => ({ ref, value, text: textFor(ref, value) }))
+      store.take(fields, step.draft)
+    }
+    const stopped = step?.asked.some((one) => one.stopped) ? ' · as far as it goes' : ''
+    showLive(chip.current, wordsFor(now.handle, stopped), pointer)
   }
 
   function textFor(ref: FieldRef, value: number): string {
@@ -104,7 +103,7 @@ export function Points({
     const grip = { x: onScreen.x - (pointer.x - box.left), y: onScreen.y - (pointer.y - box.top) }
     drag.current = { handle, grip, frame: 0, pointer, free: event.altKey }
     store.begin()
-    setLive({ id: handle.id, words: wordsFor(handle, '') })
+    showLive(chip.current, wordsFor(handle, ''), { x: pointer.x - box.left, y: pointer.y - box.top })
   }
 
   function move(event: PointerEvent<HTMLButtonElement>) {
@@ -124,7 +123,7 @@ export function Points({
       if (now.frame) follow(now)
       store.commit(pointName(now.handle, nameOf))
     } else store.cancel()
-    setLive(undefined)
+    showLive(chip.current, undefined)
   }
 
   function key(event: KeyboardEvent<HTMLButtonElement>, handle: Handle) {
@@ -159,33 +158,35 @@ export function Points({
   }
 
   return (
-    <ul aria-label="Points" className="pointer-events-none absolute inset-0">
-      {handles.map((handle) => (
-        <li key={handle.id} data-point={handle.id} className="absolute top-0 left-0">
-          <button
-            type="button"
-            aria-label={`Point for ${pointName(handle, nameOf)}`}
-            aria-roledescription="point"
-            onPointerDown={(event) => down(event, handle)}
-            onPointerMove={move}
-            onPointerUp={() => finish(true)}
-            onPointerCancel={() => finish(false)}
-            onKeyDown={(event) => key(event, handle)}
-            className="group/point pointer-events-auto absolute grid size-6 -translate-1/2 cursor-grab touch-none place-items-center rounded-full active:cursor-grabbing pointer-coarse:size-11"
-          >
-            <span
-              aria-hidden
-              className="size-2.5 rounded-full border-2 border-indigo bg-sheet group-hover/point:size-3.5 group-active/point:bg-indigo"
-            />
-          </button>
-          {live?.id === handle.id && (
-            <span className="measure pointer-events-none absolute top-4 left-4 z-40 bg-ink px-2 py-0.5 text-tag text-ground">
-              {typeset(live.words)}
-            </span>
-          )}
-        </li>
-      ))}
-    </ul>
+    <>
+      <ul aria-label="Points" className="pointer-events-none absolute inset-0">
+        {handles.map((handle) => (
+          <li key={handle.id} data-point={handle.id} className="absolute top-0 left-0">
+            <button
+              type="button"
+              aria-label={`Point for ${pointName(handle, nameOf)}`}
+              aria-roledescription="point"
+              onPointerDown={(event) => down(event, handle)}
+              onPointerMove={move}
+              onPointerUp={() => finish(true)}
+              onPointerCancel={() => finish(false)}
+              onKeyDown={(event) => key(event, handle)}
+              className="group/point pointer-events-auto absolute grid size-6 -translate-1/2 cursor-grab touch-none place-items-center rounded-full active:cursor-grabbing pointer-coarse:size-11"
+            >
+              <span
+                aria-hidden
+                className="size-2.5 rounded-full border-2 border-indigo bg-sheet group-hover/point:size-3.5 group-active/point:bg-indigo"
+              />
+            </button>
+          </li>
+        ))}
+      </ul>
+      <span
+        ref={chip}
+        hidden
+        className="measure pointer-events-none absolute top-0 left-0 z-40 bg-ink px-2 py-0.5 text-tag text-ground"
+      />
+    </>
   )
 }
 

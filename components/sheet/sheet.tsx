@@ -10,7 +10,7 @@ import {
   useState,
   type Ref,
 } from 'react'
-import type { Handle } from '@/drafting/contract'
+import type { Draft, Handle } from '@/drafting/contract'
 import { boundsOf } from '@/drafting/drawing/bounds'
 import { arrange, drawing, placePath, placeTransform, type Layer, type Places } from '@/drafting/drawing'
 import { applyTo } from '@/drafting/geometry/transform'
@@ -26,7 +26,7 @@ import { ResultTag, ValueTag } from './tag'
 import { placeTagElements } from './tag-writing'
 import type { Box } from './tag-places'
 import { markAt } from './drag-point'
-import { fitView, toScreen, trueScale, zoomAt, type View } from './view'
+import { fitView, toScreen, trueScale, zoomAt, type Size, type View } from './view'
 
 /** What the bar and the keyboard may ask of the sheet. */
 export interface SheetControl {
@@ -40,7 +40,8 @@ export interface SheetProps {
   readonly control: Ref<SheetControl>
   readonly layers: readonly Layer[]
   readonly hidden: ReadonlySet<string>
-  readonly emphasis: readonly Emphasis[]
+  /** Lines to lay over the drawing. */
+  readonly emphasise: (draft: Draft) => readonly Emphasis[]
   /** Only the emphasis is drawn: the draft is being watched as it is made. */
   readonly replaying: boolean
   readonly showTags: boolean
@@ -57,13 +58,15 @@ const readable = 14
 
 /** The table: the drawing, its tags and points, under a window that pans and zooms. */
 export function Sheet(props: SheetProps) {
-  const { control, layers, hidden, emphasis, replaying, showTags, onOpenTag } = props
+  const { control, layers, hidden, emphasise, replaying, showTags, onOpenTag } = props
   const { store, engine, writable } = useStudio()
   const area = useRef<HTMLDivElement>(null)
   const svg = useRef<SVGSVGElement>(null)
   const stage = useRef<Stage>(undefined)
   const view = useRef<View>({ scale: 0.5, x: 0, y: 0 })
   const places = useRef<Places>({})
+  /** Asked of the page only when it changes: asking in every frame would lay the page out again. */
+  const size = useRef<Size>({ width: 0, height: 0 })
   const [scale, setScale] = useState(0.5)
   const settled = useStudioState((state) => (state.gesture ? undefined : state.order))
   const stale = useStudioState(isStale)
@@ -116,7 +119,7 @@ export function Sheet(props: SheetProps) {
       element.style.transform = `translate(${at.x}px, ${at.y}px)`
       points.push({ x: at.x - pointRoom, y: at.y - pointRoom, width: 2 * pointRoom, height: 2 * pointRoom })
     }
-    placeTagElements(box, draft, places.current, view.current, points)
+    placeTagElements(box, size.current, draft, places.current, view.current, points)
   }, [handles, store])
 
   const moved = useRef(false)
@@ -145,8 +148,11 @@ export function Sheet(props: SheetProps) {
         !(item.layer === 'dimension' && item.kind === 'text') && !(item.piece && hidden.has(item.piece)),
     )
     stage.current.show({ ...list, items: replaying ? [] : shown })
+    stage.current.emphasise(
+      emphasise(draft).map((line) => ({ ...line, path: placePath(line.path, places.current[line.piece]) })),
+    )
     position()
-  }, [hidden, layers, position, replaying, store])
+  }, [emphasise, hidden, layers, position, replaying, store])
 
   const textScale = textScaleAt(scale)
   useLayoutEffect(() => draw(), [draw, textScale])
@@ -181,18 +187,13 @@ export function Sheet(props: SheetProps) {
     return store.subscribe(draw)
   }, [draw, store, tags])
 
-  useLayoutEffect(() => {
-    stage.current?.emphasise(
-      emphasis.map((line) => ({ ...line, path: placePath(line.path, places.current[line.piece]) })),
-    )
-  }, [emphasis])
-
   const phone = onOpenTag !== undefined
   const firstPiece = useStudioState((state) => state.draft?.pieces[0]?.id)
   useEffect(() => {
     const box = area.current
     if (!box) return
     const watch = new ResizeObserver(() => {
+      size.current = { width: box.clientWidth, height: box.clientHeight }
       if (!moved.current) fit(phone ? firstPiece : undefined)
     })
     watch.observe(box)

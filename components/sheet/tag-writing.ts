@@ -2,7 +2,7 @@ import type { Draft } from '@/drafting/contract'
 import { placeTransform, type Places } from '@/drafting/drawing'
 import { applyTo } from '@/drafting/geometry/transform'
 import { placeTags, type Box, type TagWish } from './tag-places'
-import { toScreen, type View } from './view'
+import { toScreen, type Size, type View } from './view'
 
 /** px: a tag's figures are this wide each, and its frame adds this much. */
 const figure = 7.2
@@ -41,12 +41,12 @@ function textLength(element: HTMLElement): number {
 /** Puts each tag below `area` at its place, clear of the points, without asking React. */
 export function placeTagElements(
   area: HTMLElement,
+  size: Size,
   draft: Draft,
   places: Places,
   view: View,
   points: readonly Box[],
 ): void {
-  const size = { width: area.clientWidth, height: area.clientHeight }
   const placed = placeTags(tagWishes(area, draft, places, view), points, size)
   const byId = new Map(placed.map((place) => [place.id, place]))
   for (const element of area.querySelectorAll<HTMLElement>('[data-tag]')) {

@@ -3,8 +3,8 @@ import type { Emphasis } from '@/components/sheet/stage'
 import { runPath } from '@/components/drawer/runs'
 
 /** Both sides of a chosen seam, or the lines along which a chosen fit is measured. */
-export function chosenEmphasis(draft: Draft | undefined, chosen: string | undefined): readonly Emphasis[] {
-  if (!draft || !chosen) return []
+export function chosenEmphasis(draft: Draft, chosen: string | undefined): readonly Emphasis[] {
+  if (!chosen) return []
   const id = chosen.slice(chosen.indexOf(':') + 1)
   if (chosen.startsWith('seam:')) {
     const seam = draft.seams.find((each) => each.id === id)
@@ -28,8 +28,7 @@ function side(draft: Draft, runs: readonly Run[], kind: Emphasis['kind']): reado
 }
 
 /** The draft as far as a step: all lines drawn before it, and its own brought out. */
-export function stepEmphasis(draft: Draft | undefined, at: number | undefined): readonly Emphasis[] {
-  if (!draft || at === undefined) return []
+export function stepEmphasis(draft: Draft, at: number): readonly Emphasis[] {
   return draft.steps.slice(0, at + 1).flatMap((step, index) =>
     step.draws.map((path, number) => ({
       id: `${step.id}:${number}`,

@@ -22,6 +22,8 @@ export interface StudioState extends Snapshot {
   readonly unit: Unit
   /** The last order that could be drafted, drawn. Undefined when even the first could not. */
   readonly draft: Draft | undefined
+  /** The draft when no gesture was open: for what need not follow every frame of a drag. Its sums are always told. */
+  readonly resting: Draft | undefined
   /** Why the opened order itself cannot be drafted; empty as soon as one could. */
   readonly problems: readonly Problem[]
   readonly attempts: Readonly<Partial<Record<FieldRef, Attempt>>>

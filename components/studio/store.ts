@@ -3,7 +3,7 @@ import { DraftingError } from '@/drafting/drafting-error'
 import { changeInWords } from './announce'
 import type { Engine } from './engine'
 import { isAbout, withValue, type FieldRef, type FieldValue } from './field-ref'
-import type { Attempt, Snapshot, StudioState, Unit } from './state'
+import { isStale, type Attempt, type Snapshot, type StudioState, type Unit } from './state'
 
 interface Entry {
   readonly label: string
@@ -41,6 +41,7 @@ export function createStudioStore({ engine, order, typed = {}, unit }: StoreOpti
     typed,
     unit,
     draft: undefined,
+    resting: undefined,
     problems: [],
     attempts: {},
     gesture: false,
@@ -49,7 +50,10 @@ export function createStudioStore({ engine, order, typed = {}, unit }: StoreOpti
     said: '',
   }
   const first = draftOf(order, true)
-  state = { ...state, ...('draft' in first ? { draft: first.draft } : { problems: first.problems }) }
+  state = {
+    ...state,
+    ...('draft' in first ? { draft: first.draft, resting: first.draft } : { problems: first.problems }),
+  }
 
   function draftOf(next: DraftOrder, explain: boolean): { draft: Draft } | { problems: readonly Problem[] } {
     try {
@@ -62,6 +66,7 @@ export function createStudioStore({ engine, order, typed = {}, unit }: StoreOpti
 
   function set(change: Partial<StudioState>) {
     state = { ...state, ...change, undoes: past.at(-1)?.label, redoes: future.at(-1)?.label }
+    if (!state.gesture && state.resting !== state.draft) state = { ...state, resting: state.draft }
     for (const listener of listeners) listener()
   }
 
@@ -128,6 +133,11 @@ export function createStudioStore({ engine, order, typed = {}, unit }: StoreOpti
       if ('problems' in result) return result.problems
       accept(fields, result.draft)
       return []
+    },
+
+    /** Takes in values whose draft the caller has made already, as a drag does in every frame. */
+    take(fields: readonly Put[], draft: Draft) {
+      accept(fields, draft)
     },
 
     /** Keeps a text that cannot be drafted at its field; the drawing stays the last good one. */
@@ -256,6 +266,7 @@ function sameOrder(a: Snapshot, b: Snapshot): boolean {
  * cannot be read, its own.
  */
 export function problemsAt(state: StudioState, ref: FieldRef): readonly Problem[] {
+  if (!isStale(state)) return []
   const attempts = Object.values(state.attempts)
   const all = [...state.problems, ...attempts.flatMap((attempt) => attempt?.problems ?? [])]
   const named = all.filter((problem) => isAbout(problem.field, ref))

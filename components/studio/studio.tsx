@@ -1,8 +1,8 @@
 'use client'
 
 import { History, Printer, Share2 } from 'lucide-react'
-import { useCallback, useMemo, useRef, useState, type ReactNode } from 'react'
-import type { MeasurementDefinition } from '@/drafting/contract'
+import { useCallback, useRef, useState, type ReactNode } from 'react'
+import type { Draft, MeasurementDefinition } from '@/drafting/contract'
 import type { Layer } from '@/drafting/drawing'
 import { Checks } from '@/components/drawer/checks'
 import { Choices } from '@/components/drawer/choices'
@@ -50,7 +50,7 @@ function Table({ definitions, name, back, saving, notice, onVersions, onShare, o
   const { store, writable } = useStudio()
   const narrow = useNarrow()
   const sheet = useRef<SheetControl>(null)
-  const draft = useStudioState((state) => state.draft)
+  const draft = useStudioState((state) => state.resting)
   const said = useStudioState((state) => state.said)
   const [leaf, setLeaf] = useState('choices')
   const [drawerOpen, setDrawerOpen] = useState(true)
@@ -65,9 +65,9 @@ function Table({ definitions, name, back, saving, notice, onVersions, onShare, o
   const commands = useCommands({ store, sheet, writable, onPrint, onVersions })
 
   const step = at !== undefined && draft && at < draft.steps.length ? at : undefined
-  const emphasis = useMemo(
-    () => (step === undefined ? chosenEmphasis(draft, chosen) : stepEmphasis(draft, step)),
-    [draft, chosen, step],
+  const emphasise = useCallback(
+    (now: Draft) => (step === undefined ? chosenEmphasis(now, chosen) : stepEmphasis(now, step)),
+    [chosen, step],
   )
   const hide = useCallback((piece: string, away: boolean) => {
     setHidden((before) => {
@@ -100,7 +100,7 @@ function Table({ definitions, name, back, saving, notice, onVersions, onShare, o
             control={sheet}
             layers={shown}
             hidden={hidden}
-            emphasis={emphasis}
+            emphasise={emphasise}
             replaying={step !== undefined}
             showTags={tags}
             onOpenTag={narrow ? setDocked : undefined}

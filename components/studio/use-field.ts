@@ -17,13 +17,10 @@ export function useField(ref: FieldRef, label: string, over = 0) {
   const [editing, setEditing] = useState<string>()
   const kind = kindOf(garment, ref)
   const unit = useStudioState((state) => state.unit)
-  const shown = useStudioState((state) => {
-    const attempt = state.attempts[ref]
-    if (attempt) return attempt.text
-    const value = currentValue(garment, state.order, ref)
-    const whole = typeof value === 'number' ? value + over : value
-    return shownText(kind, whole, state.typed[ref], state.unit)
-  })
+  const attempted = useStudioState((state) => state.attempts[ref]?.text)
+  const value = useStudioState((state) => currentValue(garment, state.order, ref))
+  const typed = useStudioState((state) => state.typed[ref])
+  const shown = attempted ?? shownText(kind, typeof value === 'number' ? value + over : value, typed, unit)
   const problem = useStudioState((state) =>
     problemsAt(state, ref)
       .map((each) => each.message)

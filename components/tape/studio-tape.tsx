@@ -72,12 +72,12 @@ function RailEntry({
   readonly name: string
   readonly onOpen: () => void
 }) {
-  const text = useStudioState((state) => {
-    const given = state.order.measurements[id]
-    if (given !== undefined) return shownText('length', given, state.typed[`measurements.${id}`], state.unit)
-    const estimate = state.draft?.used[id]?.mm
-    return estimate === undefined ? '' : `≈ ${lengthDigits(estimate, state.unit)}`
-  })
+  const unit = useStudioState((state) => state.unit)
+  const given = useStudioState((state) => state.order.measurements[id])
+  const typed = useStudioState((state) => state.typed[`measurements.${id}`])
+  const estimate = useStudioState((state) => state.resting?.used[id]?.mm)
+  const estimated = estimate === undefined ? '' : `≈ ${lengthDigits(estimate, unit)}`
+  const text = given === undefined ? estimated : shownText('length', given, typed, unit)
   return (
     <li>
       <button
@@ -105,7 +105,7 @@ export function TapePanel({
   const ids = useDraftMeasurements(definitions)
   const [at, setAt] = useState(focused)
   const definition = definitions.find((each) => each.id === at)
-  const used = useStudioState((state) => state.draft?.used)
+  const used = useStudioState((state) => state.resting?.used)
   return (
     <section aria-label="Body measurements" className="flex min-h-0 flex-1 flex-col bg-panel">
       {onClose && (
