@@ -42,7 +42,7 @@ export function Checks({
     <div className="grid gap-6 p-4">
       {draft.cautions.length > 0 && (
         <section className="grid gap-2">
-          <h3 className="font-semibold">Worth a look</h3>
+          <h2 className="font-semibold">Worth a look</h2>
           {draft.cautions.map((caution, index) => (
             <Note key={`${caution.code}:${index}`} kind="caution" className="text-sm">
               {typeset(caution.message)}
@@ -51,7 +51,7 @@ export function Checks({
         </section>
       )}
       <section>
-        <h3 className="mb-1 font-semibold">Seams</h3>
+        <h2 className="mb-1 font-semibold">Seams</h2>
         <ul>
           {draft.seams.map((seam) => (
             <Row
@@ -66,7 +66,7 @@ export function Checks({
         </ul>
       </section>
       <section>
-        <h3 className="mb-1 font-semibold">On the body</h3>
+        <h2 className="mb-1 font-semibold">On the body</h2>
         <ul>
           {draft.fits.map((fit) => (
             <Row
