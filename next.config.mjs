@@ -4,16 +4,7 @@ const config = {
   distDir: process.env.NEXT_DIST_DIR || '.next',
   poweredByHeader: false,
   reactStrictMode: true,
-  serverExternalPackages: [
-    'sequelize',
-    'mariadb',
-    'umzug',
-    '@node-rs/argon2',
-    'svgdom',
-    'pino',
-    'nodemailer',
-    'piscina',
-  ],
+  serverExternalPackages: ['sequelize', 'mariadb', 'umzug', '@node-rs/argon2', 'pino', 'nodemailer'],
   typescript: {
     // `npm run check` checks every type, tests and scripts included; a build does not do it a second time.
     ignoreBuildErrors: true,

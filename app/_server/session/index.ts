@@ -1,5 +1,4 @@
-export { type ActionResult, publicAction, signedInAction, workroomAction } from './workroom-action'
+export { publicAction, signedInAction, workroomAction } from './workroom-action'
 export { currentSession, requireActor, requireSignedIn } from './current'
 export { forPage } from './for-page'
-export { actorForRequest } from './request'
 export { workroomRoute } from './workroom-route'
