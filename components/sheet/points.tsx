@@ -97,6 +97,7 @@ export function Points({
     if (event.button !== 0 || !box || !at || !writable) return
     // A field that is being typed in keeps its value before the drag begins.
     if (document.activeElement instanceof HTMLElement) document.activeElement.blur()
+    event.currentTarget.focus()
     event.currentTarget.setPointerCapture(event.pointerId)
     const onScreen = toScreen(view(), applyTo(placeTransform(places()[handle.piece]), at))
     const pointer = { x: event.clientX, y: event.clientY }

@@ -10,7 +10,7 @@ import {
   useState,
   type Ref,
 } from 'react'
-import type { Draft, Handle } from '@/drafting/contract'
+import type { Draft, Handle, Point } from '@/drafting/contract'
 import { boundsOf } from '@/drafting/drawing/bounds'
 import { arrange, drawing, placePath, placeTransform, type Layer, type Places } from '@/drafting/drawing'
 import { applyTo } from '@/drafting/geometry/transform'
@@ -49,8 +49,8 @@ export interface SheetProps {
   readonly onOpenTag?: (dimension: string) => void
 }
 
-/** px about a point that tags leave free. */
-const pointRoom = 8
+/** px about a point that tags leave free: half of the least target. */
+const pointRoom = 12
 
 /** Size of a piece's name on paper, mm, and the least it is shown at, px. */
 const nameSize = 9
@@ -113,9 +113,12 @@ export function Sheet(props: SheetProps) {
     for (const element of box.querySelectorAll<HTMLElement>('[data-point]')) {
       const own = handles.find((each) => each.id === element.dataset.point)
       const mark = own && markAt(draft, own.piece, own.mark)
-      element.hidden = !mark
-      if (!own || !mark) continue
-      const at = toScreen(view.current, applyTo(placeTransform(places.current[own.piece]), mark))
+      const at =
+        own && mark && toScreen(view.current, applyTo(placeTransform(places.current[own.piece]), mark))
+      // Where two would lie under one finger the later waits until the view is closer; its tag does the same.
+      const held = element.contains(document.activeElement)
+      element.hidden = !at || (!held && points.some((other) => crowds(other, at)))
+      if (!at || element.hidden) continue
       element.style.transform = `translate(${at.x}px, ${at.y}px)`
       points.push({ x: at.x - pointRoom, y: at.y - pointRoom, width: 2 * pointRoom, height: 2 * pointRoom })
     }
@@ -258,6 +261,14 @@ export function Sheet(props: SheetProps) {
       )}
       <ScaleBar scale={scale} unit={unit} />
     </div>
+  )
+}
+
+/** Whether a point at `at` would lie in the room of another. */
+function crowds(other: Box, at: Point): boolean {
+  return (
+    Math.abs(other.x + pointRoom - at.x) < 2 * pointRoom &&
+    Math.abs(other.y + pointRoom - at.y) < 2 * pointRoom
   )
 }
 
