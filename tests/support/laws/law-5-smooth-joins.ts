@@ -34,7 +34,7 @@ function armholesArriveSquare(found: Findings, draft: Draft): void {
 }
 
 /** How far an armhole dips below the underarm, mm. */
-function dipOf(draft: Draft, piece: string): number {
+export function dipOf(draft: Draft, piece: string): number {
   const armhole = draft.pieces.find((one) => one.id === piece)?.edges.find((one) => one.id === 'armhole')
   if (!armhole) return NaN
   return Math.max(...chordsOf(armhole.path).map((point) => point.y)) - endOfPath(armhole.path).y
