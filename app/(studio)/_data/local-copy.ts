@@ -13,17 +13,19 @@ export interface LocalCopy {
   readonly changedAt: string
 }
 
-const store = 'drafts'
+/** What the names of our databases begin with, and what they hold. */
+export const localPrefix = 'chalkfold:'
+export const localStore = 'drafts'
 
 /** The database of one person in one workroom: nobody else who uses this device reads it. */
 export function localName(userId: string, workroomId: string): string {
-  return `chalkfold:${userId}:${workroomId}`
+  return `${localPrefix}${userId}:${workroomId}`
 }
 
 async function open(name: string): Promise<IDBPDatabase> {
   return openDB(name, 1, {
     upgrade: (database) => {
-      database.createObjectStore(store, { keyPath: 'draftId' })
+      database.createObjectStore(localStore, { keyPath: 'draftId' })
     },
   })
 }
@@ -32,7 +34,7 @@ async function open(name: string): Promise<IDBPDatabase> {
 export async function readLocal(name: string, draftId: string): Promise<LocalCopy | undefined> {
   const database = await open(name)
   try {
-    return (await database.get(store, draftId)) as LocalCopy | undefined
+    return (await database.get(localStore, draftId)) as LocalCopy | undefined
   } finally {
     database.close()
   }
@@ -42,7 +44,7 @@ export async function readLocal(name: string, draftId: string): Promise<LocalCop
 export async function writeLocal(name: string, copy: LocalCopy): Promise<void> {
   const database = await open(name)
   try {
-    await database.put(store, copy)
+    await database.put(localStore, copy)
   } finally {
     database.close()
   }
@@ -52,7 +54,7 @@ export async function writeLocal(name: string, copy: LocalCopy): Promise<void> {
 export async function dropLocal(name: string, draftId: string, headId: string): Promise<void> {
   const database = await open(name)
   try {
-    const change = database.transaction(store, 'readwrite')
+    const change = database.transaction(localStore, 'readwrite')
     const kept = (await change.store.get(draftId)) as LocalCopy | undefined
     if (kept?.headId === headId) await change.store.delete(draftId)
     await change.done
