@@ -3,7 +3,7 @@ import type { Draft } from '@/drafting/contract'
 import { paperOf } from '@/drafting/drawing'
 import type { Orientation, PaperId } from '@/drafting/drawing'
 import { download } from './download'
-import { patternPdf } from './pattern-pdf'
+import { patternInThread } from './pattern-thread'
 import { titleOf } from './pattern-of'
 import type { Printable } from './pattern-of'
 import { patternSvg } from './pattern-svg'
@@ -15,7 +15,7 @@ export async function pdfAnswer(
   choices: { readonly paper: PaperId; readonly orientation: Orientation; readonly allowances: 'yes' | 'no' },
 ): Promise<Response> {
   const paper = paperOf(choices.paper)
-  const bytes = await patternPdf({
+  const bytes = await patternInThread({
     draft,
     title: titleOf(printable),
     paper,
