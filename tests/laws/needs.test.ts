@@ -2,17 +2,17 @@ import { describe, expect, it } from 'vitest'
 import type { DraftOrder, GarmentDefinition } from '@/drafting/contract'
 import * as engine from '@/drafting/index'
 import { honestNeeds, idleNeeds } from '../support/laws/law-15-honest-needs'
-import { namedBodies } from '../support/laws/orders'
+import { namedBodies, tellingStyle } from '../support/laws/orders'
 
-/** Named bodies in a style that goes over the head, so that each measurement can have its say. */
+/** Named bodies in a sleeved style that goes over the head, so that each measurement can have its say. */
 function orders(garment: GarmentDefinition): readonly DraftOrder[] {
-  const pulledOn = garment.design.some((value) => value.id === 'backOpening')
+  const design = tellingStyle(garment)
   return namedBodies
     .filter((_, index) => index % 5 === 0)
     .map(({ card }) => ({
       garment: garment.id,
       measurements: card,
-      ...(pulledOn ? { design: { backOpening: 'none' } } : {}),
+      design,
     }))
 }
 

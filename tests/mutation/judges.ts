@@ -2,6 +2,7 @@ import type { Correction, DraftOrder, MeasurementDefinition } from '@/drafting/c
 import { sanityBodies, sizeBodies } from '../support/bodies'
 import { draftLaws, orderLaws } from '../support/laws/all'
 import { honestNeeds, idleNeeds } from '../support/laws/law-15-honest-needs'
+import { tellingStyle } from '../support/laws/orders'
 import { drafted } from '../support/laws/redraft'
 import type { Engine, Violation } from '../support/laws/violation'
 
@@ -86,7 +87,7 @@ export function* breaches(law: number, engine: MeasuringEngine): Generator<Viola
   for (const order of [orders[0], orders[4], orders[7]]) if (order) yield* honestNeeds(order, engine)
   for (const garment of engine.garments) {
     const cards = sizeBodies.filter((_, index) => index % 9 === 0).map(({ card }) => card)
-    const design: DraftOrder['design'] = garment.id === 'flared-dress' ? { backOpening: 'none' } : {}
+    const design = tellingStyle(garment)
     const idle = idleNeeds(
       garment,
       cards.map((measurements) => ({ garment: garment.id, measurements, design })),

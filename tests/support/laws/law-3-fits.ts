@@ -16,14 +16,17 @@ const aboutSkirt: typeof about = {
   hip: { body: 'hip', ease: 'hipEase' },
 }
 
-const promised = {
+/** A fit that is equal is at least as well. */
+const strength: Readonly<Record<Fit['relation'], number>> = { shown: 0, 'at-least': 1, equal: 2 }
+
+const promised: Readonly<Record<string, Fit['relation']>> = {
   bust: 'equal',
   waist: 'at-least',
   hip: 'at-least',
   biceps: 'at-least',
   armhole: 'at-least',
 }
-const promisedSkirt = { waist: 'equal' }
+const promisedSkirt: typeof promised = { waist: 'equal' }
 
 /** Each fit is what is drawn, ends on the stitch line and keeps its promise to the body. */
 export const fits: DraftLaw = (draft, order, engine) => {
@@ -49,7 +52,8 @@ export const fits: DraftLaw = (draft, order, engine) => {
   if (order.rules || order.corrections?.some((one) => !one.off)) return found.all
   for (const [id, relation] of Object.entries(order.garment === 'circle-skirt' ? promisedSkirt : promised)) {
     const fit = draft.fits.find((one) => one.id === id)
-    if (fit && fit.relation !== relation) found.add(id, `is only “${fit.relation}”, “${relation}” is due`)
+    if (fit && strength[fit.relation] < strength[relation])
+      found.add(id, `is only “${fit.relation}”, “${relation}” is due`)
   }
   return found.all
 }

@@ -197,3 +197,13 @@ export function correctedOrder(garment: GarmentDefinition): fc.Arbitrary<DraftOr
     .tuple(randomOrder(garment), corrections(garment))
     .map(([order, list]) => ({ ...order, corrections: list }))
 }
+
+/** A sleeved style that goes over the head, so that every measurement of a garment can have its say. */
+export function tellingStyle(garment: GarmentDefinition): Readonly<Record<string, string>> {
+  const chosen = { backOpening: 'none', sleeve: 'plain' }
+  return Object.fromEntries(
+    Object.entries(chosen).filter(([id, is]) =>
+      garment.design.some((value) => value.id === id && value.choices?.includes(is)),
+    ),
+  )
+}
