@@ -1,5 +1,6 @@
 'use client'
 
+import dynamic from 'next/dynamic'
 import { useCallback, useMemo, useState } from 'react'
 import { Studio } from '@/components/studio/studio'
 import { createStudioStore } from '@/components/studio/store'
@@ -8,13 +9,17 @@ import { draftGarment, garments, handles, measurements } from '@/drafting'
 import type { Version } from '../../../_data/api'
 import { ConflictNotice } from './conflict-notice'
 import { DraftName } from './draft-name'
-import { PrintLeaf } from './print-leaf'
-import { ShareLeaf } from './share-leaf'
 import { SignedOutNotice } from './signed-out-notice'
 import { contentOf, useAutosave } from './use-autosave'
-import { VersionsDialog } from './versions-dialog'
 
 const engine = { draftGarment, handles }
+
+// What opens over the table is fetched when it is first asked for: the table itself comes sooner.
+const PrintLeaf = dynamic(() => import('./print-leaf').then((part) => part.PrintLeaf), { ssr: false })
+const ShareLeaf = dynamic(() => import('./share-leaf').then((part) => part.ShareLeaf), { ssr: false })
+const VersionsDialog = dynamic(() => import('./versions-dialog').then((part) => part.VersionsDialog), {
+  ssr: false,
+})
 
 export interface OpenDraftProps {
   readonly draft: {
@@ -56,6 +61,7 @@ function Opened({
   const place = { draftId: draft.id, head: draft.head, writable: draft.writable, userId, workroomId }
   const { state, theirs, settle, autosave } = useAutosave(store, place)
 
+  const close = () => setOpen(undefined)
   const onVersions = useCallback(() => setOpen('versions'), [])
   const onShare = useCallback(() => setOpen('share'), [])
   const onPrint = useCallback(() => {
@@ -102,29 +108,19 @@ function Opened({
         onShare={draft.shareable ? onShare : undefined}
         onPrint={onPrint}
       />
-      <VersionsDialog
-        open={open === 'versions'}
-        onClose={() => setOpen(undefined)}
-        draftId={draft.id}
-        store={store}
-        autosave={autosave}
-        writable={draft.writable}
-      />
-      {draft.shareable && (
-        <ShareLeaf
-          open={open === 'share'}
-          onClose={() => setOpen(undefined)}
+      {open === 'versions' && (
+        <VersionsDialog
+          onClose={close}
           draftId={draft.id}
-          draftName={name}
-          beforeMaking={autosave.flush}
+          store={store}
+          autosave={autosave}
+          writable={draft.writable}
         />
       )}
-      <PrintLeaf
-        open={open === 'print'}
-        onClose={() => setOpen(undefined)}
-        store={store}
-        revisionId={printed}
-      />
+      {open === 'share' && (
+        <ShareLeaf onClose={close} draftId={draft.id} draftName={name} beforeMaking={autosave.flush} />
+      )}
+      {open === 'print' && <PrintLeaf onClose={close} store={store} revisionId={printed} />}
     </>
   )
 }

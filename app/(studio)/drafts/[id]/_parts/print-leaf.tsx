@@ -6,21 +6,19 @@ import { Dialog } from '@/components/ui/dialog'
 
 /** The paper pattern of what is on the table, once it is saved: what is printed can always be printed again. */
 export function PrintLeaf({
-  open,
   onClose,
   store,
   revisionId,
 }: {
-  readonly open: boolean
   readonly onClose: () => void
   readonly store: StudioStore
   readonly revisionId: string | undefined
 }) {
   const { draft } = store.get()
   if (draft && revisionId)
-    return <PrintDialog open={open} onClose={onClose} draft={draft} base={`/api/revisions/${revisionId}`} />
+    return <PrintDialog open onClose={onClose} draft={draft} base={`/api/revisions/${revisionId}`} />
   return (
-    <Dialog open={open} onClose={onClose} title="Print the pattern">
+    <Dialog open onClose={onClose} title="Print the pattern">
       <p>
         {draft
           ? 'What is on the table could not be saved yet, and only a saved version is printed. Try again when the bar says “Saved”.'

@@ -9,13 +9,11 @@ type Shares = Parameters<typeof ShareDialog>[0]['shares']
 
 /** Links to this draft: asked for when the dialog opens, made and taken back through our own routes. */
 export function ShareLeaf({
-  open,
   onClose,
   draftId,
   draftName,
   beforeMaking,
 }: {
-  readonly open: boolean
   readonly onClose: () => void
   readonly draftId: string
   readonly draftName: string
@@ -25,12 +23,12 @@ export function ShareLeaf({
   const queries = useQueryClient()
   const key = ['shares', draftId]
   const path = `/api/drafts/${draftId}/shares`
-  const list = useQuery({ queryKey: key, queryFn: () => ask<NonNullable<Shares>>(path), enabled: open })
+  const list = useQuery({ queryKey: key, queryFn: () => ask<NonNullable<Shares>>(path) })
   const again = () => queries.invalidateQueries({ queryKey: key })
 
   return (
     <ShareDialog
-      open={open}
+      open
       onClose={onClose}
       draftName={draftName}
       shares={list.data}

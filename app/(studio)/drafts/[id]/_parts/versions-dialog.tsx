@@ -12,7 +12,6 @@ import type { Autosave } from '../../../_data/autosave'
 import { contentOf } from './use-autosave'
 
 interface Props {
-  readonly open: boolean
   readonly onClose: () => void
   readonly draftId: string
   readonly store: StudioStore
@@ -23,7 +22,7 @@ interface Props {
 /** Every saved version: give the present one a name, or put an old one back on the table. */
 export function VersionsDialog(props: Props) {
   return (
-    <Dialog open={props.open} onClose={props.onClose} title="Versions">
+    <Dialog open onClose={props.onClose} title="Versions">
       <Versions {...props} />
     </Dialog>
   )
