@@ -15,9 +15,11 @@ import {
   unitWord,
 } from '@/components/studio/values'
 import type { FieldRef } from '@/components/studio/field-ref'
+import { byPiece } from './by-piece'
 import { markAt } from './drag-point'
 import { showLive } from './live-length'
 import { solveDrag } from './solve-drag'
+import { usePieceNames } from './use-piece-names'
 import { toScreen, toSheet, type View } from './view'
 
 interface Drag {
@@ -51,6 +53,7 @@ export function Points({
 }) {
   const { store, garment, engine, writable } = useStudio()
   const drag = useRef<Drag>(undefined)
+  const names = usePieceNames()
   const chip = useRef<HTMLSpanElement>(null)
   const nameOf = (id: string) => garment.design.find((value) => value.id === id)?.name ?? id
 
@@ -161,24 +164,30 @@ export function Points({
   return (
     <>
       <ul aria-label="Points" className="pointer-events-none absolute inset-0">
-        {handles.map((handle) => (
-          <li key={handle.id} data-point={handle.id} className="absolute top-0 left-0">
-            <button
-              type="button"
-              aria-label={`Point for ${pointName(handle, nameOf)}`}
-              aria-roledescription="point"
-              onPointerDown={(event) => down(event, handle)}
-              onPointerMove={move}
-              onPointerUp={() => finish(true)}
-              onPointerCancel={() => finish(false)}
-              onKeyDown={(event) => key(event, handle)}
-              className="group/point pointer-events-auto absolute grid size-6 -translate-1/2 cursor-grab touch-none place-items-center rounded-full active:cursor-grabbing pointer-coarse:size-11"
-            >
-              <span
-                aria-hidden
-                className="size-2.5 rounded-full border-2 border-indigo bg-sheet group-hover/point:size-3.5 group-active/point:bg-indigo"
-              />
-            </button>
+        {byPiece(handles).map(({ piece, items }) => (
+          <li key={piece}>
+            <ul aria-label={names.get(piece)}>
+              {items.map((handle) => (
+                <li key={handle.id} data-point={handle.id} className="absolute top-0 left-0">
+                  <button
+                    type="button"
+                    aria-label={`Point for ${pointName(handle, nameOf)}`}
+                    aria-roledescription="point"
+                    onPointerDown={(event) => down(event, handle)}
+                    onPointerMove={move}
+                    onPointerUp={() => finish(true)}
+                    onPointerCancel={() => finish(false)}
+                    onKeyDown={(event) => key(event, handle)}
+                    className="group/point pointer-events-auto absolute grid size-6 -translate-1/2 cursor-grab touch-none place-items-center rounded-full active:cursor-grabbing pointer-coarse:size-11"
+                  >
+                    <span
+                      aria-hidden
+                      className="size-2.5 rounded-full border-2 border-indigo bg-sheet group-hover/point:size-3.5 group-active/point:bg-indigo"
+                    />
+                  </button>
+                </li>
+              ))}
+            </ul>
           </li>
         ))}
       </ul>

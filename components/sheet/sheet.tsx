@@ -22,7 +22,7 @@ import { watchView } from './gestures'
 import { Points } from './points'
 import { ScaleBar } from './scale-bar'
 import { createStage, type Emphasis, type Stage } from './stage'
-import { ResultTag, ValueTag } from './tag'
+import { Tags } from './tags'
 import { placeTagElements } from './tag-writing'
 import type { Box } from './tag-places'
 import { markAt } from './drag-point'
@@ -234,23 +234,7 @@ export function Sheet(props: SheetProps) {
       />
       {showTags && !replaying && (
         <>
-          <ol aria-label="Measurements on the drawing" className="pointer-events-none absolute inset-0">
-            {tags
-              .filter((tag) => !hidden.has(tag.piece))
-              .map((tag) =>
-                tag.field ? (
-                  <ValueTag
-                    key={tag.id}
-                    dimension={tag.id}
-                    label={tag.label}
-                    field={tag.field}
-                    onOpen={onOpenTag}
-                  />
-                ) : (
-                  <ResultTag key={tag.id} id={tag.id} label={tag.label} />
-                ),
-              )}
-          </ol>
+          <Tags tags={tags.filter((tag) => !hidden.has(tag.piece))} onOpen={onOpenTag} />
           <Points
             handles={handles.filter((handle) => !hidden.has(handle.piece))}
             places={() => places.current}
