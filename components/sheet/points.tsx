@@ -165,7 +165,7 @@ export function Points({
     <>
       <ul aria-label="Points" className="pointer-events-none absolute inset-0">
         {byPiece(handles).map(({ piece, items }) => (
-          <li key={piece}>
+          <li key={`${piece}/${items[0]?.id}`}>
             <ul aria-label={names.get(piece)}>
               {items.map((handle) => (
                 <li key={handle.id} data-point={handle.id} className="absolute top-0 left-0">

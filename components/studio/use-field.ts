@@ -31,6 +31,11 @@ export function useField(ref: FieldRef, label: string, over = 0) {
   function type(text: string) {
     setEditing(text)
     const { order } = store.get()
+    // A measurement taken off the tape again is estimated, where it can be.
+    if (ref.startsWith('measurements.') && text.trim() === '') {
+      store.put(ref, undefined)
+      return
+    }
     try {
       const value = parseValue(kind, text, unit, ref) - over
       if (value === currentValue(garment, order, ref)) store.putBack(ref)

@@ -11,24 +11,35 @@ import { idShape } from '@/db/shapes/ids'
 import { invalid } from '@/db/access-error'
 import { garments } from '@/drafting'
 import { firstOrder } from './_parts/first-order'
+import { publishedSize } from './_parts/published-sizes'
 
-const started = z.strictObject({
-  id: idShape,
-  revisionId: idShape,
-  name: draftNameShape,
-  garment: z.string().max(60),
-  cardId: idShape,
-})
+const started = z
+  .strictObject({
+    id: idShape,
+    revisionId: idShape,
+    name: draftNameShape,
+    garment: z.string().max(60),
+    cardId: idShape.optional(),
+    sizeId: z.string().max(80).optional(),
+  })
+  .refine(({ cardId, sizeId }) => (cardId === undefined) !== (sizeId === undefined), {
+    path: ['cardId'],
+    message: 'Choose a measure card or a published size.',
+  })
 
-/** Starts a draft: a garment on a measure card, with the workroom's usual allowances. */
+/** Starts a draft: a garment on a measure card or a published size, with the workroom's usual allowances. */
 export const startDraft = workroomAction(
   started,
-  async (actor, { id, revisionId, name, garment, cardId }) => {
+  async (actor, { id, revisionId, name, garment, cardId, sizeId }) => {
     const definition = garments.find((each) => each.id === garment)
     if (!definition) throw invalid('garment', 'Choose a garment from the list.')
-    const [card, workroom] = await Promise.all([getCard(actor, cardId), getWorkroom(actor)])
-    const { order, typed } = firstOrder(definition, card, workroom.allowances)
-    await createDraft(actor, { id, revisionId, name, clientId: card.clientId, cardId, order, typed })
+    const [card, workroom] = await Promise.all([
+      cardId === undefined ? undefined : getCard(actor, cardId),
+      getWorkroom(actor),
+    ])
+    const body = card ?? { unit: workroom.unit, values: publishedSize(sizeId) }
+    const { order, typed } = firstOrder(definition, body, workroom.allowances)
+    await createDraft(actor, { id, revisionId, name, clientId: card?.clientId, cardId, order, typed })
     revalidatePath('/drafts')
     return { id }
   },

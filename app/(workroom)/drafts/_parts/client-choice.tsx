@@ -41,6 +41,11 @@ export function ClientChoice({
           </li>
         ))}
       </ul>
+      <p className="mt-6">
+        <Link href="/drafts/new?for=nobody" className="text-indigo underline underline-offset-4">
+          For nobody in particular: a published size
+        </Link>
+      </p>
     </>
   )
 }

@@ -12,13 +12,19 @@ const allowanceFields = {
   hem: 'hemAllowance',
 } as const satisfies Record<keyof Allowances, string>
 
+/** Measurements to draft on: a card's, with what was typed, or a published size's. */
+export interface Body {
+  readonly unit: 'in' | 'cm'
+  readonly values: Readonly<Record<string, Length | { readonly mm: number }>>
+}
+
 /**
  * The order a draft starts from: every measurement of the card, the workroom's allowances where the garment has them and takes them, and the
  * garment's own defaults for the rest. Texts stay as they were typed.
  */
 export function firstOrder(
   garment: GarmentDefinition,
-  card: { readonly unit: 'in' | 'cm'; readonly values: Readonly<Record<string, Length>> },
+  card: Body,
   allowances: Allowances,
 ): { readonly order: Omit<DraftOrder, 'corrections'>; readonly typed: Readonly<Record<string, string>> } {
   const measured = Object.entries(card.values)
@@ -37,7 +43,9 @@ export function firstOrder(
       unit: card.unit,
     },
     typed: Object.fromEntries([
-      ...measured.map(([id, value]) => [`measurements.${id}`, withUnit(value)]),
+      ...measured.flatMap(([id, value]) =>
+        'typed' in value ? [[`measurements.${id}`, withUnit(value)] as const] : [],
+      ),
       ...own.map(([id, wanted]) => [`design.${id}`, withUnit(wanted)]),
     ]),
   }

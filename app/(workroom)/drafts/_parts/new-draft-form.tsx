@@ -20,16 +20,22 @@ interface Named {
 export function NewDraftForm({
   garments,
   cards,
+  sizes,
   cardId,
 }: {
   readonly garments: readonly Named[]
   readonly cards: readonly Named[]
+  /** Published sizes, where the draft is for nobody in particular. */
+  readonly sizes: readonly Named[]
   readonly cardId: string | undefined
 }) {
   const router = useRouter()
   const [ids] = useState(() => ({ id: newId(), revisionId: newId() }))
   const [garment, setGarment] = useState(garments[0]?.id ?? '')
-  const [card, setCard] = useState(cards.find((each) => each.id === cardId)?.id ?? cards[0]?.id ?? '')
+  const [body, setBody] = useState(
+    (cards.find((each) => each.id === cardId) ?? cards[0] ?? sizes[0])?.id ?? '',
+  )
+  const onCard = cards.some((each) => each.id === body)
   const [named, setNamed] = useState<string>()
   const [problems, setProblems] = useState<readonly { field: string; message: string }[]>([])
   const [busy, start] = useTransition()
@@ -40,7 +46,12 @@ export function NewDraftForm({
     event.preventDefault()
     start(async () => {
       try {
-        const result = await startDraft({ ...ids, name, garment, cardId: card })
+        const result = await startDraft({
+          ...ids,
+          name,
+          garment,
+          ...(onCard ? { cardId: body } : { sizeId: body }),
+        })
         if (result.ok) router.push(`/drafts/${ids.id}`)
         else setProblems(result.problems)
       } catch {
@@ -78,11 +89,11 @@ export function NewDraftForm({
         </div>
       </fieldset>
       <Select
-        label="Measure card"
-        value={card}
-        onChange={(event) => setCard(event.target.value)}
-        error={problem('cardId')}
-        choices={cards.map((each) => ({ value: each.id, label: each.name }))}
+        label={sizes.length > 0 ? 'Measurements' : 'Measure card'}
+        value={body}
+        onChange={(event) => setBody(event.target.value)}
+        error={problem('cardId') ?? problem('sizeId')}
+        choices={[...cards, ...sizes].map((each) => ({ value: each.id, label: each.name }))}
       />
       <Field
         label="Name of the draft"

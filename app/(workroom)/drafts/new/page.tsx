@@ -11,6 +11,7 @@ import { dayText } from '../../_data/dates'
 import { one, type SearchParams } from '../../_data/list-address'
 import { NewDraftForm } from '../_parts/new-draft-form'
 import { ClientChoice } from '../_parts/client-choice'
+import { publishedSizes } from '../_parts/published-sizes'
 
 export const metadata: Metadata = { title: 'New draft' }
 
@@ -21,7 +22,7 @@ export default async function NewDraftPage({ searchParams }: { searchParams: Sea
   const trail = [{ href: '/drafts', label: 'Drafts' }]
   const withClients = may(actor, 'clients', 'write')
 
-  if (!clientId && withClients) {
+  if (!clientId && withClients && one(asked.for) !== 'nobody') {
     const search = (one(asked.search) ?? '').slice(0, 100)
     const clients = await forPage(listClients(actor, { search }))
     return (
@@ -34,10 +35,12 @@ export default async function NewDraftPage({ searchParams }: { searchParams: Sea
   const [client, cards] = await forPage(
     Promise.all([
       clientId ? getClient(actor, clientId) : undefined,
-      may(actor, 'cards', 'read') ? listCards(actor, clientId ?? null) : [],
+      clientId || may(actor, 'cards', 'read') ? listCards(actor, clientId ?? null) : [],
     ]),
   )
-  if (cards.length === 0) {
+  // A draft for a client stands on her own measurements; any other may stand on a published size.
+  const sizes = client ? [] : publishedSizes()
+  if (cards.length === 0 && sizes.length === 0) {
     return (
       <Page title="New draft" trail={trail} narrow>
         <EmptyState
@@ -60,12 +63,13 @@ export default async function NewDraftPage({ searchParams }: { searchParams: Sea
     <Page
       title="New draft"
       trail={trail}
-      lead={client ? `For ${client.name}` : 'On your own measurements'}
+      lead={client ? `For ${client.name}` : 'For nobody in particular'}
       narrow
     >
       <NewDraftForm
         garments={garments.map(({ id, name }) => ({ id, name }))}
         cards={cards.map((card) => ({ id: card.id, name: `${card.name}, ${dayText(card.takenOn)}` }))}
+        sizes={sizes}
         cardId={one(asked.card)}
       />
     </Page>

@@ -1,0 +1,43 @@
+import { describe, expect, it } from 'vitest'
+import { firstOrder } from '@/app/(workroom)/drafts/_parts/first-order'
+import { publishedSize, publishedSizes } from '@/app/(workroom)/drafts/_parts/published-sizes'
+import { usualAllowances } from '@/db/shapes/workroom'
+import { draftGarment, garments } from '@/drafting'
+
+const dress = garments.find((garment) => garment.id === 'flared-dress')!
+const bust = { mm: 927.1, typed: '36 1/2', unit: 'in' } as const
+
+describe('the order a draft starts from', () => {
+  it('keeps every measurement of the card and what was typed, with its unit', () => {
+    const { order, typed } = firstOrder(dress, { unit: 'in', values: { bust } }, usualAllowances)
+    expect(order.measurements).toEqual({ bust: 927.1 })
+    expect(order.unit).toBe('in')
+    expect(typed['measurements.bust']).toBe('36 1/2 in')
+  })
+
+  it('takes the allowances of the workroom where they differ from the garment’s', () => {
+    const allowances = { ...usualAllowances, side: { mm: 20, typed: '2', unit: 'cm' } as const }
+    const { order, typed } = firstOrder(dress, { unit: 'cm', values: { bust } }, allowances)
+    expect(order.design?.sideAllowance).toBe(20)
+    expect(typed['design.sideAllowance']).toBe('2 cm')
+  })
+
+  it('leaves an allowance alone that the garment would refuse', () => {
+    const allowances = { ...usualAllowances, neckline: { mm: 150, typed: '15', unit: 'cm' } as const }
+    expect(firstOrder(dress, { unit: 'cm', values: { bust } }, allowances).order.design).not.toHaveProperty(
+      'neckAllowance',
+    )
+  })
+
+  it('drafts on a published size', () => {
+    const size = publishedSizes()[5]
+    const body = { unit: 'cm', values: publishedSize(size?.id) } as const
+    const { order, typed } = firstOrder(dress, body, usualAllowances)
+    expect(Object.keys(typed).filter((field) => field.startsWith('measurements.'))).toEqual([])
+    expect(draftGarment(order).pieces.map((piece) => piece.id)).toContain('front')
+  })
+
+  it('refuses a size that is in no table', () => {
+    expect(() => publishedSize('no-such-size')).toThrow('Choose a size from the list.')
+  })
+})
