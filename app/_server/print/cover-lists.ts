@@ -1,11 +1,14 @@
 import 'server-only'
 import { cuttingWords, styles } from '@/drafting/drawing'
 import type { StyleName } from '@/drafting/drawing'
+import { arrowhead } from '@/drafting/drawing/arrowhead'
 import type { CoverContext } from './cover-page'
 import type { PageContent } from './page-content'
 
 const size = 3.4
 const leading = 4.3
+/** Length of a line's sample in the legend, mm. */
+const sample = 22
 
 interface Column {
   readonly x: number
@@ -31,6 +34,12 @@ function heading(content: PageContent, text: string, x: number, y: number): numb
   return y + 6
 }
 
+/** The arrowheads at both ends of the grain's sample. */
+function drawHeads(content: PageContent, x: number, y: number): void {
+  content.path(arrowhead({ x: x - 0.2, y }, { x: -1, y: 0 }, 3, 1.6), styles.arrowhead)
+  content.path(arrowhead({ x: x + sample + 0.2, y }, { x: 1, y: 0 }, 3, 1.6), styles.arrowhead)
+}
+
 /** What each kind of line means. Returns where the next list may start. */
 export function drawLegend(
   content: PageContent,
@@ -42,7 +51,8 @@ export function drawLegend(
   for (const { style, words } of allLines.filter(
     ({ of }) => of === 'both' || (of === 'cut') === allowances,
   )) {
-    content.line({ x, y: y - 1.1 }, { x: x + 22, y: y - 1.1 }, styles[style])
+    content.line({ x, y: y - 1.1 }, { x: x + sample, y: y - 1.1 }, styles[style])
+    if (style === 'grain') drawHeads(content, x, y - 1.1)
     content.text(words, { x: x + 25, y }, { size })
     y += 5.2
   }
@@ -50,7 +60,7 @@ export function drawLegend(
     [1, 'front notch'],
     [2, 'back notch'],
   ] as const) {
-    content.line({ x, y: y + 0.6 }, { x: x + 22, y: y + 0.6 }, styles[allowances ? 'cut' : 'nett'])
+    content.line({ x, y: y + 0.6 }, { x: x + sample, y: y + 0.6 }, styles[allowances ? 'cut' : 'nett'])
     for (let tick = 0; tick < ticks; tick += 1) {
       const at = x + 11 + tick * 4 - (ticks - 1) * 2
       content.line({ x: at, y: y + 0.6 }, { x: at, y: y - 2.6 }, styles.notch)
