@@ -33,7 +33,7 @@ export function WorkroomChoice({
             <button
               type="button"
               onClick={() => void choose(id)}
-              className="flex min-h-14 w-full items-center justify-between gap-4 px-1 text-left text-lg hover:bg-sheet"
+              className="flex min-h-14 w-full items-center justify-between gap-4 px-1 py-2.5 text-left text-lg hover:bg-sheet"
             >
               <span>
                 {name}

@@ -70,7 +70,7 @@ export function SettingsForm({ settings, currencies, timeZones, allowances }: Se
           New drafts start from these. Write them as you say them, such as 1/2, 3/4 in or 1.5 cm.
         </p>
         <input type="hidden" name="typedIn" value={settings.unit} />
-        <div className="grid gap-5 sm:grid-cols-3">
+        <div className="grid grid-cols-2 gap-5 sm:grid-cols-3">
           {allowances.map(({ id, name }) => (
             <Field
               key={id}
