@@ -29,12 +29,14 @@ describe('the order a draft starts from', () => {
     )
   })
 
-  it('drafts on a published size', () => {
-    const size = publishedSizes()[5]
-    const body = { unit: 'cm', values: publishedSize(size?.id) } as const
-    const { order, typed } = firstOrder(dress, body, usualAllowances)
-    expect(Object.keys(typed).filter((field) => field.startsWith('measurements.'))).toEqual([])
-    expect(draftGarment(order).pieces.map((piece) => piece.id)).toContain('front')
+  it('drafts on every published size that is offered', () => {
+    expect(publishedSizes().length).toBeGreaterThan(5)
+    for (const size of publishedSizes()) {
+      const body = { unit: 'cm', values: publishedSize(size.id) } as const
+      const { order, typed } = firstOrder(dress, body, usualAllowances)
+      expect(Object.keys(typed).filter((field) => field.startsWith('measurements.'))).toEqual([])
+      expect(draftGarment(order).pieces.map((piece) => piece.id)).toContain('front')
+    }
   })
 
   it('refuses a size that is in no table', () => {
