@@ -50,11 +50,7 @@ const large = {
 export const bustRange = { min: 30 * inch, max: 54 * inch } as const
 
 const shownSteps = ['front.leastLevel', 'front.underarm']
-const shownLengths = [
-  'front.armholeLevel-underarm',
-  'front.neckLevel-lengthMark',
-  'front.neckLevel-centreNeck',
-]
+const shownLengths = ['front.armholeLevel-underarm', 'front.neckLevel-centreNeck']
 
 function bodyFor(bust: number): Record<string, number> {
   const share = (bust / inch - small.bust) / (large.bust - small.bust)

@@ -39,11 +39,12 @@ export class PageContent {
   #stroke = ''
   #fill = ''
 
-  /** @param height of the paper, mm. */
+  /** @param height of the paper, mm; null for a stamp, which is drawn about its own origin and placed by pages. */
   constructor(
-    height: number,
+    height: number | null,
     private readonly type: TypeSetter,
   ) {
+    if (height === null) return
     this.#operators.push(`${pointsPerMm} 0 0 ${-pointsPerMm} 0 ${height * pointsPerMm} cm 1 j`)
   }
 
@@ -60,6 +61,11 @@ export class PageContent {
     draw()
     this.#operators.push('Q')
     this.#forget()
+  }
+
+  /** Puts what is drawn once for all pages (see stamps.ts) with its origin at a place. */
+  stamp(name: string, at: Point): void {
+    this.#operators.push(`q 1 0 0 1 ${number(at.x)} ${number(at.y)} cm /${name} Do Q`)
   }
 
   #forget(): void {

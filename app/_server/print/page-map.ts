@@ -1,6 +1,7 @@
 import 'server-only'
-import type { Path } from '@/drafting/contract'
+import type { Path, Point } from '@/drafting/contract'
 import type { Style, Tiling, TilePage } from '@/drafting/drawing'
+import { add } from '@/drafting/geometry/point'
 import { transformPath } from '@/drafting/geometry/transform'
 import type { PageContent } from './page-content'
 
@@ -13,8 +14,6 @@ export interface MapOptions {
   /** Room the map may take, mm. */
   readonly width: number
   readonly height: number
-  /** The page to light. */
-  readonly here?: TilePage
   /** Write the names into the cells. */
   readonly names?: boolean
   /** Of the pieces, to be drawn small across the cells. */
@@ -39,52 +38,62 @@ export function mapSize(
   return { width: wide * scale, height: high * scale }
 }
 
-/** How the pages lie together: a cell for each that is printed, nothing where a page is left out, this page filled. */
-export function drawMap(
-  content: PageContent,
-  tiling: Tiling,
-  at: { x: number; y: number },
-  options: MapOptions,
-): void {
-  const size = mapSize(tiling, options)
+/** The cells of a map that takes a room: their size, and where each page's lies from the map's corner. */
+function cellsOf(tiling: Tiling, room: { width: number; height: number }) {
+  const size = mapSize(tiling, room)
   const cell = { width: size.width / tiling.columns, height: size.height / tiling.rows }
   const gap = Math.min(cell.width, cell.height) * 0.08
-  drawOutlines(content, tiling, at, cell.width / own(tiling).width, options.outlines ?? [])
-  const box = { width: cell.width - gap, height: cell.height - gap }
-  const cornerOf = (page: TilePage) => ({
-    x: at.x + page.column * cell.width + gap / 2,
-    y: at.y + page.row * cell.height + gap / 2,
-  })
+  return {
+    width: cell.width - gap,
+    height: cell.height - gap,
+    /** Map millimetres for one of the sheet's. */
+    scale: cell.width / own(tiling).width,
+    cornerOf: ({ column, row }: TilePage): Point => ({
+      x: column * cell.width + gap / 2,
+      y: row * cell.height + gap / 2,
+    }),
+  }
+}
+
+/** How the pages lie together: a cell for each that is printed, nothing where a page is left out. */
+export function drawMap(content: PageContent, tiling: Tiling, at: Point, options: MapOptions): void {
+  const cells = cellsOf(tiling, options)
+  drawOutlines(content, tiling, at, cells.scale, options.outlines ?? [])
   const printed = tiling.pages.filter((page) => !page.blank)
-  const [here, others] = [true, false].map((wanted) =>
-    printed.filter((page) => (page.name === options.here?.name) === wanted).map(cornerOf),
-  )
-  content.boxes(others ?? [], box.width, box.height, outlined)
-  content.boxes(here ?? [], box.width, box.height, lit)
-  if (options.names) drawNames(content, printed, cornerOf, box)
+  const corners = printed.map((page) => add(at, cells.cornerOf(page)))
+  content.boxes(corners, cells.width, cells.height, outlined)
+  if (options.names) drawNames(content, printed, corners, cells)
+}
+
+/** Fills one page's cell of a map that was drawn in the same room. */
+export function lightCell(
+  content: PageContent,
+  tiling: Tiling,
+  at: Point,
+  room: { width: number; height: number },
+  page: TilePage,
+): void {
+  const cells = cellsOf(tiling, room)
+  content.boxes([add(at, cells.cornerOf(page))], cells.width, cells.height, lit)
 }
 
 function drawNames(
   content: PageContent,
   pages: readonly TilePage[],
-  cornerOf: (page: TilePage) => { x: number; y: number },
-  { width, height }: { width: number; height: number },
+  corners: readonly Point[],
+  { width, height }: { readonly width: number; readonly height: number },
 ): void {
   const size = Math.min(width / 2.4, height / 1.8, 4.2)
-  for (const page of pages) {
-    const corner = cornerOf(page)
-    content.text(
-      page.name,
-      { x: corner.x + width / 2, y: corner.y + height / 2 + size * 0.33 },
-      { size, align: 'middle' },
-    )
-  }
+  pages.forEach((page, index) => {
+    const middle = add(corners[index] ?? { x: 0, y: 0 }, { x: width / 2, y: height / 2 + size * 0.33 })
+    content.text(page.name, middle, { size, align: 'middle' })
+  })
 }
 
 function drawOutlines(
   content: PageContent,
   tiling: Tiling,
-  at: { x: number; y: number },
+  at: Point,
   scale: number,
   outlines: readonly Path[],
 ): void {

@@ -8,6 +8,7 @@ import { drawCover } from './cover-page'
 import { PageContent, pointsPerMm } from './page-content'
 import { placedItems } from './page-items'
 import type { PatternTitle } from './pattern-title'
+import { addStamps } from './stamps'
 import { captionWidth, drawTile, textsOf } from './tile-page'
 import { TypeSetter } from './type-setter'
 
@@ -66,7 +67,10 @@ export async function documentOf(request: PatternRequest, laidOut: LaidOut): Pro
   }
 
   const fonts = Object.fromEntries(type.fonts().map(({ name, font }) => [name, font.ref]))
-  document.context.assign(resources, document.context.obj({ Font: fonts }))
+  document.context.assign(
+    resources,
+    document.context.obj({ Font: fonts, XObject: addStamps(document, tiling, type) }),
+  )
   return document.save({ addDefaultPage: false, objectsPerTick: Infinity })
 }
 

@@ -2,15 +2,15 @@ import 'server-only'
 import type { Drawing } from '@/drafting/contract'
 import { crosses } from '@/drafting/drawing'
 import type { MatchMark, PageWindow, Style, TilePage, Tiling } from '@/drafting/drawing'
-import { drawMap, mapSize } from './page-map'
+import { lightCell, mapSize } from './page-map'
 import type { PageContent } from './page-content'
 import { drawItems, itemsIn } from './page-items'
 import type { Placed } from './page-items'
+import { mapRoom } from './stamps'
 
 const hairline: Style = { stroke: 'walnut', width: 0.1 }
 const trim: Style = { stroke: 'walnut', width: 0.2 }
 const lay: Style = { stroke: 'walnut', width: 0.15, dash: [2, 2] }
-const mark: Style = { stroke: 'ink', width: 0.2 }
 
 /** Room for the caption beside the map, mm. */
 export const captionWidth = 44
@@ -70,11 +70,7 @@ function drawSides(content: PageContent, page: TilePage, tiling: Tiling, printab
 /** A circle and a cross; its name stands beside it, on the side that stays visible on the lower sheet as well. */
 function drawMark(content: PageContent, match: MatchMark, window: PageWindow, margin: number): void {
   const at = { x: match.at.x - window.x + margin, y: match.at.y - window.y + margin }
-  const radius = 3
-  const arm = 4.5
-  content.circle(at, radius, mark)
-  content.line({ x: at.x - arm, y: at.y }, { x: at.x + arm, y: at.y }, mark)
-  content.line({ x: at.x, y: at.y - arm }, { x: at.x, y: at.y + arm }, mark)
+  content.stamp('Mark', at)
   const upright = match.side === 'left' || match.side === 'right'
   const size = 3
   // Once on either side of the join: one is cut off or covered, the other is read.
@@ -87,7 +83,7 @@ function drawMark(content: PageContent, match: MatchMark, window: PageWindow, ma
 /** The page's name, the map and the caption, in the corner where they hide least. */
 function drawName(content: PageContent, page: TilePage, context: TileContext, printable: PageWindow): void {
   const { tiling } = context
-  const map = mapSize(tiling, { width: 26, height: 22 })
+  const map = mapSize(tiling, mapRoom)
   const box = { width: map.width + 3 + captionWidth, height: Math.max(map.height, 19) }
   const clear = tiling.overlap / 2 + 3
   const corners = [
@@ -112,7 +108,8 @@ function drawName(content: PageContent, page: TilePage, context: TileContext, pr
   const { corner } = others.reduce((best, next) => (next.crossed < best.crossed ? next : best), first)
   const x = printable.x + corner.x
   const y = printable.y + corner.y
-  drawMap(content, tiling, { x, y }, { ...map, here: page })
+  content.stamp('Map', { x, y })
+  lightCell(content, tiling, { x, y }, mapRoom, page)
   const text = x + map.width + 3
   content.text(page.name, { x: text, y: y + 6.4 }, { size: 8, weight: 600, dye: 'indigo' })
   content.text(
