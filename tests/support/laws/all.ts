@@ -12,6 +12,7 @@ import { dragsArrive, handlesTrue } from './law-11-handles'
 import { steps } from './law-12-steps'
 import { continuity } from './law-13-continuity'
 import { fairCurves } from './law-14-fair-curves'
+import { darts, movedDartsKeepTheirAngle } from './law-16-darts'
 import { openings } from './law-17-openings'
 import { switchedOff } from './law-18-corrections'
 import { tape } from './law-19-tape'
@@ -30,6 +31,7 @@ export const draftLaws: readonly DraftLaw[] = [
   nothingClamped,
   steps,
   fairCurves,
+  darts,
   openings,
   tape,
 ]
@@ -43,5 +45,6 @@ export const orderLaws: readonly OrderLaw[] = [
   handlesTrue,
   dragsArrive,
   continuity,
+  movedDartsKeepTheirAngle,
   switchedOff,
 ]

@@ -92,6 +92,13 @@ export function styleOf(
   return value.default
 }
 
+/** The shape of the neck, for garments that have one to choose. */
+export function neckShape(order: DraftOrder, garment: GarmentDefinition): unknown {
+  return garment.design.some((value) => value.id === 'neckShape')
+    ? styleOf(order, garment, 'neckShape')
+    : undefined
+}
+
 /** Whether a style value is offered with the others as they stand. */
 export function offers(order: DraftOrder, garment: GarmentDefinition, id: string): boolean {
   const { when } = garment.design.find((one) => one.id === id) ?? {}

@@ -9,7 +9,7 @@ import {
   startOfPath,
   turnFrom,
 } from './curves'
-import { garmentOf, styleOf } from './formulas'
+import { garmentOf, neckShape } from './formulas'
 import { Findings, type DraftLaw } from './violation'
 
 /** A bend under this many degrees in all is no bend that an eye or an iron would notice. */
@@ -21,9 +21,7 @@ const sewable = 5
 /** Curves bend as their kind may: necks and hems one way, an armhole at most twice, half a sleeve head exactly twice. */
 export const fairCurves: DraftLaw = (draft, order, engine) => {
   const found = new Findings(14)
-  const square =
-    order.garment === 'flared-dress' &&
-    styleOf(order, garmentOf(order, engine.garments), 'neckShape') === 'square'
+  const square = neckShape(order, garmentOf(order, engine.garments)) === 'square'
   for (const piece of draft.pieces) {
     for (const edge of piece.edges) {
       const where = `${piece.id}.${edge.id}`

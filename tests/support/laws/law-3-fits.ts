@@ -11,6 +11,7 @@ const about: Readonly<Record<string, { readonly body: string; readonly ease?: st
   neck: { body: 'neckBase' },
   armhole: { body: 'upperArm' },
 }
+const aboutBodice: typeof about = { ...about, waist: { body: 'waist', ease: 'waistEase' } }
 const aboutSkirt: typeof about = {
   waist: { body: 'waist', ease: 'waistEase' },
   hip: { body: 'hip', ease: 'hipEase' },
@@ -19,21 +20,25 @@ const aboutSkirt: typeof about = {
 /** A fit that is equal is at least as well. */
 const strength: Readonly<Record<Fit['relation'], number>> = { shown: 0, 'at-least': 1, equal: 2 }
 
-const promised: Readonly<Record<string, Fit['relation']>> = {
-  bust: 'equal',
-  waist: 'at-least',
-  hip: 'at-least',
-  biceps: 'at-least',
-  armhole: 'at-least',
+/** What each garment's fits must promise, by their ids. */
+const promised: Readonly<Record<string, Readonly<Record<string, Fit['relation']>>>> = {
+  'flared-dress': {
+    bust: 'equal',
+    waist: 'at-least',
+    hip: 'at-least',
+    biceps: 'at-least',
+    armhole: 'at-least',
+  },
+  'circle-skirt': { waist: 'equal' },
+  bodice: { bust: 'equal', waist: 'equal', biceps: 'at-least', armhole: 'at-least' },
 }
-const promisedSkirt: typeof promised = { waist: 'equal' }
 
 /** Each fit is what is drawn, ends on the stitch line and keeps its promise to the body. */
 export const fits: DraftLaw = (draft, order, engine) => {
   const found = new Findings(3)
   const lines = new Map<string, Chain>()
   const garment = garmentOf(order, engine.garments)
-  const meanings = order.garment === 'circle-skirt' ? aboutSkirt : about
+  const meanings = { 'circle-skirt': aboutSkirt, bodice: aboutBodice }[order.garment] ?? about
   for (const fit of draft.fits) {
     measured(found, draft, fit, lines)
     const meaning = meanings[fit.id]
@@ -50,7 +55,7 @@ export const fits: DraftLaw = (draft, order, engine) => {
   }
   // What the rules promise is promised, unless somebody changed them or the marks.
   if (order.rules || order.corrections?.some((one) => !one.off)) return found.all
-  for (const [id, relation] of Object.entries(order.garment === 'circle-skirt' ? promisedSkirt : promised)) {
+  for (const [id, relation] of Object.entries(promised[order.garment] ?? {})) {
     const fit = draft.fits.find((one) => one.id === id)
     if (fit && strength[fit.relation] < strength[relation])
       found.add(id, `is only “${fit.relation}”, “${relation}” is due`)

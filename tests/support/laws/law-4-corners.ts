@@ -1,5 +1,5 @@
 import { angleAtStart, corners } from './corners'
-import { garmentOf, styleOf } from './formulas'
+import { garmentOf, neckShape } from './formulas'
 import { Findings, type DraftLaw } from './violation'
 
 const sewnAt = new Set(['waist', 'hem', 'armhole', 'neckline'])
@@ -7,8 +7,7 @@ const sewnAt = new Set(['waist', 'hem', 'armhole', 'neckline'])
 /** A fold is met square; where sewn neighbours meet at waist, hem, armhole or shoulder they make one line. */
 export const squareCorners: DraftLaw = (draft, order, engine) => {
   const found = new Findings(4)
-  const pointed =
-    order.garment === 'flared-dress' && styleOf(order, garmentOf(order, engine.garments), 'neckShape') === 'V'
+  const pointed = neckShape(order, garmentOf(order, engine.garments)) === 'V'
   for (const piece of draft.pieces) {
     piece.edges.forEach((edge, index) => {
       const next = (index + 1) % piece.edges.length

@@ -6,8 +6,8 @@ import { Findings, type DraftLaw } from './violation'
 /** A set-in head is its armhole and its ease, front and back; the arm has room; each cut is spread by what was asked. */
 export const sleeves: DraftLaw = (draft, order, engine) => {
   const found = new Findings(7)
-  if (order.garment !== 'flared-dress') return found.all
   const garment = garmentOf(order, engine.garments)
+  if (!garment.design.some((value) => value.id === 'sleeve')) return found.all
   const kind = styleOf(order, garment, 'sleeve')
   const sleeve = draft.pieces.find((one) => one.id === 'sleeve')
   if (kind === 'none') {
@@ -24,13 +24,18 @@ export const sleeves: DraftLaw = (draft, order, engine) => {
   const lengths = { head: 0, armhole: 0 }
   for (const side of ['front', 'back'] as const) {
     const head = edge('sleeve', `head-${side}`)
-    const armhole = edge(side, 'armhole')
+    // A dart may cut the armhole in two: what is sewn to the head is what counts.
+    const armhole = draft.seams.find((seam) => seam.a.some((run) => run.edge === `head-${side}`))?.b
     const ease = numberOf(`${side}HeadEase`, order, garment, draft.used)
     if (!head || !armhole || ease === undefined) {
       found.add(`${side} of the head`, 'cannot be measured')
       continue
     }
-    const [drawn, hole] = [lengthOfPath(head.path), lengthOfPath(armhole.path)]
+    const drawn = lengthOfPath(head.path)
+    const holes = armhole
+      .map((run) => edge(run.piece, run.edge))
+      .map((one) => (one?.role === 'armhole' ? lengthOfPath(one.path) : NaN))
+    const hole = holes.reduce((sum, one) => sum + one, 0)
     lengths.head += drawn
     lengths.armhole += hole
     found.atMost(`${side} of the head`, 'off its armhole and ease', Math.abs(drawn - hole - ease), tolerance)
