@@ -51,14 +51,7 @@ export const bodice = garment({
     length('waistEase', 'Waist ease', 'body', { default: 40, min: 10, max: 120 }),
     choice('sleeve', 'Sleeve', 'sleeve', ['none', 'plain', 'flared']),
     ...sleeveDesign,
-    choice('backOpening', 'Back opening', 'opening', ['zip', 'none']),
-    length(
-      'zipLength',
-      'Zip length',
-      'opening',
-      { default: 350, min: 150, max: 500 },
-      { id: 'backOpening', is: ['zip'] },
-    ),
+    length('zipLength', 'Zip length', 'opening', { default: 350, min: 150, max: 500 }),
     length('neckAllowance', 'Neck allowance', 'allowances', { default: 6.35, min: 0, max: 15 }),
     length('shoulderAllowance', 'Shoulder allowance', 'allowances', { default: 12.7, min: 0, max: 25 }),
     length('armholeAllowance', 'Armhole allowance', 'allowances', { default: 10, min: 0, max: 15 }),
@@ -136,8 +129,7 @@ export const bodice = garment({
     for (const piece of [front, back])
       piece.grain({ x: 35, y: piece.at('scyeLevel').y }, { x: 35, y: piece.at('centreWaist').y - 25 })
     front.cut({ cloth: 'main', count: 1, onFold: true, handed: false })
-    const { onFold } = backDrawn
-    back.cut({ cloth: 'main', count: onFold ? 1 : 2, onFold, handed: !onFold })
+    back.cut({ cloth: 'main', count: 2, onFold: false, handed: true })
     sewBodice(pen, frontDrawn)
     fitBodice(pen, front, back, frontDrawn.waist, backDrawn.waist)
     const bare = pen.chosen('sleeve') === 'none'
@@ -149,7 +141,7 @@ export const bodice = garment({
       )
     const runs = (piece: string, edge: string) =>
       piece === 'front' ? frontDrawn.runs(edge) : [{ piece, edge }]
-    faceNeckAndArmholes(pen, [frontDrawn.faced, true], [backDrawn.faced, onFold], bare, {
+    faceNeckAndArmholes(pen, [frontDrawn.faced, true], [backDrawn.faced, false], bare, {
       runs,
       shoulderEase: 'shoulderEase',
     })

@@ -37,9 +37,9 @@ export const flaredDress = garment({
   ],
   design: [
     choice('neckShape', 'Neck shape', 'neckline', ['round', 'V', 'square', 'boat']),
-    length('neckWidening', 'Neck wider by', 'neckline', { default: 0, min: 0, max: 80 }),
-    length('frontNeckDrop', 'Front neck lower by', 'neckline', { default: 0, min: 0, max: 150 }),
-    length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 150 }),
+    length('neckWidening', 'Neck wider by', 'neckline', { default: 0, min: 0, max: 70 }),
+    length('frontNeckDrop', 'Front neck lower by', 'neckline', { default: 0, min: 0, max: 130 }),
+    length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 120 }),
     length('facingDepth', 'Facing depth', 'neckline', { default: 50.8, min: 30, max: 90 }),
     length('shoulderSlope', 'Shoulder slope', 'shoulder', { default: 38.1, min: 15, max: 60 }),
     length('armholeDrop', 'Armhole lower by', 'armhole', { default: 0, min: 0, max: 80 }),
@@ -113,6 +113,7 @@ export const flaredDress = garment({
   found: {
     armholeDeepening: 'length',
     neckFall: 'length',
+    zipDrawn: 'length',
     hemDrop: 'length',
     swingLoss: 'length',
     headHeight: 'length',

@@ -1,6 +1,7 @@
 import type { DesignValue, RuleDefinition } from '../contract'
 import { length, choice } from '../pen/design'
 import { lengthRule } from '../pen/garment'
+import { nothing } from '../pen/masks'
 import type { Pen } from '../pen/pen'
 import { straight, type PiecePen } from '../pen/piece-pen'
 
@@ -33,21 +34,30 @@ export function backOpening(pen: Pen, back: PiecePen): boolean {
     if (short > 0) slit(pen, back, Math.max(60, Math.ceil(short / 2 / 5) * 5))
     return true
   }
-  const zip = pen.length('zipLength')
+  const asked = pen.length('zipLength')
   const room = back.at('lengthMark').y - back.at('centreNeck').y - 60
-  if (zip > room) {
-    pen.refuse({
-      field: 'zipLength',
-      code: 'impossible-shape',
-      message: `The zip would run into the hem. Choose one of at most ${pen.say(room)}.`,
-      max: room,
-    })
+  const zip = pen.tape ? Math.min(asked, Math.floor(room / pen.tape) * pen.tape) : Math.min(asked, room)
+  const level = back.mark('lengthMark').y | back.mark('centreNeck').y
+  pen.find('zipDrawn', zip, pen.usesOf(['zipLength']) | (zip < asked ? level : nothing))
+  if (zip < asked) {
+    pen.caution(
+      'zip-shortened',
+      `A zip that long would run into the hem, so the opening is drawn ${pen.say(zip)} long.`,
+      'zipLength',
+      'length',
+    )
   }
-  back.go('zipEnd', 'centreNeck', 'down', 'zipLength', {
+  back.go('zipEnd', 'centreNeck', 'down', 'zipDrawn', {
     say: 'Down the centre back mark the end of the zip',
     drag: ['zipLength'],
   })
-  pen.tag({ piece: back.id, from: 'centreNeck', to: 'zipEnd', label: 'Zip', value: 'zipLength' })
+  pen.tag({
+    piece: back.id,
+    from: 'centreNeck',
+    to: 'zipEnd',
+    label: 'Zip',
+    ...(zip < asked ? {} : { value: 'zipLength' }),
+  })
   back.line('centre', 'lengthMark', 'zipEnd', {
     role: 'seam',
     allowance: 'centreBackAllowance',

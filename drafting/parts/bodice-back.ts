@@ -50,22 +50,12 @@ export function bodiceBackMarks(pen: Pen, back: PiecePen): void {
     drag: ['bustEase'],
   })
   back.go('waistLevel', 'nape', 'down', 'napeToWaist', { say: 'From the nape come down to the waist' })
-  if (pen.chosen('backOpening') === 'none') {
-    back.place('centreWaist', back.at('waistLevel'), {
-      say: 'On the fold the centre stays straight',
-      through: ['waistLevel'],
-    })
-  } else back.go('centreWaist', 'waistLevel', 'right', 'centreBackIn', { say: 'Come in at the centre back' })
+  back.go('centreWaist', 'waistLevel', 'right', 'centreBackIn', { say: 'Come in at the centre back' })
 }
 
 /** Draws the back from its marks: the waist fitted first, then neck, shoulder, armhole, side, waist and centre. */
-export function drawBodiceBack(
-  pen: Pen,
-  back: PiecePen,
-  lean: number,
-): { faced: Faced; waist: FittedWaist; onFold: boolean } {
+export function drawBodiceBack(pen: Pen, back: PiecePen, lean: number): { faced: Faced; waist: FittedWaist } {
   const at = (id: string): Point => back.at(id)
-  const onFold = pen.chosen('backOpening') === 'none'
   const centreDown = unit(
     between({ x: 0, y: (at('scyeLevel').y + at('waistLevel').y) / 2 }, at('centreWaist')),
   )
@@ -139,25 +129,23 @@ export function drawBodiceBack(
     say: 'Draw the side seam',
   })
   drawWaist(back, waist, { centre: 'centreWaist', side: 'sideWaist' }, false, names, 'bound')
-  centreBack(pen, back, onFold, names)
-  return { faced: facedBody(back), waist, onFold }
+  centreBack(pen, back, centreDown, names)
+  return { faced: facedBody(back), waist }
 }
 
-/** The centre back: straight to the level of the underarm, then in to the waist; on the fold it is straight all the way. */
-function centreBack(pen: Pen, back: PiecePen, onFold: boolean, uses: readonly string[]): void {
+/** The centre back: straight to the level of the underarm, then in to the waist, where it meets it square. */
+function centreBack(pen: Pen, back: PiecePen, down: Point, uses: readonly string[]): void {
   const waist = back.at('centreWaist')
   const neck = back.at('centreNeck')
-  if (onFold) {
-    back.line('centre', 'centreWaist', 'centreNeck', {
-      role: 'fold',
-      say: 'The centre back lies on the fold',
-    })
-    return
-  }
   const bend = { x: 0, y: Math.max(neck.y + 20, back.at('scyeLevel').y) }
   const long = waist.y - bend.y
   const whole = openPath([
-    cubic(waist, { x: waist.x * 0.66, y: waist.y - long * 0.33 }, { x: 0, y: bend.y + long * 0.33 }, bend),
+    cubic(
+      waist,
+      { x: waist.x - (down.x * long) / 3, y: waist.y - (down.y * long) / 3 },
+      { x: 0, y: bend.y + long * 0.33 },
+      bend,
+    ),
     { kind: 'line', from: bend, to: neck },
   ])
   const zip = Math.min(pen.length('zipLength'), pathLength(whole))

@@ -123,8 +123,8 @@ export function drawBodiceFront(pen: Pen, front: PiecePen, seam: number, lean: n
   )
 
   const sideWaist = opened.beyond ? waist.side : (upper.edges.at(-1)?.path.segments.at(-1)?.to as Point)
-  drawOutline(front, opened.edges, upper.point, names)
   front.place('sideWaistEnd', sideWaist, { say: 'Mark the waist on the side', uses: names })
+  drawOutline(front, opened.edges, upper.point, names)
   const turned = opened.beyond ? waist : swingWaist(waist, upper.point, -angle)
   drawWaist(front, turned, { centre: 'centreWaist', side: 'sideWaistEnd' }, false, names, 'bound')
   front.line('centre', 'centreWaist', 'centreNeck', {
@@ -308,7 +308,11 @@ function drawOutline(
     const end = edge.path.segments.at(-1)?.to as Point
     const next = edges[index + 1]
     const known = next && start[next.id]
-    let to = next?.of === 'dart' && edge.of === 'dart' ? 'bustDartPoint' : `end-${edge.id}`
+    let to = !next
+      ? 'sideWaistEnd'
+      : next.of === 'dart' && edge.of === 'dart'
+        ? 'bustDartPoint'
+        : `end-${edge.id}`
     if (known && distance(front.at(known), end) < 1e-6) to = known
     if (!front.marks.has(to)) front.place(to, end, { say: 'Mark where it ends', uses: names })
     front.curve(edge.id, pinned(edge.path, front.at(from), front.at(to)), from, to, {

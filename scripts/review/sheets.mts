@@ -28,7 +28,7 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     shoulder: { dartTo: 'shoulder', sleeve: 'plain' },
     armhole: { dartTo: 'armhole', neckShape: 'V' },
     neck: { dartTo: 'neck', sleeve: 'flared' },
-    waist: { dartTo: 'waist', sleeve: 'plain', backOpening: 'none' },
+    waist: { dartTo: 'waist', sleeve: 'plain' },
   },
   'circle-skirt': {
     default: {},
