@@ -22,11 +22,11 @@ export class NameTable {
     return bit
   }
 
-  /** The names behind a mask, in the order in which they were first met. */
+  /** The names behind a mask, sorted: the order in which they were met depends on what was drafted before. */
   spell(mask: Mask): readonly string[] {
     const known = this.spelled.get(mask)
     if (known) return known
-    const found = this.names.filter((_, index) => (mask >> BigInt(index)) & 1n)
+    const found = this.names.filter((_, index) => (mask >> BigInt(index)) & 1n).sort()
     if (this.spelled.size > 4000) this.spelled.clear()
     this.spelled.set(mask, found)
     return found
