@@ -15,7 +15,7 @@ import { socketFolder } from './socket-folder.mjs'
  * @param {object} options
  * @param {string} options.folder where its data, log and socket stand
  * @param {{ port?: number, socketFolder?: string }} options.remembered from the last start; port and folder are kept
- * @returns {Promise<{ port: number, socketFolder: string, wasRunning: boolean, sql: (text: string) => Promise<string>, stop: () => Promise<void> }>}
+ * @returns {Promise<{ pid: number, port: number, socketFolder: string, wasRunning: boolean, sql: (text: string) => Promise<string>, stop: () => Promise<void> }>}
  */
 export async function startServer({ folder, remembered }) {
   const data = await installDatabase(folder)
@@ -33,6 +33,7 @@ export async function startServer({ folder, remembered }) {
     pid = await launch({ ...server, data, port })
   }
   return {
+    pid,
     port,
     socketFolder: run,
     wasRunning: answers,
