@@ -126,6 +126,8 @@ export async function openShare(token: string): Promise<OpenedShare | null> {
   ])
   const head = draft && (await Revision.findByPk(draft.headId))
   if (!draft || !workroom || !head) return null
+  // What somebody has seen by a link is never thinned away.
+  if (!head.sharedAt) await head.update({ sharedAt: new Date() })
   return {
     scope: share.scope,
     draftName: draft.name,

@@ -1,6 +1,6 @@
 import { beforeAll, expect, it } from 'vitest'
 import { createClient } from '@/db/access/clients'
-import { saveRevision } from '@/db/access/revisions'
+import { getRevision, saveRevision } from '@/db/access/revisions'
 import { createShare, listShares, openShare, revokeShare } from '@/db/access/shares'
 import { Share } from '@/db/models/share'
 import { newId } from '@/db/new-id'
@@ -29,6 +29,7 @@ it('opens the newest version and nothing about the client', async () => {
   const opened = await openShare(token)
   expect(opened).toMatchObject({ revisionId: next.id, workroomName: workroom.name, scope: 'drawing' })
   expect(JSON.stringify(opened)).not.toMatch(/Secret|555|client/i)
+  expect((await getRevision(owner.actor, next.id)).shared).toBe(true)
 })
 
 it('keeps only a hash of the token, and gives the same link for the same id', async () => {

@@ -30,21 +30,30 @@ function fieldsOf(form: FormData): Record<string, unknown> {
   )
 }
 
-async function answer<S extends z.ZodType, T>(
+/** The page an action was called from, without its query. */
+const pageOf = (sent: Headers) => (sent.get('x-page') ?? '').split('?')[0]
+
+/** Origin first, then who it is, then what was sent: nobody learns more than they may. */
+async function answer<S extends z.ZodType, W extends { readonly userId?: string; readonly address?: string }, T>(
   schema: S,
   input: unknown,
-  fn: (input: z.output<S>, headers: Headers) => Promise<T>,
+  identify: (sent: Headers) => W | Promise<W>,
+  fn: (caller: W, input: z.output<S>) => Promise<T>,
 ): Promise<ActionResult<T>> {
+  const sent = await headers()
+  let userId: string | undefined
   try {
-    const sent = await headers()
     requireSameOrigin(sent)
-    return {
-      ok: true,
-      value: await fn(checkInput(schema, input instanceof FormData ? fieldsOf(input) : input), sent),
-    }
+    const caller = await identify(sent)
+    userId = caller.userId
+    const checked = checkInput(schema, input instanceof FormData ? fieldsOf(input) : input)
+    return { ok: true, value: await fn(caller, checked) }
   } catch (error) {
     unstable_rethrow(error)
-    return { ok: false, problems: refusalOf(error).problems }
+    return {
+      ok: false,
+      problems: refusalOf(error, { userId, request: `action on ${pageOf(sent)}` }).problems,
+    }
   }
 }
 
@@ -56,7 +65,13 @@ export function publicAction<S extends z.ZodType, T>(
   schema: S,
   fn: (input: z.output<S>, address: string) => Promise<T>,
 ): Action<S, T> {
-  return async (input) => answer(schema, input, (checked, sent) => fn(checked, requestAddress(sent)))
+  return async (input) =>
+    answer(
+      schema,
+      input,
+      (sent) => ({ address: requestAddress(sent) }),
+      ({ address }, checked) => fn(checked, address),
+    )
 }
 
 /** A server action for whoever is signed in, whether or not in a workroom. */
@@ -64,8 +79,7 @@ export function signedInAction<S extends z.ZodType, T>(
   schema: S,
   fn: (signedIn: SignedIn, input: z.output<S>) => Promise<T>,
 ): Action<S, T> {
-  return async (input) =>
-    answer(schema, input, async (checked) => fn(requireSession(await currentSession()), checked))
+  return async (input) => answer(schema, input, async () => requireSession(await currentSession()), fn)
 }
 
 /** A server action inside a workroom: origin, session, membership and input are checked before `fn` runs. */
@@ -73,6 +87,5 @@ export function workroomAction<S extends z.ZodType, T>(
   schema: S,
   fn: (actor: Actor, input: z.output<S>) => Promise<T>,
 ): Action<S, T> {
-  return async (input) =>
-    answer(schema, input, async (checked) => fn(requireMember(await currentSession()), checked))
+  return async (input) => answer(schema, input, async () => requireMember(await currentSession()), fn)
 }

@@ -3,7 +3,7 @@ import type * as z from 'zod'
 import { checkInput } from '@/db/check-input'
 import type { Actor } from '@/db/permissions'
 import { requireSameOrigin } from '../origin'
-import { refusalOf } from '../problems'
+import { type Asking, refusalOf } from '../problems'
 import { jsonBody } from './json-body'
 import { actorForRequest } from './request'
 
@@ -28,8 +28,8 @@ async function inputOf(request: Request, params: Params): Promise<Record<string,
 }
 
 /** Answers an error as JSON: `{ok: false, problems: [{field, message}]}`. */
-export function refused(error: unknown): Response {
-  const { status, problems } = refusalOf(error)
+export function refused(error: unknown, asking: Asking = {}): Response {
+  const { status, problems } = refusalOf(error, asking)
   return privately(Response.json({ ok: false, problems }, { status }))
 }
 
@@ -43,13 +43,15 @@ export function workroomRoute<S extends z.ZodType, T>(
   fn: (actor: Actor, input: z.output<S>, request: Request) => Promise<T | Response>,
 ): Handler {
   return async (request, { params }) => {
+    let userId: string | undefined
     try {
       if (!unchanging.has(request.method)) requireSameOrigin(request.headers)
       const actor = await actorForRequest(request)
+      userId = actor.userId
       const result = await fn(actor, checkInput(schema, await inputOf(request, await params)), request)
       return privately(result instanceof Response ? result : Response.json({ ok: true, value: result }))
     } catch (error) {
-      return refused(error)
+      return refused(error, { userId, request: `${request.method} ${new URL(request.url).pathname}` })
     }
   }
 }
