@@ -34,7 +34,11 @@ function fieldsOf(form: FormData): Record<string, unknown> {
 const pageOf = (sent: Headers) => (sent.get('x-page') ?? '').split('?')[0]
 
 /** Origin first, then who it is, then what was sent: nobody learns more than they may. */
-async function answer<S extends z.ZodType, W extends { readonly userId?: string; readonly address?: string }, T>(
+async function answer<
+  S extends z.ZodType,
+  W extends { readonly userId?: string; readonly address?: string },
+  T,
+>(
   schema: S,
   input: unknown,
   identify: (sent: Headers) => W | Promise<W>,
