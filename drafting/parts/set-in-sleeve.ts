@@ -342,20 +342,6 @@ function sewSleeve(
       { piece: 'sleeve', path: hemEdge.path, times: 1, length: pathLength(hemEdge.path) },
     ]),
   )
-  fitLength(pen, sleeve, hemEdge.path)
-}
-
-/** The finished length down the grain, beside the length of the arm. */
-function fitLength(pen: Pen, sleeve: PiecePen, hem: Path): void {
-  const crown = sleeve.at('crown')
-  const met = intersections(hem, straight(crown, { x: crown.x, y: crown.y + 2000 }))[0]
-  if (!met) return
-  const down = straight(crown, met.point)
-  pen.fit(
-    fitAcross('sleeve-length', 'shown', 0, pen.value('armLength'), [
-      { piece: 'sleeve', path: down, times: 1, length: pathLength(down) },
-    ]),
-  )
 }
 
 /** The sleeve against the arm: from the crown straight down to the hem. */

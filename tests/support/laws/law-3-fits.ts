@@ -39,6 +39,10 @@ export const fits: DraftLaw = (draft, order, engine) => {
   const lines = new Map<string, Chain>()
   const garment = garmentOf(order, engine.garments)
   const meanings = { 'circle-skirt': aboutSkirt, bodice: aboutBodice }[order.garment] ?? about
+  const ids = draft.fits.map((fit) => fit.id)
+  for (const id of new Set(ids)) {
+    if (ids.indexOf(id) !== ids.lastIndexOf(id)) found.add(id, 'is measured twice')
+  }
   for (const fit of draft.fits) {
     measured(found, draft, fit, lines)
     const meaning = meanings[fit.id]
