@@ -5,7 +5,7 @@ import { angleRule, garment, geometry, lengthRule } from '../pen/garment'
 import { fitAcross, type Pen } from '../pen/pen'
 import type { PiecePen } from '../pen/piece-pen'
 import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/in-seam-pocket'
-import { waistband, waistbandDesign, waistbandRules } from '../parts/waistband'
+import { waistband, waistbandDesign, waistbandRules, waistEasedIn } from '../parts/waistband'
 
 const shares: Readonly<Record<string, number>> = {
   '1/4': 0.25,
@@ -28,16 +28,7 @@ export const circleSkirt = garment({
     length('waistEase', 'Waist ease', 'skirt', { default: 15, min: -20, max: 50 }),
     length('hipEase', 'Hip ease', 'skirt', { default: 50, min: 0, max: 150 }),
     ...waistbandDesign,
-    length(
-      'waistEasedIn',
-      'Skirt eased into the band',
-      'waistband',
-      { default: 0, min: 0, max: 10 },
-      {
-        id: 'waistband',
-        is: [true],
-      },
-    ),
+    waistEasedIn,
     choice('opening', 'Opening', 'opening', ['zip', 'none']),
     length(
       'zipLength',

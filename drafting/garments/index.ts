@@ -1,11 +1,14 @@
 import type { DraftOrder, GarmentDefinition } from '../contract'
 import { DraftingError } from '../drafting-error'
 import type { Garment } from '../pen/garment'
+import { aLineSkirt } from './a-line-skirt'
 import { bodice } from './bodice'
 import { circleSkirt } from './circle-skirt'
 import { flaredDress } from './flared-dress'
+import { gatheredSkirt } from './gathered-skirt'
+import { straightSkirt } from './straight-skirt'
 
-const all: readonly Garment[] = [flaredDress, circleSkirt, bodice]
+const all: readonly Garment[] = [flaredDress, circleSkirt, bodice, straightSkirt, aLineSkirt, gatheredSkirt]
 
 /** Every garment that can be drafted. */
 export const garments: readonly GarmentDefinition[] = all.map((garment) => garment.definition)

@@ -140,6 +140,8 @@ export function pocketBag(pen: Pen, least: number, uses: Mask): PiecePen {
     {
       role: 'seam',
       allowance: 'pocketAllowance',
+      // It runs on from the mouth almost straight: a mitre of two different allowances would lie far off.
+      corner: 'step',
       say: 'Draw round the bag in one sweep',
       uses: names,
       through: ['bottom', 'inside'],

@@ -17,11 +17,13 @@ import {
 import { straight } from '../pen/piece-pen'
 import { fairCurve } from './hem'
 
-/** A dart at a waist: its point, and how much it takes out. The legs stand alike on both sides of an upright axis. */
+/** A dart at a waist: its point, and how much it takes out. The legs stand alike on both sides of its axis. */
 export interface WaistDart {
   readonly point: Point
   /** Degrees between the legs. */
   readonly angle: number
+  /** Degrees by which its axis is turned from the upright, where the piece was turned about another dart. */
+  readonly lean?: number
 }
 
 /** One stretch of a waist between two darts, as it lies on the open piece, from the centre towards the side. */
@@ -67,7 +69,10 @@ export function openWaist(
     }
     const met = intersections(
       closed,
-      transformPath(closing[index] as Transform, straight(dart.point, leg)),
+      transformPath(
+        compose(closing[index] as Transform, rotation(dart.lean ?? 0, dart.point)),
+        straight(dart.point, leg),
+      ),
     )[0]
     if (met) cuts.push(met.a)
   })

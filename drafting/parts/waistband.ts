@@ -1,7 +1,7 @@
 import type { DesignValue, RuleDefinition, Run } from '../contract'
 import { length, yesNo } from '../pen/design'
 import { lengthRule } from '../pen/garment'
-import type { Pen } from '../pen/pen'
+import type { Pen, SeamPlan } from '../pen/pen'
 
 const worn = { id: 'waistband', is: [true] }
 
@@ -12,6 +12,20 @@ export const waistbandDesign: readonly DesignValue[] = [
   length('waistbandAllowance', 'Waistband allowance', 'allowances', { default: 12.7, min: 0, max: 25 }, worn),
 ]
 
+/** The same for a skirt that cannot do without a band. */
+export const bandAlways: readonly DesignValue[] = waistbandDesign
+  .filter((value) => value.id !== 'waistband')
+  .map(({ when: _when, ...value }) => value)
+
+/** How much a skirt that is not gathered is eased into its band. */
+export const waistEasedIn = length(
+  'waistEasedIn',
+  'Skirt eased into the band',
+  'waistband',
+  { default: 0, min: 0, max: 10 },
+  worn,
+)
+
 export const waistbandRules: readonly RuleDefinition[] = [
   lengthRule('waistbandLength', 'Waistband without underlap', 'waistDrawn - waistEasedIn'),
   lengthRule('waistbandFold', 'Waistband, cut depth', 'waistbandDepth * 2'),
@@ -21,8 +35,15 @@ export const waistbandRules: readonly RuleDefinition[] = [
  * A straight waistband, folded along its upper edge; the skirt is eased into it.
  *
  * @param runs the skirt's waist edges in order, beginning at the opening.
+ * @param matches mm along skirt and band that must fall together: sides and centres.
+ * @param gathered the rule that says how much is gathered in, where the skirt is gathered instead of eased.
  */
-export function waistband(pen: Pen, runs: readonly Run[]): void {
+export function waistband(
+  pen: Pen,
+  runs: readonly Run[],
+  matches: SeamPlan['matches'] = [],
+  gathered?: string,
+): void {
   const band = pen.piece('waistband', 'Waistband')
   band.start('end', { x: 0, y: 0 }, 'Mark the end of the band on a straight line')
   band.go('foldEnd', 'end', 'down', 'waistbandDepth', {
@@ -71,8 +92,9 @@ export function waistband(pen: Pen, runs: readonly Run[]): void {
     name: 'Skirt into waistband',
     a: runs,
     b: [{ piece: 'waistband', edge: 'lower' }],
-    join: 'eased',
-    easeFrom: 'waistEasedIn',
+    join: gathered ? 'gathered' : 'eased',
+    easeFrom: gathered ?? 'waistEasedIn',
+    matches,
   })
   pen.notion({ kind: 'hook', count: 1 })
 }

@@ -30,6 +30,20 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     neck: { dartTo: 'neck', sleeve: 'flared' },
     waist: { dartTo: 'waist', sleeve: 'plain' },
   },
+  'straight-skirt': {
+    default: {},
+    slit: { walkingRoom: 'slit', frontDarts: 2, pockets: true },
+    sideZip: { opening: 'side zip', backDarts: 1, waistband: false, length: 450 },
+  },
+  'a-line-skirt': {
+    default: {},
+    wide: { dartClosed: 1, flareMore: 40, frontDarts: 2, length: 800 },
+    backOne: { backDarts: 1, opening: 'side zip', dartClosed: 0.3 },
+  },
+  'gathered-skirt': {
+    default: {},
+    full: { fullness: 2.5, opening: 'side zip', length: 900 },
+  },
   'circle-skirt': {
     default: {},
     full: { share: '1', panels: 4, pockets: true },

@@ -30,6 +30,9 @@ const promised: Readonly<Record<string, Readonly<Record<string, Fit['relation']>
     armhole: 'at-least',
   },
   'circle-skirt': { waist: 'equal' },
+  'straight-skirt': { waist: 'equal', hip: 'at-least' },
+  'a-line-skirt': { waist: 'equal', hip: 'at-least' },
+  'gathered-skirt': { waist: 'equal' },
   bodice: { bust: 'equal', waist: 'equal', biceps: 'at-least', armhole: 'at-least' },
 }
 
@@ -38,7 +41,11 @@ export const fits: DraftLaw = (draft, order, engine) => {
   const found = new Findings(3)
   const lines = new Map<string, Chain>()
   const garment = garmentOf(order, engine.garments)
-  const meanings = { 'circle-skirt': aboutSkirt, bodice: aboutBodice }[order.garment] ?? about
+  const meanings = order.garment.endsWith('-skirt')
+    ? aboutSkirt
+    : order.garment === 'bodice'
+      ? aboutBodice
+      : about
   const ids = draft.fits.map((fit) => fit.id)
   for (const id of new Set(ids)) {
     if (ids.indexOf(id) !== ids.lastIndexOf(id)) found.add(id, 'is measured twice')
