@@ -36,10 +36,12 @@ describe('a stranger’s formula', () => {
   it('is judged within 100 ms, however many names it misspells', () => {
     const names = Array.from({ length: 200 }, (_, at) => `measurementNumber${at}OfAWorkroom`)
     const kinds = Object.fromEntries(names.map((name) => [name, 'length' as const]))
-    const start = performance.now()
+    // The processor's time, not the wall's: other programs may be busy.
+    const start = process.cpuUsage()
     const text = names.map((name) => name.replace('Number', 'Nmuber')).join('+')
     const problems = checkRule('depth', text.slice(0, 500), 'length', { kinds, formulas: {} })
-    expect(performance.now() - start).toBeLessThan(100)
+    const { user, system } = process.cpuUsage(start)
+    expect((user + system) / 1000).toBeLessThan(100)
     expect(problems[0]?.message).toContain('Did you mean measurementNumber0OfAWorkroom')
   })
 })
