@@ -6,9 +6,18 @@ import { bodice } from './bodice'
 import { circleSkirt } from './circle-skirt'
 import { flaredDress } from './flared-dress'
 import { gatheredSkirt } from './gathered-skirt'
+import { goredSkirt } from './gored-skirt'
 import { straightSkirt } from './straight-skirt'
 
-const all: readonly Garment[] = [flaredDress, circleSkirt, bodice, straightSkirt, aLineSkirt, gatheredSkirt]
+const all: readonly Garment[] = [
+  flaredDress,
+  circleSkirt,
+  bodice,
+  straightSkirt,
+  aLineSkirt,
+  goredSkirt,
+  gatheredSkirt,
+]
 
 /** Every garment that can be drafted. */
 export const garments: readonly GarmentDefinition[] = all.map((garment) => garment.definition)

@@ -55,9 +55,10 @@ export function fitHip(pen: Pen, halves: readonly DrawnHalf[], ...remedies: read
 export function hipGirth(pen: Pen, across: Across, ...remedies: readonly string[]): void {
   const girth = across.reduce((sum, one) => sum + one.times * one.length, 0)
   const wanted = pen.value('hip') + pen.value('hipEase')
-  const relation: Fit['relation'] = girth >= wanted ? 'at-least' : 'shown'
+  const wide = girth >= wanted - 1e-7
+  const relation: Fit['relation'] = wide ? 'at-least' : 'shown'
   pen.fit(fitAcross('hip', relation, pen.value('hipEase'), pen.value('hip'), across))
-  if (girth >= wanted) return
+  if (wide) return
   pen.caution(
     'hip-tight',
     `At the hip the skirt is ${pen.say(girth)} round, the body with ease ${pen.say(wanted)}. Make it wider there.`,

@@ -40,6 +40,11 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     wide: { dartClosed: 1, flareMore: 40, frontDarts: 2, length: 800 },
     backOne: { backDarts: 1, opening: 'side zip', dartClosed: 0.3 },
   },
+  'gored-skirt': {
+    default: {},
+    trumpet: { gores: 8, flareFrom: 'above the hem', length: 900, hemFlare: 80 },
+    four: { gores: 5, hemFlare: 100, waistband: false, pockets: true },
+  },
   'gathered-skirt': {
     default: {},
     full: { fullness: 2.5, opening: 'side zip', length: 900 },

@@ -32,6 +32,7 @@ const promised: Readonly<Record<string, Readonly<Record<string, Fit['relation']>
   'circle-skirt': { waist: 'equal' },
   'straight-skirt': { waist: 'equal', hip: 'at-least' },
   'a-line-skirt': { waist: 'equal', hip: 'at-least' },
+  'gored-skirt': { waist: 'equal', hip: 'at-least' },
   'gathered-skirt': { waist: 'equal' },
   bodice: { bust: 'equal', waist: 'equal', biceps: 'at-least', armhole: 'at-least' },
 }
