@@ -1,5 +1,5 @@
-import AxeBuilder from '@axe-core/playwright'
 import { expect, test, type Page } from '@playwright/test'
+import { expectAccessible } from './support/axe'
 import { body, measureClient, signInToDemo, startDress } from './support/demo'
 
 const neckDepth = (page: Page) => page.getByRole('textbox', { name: 'Neck depth, in', exact: true })
@@ -18,14 +18,6 @@ async function savedVersion(page: Page) {
   const newest = await page.request.get(`/api/drafts/${id}/revisions/${list.value[0].id}`)
   const { order, typed } = (await newest.json()).value
   return { versions: list.value.length as number, order, typed }
-}
-
-async function expectNoBarriers(page: Page) {
-  for (const theme of ['light', 'dark'] as const) {
-    await page.emulateMedia({ colorScheme: theme, reducedMotion: 'reduce' })
-    const { violations } = await new AxeBuilder({ page }).analyze()
-    expect(violations.map(({ id, nodes }) => `${theme}: ${id}: ${nodes[0]?.html}`)).toEqual([])
-  }
 }
 
 test.beforeEach(async ({ page }) => {
@@ -53,7 +45,7 @@ test('a card says at the field what it cannot read and what is odd', async ({ pa
   await expect(page.getByText('cannot have 0 below the line')).toBeVisible()
   await page.getByLabel('Waist', { exact: true }).fill('60')
   await expect(page.getByText(/Waist 60.in is large/)).toBeVisible()
-  await expectNoBarriers(page)
+  await expectAccessible(page)
 })
 
 test('neck depth: typed, dragged, undone to the bytes, and kept', async ({ page }) => {
@@ -225,13 +217,13 @@ test('the studio has no barriers, in daylight or with the lamp on', async ({ pag
   await startDress(page, 'Axe dress')
   for (const leaf of ['Choices', 'Rules', 'Checks', 'Pieces']) {
     await page.getByRole('tab', { name: leaf }).click()
-    await expectNoBarriers(page)
+    await expectAccessible(page)
   }
 })
 
 test('lists have no barriers, sort and search in the address', async ({ page }) => {
   await page.goto('/clients')
-  await expectNoBarriers(page)
+  await expectAccessible(page)
   await page.getByRole('link', { name: 'Name' }).click()
   await expect(page.getByRole('columnheader', { name: 'Name' })).toHaveAttribute('aria-sort', 'descending')
   await expect(page).toHaveURL(/direction=desc/)
@@ -239,7 +231,7 @@ test('lists have no barriers, sort and search in the address', async ({ page }) 
   await page.getByRole('button', { name: 'Search' }).click()
   await expect(page.getByText('Nobody is found for')).toBeVisible()
   await page.goto('/drafts')
-  await expectNoBarriers(page)
+  await expectAccessible(page)
   await page.goto('/drafts/new')
-  await expectNoBarriers(page)
+  await expectAccessible(page)
 })
