@@ -5,28 +5,25 @@ import {
   useEffect,
   useImperativeHandle,
   useLayoutEffect,
-  useMemo,
   useRef,
   useState,
   type Ref,
 } from 'react'
-import type { Draft, Handle, Point } from '@/drafting/contract'
+import type { Draft } from '@/drafting/contract'
 import { boundsOf } from '@/drafting/drawing/bounds'
-import { arrange, drawing, placePath, placeTransform, type Layer, type Places } from '@/drafting/drawing'
-import { applyTo } from '@/drafting/geometry/transform'
+import { arrange, drawing, placePath, type Layer, type Places } from '@/drafting/drawing'
 import { classes } from '@/components/ui/classes'
-import type { FieldRef } from '@/components/studio/field-ref'
 import { isStale } from '@/components/studio/state'
-import { useStudio, useStudioList, useStudioState } from '@/components/studio/use-store'
+import { useStudio, useStudioState } from '@/components/studio/use-store'
 import { watchView } from './gestures'
 import { Points } from './points'
 import { ScaleBar } from './scale-bar'
 import { createStage, type Emphasis, type Stage } from './stage'
 import { Tags } from './tags'
+import { useHandles, useTagEntries } from './use-sheet-data'
 import { placeTagElements } from './tag-writing'
-import type { Box } from './tag-places'
-import { markAt } from './drag-point'
-import { fitView, toScreen, trueScale, zoomAt, type Size, type View } from './view'
+import { placePointElements } from './point-writing'
+import { fitView, trueScale, zoomAt, type Size, type View } from './view'
 
 /** What the bar and the keyboard may ask of the sheet. */
 export interface SheetControl {
@@ -49,9 +46,6 @@ export interface SheetProps {
   readonly onOpenTag?: (dimension: string) => void
 }
 
-/** px about a point that tags leave free: half of the least target. */
-const pointRoom = 12
-
 /** Size of a piece's name on paper, mm, and the least it is shown at, px. */
 const nameSize = 9
 const readable = 14
@@ -59,7 +53,7 @@ const readable = 14
 /** The table: the drawing, its tags and points, under a window that pans and zooms. */
 export function Sheet(props: SheetProps) {
   const { control, layers, hidden, emphasise, replaying, showTags, onOpenTag } = props
-  const { store, engine, writable } = useStudio()
+  const { store } = useStudio()
   const area = useRef<HTMLDivElement>(null)
   const svg = useRef<SVGSVGElement>(null)
   const stage = useRef<Stage>(undefined)
@@ -68,60 +62,17 @@ export function Sheet(props: SheetProps) {
   /** Asked of the page only when it changes: asking in every frame would lay the page out again. */
   const size = useRef<Size>({ width: 0, height: 0 })
   const [scale, setScale] = useState(0.5)
-  const settled = useStudioState((state) => (state.gesture ? undefined : state.order))
   const stale = useStudioState(isStale)
   const unit = useStudioState((state) => state.unit)
-  const dimensions = useStudioList((state) =>
-    (state.draft?.dimensions ?? []).map(
-      (each) => `${each.id}|${each.piece}|${each.shows}|${each.value ?? ''}|${each.label}`,
-    ),
-  )
-  const [handles, setHandles] = useState<readonly Handle[]>([])
-
-  useEffect(() => {
-    if (!settled || !writable) return
-    const later = setTimeout(() => {
-      try {
-        setHandles(engine.handles(settled))
-      } catch {
-        setHandles([])
-      }
-    }, 0)
-    return () => clearTimeout(later)
-  }, [engine, settled, writable])
-
-  const tags = useMemo(
-    () =>
-      dimensions.map((text) => {
-        const [id = '', piece = '', shows = '', value = '', label = ''] = text.split('|')
-        return {
-          id,
-          piece,
-          label,
-          field: shows === 'value' && value ? (`design.${value}` as FieldRef) : undefined,
-        }
-      }),
-    [dimensions],
-  )
+  const handles = useHandles()
+  const tags = useTagEntries()
 
   const position = useCallback(() => {
     const box = area.current
     const { draft } = store.get()
     if (!box || !draft) return
     stage.current?.look(view.current)
-    const points: Box[] = []
-    for (const element of box.querySelectorAll<HTMLElement>('[data-point]')) {
-      const own = handles.find((each) => each.id === element.dataset.point)
-      const mark = own && markAt(draft, own.piece, own.mark)
-      const at =
-        own && mark && toScreen(view.current, applyTo(placeTransform(places.current[own.piece]), mark))
-      // Where two would lie under one finger the later waits until the view is closer; its tag does the same.
-      const held = element.contains(document.activeElement)
-      element.hidden = !at || (!held && points.some((other) => crowds(other, at)))
-      if (!at || element.hidden) continue
-      element.style.transform = `translate(${at.x}px, ${at.y}px)`
-      points.push({ x: at.x - pointRoom, y: at.y - pointRoom, width: 2 * pointRoom, height: 2 * pointRoom })
-    }
+    const points = placePointElements(box, draft, handles, places.current, view.current)
     placeTagElements(box, size.current, draft, places.current, view.current, points)
   }, [handles, store])
 
@@ -188,7 +139,7 @@ export function Sheet(props: SheetProps) {
   useLayoutEffect(() => {
     draw()
     return store.subscribe(draw)
-  }, [draw, store, tags])
+  }, [draw, hidden, showTags, store, tags])
 
   const phone = onOpenTag !== undefined
   const firstPiece = useStudioState((state) => state.draft?.pieces[0]?.id)
@@ -245,14 +196,6 @@ export function Sheet(props: SheetProps) {
       )}
       <ScaleBar scale={scale} unit={unit} />
     </div>
-  )
-}
-
-/** Whether a point at `at` would lie in the room of another. */
-function crowds(other: Box, at: Point): boolean {
-  return (
-    Math.abs(other.x + pointRoom - at.x) < 2 * pointRoom &&
-    Math.abs(other.y + pointRoom - at.y) < 2 * pointRoom
   )
 }
 
