@@ -213,6 +213,7 @@ test('a version gets a name, and an old one comes back', async ({ page }) => {
 })
 
 test('the studio has no barriers, in daylight or with the lamp on', async ({ page }) => {
+  test.slow()
   await measureClient(page, 'Axe Test', body)
   await startDress(page, 'Axe dress')
   for (const leaf of ['Choices', 'Rules', 'Checks', 'Pieces']) {
