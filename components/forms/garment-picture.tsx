@@ -11,6 +11,17 @@ const pictures: Readonly<Record<string, readonly string[]>> = {
   ],
 }
 
+/** A plain skirt or bodice stands for garments that have no drawing of their own yet. */
+const plainSkirt = ['M40 30H80V40H40Z', 'M40 40C36 56 34 70 34 84V144H86V84C86 70 84 56 80 40']
+const plainBodice = [
+  'M44 20C50 30 70 30 76 20L92 28C86 44 88 56 94 66C92 88 88 106 84 122H36C32 106 28 88 26 66C32 56 34 44 28 28Z',
+  'M50 122L54 92M70 122L66 92',
+]
+
+function pictureOf(garment: string): readonly string[] {
+  return pictures[garment] ?? (garment.includes('skirt') ? plainSkirt : plainBodice)
+}
+
 /** A flat drawing of a garment, our own. Decoration: its name stands beside it. */
 export function GarmentPicture({
   garment,
@@ -30,7 +41,7 @@ export function GarmentPicture({
       strokeLinecap="round"
       aria-hidden
     >
-      {(pictures[garment] ?? []).map((path, index) => (
+      {pictureOf(garment).map((path, index) => (
         <path
           key={path}
           d={path}
