@@ -8,6 +8,7 @@ import { foldCorner } from './fold-corner'
 import { mitre, step } from './mitre'
 import type { OutlineDart, OutlineEdge, Side, Turn } from './outline-edge'
 import { square } from './square'
+import { withTrueEnds } from './true-ends'
 import { turned } from './turned'
 import { isSound, untangle } from './untangle'
 
@@ -69,16 +70,17 @@ const asStitched = (edges: readonly OutlineEdge[]): CutLine => {
 const sideOf = (edge: OutlineEdge, clipped: Set<string>): Side => {
   const wanted = edge.role === 'fold' || edge.role === 'dart' || !(edge.allowance > 0) ? 0 : edge.allowance
   const allowance = Number.isFinite(wanted) ? wanted : 0
-  const offset = offsetPath(edge.path, allowance)
-  if (offset.clipped) clipped.add(edge.id)
+  const parallel = offsetPath(edge.path, allowance)
+  if (parallel.clipped) clipped.add(edge.id)
+  const offset = parallel.clipped ? withTrueEnds(edge.path, parallel.path, allowance) : parallel.path
   return {
     edge,
     allowance,
-    offset: offset.path,
-    start: startOf(offset.path),
-    end: endOf(offset.path),
-    leaving: startTangent(offset.clipped ? offset.path : edge.path),
-    arriving: endTangent(offset.clipped ? offset.path : edge.path),
+    offset,
+    start: startOf(offset),
+    end: endOf(offset),
+    leaving: startTangent(edge.path),
+    arriving: endTangent(edge.path),
   }
 }
 
