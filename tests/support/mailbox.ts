@@ -25,7 +25,7 @@ export async function mailTo(address: string): Promise<readonly KeptMessage[]> {
  * @param patience in milliseconds
  * @throws {Error} when it has not come in time
  */
-export async function waitForMail(address: string, subject: RegExp, patience = 15_000): Promise<KeptMessage> {
+export async function waitForMail(address: string, subject: RegExp, patience = 45_000): Promise<KeptMessage> {
   for (let waited = 0; waited < patience; waited += 100) {
     const found = (await mailTo(address)).find((message) => subject.test(message.subject))
     if (found) return found
