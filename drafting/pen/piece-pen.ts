@@ -1,67 +1,21 @@
-import type { Corner, Cutting, Dart, Edge, EdgeRole, InnerLine, Mark, Path, Point, Step } from '../contract'
+import type { Cutting, Dart, Edge, EdgeRole, InnerLine, Mark, Path, Point, Step } from '../contract'
 import {
   add,
   distance,
   line,
   magnitude,
-  nearestOn,
   openPath,
   pathLength,
-  pointAt,
   scale,
   startOf,
   endOf,
   subtract,
 } from '../geometry'
+import { drillPoint, sagittaOf } from './curve-measures'
 import { letter } from './letters'
 import { nothing, type Mask } from './masks'
 import type { Pen } from './pen'
-
-/** A mark with what each of its coordinates depends on. */
-export interface PenMark {
-  readonly id: string
-  readonly at: Point
-  readonly x: Mask
-  readonly y: Mask
-}
-
-/** An edge as drawn, before its allowance is added. */
-export interface DrawnEdge {
-  readonly id: string
-  readonly role: EdgeRole
-  readonly finish: Edge['finish']
-  readonly path: Path
-  readonly allowance: number
-  readonly startCorner: Corner
-  readonly madeBy: string
-  readonly uses: Mask
-}
-
-export interface EdgeOptions {
-  readonly role: EdgeRole
-  /** Style value that gives the allowance; none on a fold. */
-  readonly allowance?: string
-  readonly corner?: Corner
-  readonly finish?: Edge['finish']
-  readonly say: string
-  /** Names and marks it follows from, beside its own ends. */
-  readonly uses?: readonly string[]
-  readonly through?: readonly string[]
-  readonly mask?: Mask
-  readonly kind?: Step['kind']
-}
-
-export interface MarkOptions {
-  /** Which way a tape rounds it, where the nearest would do harm: a girth must not come out too small. */
-  readonly round?: 'up' | 'down'
-  readonly stepKind?: Step['kind']
-  readonly say: string
-  readonly kind?: Mark['kind']
-  /** Style values that dragging this mark changes, one or two. */
-  readonly drag?: readonly string[]
-  /** Sewn neighbours hold the same mark in the same place, so a correction of one moves all of them. */
-  readonly shared?: boolean
-}
+import type { DrawnEdge, EdgeOptions, MarkOptions, PenMark } from './piece-options'
 
 const finishOf: Record<EdgeRole, Edge['finish']> = {
   seam: 'seam',
@@ -410,23 +364,6 @@ export class PiecePen {
       kind: this.kinds.get(mark.id) ?? 'construction',
     }))
   }
-}
-
-/** Inside a dart's point, so that the hole is hidden when it is sewn: 13 mm (seen: extension circulars). */
-function drillPoint(first: Path, second: Path, point: Point): Point {
-  const mouth = { x: (startOf(first).x + endOf(second).x) / 2, y: (startOf(first).y + endOf(second).y) / 2 }
-  const long = distance(mouth, point)
-  const share = long > 26 ? 13 / long : 0.25
-  return { x: point.x + (mouth.x - point.x) * share, y: point.y + (mouth.y - point.y) * share }
-}
-
-/** Depth of a curve at the middle of the straight line between its ends, mm. */
-function sagittaOf(path: Path): number {
-  const from = startOf(path)
-  const to = endOf(path)
-  if (distance(from, to) < 1e-9) return 0
-  const chord = openPath([line(from, to)])
-  return nearestOn(chord, pointAt(path, pathLength(path) / 2)).gap
 }
 
 /** The straight path between two points. */
