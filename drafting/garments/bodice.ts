@@ -7,6 +7,7 @@ import { bodiceBackMarks, drawBodiceBack } from '../parts/bodice-back'
 import { bodiceFrontMarks, drawBodiceFront, type BodiceFront } from '../parts/bodice-front'
 import { faceNeckAndArmholes } from '../parts/facings'
 import type { FittedWaist } from '../parts/fitted-waist'
+import { neckRules } from '../parts/neck-rules'
 import { neckLeans } from '../parts/neck-lean'
 import { setInSleeve, sleeveDesign, sleeveRules, wholeArmhole } from '../parts/set-in-sleeve'
 
@@ -40,7 +41,7 @@ export const bodice = garment({
     ),
     length('dartShort', 'Dart short of the bust point', 'darts', { default: 25, min: 15, max: 40 }),
     length('waistTip', 'Waist dart below the bust point', 'darts', { default: 22, min: 15, max: 50 }),
-    choice('neckShape', 'Neck shape', 'neckline', ['round', 'V', 'square']),
+    choice('neckShape', 'Neck shape', 'neckline', ['round', 'V', 'square', 'scoop', 'sweetheart']),
     length('neckWidening', 'Neck wider by', 'neckline', { default: 0, min: 0, max: 60 }),
     length('frontNeckDrop', 'Front neck lower by', 'neckline', { default: 0, min: 0, max: 100 }),
     length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 100 }),
@@ -66,6 +67,7 @@ export const bodice = garment({
     lengthRule('backNeckDepth', 'Back neck depth', 'napeDepth + neckFall + backNeckDrop'),
     lengthRule('frontNeckDepth', 'Front neck depth', 'neckBase / 5 + 0.2cm + frontNeckDrop'),
     lengthRule('vNeckDepth', 'V neck: front depth', 'frontNeckDepth + 5.8cm'),
+    ...neckRules,
     lengthRule('frontShoulder', 'Front shoulder', 'shoulderLength'),
     lengthRule('shoulderEase', 'Ease of the back shoulder', '0.8cm'),
     lengthRule('backShoulder', 'Back shoulder', 'shoulderLength + shoulderEase'),

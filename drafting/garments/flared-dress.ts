@@ -7,6 +7,7 @@ import { faceNeckAndArmholes } from '../parts/facings'
 import { facedBody } from '../parts/facing'
 import { deepenArmhole } from '../parts/armhole-room'
 import { drawHalf, flareDirection, hemOf, lowerMarks, upperMarks } from '../parts/flared-half'
+import { neckRules } from '../parts/neck-rules'
 import { neckLeans } from '../parts/neck-lean'
 import { fitLevels } from '../parts/levels'
 import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/in-seam-pocket'
@@ -36,7 +37,7 @@ export const flaredDress = garment({
     'head',
   ],
   design: [
-    choice('neckShape', 'Neck shape', 'neckline', ['round', 'V', 'square', 'boat']),
+    choice('neckShape', 'Neck shape', 'neckline', ['round', 'V', 'square', 'boat', 'scoop', 'sweetheart']),
     length('neckWidening', 'Neck wider by', 'neckline', { default: 0, min: 0, max: 70 }),
     length('frontNeckDrop', 'Front neck lower by', 'neckline', { default: 0, min: 0, max: 130 }),
     length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 120 }),
@@ -81,6 +82,7 @@ export const flaredDress = garment({
     ),
     lengthRule('boatNeckDepth', 'Boat neck: front depth', '4cm + neckFall + frontNeckDrop'),
     lengthRule('vNeckDepth', 'V neck: front depth', 'neckBase / 5 + 6cm + frontNeckDrop'),
+    ...neckRules,
     lengthRule('halfShoulder', 'Half the shoulders', 'acrossShoulders / 2'),
     lengthRule('armholeDepth', 'Armhole depth', 'bust / 6 + 1.5in'),
     lengthRule('sleevedLowering', 'Lower for a sleeve', '0.5in + armholeDrop'),

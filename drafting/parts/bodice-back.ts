@@ -5,10 +5,11 @@ import { between, straight, type PiecePen } from '../pen/piece-pen'
 import { armholeCurve } from './armhole'
 import { drawWaist, fitWaist, pinned, waistDarts, type FittedWaist } from './fitted-waist'
 import { facedBody, type Faced } from './facing'
-import { backNeckline, leaning } from './necklines'
+import { backNeckline, chosenNeckline, leaning } from './necklines'
 
 /** Marks of neck, shoulder and levels of a fitted back, in drafting order. */
 export function bodiceBackMarks(pen: Pen, back: PiecePen): void {
+  const { widening } = chosenNeckline(pen)
   back.start('neckLevel', { x: 0, y: 0 }, 'Mark the level of the side neck on the centre')
   back.go('neckPoint', 'neckLevel', 'right', 'backNeckWidth', {
     say: 'Go across the width of the back neck',
@@ -26,16 +27,16 @@ export function bodiceBackMarks(pen: Pen, back: PiecePen): void {
     uses: ['backSlope'],
     drag: ['backSlope'],
   })
-  back.aim('sideNeck', 'neckPoint', shoulder, pen.length('neckWidening'), {
+  back.aim('sideNeck', 'neckPoint', shoulder, pen.length(widening), {
     say: 'Open the neck along the shoulder',
-    by: 'neckWidening',
+    by: widening,
     uses: ['backSlope'],
     drag: ['neckWidening'],
   })
   pen.find(
     'neckFall',
-    pen.value('neckWidening') * Math.sin((pen.value('backSlope') * Math.PI) / 180),
-    pen.usesOf(['neckWidening', 'backSlope']),
+    pen.value(widening) * Math.sin((pen.value('backSlope') * Math.PI) / 180),
+    pen.usesOf([widening, 'backSlope']),
   )
   back.go('nape', 'neckLevel', 'down', 'napeDepth', { say: 'Come down to the nape' })
   back.go('centreNeck', 'neckLevel', 'down', 'backNeckDepth', {

@@ -6,7 +6,7 @@ import { armholeCurve } from './armhole'
 import { openDart, type PlacedEdge, type UpperEdge } from './bust-dart'
 import { drawWaist, fitWaist, pinned, waistDarts, type FittedWaist } from './fitted-waist'
 import type { Faced } from './facing'
-import { leaning, necklines } from './necklines'
+import { chosenNeckline, leaning } from './necklines'
 
 /** Where the bust dart may open: the edge, and how far along: a share of it, or a named length. */
 const places: Readonly<
@@ -28,12 +28,13 @@ export interface BodiceFront {
 
 /** Marks of neck, shoulder, bust and levels, in drafting order. */
 export function bodiceFrontMarks(pen: Pen, front: PiecePen): void {
+  const { depth, widening } = chosenNeckline(pen)
   front.start('neckLevel', { x: 0, y: 0 }, 'Fold the cloth; mark the level of the side neck on the centre')
   front.go('neckPoint', 'neckLevel', 'right', 'frontNeckWidth', {
     say: 'Go across the width of the front neck',
     round: 'up',
   })
-  front.go('centreNeck', 'neckLevel', 'down', 'frontNeckDepth', {
+  front.go('centreNeck', 'neckLevel', 'down', depth, {
     say: 'Come down the depth of the front neck',
     drag: ['frontNeckDrop'],
   })
@@ -43,7 +44,7 @@ export function bodiceFrontMarks(pen: Pen, front: PiecePen): void {
     to: 'centreNeck',
     label: 'Neck depth',
     value: 'frontNeckDrop',
-    over: pen.length('frontNeckDepth') - pen.value('frontNeckDrop'),
+    over: pen.length(depth) - pen.value('frontNeckDrop'),
   })
   const shoulder = towards(pen.value('frontSlope'))
   front.aim('shoulderTip', 'neckPoint', shoulder, pen.length('frontShoulder'), {
@@ -52,9 +53,9 @@ export function bodiceFrontMarks(pen: Pen, front: PiecePen): void {
     uses: ['frontSlope'],
     drag: ['frontSlope'],
   })
-  front.aim('sideNeck', 'neckPoint', shoulder, pen.length('neckWidening'), {
+  front.aim('sideNeck', 'neckPoint', shoulder, pen.length(widening), {
     say: 'Open the neck along the shoulder',
-    by: 'neckWidening',
+    by: widening,
     uses: ['frontSlope'],
     drag: ['neckWidening'],
   })
@@ -64,6 +65,7 @@ export function bodiceFrontMarks(pen: Pen, front: PiecePen): void {
     to: 'sideNeck',
     label: 'Neck wider by',
     value: 'neckWidening',
+    over: pen.length(widening) - pen.value('neckWidening'),
   })
   front.go('bustLevel', 'neckLevel', 'down', 'bustHeight', { say: 'Come down the bust height' })
   front.go('bustPoint', 'bustLevel', 'right', 'bustPointOut', {
@@ -179,8 +181,7 @@ function swungOutline(
   front.go('hollow', 'halfDepth', 'right', 'frontHalf', {
     say: 'Go across half the front: the hollow of the armhole',
   })
-  const shape = necklines[String(pen.chosen('neckShape'))]
-  if (!shape) throw new Error('Every neck shape offered has a neckline.')
+  const shape = chosenNeckline(pen)
   if (at('hollow').x > underarm.x - 15 || bust.x > underarm.x - 20) {
     pen.refuse({
       field: 'acrossFront',

@@ -42,8 +42,12 @@ function evenBand(neckline: Path, depth: number, body: PiecePen, shoulder: Point
     return { closed: false, segments: [...even.segments.slice(0, -1), { ...last, to: end }] }
   }
   const low = { x: centre.x, y: Math.max(centre.y, end.y) + depth }
-  const square = (Math.atan2(shoulder.y, shoulder.x) * 180) / Math.PI
-  const lean = Math.min(square, mostCurvedLean(end.x - low.x, low.y - end.y))
+  // It leaves the shoulder as the neckline does, so that front and back still run on into each other.
+  const arrives = endTangent(neckline)
+  const lean = Math.min(
+    (Math.atan2(arrives.x, -arrives.y) * 180) / Math.PI,
+    mostCurvedLean(end.x - low.x, low.y - end.y),
+  )
   return neckCurve(low, end, leaning(lean), 0.52, 0.5)
 }
 

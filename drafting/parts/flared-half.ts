@@ -5,8 +5,7 @@ import type { Pen } from '../pen/pen'
 import { between, type PiecePen } from '../pen/piece-pen'
 import { armholeCurve } from './armhole'
 import { fairCurve } from './hem'
-import { backNeckline, leaning, necklines } from './necklines'
-import type { Neckline } from './necklines/neckline'
+import { backNeckline, chosenNeckline, leaning } from './necklines'
 
 /** Directions that the whole of one half is drawn by. */
 export interface HalfShape {
@@ -21,18 +20,12 @@ export function flareDirection(degrees: number): Point {
   return { x: Math.sin(turn), y: Math.cos(turn) }
 }
 
-function neckShape(pen: Pen): Neckline {
-  const shape = necklines[String(pen.chosen('neckShape'))]
-  if (!shape) throw new Error('Every neck shape offered has a neckline.')
-  return shape
-}
-
 /**
  * The upper part of one half of a freehand dress: neck, shoulder, armhole level, hollow and underarm, in the order in which
  * they are chalked.
  */
 export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): void {
-  const shape = neckShape(pen)
+  const shape = chosenNeckline(pen)
   const sleeved = pen.chosen('sleeve') !== 'none'
   const { widening } = shape
   piece.start('neckLevel', { x: 0, y: 0 }, 'Fold the cloth; mark the level of the side neck on the centre')
@@ -199,7 +192,7 @@ export function drawHalf(
   const at = (id: string): Point => piece.at(id)
   const shoulder = unit(between(at('sideNeck'), at('shoulderTip')))
   const ends = [at('centreNeck'), at('sideNeck'), leaning(lean)] as const
-  const neckline = side === 'front' ? neckShape(pen).draw(...ends) : backNeckline(...ends)
+  const neckline = side === 'front' ? chosenNeckline(pen).draw(...ends) : backNeckline(...ends)
   const sidePath = takenIn(pen, piece, at('underarm'), at('sideHem'))
   const first = sidePath.segments[0]
   const down =

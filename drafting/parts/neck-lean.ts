@@ -2,7 +2,7 @@ import type { Point } from '../contract'
 import type { Pen } from '../pen/pen'
 import { solveBetween } from '../pen/solve'
 import { between, type PiecePen } from '../pen/piece-pen'
-import { necklines } from './necklines'
+import { chosenNeckline } from './necklines'
 import { mostCurvedLean } from './necklines/neckline'
 
 /**
@@ -11,8 +11,7 @@ import { mostCurvedLean } from './necklines/neckline'
  * the shoulder; a deep neck can lean less than that without bending both ways, and then the other leans more.
  */
 export function neckLeans(pen: Pen, front: PiecePen, back: PiecePen): { front: number; back: number } {
-  const shape = necklines[String(pen.chosen('neckShape'))]
-  if (!shape) throw new Error('Every neck shape offered has a neckline.')
+  const shape = chosenNeckline(pen)
   const slopeOf = (piece: PiecePen): number => {
     const shoulder = between(piece.at('sideNeck'), piece.at('shoulderTip'))
     return (Math.atan2(shoulder.y, shoulder.x) * 180) / Math.PI

@@ -21,6 +21,10 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     flaredSleeve: { sleeve: 'flared', neckShape: 'V', neckWidening: 20 },
     bare: { sleeve: 'none', neckShape: 'boat', hemWay: 'swung' },
     square: { neckShape: 'square', frontNeckDrop: 40, neckWidening: 30, sleeveLength: 560, flare: 0.125 },
+    scoop: { neckShape: 'scoop' },
+    sweetheart: { neckShape: 'sweetheart', sleeve: 'none' },
+    puff: { sleeve: 'puff' },
+    bell: { sleeve: 'bell' },
     narrowShoulder: { sleeve: 'none', neckWidening: 70, frontNeckDrop: 80, backOpening: 'none', flare: 0.5 },
   },
   bodice: {
@@ -28,6 +32,8 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     shoulder: { dartTo: 'shoulder', sleeve: 'plain' },
     armhole: { dartTo: 'armhole', neckShape: 'V' },
     neck: { dartTo: 'neck', sleeve: 'flared' },
+    sweetheart: { neckShape: 'sweetheart' },
+    scoop: { neckShape: 'scoop', dartTo: 'shoulder', sleeve: 'puff' },
     waist: { dartTo: 'waist', sleeve: 'plain' },
   },
   'straight-skirt': {

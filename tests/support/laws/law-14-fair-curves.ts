@@ -21,11 +21,13 @@ const sewable = 5
 /** Curves bend as their kind may: necks and hems one way, an armhole at most twice, half a sleeve head exactly twice. */
 export const fairCurves: DraftLaw = (draft, order, engine) => {
   const found = new Findings(14)
-  const square = neckShape(order, garmentOf(order, engine.garments)) === 'square'
+  const square = ['square', 'sweetheart'].includes(
+    String(neckShape(order, garmentOf(order, engine.garments))),
+  )
   for (const piece of draft.pieces) {
     for (const edge of piece.edges) {
       const where = `${piece.id}.${edge.id}`
-      // A square neck has its corner, and the facing that runs round it too.
+      // A square or a sweetheart neck has its corner, and the facing that runs round it too.
       const cornered =
         square && piece.id.startsWith('front') && (edge.role === 'neckline' || edge.role === 'free')
       handles(found, where, edge.path)

@@ -7,7 +7,7 @@ const sewnAt = new Set(['waist', 'hem', 'armhole', 'neckline'])
 /** A fold is met square; where sewn neighbours meet at waist, hem, armhole or shoulder they make one line. */
 export const squareCorners: DraftLaw = (draft, order, engine) => {
   const found = new Findings(4)
-  const pointed = neckShape(order, garmentOf(order, engine.garments)) === 'V'
+  const pointed = ['V', 'sweetheart'].includes(String(neckShape(order, garmentOf(order, engine.garments))))
   for (const piece of draft.pieces) {
     piece.edges.forEach((edge, index) => {
       const next = (index + 1) % piece.edges.length
@@ -16,7 +16,7 @@ export const squareCorners: DraftLaw = (draft, order, engine) => {
         [index, piece.edges[(index + piece.edges.length - 1) % piece.edges.length]],
         [next, piece.edges[next]],
       ] as const) {
-        // The front of a V is meant to be pointed, and its facing with it.
+        // The front of a V or a sweetheart is meant to be pointed, and its facing with it.
         const atPoint = pointed && piece.id.startsWith('front') && beyond?.role !== 'hem'
         if (!atPoint) {
           found.atMost(

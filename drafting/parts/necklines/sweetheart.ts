@@ -1,0 +1,35 @@
+import type { Point } from '../../contract'
+import { cubic, distance, line, openPath } from '../../geometry'
+import type { Neckline } from './neckline'
+
+/** How far down the strap comes, share of the depth of the neck. */
+const strap = 0.58
+
+/** How much each end of the curve over the bust turns from its chord, degrees: a shallow arc. */
+const bulge = 26
+
+const from = (start: Point, degrees: number, reach: number): Point => ({
+  x: start.x + Math.cos((degrees * Math.PI) / 180) * reach,
+  y: start.y + Math.sin((degrees * Math.PI) / 180) * reach,
+})
+
+/** Sweetheart: rises from a point at the centre in a curve over each bust to a corner, then straight up to the shoulder. */
+export const sweetheart: Neckline = {
+  depth: 'sweetheartNeckDepth',
+  widening: 'sweetheartWidening',
+  lean: () => 0,
+  mostLean: (width, depth) => (Math.atan2(0.6 * width, depth) * 180) / Math.PI,
+  draw: (centre, side, leaves) => {
+    const depth = centre.y - side.y
+    const corner = {
+      x: side.x + (leaves.x / leaves.y) * depth * strap,
+      y: side.y + depth * strap,
+    }
+    const chord = (Math.atan2(corner.y - centre.y, corner.x - centre.x) * 180) / Math.PI
+    const reach = distance(centre, corner) * 0.36
+    return openPath([
+      cubic(centre, from(centre, chord - bulge, reach), from(corner, chord + bulge, -reach), corner),
+      line(corner, side),
+    ])
+  },
+}
