@@ -9,7 +9,8 @@ import { faceNeckAndArmholes } from '../parts/facings'
 import type { FittedWaist } from '../parts/fitted-waist'
 import { neckRules } from '../parts/neck-rules'
 import { neckLeans } from '../parts/neck-lean'
-import { setInSleeve, sleeveDesign, sleeveRules, wholeArmhole } from '../parts/set-in-sleeve'
+import { setInSleeve, wholeArmhole } from '../parts/set-in-sleeve'
+import { sleeveDesign, sleeveRules } from '../parts/sleeves'
 
 /** The fitted bodice with bust and waist darts; the bust dart opens where the style puts it. Rules: common practice. */
 export const bodice = garment({
@@ -50,7 +51,7 @@ export const bodice = garment({
     angle('frontSlope', 'Front shoulder slope', 'shoulder', { default: 22, min: 12, max: 30 }),
     length('bustEase', 'Bust ease', 'body', { default: 80, min: 40, max: 160 }),
     length('waistEase', 'Waist ease', 'body', { default: 40, min: 10, max: 120 }),
-    choice('sleeve', 'Sleeve', 'sleeve', ['none', 'plain', 'flared']),
+    choice('sleeve', 'Sleeve', 'sleeve', ['none', 'plain', 'flared', 'bell', 'puff']),
     ...sleeveDesign,
     length('zipLength', 'Zip length', 'opening', { default: 350, min: 150, max: 500 }),
     length('neckAllowance', 'Neck allowance', 'allowances', { default: 6.35, min: 0, max: 15 }),

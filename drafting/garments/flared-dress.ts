@@ -11,7 +11,8 @@ import { neckRules } from '../parts/neck-rules'
 import { neckLeans } from '../parts/neck-lean'
 import { fitLevels } from '../parts/levels'
 import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/in-seam-pocket'
-import { setInSleeve, sleeveDesign, sleeveRules, wholeArmhole } from '../parts/set-in-sleeve'
+import { setInSleeve, wholeArmhole } from '../parts/set-in-sleeve'
+import { sleeveDesign, sleeveRules } from '../parts/sleeves'
 import { backOpening, openingDesign, openingRules } from '../parts/back-opening'
 
 /**
@@ -60,7 +61,7 @@ export const flaredDress = garment({
         is: ['equal drop'],
       },
     ),
-    choice('sleeve', 'Sleeve', 'sleeve', ['plain', 'flared', 'none']),
+    choice('sleeve', 'Sleeve', 'sleeve', ['plain', 'flared', 'none', 'bell', 'puff']),
     ...sleeveDesign,
     ...openingDesign,
     ...pocketDesign,

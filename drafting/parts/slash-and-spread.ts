@@ -12,7 +12,7 @@ import type { Pen } from '../pen/pen'
 import { straight, type PiecePen } from '../pen/piece-pen'
 import { backFullness, frontFullness } from './sleeve-head'
 import { fitHead } from './solve-head'
-import type { SleeveCorners } from './set-in-sleeve'
+import type { Halves, SleeveCorners } from './sleeves/sleeve-kind'
 
 /** How near to the underarm a cut may come: nearer, the flare would hang under the arm. Common practice. */
 const clearOfUnderarm = 35
@@ -21,15 +21,17 @@ const clearOfUnderarm = 35
  * Cuts a sleeve from the hem up to the stitch line of its head, with the grain, and spreads each cut at the hem: the strips
  * turn about the ends of the cuts, the middle one stays on the grain.
  *
+ * @param by names of the number of cuts, the spread of each and the length of the sleeve.
  * @returns the ids of the corners after spreading.
  */
 export function fanOut(
   pen: Pen,
   sleeve: PiecePen,
-  head: { readonly front: number; readonly back: number },
+  head: Halves,
+  by: { readonly cuts: string; readonly spread: string; readonly length: string },
 ): SleeveCorners {
-  const cuts = Math.round(pen.value('sleeveCuts'))
-  const spread = pen.length('sleeveSpread')
+  const cuts = Math.round(pen.value(by.cuts))
+  const spread = pen.length(by.spread)
   const hem = sleeve.at('hemLevel').y
   const front = sleeve.at('frontUnderarm')
   const back = sleeve.at('backUnderarm')
@@ -38,7 +40,7 @@ export function fanOut(
   const shortest = Math.min(...hinges.map((hinge) => hem - hinge.y))
   if (spread > shortest) {
     pen.refuse({
-      field: 'sleeveSpread',
+      field: by.spread,
       code: 'impossible-shape',
       message: `Each cut is only ${pen.say(shortest)} long: spread it less than that, or lengthen the sleeve.`,
       max: shortest,
@@ -47,7 +49,7 @@ export function fanOut(
   const angles = hinges.map((hinge) => (2 * Math.asin(spread / 2 / (hem - hinge.y)) * 180) / Math.PI)
   const turns = stripTurns(hinges, angles)
 
-  const names = ['sleeveSpread', 'sleeveCuts', 'sleeveLength', 'biceps', 'frontHeadEase', 'backHeadEase']
+  const names = [by.spread, by.cuts, by.length, 'biceps', 'frontHeadEase', 'backHeadEase']
   const through = ['frontUnderarm', 'backUnderarm', 'hemLevel']
   places.forEach((x, index) => {
     const foot = { x, y: hem }
@@ -61,12 +63,12 @@ export function fanOut(
     })
     sleeve.turnOpen(`cut${index + 1}Right`, `cut${index + 1}Left`, right, {
       say: 'Spread the cut at the hem',
-      by: 'sleeveSpread',
+      by: by.spread,
       length: spread,
       uses: names,
       through,
       draws: transformPath(turns[index] as Transform, straight(hinges[index] as Point, foot)),
-      ...(index === cuts - 1 ? { drag: ['sleeveSpread'] } : {}),
+      ...(index === cuts - 1 ? { drag: [by.spread] } : {}),
     })
   })
   pen.tag({
@@ -74,7 +76,7 @@ export function fanOut(
     from: `cut${cuts}Left`,
     to: `cut${cuts}Right`,
     label: 'Spread',
-    value: 'sleeveSpread',
+    value: by.spread,
   })
   const corner = (id: string, at: Point, turn: Transform, say: string): string => {
     sleeve.place(id, applyTo(turn, at), { say, uses: names, through, stepKind: 'turn' })
@@ -83,6 +85,7 @@ export function fanOut(
   const first = turns[0] as Transform
   const last = turns[cuts] as Transform
   return {
+    crown: 'crown',
     front: corner('frontUnderarmSpread', front, last, 'Mark the front underarm where it has turned to'),
     back: corner('backUnderarmSpread', back, first, 'Mark the back underarm where it has turned to'),
     frontHem: corner(
@@ -106,11 +109,7 @@ function cutPlaces(cuts: number, from: number, to: number): number[] {
 }
 
 /** The point of the unspread head straight above a cut. */
-function hingeAt(
-  x: number,
-  sleeve: PiecePen,
-  head: { readonly front: number; readonly back: number },
-): Point {
+function hingeAt(x: number, sleeve: PiecePen, head: Halves): Point {
   const onFront = x >= 0
   const half = onFront
     ? fitHead({ x: 0, y: 0 }, sleeve.at('frontUnderarm'), { x: 1, y: 0 }, head.front, frontFullness)

@@ -26,7 +26,7 @@ export const sleeves: DraftLaw = (draft, order, engine) => {
     const head = edge('sleeve', `head-${side}`)
     // A dart may cut the armhole in two: what is sewn to the head is what counts.
     const armhole = draft.seams.find((seam) => seam.a.some((run) => run.edge === `head-${side}`))?.b
-    const ease = numberOf(`${side}HeadEase`, order, garment, draft.used)
+    const ease = numberOf(`${side}${kind === 'puff' ? 'Puff' : 'Head'}Ease`, order, garment, draft.used)
     if (!head || !armhole || ease === undefined) {
       found.add(`${side} of the head`, 'cannot be measured')
       continue
@@ -41,7 +41,7 @@ export const sleeves: DraftLaw = (draft, order, engine) => {
     found.atMost(`${side} of the head`, 'off its armhole and ease', Math.abs(drawn - hole - ease), tolerance)
   }
   const total = numberOf('sleeveHeadEase', order, garment, draft.used) ?? NaN
-  if (!order.rules) {
+  if (!order.rules && kind !== 'puff') {
     const off = Math.abs(lengths.head - lengths.armhole - total)
     found.atMost('head', 'off both armholes and the whole ease', off, tolerance)
   }
@@ -53,14 +53,11 @@ export const sleeves: DraftLaw = (draft, order, engine) => {
     const girth = far(endOfPath(front.path), endOfPath(back.path))
     found.atMost('biceps', 'tighter than the arm and its ease', arm - girth, 0.01)
   }
-  if (kind === 'flared')
-    mouths(
-      found,
-      draft,
-      order,
-      Number(styleOf(order, garment, 'sleeveCuts')),
-      Number(styleOf(order, garment, 'sleeveSpread')),
-    )
+  const cut = { flared: 'sleeve', bell: 'bell' }[String(kind)]
+  if (cut) {
+    const value = (id: string): number => Number(styleOf(order, garment, id))
+    mouths(found, draft, order, value(`${cut}Cuts`), value(`${cut}Spread`))
+  }
   return found.all
 }
 
