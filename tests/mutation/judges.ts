@@ -36,6 +36,7 @@ const orders: readonly DraftOrder[] = [
   skirt({}),
   { ...skirt({ share: '1', pockets: true, waistEasedIn: 5 }, two), unit: 'in' },
   skirt({ share: '1 1/2', panels: 5 }),
+  dress(one, { sleeve: 'puff', neckShape: 'sweetheart' }),
 ]
 
 const taped = orders.slice(0, 9).map((order): DraftOrder => ({ ...order, tape: 3.175, unit: 'in' }))

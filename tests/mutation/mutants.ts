@@ -36,6 +36,12 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
   ],
   2: [
     [
+      'the hem of a puff is 2 mm longer than its band gathers',
+      'parts/sleeves/puff.ts',
+      "+ pen.value('puffGather')",
+      "+ pen.value('puffGather') + 2",
+    ],
+    [
       'the back’s side seam is 1 mm longer',
       'parts/flared-half.ts',
       'direction, pen.length(by), {',
@@ -139,8 +145,8 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
     [
       'the front of the head is 1 mm short',
       'parts/set-in-sleeve.ts',
-      "armhole.front + pen.value('frontHeadEase'),",
-      "armhole.front + pen.value('frontHeadEase') - 1,",
+      'armhole.front + pen.value(kind.ease.front),',
+      'armhole.front + pen.value(kind.ease.front) - 1,',
     ],
     [
       'cuts are spread 2 mm less',
