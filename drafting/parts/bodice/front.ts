@@ -1,12 +1,13 @@
-import type { Point, Run } from '../contract'
-import { applyTo, distance, pathLength, rotation, startTangent, towards, unit } from '../geometry'
-import type { Pen } from '../pen/pen'
-import { between, straight, type PiecePen } from '../pen/piece-pen'
-import { armholeCurve } from './armhole'
+import type { Point, Run } from '../../contract'
+import { applyTo, distance, pathLength, rotation, startTangent, towards, unit } from '../../geometry'
+import type { Pen } from '../../pen/pen'
+import { between, straight, type PiecePen } from '../../pen/piece-pen'
+import { armholeCurve } from '../armhole'
+import type { BodiceWay } from '.'
 import { openDart, type PlacedEdge, type UpperEdge } from './bust-dart'
-import { drawWaist, fitWaist, pinned, waistDarts, type FittedWaist } from './fitted-waist'
-import type { Faced } from './facing'
-import { chosenNeckline, leaning } from './necklines'
+import { drawWaist, fitWaist, pinned, waistDarts, type FittedWaist } from '../fitted-waist'
+import type { Faced } from '../facing'
+import { chosenNeckline, leaning } from '../necklines'
 
 /** Where the bust dart may open: the edge, and how far along: a share of it, or a named length. */
 const places: Readonly<
@@ -23,7 +24,8 @@ export interface BodiceFront {
   readonly faced: Faced
   /** The edges that each edge of the outline consists of, in order: a dart divides the one that it opens on. */
   readonly runs: (edge: string) => Run[]
-  readonly waist: FittedWaist
+  /** Its waist edges from the side to the centre, as they are drawn. */
+  readonly waist: readonly string[]
 }
 
 /** Marks of neck, shoulder, bust and levels, in drafting order. */
@@ -89,7 +91,13 @@ export function bodiceFrontMarks(pen: Pen, front: PiecePen): void {
  * @param seam length of the back's side seam, mm, which the front's must have.
  * @param lean how the neckline leaves the side neck.
  */
-export function drawBodiceFront(pen: Pen, front: PiecePen, seam: number, lean: number): BodiceFront {
+export function drawBodiceFront(
+  pen: Pen,
+  front: PiecePen,
+  seam: number,
+  lean: number,
+  way: BodiceWay,
+): BodiceFront {
   const at = (id: string): Point => front.at(id)
   const bust = at('bustPoint')
   const names = [
@@ -128,7 +136,8 @@ export function drawBodiceFront(pen: Pen, front: PiecePen, seam: number, lean: n
   front.place('sideWaistEnd', sideWaist, { say: 'Mark the waist on the side', uses: names })
   drawOutline(front, opened.edges, upper.point, names)
   const turned = opened.beyond ? waist : swingWaist(waist, upper.point, -angle)
-  drawWaist(front, turned, { centre: 'centreWaist', side: 'sideWaistEnd' }, false, names, 'bound')
+  const ends = { centre: 'centreWaist', side: 'sideWaistEnd' }
+  const waistEdges = drawWaist(front, turned, ends, false, names, way.waist)
   front.line('centre', 'centreWaist', 'centreNeck', {
     role: 'fold',
     say: 'The centre front lies on the fold',
@@ -145,7 +154,7 @@ export function drawBodiceFront(pen: Pen, front: PiecePen, seam: number, lean: n
     },
     runs: (edge) =>
       opened.edges.filter((one) => one.of === edge).map((one) => ({ piece: 'front', edge: one.id })),
-    waist,
+    waist: waistEdges,
   }
 }
 

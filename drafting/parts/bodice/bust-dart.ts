@@ -1,5 +1,5 @@
-import type { Path, Point } from '../contract'
-import { pathLength, pointAt, rotation, slicePath, transformPath, type Transform } from '../geometry'
+import type { Path, Point } from '../../contract'
+import { pathLength, pointAt, rotation, slicePath, transformPath, type Transform } from '../../geometry'
 
 /** One edge of the upper outline of a front, drawn with the bust dart open at its place or not yet. */
 export interface UpperEdge {

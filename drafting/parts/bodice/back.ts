@@ -1,11 +1,12 @@
-import type { Point } from '../contract'
-import { cubic, openPath, pathLength, pointAt, slicePath, startTangent, towards, unit } from '../geometry'
-import type { Pen } from '../pen/pen'
-import { between, straight, type PiecePen } from '../pen/piece-pen'
-import { armholeCurve } from './armhole'
-import { drawWaist, fitWaist, pinned, waistDarts, type FittedWaist } from './fitted-waist'
-import { facedBody, type Faced } from './facing'
-import { backNeckline, chosenNeckline, leaning } from './necklines'
+import type { Point } from '../../contract'
+import { cubic, openPath, pathLength, pointAt, slicePath, startTangent, towards, unit } from '../../geometry'
+import type { Pen } from '../../pen/pen'
+import { between, straight, type PiecePen } from '../../pen/piece-pen'
+import { armholeCurve } from '../armhole'
+import { drawWaist, fitWaist, pinned, waistDarts } from '../fitted-waist'
+import type { BodiceWay } from '.'
+import { facedBody, type Faced } from '../facing'
+import { backNeckline, chosenNeckline, leaning } from '../necklines'
 
 /** Marks of neck, shoulder and levels of a fitted back, in drafting order. */
 export function bodiceBackMarks(pen: Pen, back: PiecePen): void {
@@ -55,7 +56,12 @@ export function bodiceBackMarks(pen: Pen, back: PiecePen): void {
 }
 
 /** Draws the back from its marks: the waist fitted first, then neck, shoulder, armhole, side, waist and centre. */
-export function drawBodiceBack(pen: Pen, back: PiecePen, lean: number): { faced: Faced; waist: FittedWaist } {
+export function drawBodiceBack(
+  pen: Pen,
+  back: PiecePen,
+  lean: number,
+  way: BodiceWay,
+): { readonly faced: Faced; readonly waist: readonly string[] } {
   const at = (id: string): Point => back.at(id)
   const centreDown = unit(
     between({ x: 0, y: (at('scyeLevel').y + at('waistLevel').y) / 2 }, at('centreWaist')),
@@ -129,13 +135,20 @@ export function drawBodiceBack(pen: Pen, back: PiecePen, lean: number): { faced:
     allowance: 'sideAllowance',
     say: 'Draw the side seam',
   })
-  drawWaist(back, waist, { centre: 'centreWaist', side: 'sideWaist' }, false, names, 'bound')
-  centreBack(pen, back, centreDown, names)
-  return { faced: facedBody(back), waist }
+  const ends = { centre: 'centreWaist', side: 'sideWaist' }
+  const edges = drawWaist(back, waist, ends, false, names, way.waist)
+  centreBack(pen, back, centreDown, names, way.zip)
+  return { faced: facedBody(back), waist: edges }
 }
 
 /** The centre back: straight to the level of the underarm, then in to the waist, where it meets it square. */
-function centreBack(pen: Pen, back: PiecePen, down: Point, uses: readonly string[]): void {
+function centreBack(
+  pen: Pen,
+  back: PiecePen,
+  down: Point,
+  uses: readonly string[],
+  opening: BodiceWay['zip'],
+): void {
   const waist = back.at('centreWaist')
   const neck = back.at('centreNeck')
   const bend = { x: 0, y: Math.max(neck.y + 20, back.at('scyeLevel').y) }
@@ -149,9 +162,10 @@ function centreBack(pen: Pen, back: PiecePen, down: Point, uses: readonly string
     ),
     { kind: 'line', from: bend, to: neck },
   ])
-  const zip = Math.min(pen.length('zipLength'), pathLength(whole))
+  const runsOn = opening === 'runs on'
+  const zip = runsOn ? pathLength(whole) : Math.min(pen.length('zipLength'), pathLength(whole))
   const options = { allowance: 'centreBackAllowance', uses }
-  pen.notion({ kind: 'zip', length: zip, count: 1 })
+  if (!runsOn) pen.notion({ kind: 'zip', length: zip, count: 1 })
   const below = pathLength(whole) - zip
   if (below < 25) {
     back.curve('opening', whole, 'centreWaist', 'centreNeck', {
