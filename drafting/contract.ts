@@ -270,8 +270,12 @@ export interface DraftOrder {
   readonly measurements: Readonly<Record<string, number>>
   /** Lengths in mm, angles in degrees; defaults fill in. */
   readonly design?: Readonly<Record<string, DesignChoice>>
-  /** Formulas that replace the garment's own. */
+  /** The drafting method that the draft follows; without one the garment's own rules. */
+  readonly method?: MethodUse
+  /** Formulas that replace the method's and the garment's own. */
   readonly rules?: Readonly<Record<string, string>>
+  /** The workroom's own measurements; their values stand among `measurements`, and formulas may name them. */
+  readonly ownMeasurements?: readonly OwnMeasurement[]
   readonly corrections?: readonly Correction[]
   /** Wording of steps only; default 'cm'. */
   readonly unit?: Unit
@@ -321,6 +325,51 @@ export interface RuleDefinition {
   readonly kind: 'length' | 'angle' | 'number'
   readonly formula: string
   readonly source: string
+}
+
+/** One rule of a garment as a drafting method has it. */
+export interface MethodRule {
+  /** Of the garment's rule that it replaces. */
+  readonly id: string
+  readonly formula: string
+  readonly source: string
+}
+
+/** A named set of formulas that a drafter works by: for each garment the rules that differ from the garment's own. */
+export interface DraftingMethod {
+  readonly id: string
+  readonly name: string
+  readonly description: string
+  /** By garment. A garment that is not here is drafted by its own rules. */
+  readonly garments: Readonly<Record<string, readonly MethodRule[]>>
+}
+
+/**
+ * The method that a draft follows. Its rules for the garment stand in the order itself, so that a method changed later leaves
+ * old drafts as they are; without `rules` it is a built-in one.
+ */
+export interface MethodUse {
+  readonly id: string
+  readonly name?: string
+  readonly version?: number
+  readonly rules?: readonly MethodRule[]
+}
+
+/** A rule as a draft works by it, and who says so: the garment, the method, or the drafter for this draft alone. */
+export interface RuleInForce extends RuleDefinition {
+  readonly from: 'garment' | 'method' | 'order'
+}
+
+/** A measurement that a workroom takes and the engine does not know. */
+export interface OwnMeasurement {
+  /** Words joined by underscores, such as across_shoulder_blades: no name of the engine's has one, now or later. */
+  readonly id: string
+  readonly name: string
+  /** How it is taken, in one sentence. */
+  readonly how: string
+  /** mm, outside which it is refused. */
+  readonly min: number
+  readonly max: number
 }
 
 export interface GarmentDefinition {

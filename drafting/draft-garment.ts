@@ -71,7 +71,8 @@ function estimateSources(ready: ReadyOrder): Record<string, readonly string[]> {
 
 function usedMeasurements(garment: Garment, ready: ReadyOrder): Draft['used'] {
   const used: Record<string, { mm: number; estimatedBy?: string }> = {}
-  for (const id of [...garment.definition.needs, ...garment.definition.estimates]) {
+  const own = ready.rules.own.map(({ id }) => id)
+  for (const id of [...garment.definition.needs, ...garment.definition.estimates, ...own]) {
     const estimatedBy = ready.estimatedBy[id]
     if (ready.measurements[id] === undefined) continue
     used[id] = { mm: ready.measurements[id] as number, ...(estimatedBy ? { estimatedBy } : {}) }

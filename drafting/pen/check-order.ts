@@ -1,9 +1,12 @@
 import type { Correction, DesignChoice, DesignValue, DraftOrder, Problem } from '../contract'
 import { completeCard, measurementById } from '../body'
 import { formatLength } from '../lengths'
+import { checkMethod, formulasInForce } from './check-method'
 import { compileRules, type CompiledRules } from './compile'
 import type { Garment } from './garment'
 import { isOffered } from './design'
+import { checkOwnMeasurements, ownValues } from './own-measurements'
+import { isNumber, isRecord } from './plain-data'
 
 /** An order that can be drafted, as far as can be told before drawing. */
 export interface ReadyOrder {
@@ -13,10 +16,6 @@ export interface ReadyOrder {
   readonly rules: CompiledRules
   readonly corrections: readonly Correction[]
 }
-
-const isNumber = (value: unknown): value is number => typeof value === 'number' && Number.isFinite(value)
-const isRecord = (value: unknown): value is Record<string, unknown> =>
-  typeof value === 'object' && value !== null && !Array.isArray(value)
 
 /**
  * Checks an order against its garment: every measurement, style value, formula and correction. Puts all that is wrong into
@@ -28,16 +27,20 @@ export function checkOrder(garment: Garment, order: DraftOrder, problems: Proble
   const unit = order.unit === 'in' ? 'in' : 'cm'
   const card = checkCard(garment, order.measurements, problems, unit)
   const design = checkDesign(garment, order.design, problems, unit)
+  const named = problems.length
+  const method = checkMethod(garment, order.method, problems)
+  const own = checkOwnMeasurements(order.ownMeasurements, problems)
   checkRuleNames(garment, order.rules, problems)
-  const rules = problems.some(
-    (problem) => problem.code === 'unknown-field' && problem.field.startsWith('rules.'),
-  )
-    ? undefined
-    : compileRules(garment, order.rules, problems)
+  const rules =
+    problems.length > named
+      ? undefined
+      : compileRules(garment, formulasInForce(method, order.rules), own, problems)
+  const taken = ownValues(rules?.own ?? [], order.measurements, unit, problems)
   const corrections = checkCorrections(order.corrections, problems)
   checkManner(order, problems)
   if (problems.length > before || !card || !rules) return undefined
-  return { ...card, design, rules, corrections }
+  const measurements = rules.own.length > 0 ? { ...card.measurements, ...taken } : card.measurements
+  return { ...card, measurements, design, rules, corrections }
 }
 
 function checkCard(

@@ -1,4 +1,4 @@
-import type { DraftOrder, Problem } from '../contract'
+import type { DraftOrder, OwnMeasurement, Problem } from '../contract'
 import { measurements } from '../body'
 import { checkFormulaKinds, orderRules, parseFormula, type Formula } from '../rules'
 import { DraftingError } from '../drafting-error'
@@ -14,14 +14,27 @@ export interface CompiledRules {
   readonly names: NameTable
   /** Name → its own bit and the bits of all that it follows from, estimates excepted. */
   readonly masks: ReadonlyMap<string, Mask>
+  /** The workroom's own measurements that a formula names. */
+  readonly own: readonly OwnMeasurement[]
 }
 
 const compiled = new WeakMap<Garment, Map<string, CompiledRules>>()
 const nameTables = new WeakMap<Garment, NameTable>()
 
-/** The kinds of all names that a formula of this garment may use. */
-export function kindsOf(garment: Garment): Readonly<Record<string, Kind>> {
+/** A garment's own table of names. Names that workrooms made up never enter it: it lives as long as the process. */
+function namesOf(garment: Garment): NameTable {
+  let names = nameTables.get(garment)
+  if (!names) nameTables.set(garment, (names = new NameTable()))
+  return names
+}
+
+/** The kinds of all names that a formula of this garment may use, a workroom's own measurements among them. */
+export function kindsOf(
+  garment: Garment,
+  own: readonly OwnMeasurement[] = [],
+): Readonly<Record<string, Kind>> {
   const kinds: Record<string, Kind> = Object.create(null) as Record<string, Kind>
+  for (const { id } of own) kinds[id] = 'length'
   for (const measurement of measurements) kinds[measurement.id] = 'length'
   for (const value of garment.definition.design) {
     if (value.kind === 'length' || value.kind === 'angle') kinds[value.id] = value.kind
@@ -41,16 +54,18 @@ function problemsOf(error: unknown, field: string): readonly Problem[] {
 export function compileRules(
   garment: Garment,
   replacements: DraftOrder['rules'],
+  own: readonly OwnMeasurement[],
   problems: Problem[],
 ): CompiledRules | undefined {
-  const key = replacements ? JSON.stringify(replacements) : ''
+  const changed = replacements ? JSON.stringify(replacements) : ''
+  const key = own.length > 0 ? `${changed} ${JSON.stringify(own)}` : changed
   let byKey = compiled.get(garment)
   if (!byKey) compiled.set(garment, (byKey = new Map()))
   const known = byKey.get(key)
   if (known) return known
 
   const before = problems.length
-  const kinds = kindsOf(garment)
+  const kinds = kindsOf(garment, own)
   const formulas = new Map<string, Formula>()
   const allowed = new Set([
     ...garment.definition.needs,
@@ -58,6 +73,7 @@ export function compileRules(
     ...garment.definition.design.map((value) => value.id),
     ...garment.definition.rules.map((rule) => rule.id),
     ...Object.keys(garment.found),
+    ...own.map(({ id }) => id),
   ])
   for (const rule of garment.definition.rules) {
     const text =
@@ -92,15 +108,16 @@ export function compileRules(
     return undefined
   }
 
-  let names = nameTables.get(garment)
-  if (!names) nameTables.set(garment, (names = new NameTable()))
+  const named = new Set([...formulas.values()].flatMap((formula) => formula.names))
+  const used = own.filter(({ id }) => named.has(id))
+  const names = used.length > 0 ? new NameTable() : namesOf(garment)
   const masks = new Map<string, Mask>()
   for (const id of order) {
     let mask = names.bit(id)
     for (const name of formulas.get(id)?.names ?? []) mask |= masks.get(name) ?? names.bit(name)
     masks.set(id, mask)
   }
-  const result: CompiledRules = { formulas, kinds, names, masks }
+  const result: CompiledRules = { formulas, kinds, names, masks, own: used }
   // A drafter who edits a formula makes many short-lived sets; keep the memory bounded.
   if (byKey.size > 50) byKey.clear()
   byKey.set(key, result)

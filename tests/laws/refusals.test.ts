@@ -101,7 +101,10 @@ function spoils(garment: GarmentDefinition): fc.Arbitrary<Spoil> {
     )
   const whole = fc
     .tuple(
-      fc.constantFrom('garment', 'measurements', 'design', 'rules', 'corrections', 'unit', 'tape'),
+      fc.constantFrom(
+        ...['garment', 'measurements', 'design', 'rules', 'corrections', 'unit', 'tape'],
+        ...['method', 'ownMeasurements'],
+      ),
       nonsense,
     )
     .map(([where, what]): Spoil => (order) => {
@@ -133,7 +136,23 @@ function spoils(garment: GarmentDefinition): fc.Arbitrary<Spoil> {
     .map((one): Spoil => (order) => {
       order.corrections = [one]
     })
+  const methodRule = fc.record(
+    { id: fc.oneof(rule, nonsense), formula: fc.oneof(formulas, nonsense) },
+    { requiredKeys: [] },
+  )
+  const method = fc
+    .record(
+      {
+        id: fc.oneof(fc.constantFrom('handbook', 'nobody'), nonsense),
+        rules: fc.oneof(fc.array(methodRule), nonsense),
+      },
+      { requiredKeys: [] },
+    )
+    .map((one): Spoil => (order) => {
+      order.method = one
+    })
   return fc.oneof(
+    method,
     into('measurements', measurement, nonsense),
     into('design', style, nonsense),
     into('rules', rule, fc.oneof(formulas, nonsense)),

@@ -5,7 +5,7 @@ import type { DraftOrder, GarmentDefinition } from '@/drafting/contract'
  */
 
 const unitSizes: Readonly<Record<string, number>> = { in: 25.4, cm: 10, mm: 1, '°': 1 }
-const token = /\s*(\d+(?:\.\d+)?(?: \d+\/\d+)?|[A-Za-z_]\w*|°|[-−+*×/÷(),])/y
+const token = /\s*(\d+\/\d+(?= ?(?:in|cm|mm)\b)|\d+(?:\.\d+)?(?: \d+\/\d+)?|[A-Za-z_]\w*|°|[-−+*×/÷(),])/y
 
 function tokens(text: string): string[] {
   const found: string[] = []
@@ -73,10 +73,14 @@ export function namesIn(text: string): string[] {
   )
 }
 
+/** The garment of an order, its rules as the order's drafting method has them. */
 export function garmentOf(order: DraftOrder, garments: readonly GarmentDefinition[]): GarmentDefinition {
   const found = garments.find((one) => one.id === order.garment)
   if (!found) throw new Error(`No garment “${order.garment}”.`)
-  return found
+  const changed = order.method?.rules
+  if (!changed) return found
+  const rules = found.rules.map((rule) => ({ ...rule, ...changed.find(({ id }) => id === rule.id) }))
+  return { ...found, rules }
 }
 
 /** A style value as ordered, or its default. */

@@ -32,7 +32,7 @@ function knownField(field: string, order: DraftOrder, garment: GarmentDefinition
     ].includes(field)
   )
     return true
-  if (field.startsWith('rules.') || field.startsWith('corrections.')) return true
+  if (/^(?:rules|corrections|method|ownMeasurements|remedies)(?:\.|$)/.test(field)) return true
   if (!garment) return false
   return (
     garment.needs.includes(field) ||
