@@ -18,6 +18,7 @@ import { fairCurve } from './hem'
 import { armholeCurve } from './armhole'
 import { leaning, neckCurve } from './necklines'
 import { mostCurvedLean } from './necklines/neckline'
+import { v } from './necklines/v'
 import { trimBetween } from './trim'
 
 const down = { x: 0, y: 1 }
@@ -25,7 +26,7 @@ const down = { x: 0, y: 1 }
 /**
  * The outer edge of a band of even depth beside a neckline, from the centre to the shoulder. It meets the shoulder at
  * exactly the same distance in front and back. Where the neckline bends too sharply for an even band, the outer
- * edge is a plain neck curve of its own.
+ * edge is a plain neck curve of its own, pointed where the neckline is.
  */
 function evenBand(neckline: Path, depth: number, body: PiecePen, shoulder: Point): Path {
   const centre = body.at('centreNeck')
@@ -44,6 +45,8 @@ function evenBand(neckline: Path, depth: number, body: PiecePen, shoulder: Point
   const low = { x: centre.x, y: Math.max(centre.y, end.y) + depth }
   // It leaves the shoulder as the neckline does, so that front and back still run on into each other.
   const arrives = endTangent(neckline)
+  const pointed = Math.abs(startTangent(neckline).y) > 0.2
+  if (pointed) return v.draw(low, end, { x: -arrives.x, y: -arrives.y })
   const lean = Math.min(
     (Math.atan2(arrives.x, -arrives.y) * 180) / Math.PI,
     mostCurvedLean(end.x - low.x, low.y - end.y),

@@ -33,6 +33,10 @@ export function solveHead(
   }
 }
 
+/** A head lower than this share of its width, or that leans less, has ripples instead of a bell; found by searching. */
+const flattest = 0.16
+const least = 0.22
+
 /**
  * Draws one half of a head to an exact length between two given points by changing how full it is.
  *
@@ -45,7 +49,7 @@ export function fitHead(
   length: number,
   shape: Fullness,
 ): Path | undefined {
-  if (underarm.y - crown.y < 0.04 * (underarm.x - crown.x)) return undefined
+  if (underarm.y - crown.y < flattest * (underarm.x - crown.x)) return undefined
   const drawn = (lean: number): Path => headHalf(crown, underarm, arrives, { ...shape, lean })
   const over = (lean: number): number => {
     const half = drawn(lean)
@@ -55,7 +59,6 @@ export function fitHead(
   }
   const chord = Math.atan2(underarm.y - crown.y, underarm.x - crown.x)
   // Past a right angle the head would lean over itself.
-  const least = 0.02
   const most = (Math.PI * 0.47 - chord) / leanUnit(chord)
   let before = shape.lean
   let now = before * 1.02

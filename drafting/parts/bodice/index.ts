@@ -45,8 +45,11 @@ export function drawBodice(pen: Pen, way: BodiceWay): Bodice {
   const leans = neckLeans(pen, front, back)
   const ofBack = drawBodiceBack(pen, back, leans.back, way)
   const ofFront = drawBodiceFront(pen, front, back.lengthOf('side'), leans.front, way)
-  for (const piece of [front, back])
-    piece.grain({ x: 35, y: piece.at('scyeLevel').y }, { x: 35, y: piece.at('centreWaist').y - 25 })
+  for (const piece of [front, back]) {
+    // Below the neckline too, where that is deep.
+    const top = Math.max(piece.at('scyeLevel').y, piece.at('centreNeck').y + 15)
+    piece.grain({ x: 35, y: top }, { x: 35, y: piece.at('centreWaist').y - 25 })
+  }
   front.cut({ cloth: 'main', count: 1, onFold: true, handed: false })
   back.cut({ cloth: 'main', count: 2, onFold: false, handed: true })
   const runs: Bodice['runs'] = (half, edge) =>

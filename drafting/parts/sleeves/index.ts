@@ -24,7 +24,7 @@ export const sleeveDesign: readonly DesignValue[] = [
   ),
   length('sleeveEase', 'Ease round the arm', 'sleeve', { default: 50, min: 40, max: 120 }, worn),
   length('sleeveHeadEase', 'Ease of the sleeve head', 'sleeve', { default: 10, min: 0, max: 40 }, worn),
-  length('sleeveTaper', 'Taper of each side', 'sleeve', { default: 15, min: 0, max: 60 }, is('plain')),
+  length('sleeveTaper', 'Taper of each side', 'sleeve', { default: 15, min: 0, max: 40 }, is('plain')),
   count('sleeveCuts', 'Number of cuts', 'sleeve', { default: 4, min: 2, max: 8 }, is('flared')),
   length('sleeveSpread', 'Spread at each cut', 'sleeve', { default: 40, min: 5, max: 80 }, is('flared')),
   ...bellDesign,
