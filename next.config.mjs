@@ -4,6 +4,9 @@ const config = {
   distDir: process.env.NEXT_DIST_DIR || '.next',
   poweredByHeader: false,
   reactStrictMode: true,
+  // A page comes with its title, whoever asks: a screen reader reads it out the moment the page changes, and a title that
+  // follows later is never heard.
+  htmlLimitedBots: /.*/,
   serverExternalPackages: ['sequelize', 'mariadb', 'umzug', '@node-rs/argon2', 'pino', 'nodemailer'],
   typescript: {
     // `npm run check` checks every type, tests and scripts included; a build does not do it a second time.

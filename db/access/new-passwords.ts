@@ -9,7 +9,7 @@ import { changePasswordShape, forgottenShape, resetShape } from '../shapes/accou
 import { inTransaction } from '../transactions'
 import { giveBack, takeTry } from './limits'
 import { enqueue } from './outbox'
-import { type SignedIn, endAllSessions } from './sessions'
+import { type SignedIn, endAllSessions, replaceSessions } from './sessions'
 import { issueToken, liveToken, spendToken } from './tokens'
 
 /**
@@ -57,14 +57,15 @@ export async function resetPassword(input: z.input<typeof resetShape>): Promise<
 }
 
 /**
- * Changes the password of whoever is signed in and ends every session, this one included: the page signs in again with
- * the new one, so that a copied cookie is worth nothing.
+ * Changes the password of whoever is signed in and ends every session. A new one for this device comes into being with
+ * the change, so that there is no moment at which the password is changed and the person shut out.
+ * @returns id of the new session
  * @throws AccessError invalid, limited
  */
 export async function changePassword(
   signedIn: SignedIn,
   input: z.input<typeof changePasswordShape>,
-): Promise<{ email: string }> {
+): Promise<{ sessionId: string }> {
   const { current, next } = checkInput(changePasswordShape, input)
   const { email, userId, userName } = signedIn
   await takeTry('sign-in account', email)
@@ -73,10 +74,10 @@ export async function changePassword(
     throw invalid('current', 'This is not your present password.')
   await giveBack('sign-in account', email, true)
   const passwordHash = await hashPassword(next)
-  await inTransaction(async (transaction) => {
+  return inTransaction(async (transaction) => {
     await User.update({ passwordHash }, { where: { id: userId }, transaction })
-    await endAllSessions(userId, transaction)
+    const sessionId = await replaceSessions(signedIn, transaction)
     await enqueue('mail-password-changed', { email, name: userName }, { transaction })
+    return { sessionId }
   })
-  return { email }
 }

@@ -51,16 +51,13 @@ export async function startSession(userId: string, transaction?: Transaction): P
     transaction,
   })
   const usual = memberships.find((each) => each.workroomId === latest?.workroomId) ?? memberships[0]
+  return openSession(userId, usual?.workroomId ?? null, transaction)
+}
+
+async function openSession(userId: string, workroomId: string | null, transaction?: Transaction) {
   const now = new Date()
   const session = await Session.create(
-    {
-      id: newId(),
-      userId,
-      workroomId: usual?.workroomId ?? null,
-      startedAt: now,
-      lastSeenAt: now,
-      endedAt: null,
-    },
+    { id: newId(), userId, workroomId, startedAt: now, lastSeenAt: now, endedAt: null },
     { transaction },
   )
   return session.id
@@ -121,6 +118,18 @@ export async function endSession(sessionId: string): Promise<void> {
 /** Ends every session of a person, on every device. */
 export async function endAllSessions(userId: string, transaction?: Transaction): Promise<void> {
   await Session.update({ endedAt: new Date() }, { where: { userId, endedAt: null }, transaction })
+}
+
+/**
+ * Ends every session of a person and starts a new one in the workroom of this one: what was copied from any device is
+ * worth nothing, and this device goes on. @returns its id
+ */
+export async function replaceSessions(
+  { userId, workroom }: Pick<SignedIn, 'userId' | 'workroom'>,
+  transaction: Transaction,
+): Promise<string> {
+  await endAllSessions(userId, transaction)
+  return openSession(userId, workroom?.id ?? null, transaction)
 }
 
 /** Moves a session to another workroom of the same person. @throws AccessError not-found */

@@ -47,6 +47,7 @@ test('join, invite, accept elsewhere, change roles, shut out', async ({ page, br
   await page.goto('/members')
   await expect(page.getByRole('row', { name: /Ben Reed/ })).toContainText('Maker, Student')
   await page.getByRole('button', { name: 'Change Ben Reed' }).click()
+  await expect(page.getByRole('dialog')).toBeVisible()
   await expectAccessible(page)
   await page.getByRole('checkbox', { name: 'Owner' }).check()
   await page.getByRole('button', { name: 'Save the roles' }).click()
@@ -87,6 +88,9 @@ test('a second workroom: accept when signed in, switch, and be somebody else the
   await expect(other.getByRole('link', { name: 'Clients' })).toBeHidden()
 
   await other.getByRole('link', { name: /switch workroom/ }).click()
+  await expect(other.getByRole('heading', { name: 'Choose a workroom' })).toBeVisible()
+  // At once, not after a while: this is when a screen reader reads it out.
+  expect(await other.title()).toBe('Workrooms · Chalkfold')
   await expectAccessible(other)
   await other.getByRole('button', { name: 'Vale school of sewing' }).click()
   await other.waitForURL(/\/clients$/)
@@ -155,7 +159,7 @@ test('settings keep what was typed, and say what is wrong where it is', async ({
   await page.getByLabel('Present password').fill(password)
   await page.getByLabel('New password').fill('eight silver pins')
   await page.getByRole('button', { name: 'Change the password' }).click()
-  await expect(page.getByText('every other device is signed out').first()).toBeVisible()
+  await expect(page.getByText('The password is changed, and every other').first()).toBeVisible()
   await page.reload()
   await signOut(page, 'Eva Lark')
   await signInAs(page, email, 'eight silver pins')

@@ -1,6 +1,6 @@
 import { expect, test, type Page } from '@playwright/test'
 import { expectAccessible } from './support/axe'
-import { body, measureClient, signInToDemo, startDress } from './support/demo'
+import { body, changeAndSave, measureClient, signInToDemo, startDress } from './support/demo'
 
 const neckDepth = (page: Page) => page.getByRole('textbox', { name: 'Neck depth, in', exact: true })
 const saved = (page: Page) => page.getByRole('banner').getByRole('status')
@@ -158,9 +158,10 @@ test('two tabs on one draft: both versions are kept, and the person chooses', as
   await other.goto(address)
   await expect(neckDepth(other)).toBeVisible()
 
-  await neckDepth(page).fill('4')
-  await page.keyboard.press('Enter')
-  await expect(saved(page)).toHaveText('Saved')
+  await changeAndSave(page, async () => {
+    await neckDepth(page).fill('4')
+    await page.keyboard.press('Enter')
+  })
   await neckDepth(other).fill('5')
   await other.keyboard.press('Enter')
   await expect(saved(other)).toHaveText(/Two versions/)
@@ -200,9 +201,10 @@ test('a version gets a name, and an old one comes back', async ({ page }) => {
   await page.getByRole('button', { name: 'Save it' }).click()
   await expect(page.getByRole('listitem').filter({ hasText: 'As measured' })).toContainText('On the table')
   await page.getByRole('button', { name: 'Close', exact: true }).click()
-  await neckDepth(page).fill('5')
-  await page.keyboard.press('Enter')
-  await expect(saved(page)).toHaveText('Saved')
+  await changeAndSave(page, async () => {
+    await neckDepth(page).fill('5')
+    await page.keyboard.press('Enter')
+  })
   await page.getByRole('button', { name: 'Versions' }).click()
   await page
     .getByRole('listitem')
@@ -218,6 +220,7 @@ test('the studio has no barriers, in daylight or with the lamp on', async ({ pag
   await startDress(page, 'Axe dress')
   for (const leaf of ['Choices', 'Rules', 'Checks', 'Pieces']) {
     await page.getByRole('tab', { name: leaf }).click()
+    await expect(page.getByRole('tab', { name: leaf })).toHaveAttribute('aria-selected', 'true')
     await expectAccessible(page)
   }
 })

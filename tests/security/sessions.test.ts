@@ -51,6 +51,16 @@ describe('a copied cookie', () => {
     expect([await opens(first), await opens(second)]).toEqual([false, false])
   })
 
+  it('is replaced, in the same answer, on the device where the password was changed', async () => {
+    const { first } = await onTwoDevices()
+    const change = { current: testPassword, next: 'seven green buttons' }
+    const { headers } = await first.action('app/(workroom)/account/actions.ts#setPassword', change)
+    const [cookie = ''] = headers.getSetCookie().filter((each) => each.includes('session-token=ey'))
+    expect(cookie).toMatch(/; HttpOnly/i)
+    expect(cookie).toMatch(/; SameSite=lax/i)
+    expect(await opens(new Visitor(cookie.split(';')[0]))).toBe(true)
+  })
+
   it('is worth nothing once the person is disabled', async () => {
     const { first, person } = await onTwoDevices()
     await User.update({ disabledAt: new Date() }, { where: { id: person.actor.userId } })

@@ -8,8 +8,7 @@ import { appOrigin } from '../config'
 import { log } from '../log'
 import { refusalOf } from '../problems'
 import { safePath } from './safe-path'
-
-const sixtyDays = 60 * 24 * 3600
+import { cookieAge } from './session-cookie'
 
 /** Next-auth reports only an error's message: the status is what the sign-in page turns into words. */
 function refusedSignIn(error: unknown): Error {
@@ -27,7 +26,7 @@ export function authOptions(): NextAuthOptions {
   process.env.NEXTAUTH_URL = appOrigin()
   return {
     secret: process.env.NEXTAUTH_SECRET,
-    session: { strategy: 'jwt', maxAge: sixtyDays },
+    session: { strategy: 'jwt', maxAge: cookieAge },
     pages: { signIn: '/sign-in', error: '/sign-in' },
     providers: [
       CredentialsProvider({

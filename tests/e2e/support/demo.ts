@@ -41,3 +41,16 @@ export async function startDress(page: Page, name: string): Promise<string> {
 
 /** A body in inches, invented. */
 export const body = { Bust: '36 1/2', Waist: '29', Hip: '39 1/4' } as const
+
+/**
+ * Changes the draft that is open and waits until the server has it. The words alone would not do: the bar says "Saved"
+ * before a change as well as after it.
+ */
+export async function changeAndSave(page: Page, change: () => Promise<void>): Promise<void> {
+  const answered = page.waitForResponse(
+    (response) => response.request().method() === 'POST' && response.url().endsWith('/revisions'),
+  )
+  await change()
+  await answered
+  await expect(page.getByRole('banner').getByRole('status')).toHaveText('Saved')
+}

@@ -1,7 +1,5 @@
 'use client'
 
-import { useRouter } from 'next/navigation'
-import { signInWith } from '@/app/(auth)/_parts/sign-in-with'
 import { PasswordField } from '@/components/forms/password-field'
 import { useActionForm } from '@/components/forms/use-action-form'
 import { Button } from '@/components/ui/button'
@@ -10,18 +8,13 @@ import { useToast } from '@/components/ui/toast'
 import { setPassword } from '../actions'
 
 export function PasswordForm({ email }: { readonly email: string }) {
-  const router = useRouter()
   const say = useToast()
   const form = useActionForm(
     (fields) => {
       fields.delete('email')
       return setPassword(fields)
     },
-    async (_changed, fields) => {
-      await signInWith(email, String(fields.get('next')))
-      say('The password is changed, and every other device is signed out.')
-      router.refresh()
-    },
+    () => say('The password is changed, and every other device is signed out.'),
   )
   return (
     <form method="post" onSubmit={form.onSubmit} className="grid max-w-105 gap-5" noValidate>
