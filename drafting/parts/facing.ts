@@ -1,10 +1,14 @@
 import type { Path, Point } from '../contract'
 import {
+  add,
   distance,
   endOf,
   intersections,
+  line,
   offsetPath,
+  openPath,
   reversePath,
+  scale,
   startOf,
   startTangent,
   unit,
@@ -46,6 +50,11 @@ function evenBand(neckline: Path, depth: number, body: PiecePen, shoulder: Point
   // It leaves the shoulder as the neckline does, so that front and back still run on into each other.
   const arrives = endTangent(neckline)
   const pointed = Math.abs(startTangent(neckline).y) > 0.2
+  const corner = neckline.segments.length > 1 ? neckline.segments.at(-1)?.from : undefined
+  if (pointed && corner) {
+    const knee = add(end, scale(arrives, -Math.max(10, corner.y + depth * 0.4 - end.y)))
+    return openPath([line(low, knee), line(knee, end)])
+  }
   if (pointed) return v.draw(low, end, { x: -arrives.x, y: -arrives.y })
   const lean = Math.min(
     (Math.atan2(arrives.x, -arrives.y) * 180) / Math.PI,
