@@ -10,7 +10,11 @@ export interface PackOptions {
   readonly allowances: boolean
   /** How far down the sheet pieces may reach, mm. */
   readonly height: number
+  /** Lay pieces on their side, along a roll. Default false: as drawn or on their head. */
+  readonly sideways?: boolean
 }
+
+type Turn = 0 | 90 | 180 | -90
 
 /** The stretch that something covers in one row, mm. */
 interface Span {
@@ -20,7 +24,7 @@ interface Span {
 
 /** A piece in one direction as the rows it covers, from its own top row. */
 interface Shape {
-  readonly turn: 0 | 180
+  readonly turn: Turn
   /** Of its first row, mm in the piece's turned frame. */
   readonly top: number
   readonly rows: readonly Span[]
@@ -40,8 +44,8 @@ const rowHeight = 20
 const touching = 1e-6
 
 /**
- * Lays the pieces on a sheet of paper as close as they go, each as drawn or on its head, so that a flare lies against a flare:
- * the largest first, each as far left as it can. On paper the grain does not matter, as pieces are cut out before they are laid
+ * Lays the pieces on a sheet of paper as close as they go, each as drawn or on its head (or on either side), so that a flare lies
+ * against a flare: the largest first, each as far left as it can. On paper the grain does not matter, as pieces are cut out before they are laid
  * on cloth.
  */
 export function pack(draft: Draft, options: PackOptions): Places {
@@ -68,13 +72,16 @@ function placeOf({ shape, x, row }: Spot): Place {
 const area = (shapes: readonly Shape[]) =>
   (shapes[0]?.rows ?? []).reduce((sum, row) => sum + row.to - row.from, 0)
 
-function shapesOf(piece: Piece, { allowances, gap }: PackOptions): readonly Shape[] {
+function shapesOf(piece: Piece, { allowances, gap, sideways = false }: PackOptions): readonly Shape[] {
   const path = outline(piece, allowances)
-  return [shapeOf(path, 0, gap), shapeOf(transformPath(rotation(180, { x: 0, y: 0 }), path), 180, gap)]
+  const turns: readonly Turn[] = sideways ? [-90, 90] : [0, 180]
+  return turns.map((turn) =>
+    shapeOf(turn === 0 ? path : transformPath(rotation(turn, { x: 0, y: 0 }), path), turn, gap),
+  )
 }
 
 /** Each row takes whatever lies in it or within the gap above and below it. */
-function shapeOf(path: Path, turn: 0 | 180, gap: number): Shape {
+function shapeOf(path: Path, turn: Turn, gap: number): Shape {
   const points = flatten(path, 1)
   const ys = points.map((point) => point.y)
   const top = Math.min(...ys)

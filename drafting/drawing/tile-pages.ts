@@ -64,6 +64,7 @@ function tile(
     height,
     margin,
     overlap,
+    join: options.join ?? 'trim',
   }
 }
 

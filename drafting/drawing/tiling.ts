@@ -10,6 +10,12 @@ export interface MatchMark {
   readonly side: 'left' | 'right' | 'top' | 'bottom'
 }
 
+/**
+ * How neighbours meet: 'trim' cuts one of two along its solid line and lays it over the other; 'butt' cuts both along the same
+ * line and tapes them edge to edge, so that no join is thicker than one sheet.
+ */
+export type Join = 'trim' | 'butt'
+
 export type Orientation = 'portrait' | 'landscape' | 'fewest'
 
 export interface TileOptions {
@@ -18,8 +24,10 @@ export interface TileOptions {
   readonly orientation?: Orientation
   /** Safe edge: nothing is drawn nearer to the edge of the paper, mm. Default 10. */
   readonly margin?: number
-  /** How far neighbours lie over each other, mm. Default 12. */
+  /** How far neighbours show the same, mm. Default 12. */
   readonly overlap?: number
+  /** See Join. Default 'trim'. */
+  readonly join?: Join
   /** Outlines of pieces: a page that lies wholly inside one is needed to hold the others together, though nothing is drawn on it. */
   readonly regions?: readonly (readonly Point[])[]
 }
@@ -46,4 +54,5 @@ export interface Tiling {
   readonly height: number
   readonly margin: number
   readonly overlap: number
+  readonly join: Join
 }

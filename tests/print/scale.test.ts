@@ -9,6 +9,7 @@ import { pathLength, pointAt, tangentOn } from '@/drafting/geometry/path'
 import { sanityBodies } from '../support/bodies'
 import { sampleDraft } from '../support/sample-draft'
 import { findSquares } from './support/find-squares'
+import { inkedNearEdge } from './support/near-edge'
 import type { Spot } from './support/find-marks'
 import { rendered, words } from './support/rendered'
 import type { PagePicture } from './support/rendered'
@@ -144,22 +145,6 @@ describe.each([
     expect(Math.abs((truth ?? 0) - pathLength(path))).toBeLessThan(0.3)
   })
 })
-
-/** Dots that are inked nearer to the edge of the paper than so many mm. */
-function inkedNearEdge({ width, height, dark, perMm }: PagePicture, mm: number): number {
-  const edge = Math.floor(mm * perMm)
-  let inked = 0
-  const look = (fromX: number, toX: number, fromY: number, toY: number) => {
-    for (let y = fromY; y < toY; y += 1) {
-      for (let x = fromX; x < toX; x += 1) if ((dark[y * width + x] ?? 0) > 12) inked += 1
-    }
-  }
-  look(0, width, 0, edge)
-  look(0, width, height - edge, height)
-  look(0, edge, edge, height - edge)
-  look(width - edge, width, edge, height - edge)
-  return inked
-}
 
 /** Looks where a path passes at a distance along it. */
 type Look = (path: Path, along: number) => Spot

@@ -1,5 +1,5 @@
 import { newId } from '@/db/new-id'
-import type { Role } from '@/db/permissions'
+import { type Role, roles } from '@/db/permissions'
 
 /** Things of one workroom that requests name: each endpoint is tried on them by its own people and by strangers. */
 export interface Things {
@@ -11,6 +11,8 @@ export interface Things {
   readonly shareToken: string
   readonly invitationId: string
   readonly membershipId: string
+  /** Remembered by the owner. */
+  readonly printerId: string
 }
 
 /** Who gets through: anybody at all, anybody signed in, or these roles of the workroom (and nobody of another one). */
@@ -105,6 +107,19 @@ export const endpoints: Readonly<Record<string, Endpoint>> = {
     outOfReach: ['tutor'],
     input: nothing,
     path: ({ draftId, shareId }) => `/api/drafts/${draftId}/shares/${shareId}`,
+  },
+  'GET /api/printers': { access: roles, input: nothing, stranger: 'own', path: () => '/api/printers' },
+  'POST /api/printers': {
+    access: roles,
+    input: () => ({ id: newId(), name: 'Upstairs', short: 98.5, long: 99.2 }),
+    stranger: 'own',
+    path: () => '/api/printers',
+  },
+  'DELETE /api/printers/[id]': {
+    access: owner,
+    outOfReach: ['drafter', 'tutor', 'maker', 'student'],
+    input: nothing,
+    path: ({ printerId }) => `/api/printers/${printerId}`,
   },
   'GET /api/shared/[token]': {
     access: 'anybody',

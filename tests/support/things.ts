@@ -1,6 +1,7 @@
 import { createCard } from '@/db/access/cards'
 import { createClient } from '@/db/access/clients'
 import { inviteMember } from '@/db/access/invitations'
+import { keepPrinter } from '@/db/access/printers'
 import { createShare } from '@/db/access/shares'
 import { newId } from '@/db/new-id'
 import type { Actor } from '@/db/permissions'
@@ -17,6 +18,12 @@ export async function makeThings(workroom: TestWorkroom, owner: Actor): Promise<
   const { share, token } = await createShare(owner, link)
   const invitation = { id: newId(), email: `${newId()}@people.example`, roles: ['maker'] }
   const spare = await workroom.person('maker')
+  const printer = await keepPrinter(owner, {
+    id: newId(),
+    name: `Printer ${newId()}`,
+    short: 98.5,
+    long: 99.2,
+  })
   return {
     clientId: client.id,
     cardId: card.id,
@@ -26,5 +33,6 @@ export async function makeThings(workroom: TestWorkroom, owner: Actor): Promise<
     shareToken: token,
     invitationId: (await inviteMember(owner, invitation)).id,
     membershipId: spare.actor.membershipId,
+    printerId: printer.id,
   }
 }

@@ -1,32 +1,41 @@
 import 'server-only'
 import type { Draft } from '@/drafting/contract'
-import { paperOf } from '@/drafting/drawing'
-import type { Orientation, PaperId } from '@/drafting/drawing'
+import { layOutOf } from './choices'
+import type { PrintQuery } from './choices'
 import { download } from './download'
 import { patternInThread } from './pattern-thread'
 import { titleOf } from './pattern-of'
 import type { Printable } from './pattern-of'
 import { patternSvg } from './pattern-svg'
 
-/** The paper pattern of a version as a file to save. */
+/**
+ * The paper pattern of a version as a file to save.
+ * @param signal of whoever waits: when they go away, the work is stopped
+ */
 export async function pdfAnswer(
   printable: Printable,
   draft: Draft,
-  choices: { readonly paper: PaperId; readonly orientation: Orientation; readonly allowances: 'yes' | 'no' },
+  query: PrintQuery,
+  signal?: AbortSignal,
 ): Promise<Response> {
-  const paper = paperOf(choices.paper)
-  const bytes = await patternInThread({
-    draft,
+  const request = {
+    ...layOutOf(draft, query),
     title: titleOf(printable),
-    paper,
-    orientation: choices.orientation,
-    allowances: choices.allowances === 'yes',
+    black: query.ink === 'black',
+    bold: query.lines === 'bold',
     savedAt: new Date(printable.savedAt),
+  }
+  const bytes = await patternInThread(request, signal).catch((error: unknown) => {
+    if (signal?.aborted) return null
+    throw error
   })
+  // Nobody reads this answer: who asked has gone away.
+  if (!bytes) return new Response(null, { status: 499 })
   return download(new Uint8Array(bytes), 'application/pdf', [
     printable.name,
-    paper.name,
-    nett(choices.allowances),
+    request.paper.name,
+    ...(query.scale === 'full' ? [] : [`${query.scale} size`]),
+    nett(query.allowances),
   ])
 }
 

@@ -1,10 +1,11 @@
 import 'server-only'
 import { cuttingWords, styles } from '@/drafting/drawing'
-import type { StyleName } from '@/drafting/drawing'
+import type { Style, StyleName } from '@/drafting/drawing'
 import { arrowhead } from '@/drafting/drawing/arrowhead'
 import type { CoverContext } from './cover-page'
 import type { PageContent } from './page-content'
 
+const box: Style = { stroke: 'ink', width: 0.2 }
 const size = 3.4
 const leading = 4.3
 /** Length of a line's sample in the legend, mm. */
@@ -80,9 +81,11 @@ export function drawPieces(
 ): number {
   let y = heading(content, 'Pieces', column.x, top)
   for (const piece of draft.pieces) {
-    content.text(piece.name, { x: column.x, y }, { size, weight: 600 })
-    const words = piece.cut.flatMap((cutting) => type.wrap(cuttingWords(cutting), size, column.width - 3))
-    y = content.lines(words, { x: column.x + 3, y: y + leading }, leading, { size }) + 0.9
+    // To be ticked off when it is cut.
+    content.boxes([{ x: column.x, y: y - 2.4 }], 2.6, 2.6, box)
+    content.text(piece.name, { x: column.x + 4.5, y }, { size, weight: 600 })
+    const words = piece.cut.flatMap((cutting) => type.wrap(cuttingWords(cutting), size, column.width - 4.5))
+    y = content.lines(words, { x: column.x + 4.5, y: y + leading }, leading, { size }) + 0.9
   }
   return y
 }

@@ -1,6 +1,7 @@
 import 'server-only'
 import type { Draft, Path } from '@/drafting/contract'
-import type { Paper, Tiling } from '@/drafting/drawing'
+import { safeMargin, trueMeasure } from '@/drafting/drawing'
+import type { Measured, Paper, PrintScale, Tiling } from '@/drafting/drawing'
 import { drawCautions, drawLegend, drawPieces } from './cover-lists'
 import { drawSquares } from './cover-squares'
 import type { PageContent } from './page-content'
@@ -13,16 +14,28 @@ export interface CoverContext {
   readonly paper: Paper
   readonly tiling: Tiling
   readonly allowances: boolean
+  readonly scale?: PrintScale
+  /** What the printer made of 100 mm before it was corrected for. */
+  readonly measured?: Measured
   readonly type: TypeSetter
   /** Of the pieces as they lie on the sheet, for the map. */
   readonly outlines: readonly Path[]
 }
 
+const scaleWords: Readonly<Record<PrintScale, string>> = {
+  full: 'full',
+  half: 'half',
+  quarter: 'quarter',
+  fifth: 'fifth',
+}
+
 /** The first page, always upright: test squares with how to print, the page map, the lines, the pieces and the cautions. */
 export function drawCover(content: PageContent, context: CoverContext): void {
   const { paper, title, tiling } = context
-  const left = 10.5
-  const right = paper.width - 10.5
+  // Lines have a width of their own.
+  const edge = safeMargin(paper, context.measured ?? trueMeasure, 10) + 0.5
+  const left = edge
+  const right = paper.width - edge
   const printed = tiling.pages.filter((page) => !page.blank).length
   content.text(
     context.type.shortened(title.name, 8, right - left, 600),
@@ -35,6 +48,9 @@ export function drawCover(content: PageContent, context: CoverContext): void {
     title.date,
     `${paper.name}, ${printed} ${printed === 1 ? 'sheet' : 'sheets'} after this one`,
     context.allowances ? 'allowances included' : 'nett: no allowances',
+    context.scale && context.scale !== 'full'
+      ? `drawn at ${scaleWords[context.scale]} size: not for cutting`
+      : '',
   ].filter(Boolean)
   content.text(
     context.type.shortened(facts.join(' · '), 3.6, right - left),
@@ -50,7 +66,7 @@ export function drawCover(content: PageContent, context: CoverContext): void {
   drawCautions(content, context, column, y + 4)
   content.text(
     title.maker,
-    { x: left, y: Math.min(bottomOfSquares + 6, paper.height - 11.5) },
+    { x: left, y: Math.min(bottomOfSquares + 6, paper.height - edge - 1) },
     { size: 3, dye: 'walnut' },
   )
 }

@@ -1,5 +1,6 @@
 import 'server-only'
-import type { Style } from '@/drafting/drawing'
+import { stretchOf, trueMeasure } from '@/drafting/drawing'
+import type { Join, Measured, Style } from '@/drafting/drawing'
 import type { CoverContext } from './cover-page'
 import { drawMap } from './page-map'
 import type { PageContent } from './page-content'
@@ -11,15 +12,30 @@ const leading = 4.5
 
 const howToPrint = [
   'Print this page alone first. In the print window choose “Actual size” or 100\u00a0%, never “Fit to page”.',
-  'Measure this square along the middle of its lines: each side is 10\u00a0cm. Each side of the square below is 4\u00a0in.',
-  'If it measures something else, say 9.8 cm, print at 100\u00a0×\u00a010\u00a0÷\u00a09.8\u00a0=\u00a0102\u00a0% and measure again.',
-  'If width and height differ, the printer pulls the paper unevenly: try other paper or another printer.',
+  'Measure this square along the middle of its lines, both ways: each side is 10\u00a0cm. Each side of the square below is 4\u00a0in.',
+  'If it measures something else, say 9.85 cm across and 9.92 cm down, enter both where you downloaded this pattern (“My printer is off”) and print its first page again: the pattern is then drawn so much larger.',
+  'If a side is off by more than 5\u00a0mm, the page was made to fit: look for “Actual size” again.',
   'When both squares are right, print the rest the same way.',
 ]
 
-const howToTape = [
-  'Trim the solid line on the left and top of each sheet, lay it up to the dashed line of its neighbour so that circles with the same name close, and tape.',
-]
+/** What this copy was corrected for, so that nobody corrects it twice or prints it elsewhere. */
+function correction({ short, long }: Measured): readonly string[] {
+  if (short === 100 && long === 100) return []
+  return [
+    `This copy is corrected for a printer that makes ${cm(short)} of 10\u00a0cm across the paper and ${cm(long)} along it. On any other printer it is wrong.`,
+  ]
+}
+
+const cm = (mm: number) => `${Math.round(mm * 10) / 100}\u00a0cm`
+
+const howToTape: Readonly<Record<Join, readonly string[]>> = {
+  trim: [
+    'Trim the solid line on the left and top of each sheet, lay it up to the dashed line of its neighbour so that circles with the same name close, and tape.',
+  ],
+  butt: [
+    'Trim every solid line, lay the sheets edge to edge so that the halves of circles with the same name meet, and tape both sides.',
+  ],
+}
 
 /** The two squares that prove the scale, with what to do about it written inside. Returns the lower end of the second. */
 export function drawSquares(
@@ -27,14 +43,25 @@ export function drawSquares(
   context: CoverContext,
   at: { x: number; y: number },
 ): number {
-  content.boxes([at], 100, 100, square)
+  const { measured = trueMeasure } = context
+  // The page always lies upright, so that the paper's short side goes across.
+  const { x: wide, y: high } = stretchOf(measured, 'full', 'portrait')
+  content.boxes([at], 100 * wide, 100 * high, square)
   content.text('10 cm on each side', { x: at.x + inner, y: at.y + 10 }, { size: 5, weight: 600 })
-  drawSteps(content, context, howToPrint, { x: at.x + inner, y: at.y + 18 }, 100 - 2 * inner)
+  drawSteps(
+    content,
+    context,
+    [...correction(measured), ...howToPrint],
+    { x: at.x + inner, y: at.y + 18 },
+    100 - 2 * inner,
+  )
 
-  const below = { x: at.x, y: at.y + 100 + 5 }
-  content.boxes([below], 101.6, 101.6, square)
+  const below = { x: at.x, y: at.y + 100 * high + 5 }
+  content.boxes([below], 101.6 * wide, 101.6 * high, square)
   content.text('4 in on each side', { x: below.x + inner, y: below.y + 10 }, { size: 5, weight: 600 })
-  const lines = howToTape.flatMap((text) => context.type.wrap(text, size, 101.6 - 2 * inner))
+  const lines = howToTape[context.tiling.join].flatMap((text) =>
+    context.type.wrap(text, size, 101.6 - 2 * inner),
+  )
   const y = content.lines(lines, { x: below.x + inner, y: below.y + 17 }, leading, { size })
   const room = { width: 101.6 - 2 * inner, height: below.y + 101.6 - inner - y }
   drawMap(
@@ -43,7 +70,7 @@ export function drawSquares(
     { x: below.x + inner, y },
     { ...room, names: true, outlines: context.outlines },
   )
-  return below.y + 101.6
+  return below.y + 101.6 * high
 }
 
 function drawSteps(

@@ -29,6 +29,16 @@ const colours = Object.fromEntries(
     [1, 3, 5].map((at) => share(parseInt(hex.slice(at, at + 2), 16) / 255)).join(' '),
   ]),
 ) as Readonly<Record<Dye, string>>
+const black = '0 0 0'
+
+/** How all lines are drawn: in their colours or all black, and how many times their weight. */
+export interface Pen {
+  readonly black: boolean
+  readonly weight: number
+}
+
+/** Colours as they are, weights as they are. */
+export const plainPen: Pen = { black: false, weight: 1 }
 
 /**
  * The content stream of one page, written in millimetres from the top left corner of the paper with y going down, as drawings
@@ -43,6 +53,7 @@ export class PageContent {
   constructor(
     height: number | null,
     private readonly type: TypeSetter,
+    private readonly pen: Pen = plainPen,
   ) {
     if (height === null) return
     this.#operators.push(`${pointsPerMm} 0 0 ${-pointsPerMm} 0 ${height * pointsPerMm} cm 1 j`)
@@ -61,6 +72,13 @@ export class PageContent {
     draw()
     this.#operators.push('Q')
     this.#forget()
+  }
+
+  /** Draws what `draw` draws on a layer that a reader of the document can switch off; see pdf-layers.ts. */
+  on(layer: string, draw: () => void): void {
+    this.#operators.push(`/OC /${layer} BDC`)
+    draw()
+    this.#operators.push('EMC')
   }
 
   /** Puts what is drawn once for all pages (see stamps.ts) with its origin at a place. */
@@ -140,17 +158,22 @@ export class PageContent {
   #useStroke(style: Style, phase: number): void {
     const dash = style.dash ?? []
     const cap = dash.length > 0 ? 0 : 1
-    const stroke = `${colours[style.stroke ?? 'ink']} RG ${number(style.width ?? 0.3)} w ${cap} J [${dash.map(number).join(' ')}] ${number(phase)} d`
+    const width = (style.width ?? 0.3) * this.pen.weight
+    const stroke = `${this.#colour(style.stroke ?? 'ink')} RG ${number(width)} w ${cap} J [${dash.map(number).join(' ')}] ${number(phase)} d`
     if (stroke === this.#stroke) return
     this.#stroke = stroke
     this.#operators.push(stroke)
   }
 
   #useFill(dye: Dye): void {
-    const fill = `${colours[dye]} rg`
+    const fill = `${this.#colour(dye)} rg`
     if (fill === this.#fill) return
     this.#fill = fill
     this.#operators.push(fill)
+  }
+
+  #colour(dye: Dye): string {
+    return this.pen.black ? black : colours[dye]
   }
 
   /** The stream, deflated. */

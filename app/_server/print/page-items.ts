@@ -4,6 +4,8 @@ import { crosses, inkOf, styleOf } from '@/drafting/drawing'
 import type { Ink, PageWindow } from '@/drafting/drawing'
 import { segmentLength } from '@/drafting/geometry/segment'
 import type { PageContent } from './page-content'
+import { pdfLayerOf } from './pdf-layers'
+import type { PdfLayer } from './pdf-layers'
 
 /** An item with what is needed to know quickly which pages it is on. */
 export interface Placed {
@@ -60,20 +62,36 @@ export function itemsIn(items: readonly Placed[], window: PageWindow): readonly 
 
 /** Draws what lies in a window: of each line only the segments that reach into it, their dashes running on unbroken. */
 export function drawItems(content: PageContent, items: readonly Placed[], window: PageWindow): void {
-  for (const placed of items) {
-    const { item } = placed
-    const style = styleOf(item.style)
-    if (item.kind === 'text') {
-      content.text(item.text, item.at, {
-        size: item.size,
-        weight: style.weight ?? 400,
-        dye: style.fill ?? 'ink',
-        turn: item.turn,
-        align: 'middle',
-      })
-    } else if (style.fill) content.path(item.path, style)
-    else drawLine(content, placed, window)
+  for (const run of runsByLayer(items)) {
+    content.on(run.layer, () => run.items.forEach((placed) => drawItem(content, placed, window)))
   }
+}
+
+/** Neighbours in the drawing's order that belong to one layer of the document. */
+function runsByLayer(items: readonly Placed[]): readonly { layer: PdfLayer; items: readonly Placed[] }[] {
+  const runs: { layer: PdfLayer; items: Placed[] }[] = []
+  for (const placed of items) {
+    const layer = pdfLayerOf(placed.item.layer)
+    const last = runs.at(-1)
+    if (last?.layer === layer) last.items.push(placed)
+    else runs.push({ layer, items: [placed] })
+  }
+  return runs
+}
+
+function drawItem(content: PageContent, placed: Placed, window: PageWindow): void {
+  const { item } = placed
+  const style = styleOf(item.style)
+  if (item.kind === 'text') {
+    content.text(item.text, item.at, {
+      size: item.size,
+      weight: style.weight ?? 400,
+      dye: style.fill ?? 'ink',
+      turn: item.turn,
+      align: 'middle',
+    })
+  } else if (style.fill) content.path(item.path, style)
+  else drawLine(content, placed, window)
 }
 
 function drawLine(content: PageContent, placed: Placed, window: PageWindow): void {

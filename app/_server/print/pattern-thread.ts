@@ -1,7 +1,7 @@
 import 'server-only'
 import { Worker } from 'node:worker_threads'
 import type { PatternRequest } from './pattern-pdf'
-import type { PatternResult, PatternTask } from './pattern-worker'
+import type { PatternMessage, PatternResult } from './pattern-worker'
 
 interface Waiting {
   readonly resolve: (bytes: Uint8Array) => void
@@ -15,14 +15,33 @@ let count = 0
 /**
  * Makes a paper pattern in a thread of its own; see patternPdf. One thread serves the whole process and is started with the first
  * pattern; when it dies, whoever waits is told and the next pattern starts another.
+ *
+ * @param signal stops the work between two pages; the promise is then rejected with its reason
  */
-export function patternInThread(request: PatternRequest): Promise<Uint8Array> {
+export function patternInThread(request: PatternRequest, signal?: AbortSignal): Promise<Uint8Array> {
+  signal?.throwIfAborted()
   const worker = (thread ??= start())
-  const task: PatternTask = { id: (count += 1), request }
+  const id = (count += 1)
   return new Promise((resolve, reject) => {
-    waiting.set(task.id, { resolve, reject })
-    worker.postMessage(task)
+    const stop = () => {
+      waiting.delete(id)
+      send(worker, { stop: id })
+      reject(signal?.reason instanceof Error ? signal.reason : new Error('Nobody waits for the pattern.'))
+    }
+    const ended =
+      <T>(then: (value: T) => void) =>
+      (value: T) => {
+        signal?.removeEventListener('abort', stop)
+        then(value)
+      }
+    waiting.set(id, { resolve: ended(resolve), reject: ended(reject) })
+    signal?.addEventListener('abort', stop, { once: true })
+    send(worker, { id, request })
   })
+}
+
+function send(worker: Worker, message: PatternMessage): void {
+  worker.postMessage(message)
 }
 
 function start(): Worker {

@@ -2,25 +2,31 @@ import { parentPort } from 'node:worker_threads'
 import { patternPdf } from './pattern-pdf'
 import type { PatternRequest } from './pattern-pdf'
 
-/** What the pool sends, and what comes back under the same number. */
-export interface PatternTask {
-  readonly id: number
-  readonly request: PatternRequest
-}
+/** What is asked for, or that nobody waits for it any more. */
+export type PatternMessage =
+  { readonly id: number; readonly request: PatternRequest } | { readonly stop: number }
+/** What comes back under the same number. */
 export type PatternResult =
   { readonly id: number; readonly bytes: Uint8Array } | { readonly id: number; readonly problem: string }
 
-/** The thread that makes paper patterns, one after the other, so that the requests of others go on meanwhile. */
-parentPort?.on('message', (task: PatternTask) => {
-  void answer(task)
+const stops = new Map<number, AbortController>()
+
+/** The thread that makes paper patterns, so that the requests of others go on meanwhile. */
+parentPort?.on('message', (message: PatternMessage) => {
+  if ('stop' in message) stops.get(message.stop)?.abort()
+  else void answer(message.id, message.request)
 })
 
-async function answer({ id, request }: PatternTask): Promise<void> {
+async function answer(id: number, request: PatternRequest): Promise<void> {
+  const stop = new AbortController()
+  stops.set(id, stop)
   try {
-    const bytes = await patternPdf(request)
+    const bytes = await patternPdf(request, stop.signal)
     send({ id, bytes })
   } catch (error) {
     send({ id, problem: error instanceof Error ? (error.stack ?? error.message) : String(error) })
+  } finally {
+    stops.delete(id)
   }
 }
 

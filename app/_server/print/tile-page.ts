@@ -1,6 +1,6 @@
 import 'server-only'
 import type { Drawing } from '@/drafting/contract'
-import { crosses } from '@/drafting/drawing'
+import { crosses, pageName } from '@/drafting/drawing'
 import type { MatchMark, PageWindow, Style, TilePage, Tiling } from '@/drafting/drawing'
 import { lightCell, mapSize } from './page-map'
 import type { PageContent } from './page-content'
@@ -39,32 +39,61 @@ export function drawTile(content: PageContent, page: TilePage, context: TileCont
   }
   const items = itemsIn(context.items, page.window)
   content.within(printable, page.window, () => drawItems(content, items, page.window))
-  content.within(printable, printable, () => {
-    drawSides(content, page, tiling, printable)
-    for (const match of page.marks) drawMark(content, match, page.window, margin)
-    drawName(content, page, { ...context, items }, printable)
-  })
+  content.within(printable, printable, () =>
+    content.on('Sheet', () => {
+      drawSides(content, page, tiling, printable)
+      drawNeighbours(content, page, context, printable)
+      for (const match of page.marks) drawMark(content, match, page.window, margin)
+      drawName(content, page, { ...context, items }, printable)
+    }),
+  )
 }
 
 /**
- * Left and top are trimmed and laid over the neighbour; right and bottom are laid under, up to the dashed line. A side without
- * neighbour shows where the printable area ends.
+ * Left and top are trimmed and laid over the neighbour; right and bottom are laid under, up to the dashed line. Where sheets are
+ * taped edge to edge, all four are trimmed. A side without neighbour shows where the printable area ends.
  */
 function drawSides(content: PageContent, page: TilePage, tiling: Tiling, printable: PageWindow): void {
   const half = tiling.overlap / 2
   const right = printable.x + printable.width
   const bottom = printable.y + printable.height
   const joined = new Set(page.marks.map((match) => match.side))
+  const under = tiling.join === 'butt' ? trim : lay
   const upright = (x: number, style: Style) => content.line({ x, y: printable.y }, { x, y: bottom }, style)
   const level = (y: number, style: Style) => content.line({ x: printable.x, y }, { x: right, y }, style)
   if (joined.has('left')) upright(printable.x + half, trim)
   else upright(printable.x + inset, hairline)
-  if (joined.has('right')) upright(right - half, lay)
+  if (joined.has('right')) upright(right - half, under)
   else upright(right - inset, hairline)
   if (joined.has('top')) level(printable.y + half, trim)
   else level(printable.y + inset, hairline)
-  if (joined.has('bottom')) level(bottom - half, lay)
+  if (joined.has('bottom')) level(bottom - half, under)
   else level(bottom - inset, hairline)
+}
+
+/** Which sheet lies beyond each edge, written where it is cut off or covered once the sheets are taped. */
+function drawNeighbours(
+  content: PageContent,
+  page: TilePage,
+  { tiling, sheets }: TileContext,
+  printable: PageWindow,
+): void {
+  const strip = tiling.overlap / 2
+  const middle = { x: printable.x + printable.width / 2, y: printable.y + printable.height / 2 }
+  const right = printable.x + printable.width
+  const bottom = printable.y + printable.height
+  const baseline = strip / 2 + 1
+  const beyond = [
+    { row: -1, column: 0, sign: '↑', turn: 0, at: { x: middle.x, y: printable.y + baseline } },
+    { row: 1, column: 0, sign: '↓', turn: 0, at: { x: middle.x, y: bottom - strip + baseline } },
+    { row: 0, column: -1, sign: '↑', turn: -90, at: { x: printable.x + baseline, y: middle.y } },
+    { row: 0, column: 1, sign: '↑', turn: 90, at: { x: right - baseline, y: middle.y } },
+  ]
+  for (const { row, column, sign, turn, at } of beyond) {
+    const name = pageName(page.row + row, page.column + column)
+    if (!sheets.has(name)) continue
+    content.text(`${sign}${name}`, at, { size: 3, align: 'middle', dye: 'walnut', turn })
+  }
 }
 
 /** A circle and a cross; its name stands beside it, on the side that stays visible on the lower sheet as well. */

@@ -41,7 +41,7 @@ export function rendered(pdf: Uint8Array): readonly PagePicture[] {
 }
 
 /** Reads a portable graymap: 'P5', width, height, 255, then a byte a dot from white (255) to black (0). */
-function pictureOf(bytes: Uint8Array): PagePicture {
+export function pictureOf(bytes: Uint8Array): PagePicture {
   const header = /^P5\s+(\d+)\s+(\d+)\s+255\s/.exec(Buffer.from(bytes.subarray(0, 64)).toString('latin1'))
   if (!header) throw new Error('pdftoppm wrote something other than a graymap')
   const dark = bytes.subarray(header[0].length).map((light) => 255 - light)

@@ -2,9 +2,6 @@ import type { Spot } from './find-marks'
 
 import type { TapedPage } from './taped'
 
-/** How far from where it is expected a line is looked for, mm. */
-const reach = 1.6
-
 function onPage(page: TapedPage, spot: Spot): Spot {
   const cos = Math.cos(-page.laid.turn)
   const sin = Math.sin(-page.laid.turn)
@@ -42,9 +39,16 @@ function darkness(page: TapedPage, spot: Spot): number {
 /**
  * The middle of the inked line that crosses the normal at a spot of the taped sheet.
  * @param width of the line that is looked for, mm: others nearby are left alone
+ * @param reach how far from where it is expected it is looked for, mm
  * @throws Error when no such line is there
  */
-export function lineAt(pages: readonly TapedPage[], spot: Spot, tangent: Spot, width: number): Spot {
+export function lineAt(
+  pages: readonly TapedPage[],
+  spot: Spot,
+  tangent: Spot,
+  width: number,
+  reach = 1.6,
+): Spot {
   const page = pages.reduce((best, next) => (depth(next, spot) > depth(best, spot) ? next : best))
   const normal = { x: -tangent.y, y: tangent.x }
   const step = 0.02

@@ -3,6 +3,7 @@
 import { PrintDialog } from '@/components/print/print-dialog'
 import type { StudioStore } from '@/components/studio/store'
 import { Dialog } from '@/components/ui/dialog'
+import { usePrinters } from '../../../_data/printers'
 
 /** The paper pattern of what is on the table, once it is saved: what is printed can always be printed again. */
 export function PrintLeaf({
@@ -15,8 +16,11 @@ export function PrintLeaf({
   readonly revisionId: string | undefined
 }) {
   const { draft } = store.get()
-  if (draft && revisionId)
-    return <PrintDialog open onClose={onClose} draft={draft} base={`/api/revisions/${revisionId}`} />
+  const printers = usePrinters()
+  if (draft && revisionId) {
+    const base = `/api/revisions/${revisionId}`
+    return <PrintDialog open onClose={onClose} draft={draft} base={base} printers={printers} />
+  }
   return (
     <Dialog open onClose={onClose} title="Print the pattern">
       <p>

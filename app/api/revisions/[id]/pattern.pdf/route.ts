@@ -8,8 +8,8 @@ import { printed } from '../_printed'
 /** The paper pattern of a version, in pages. */
 export const GET = workroomRoute(
   z.strictObject({ id: idShape, ...printChoices }),
-  async (actor, { id, ...choices }) => {
+  async (actor, { id, ...choices }, request) => {
     const { printable, draft } = await printed(actor, id)
-    return pdfAnswer(printable, draft, choices)
+    return pdfAnswer(printable, draft, choices, request.signal)
   },
 )
