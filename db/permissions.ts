@@ -12,7 +12,7 @@ export interface Actor {
   readonly sessionId: string
 }
 
-export type Resource = 'clients' | 'cards' | 'drafts' | 'shares' | 'workroom' | 'members'
+export type Resource = 'clients' | 'cards' | 'drafts' | 'shares' | 'methods' | 'workroom' | 'members'
 export type Action = 'read' | 'write'
 
 /**
@@ -37,6 +37,7 @@ export const permissions: Readonly<Record<Role, Grants>> = {
     cards: everything,
     drafts: everything,
     shares: everything,
+    methods: everything,
     workroom: everything,
     members: everything,
   },
@@ -45,22 +46,26 @@ export const permissions: Readonly<Record<Role, Grants>> = {
     cards: everything,
     drafts: everything,
     shares: everything,
+    methods: everything,
     workroom: { read: ['all'] },
   },
   tutor: {
     drafts: { read: ['own', 'teaching'], write: ['own'] },
     shares: { read: ['own'], write: ['own'] },
+    methods: everything,
     workroom: { read: ['all'] },
   },
   maker: {
     clients: { read: ['assigned'] },
     cards: { read: ['assigned'] },
     drafts: { read: ['assigned'] },
+    methods: { read: ['all'] },
     workroom: { read: ['all'] },
   },
   student: {
     cards: { read: ['own'], write: ['own'] },
     drafts: { read: ['practice', 'shared'], write: ['practice'] },
+    methods: { read: ['all'] },
     workroom: { read: ['all'] },
   },
 }

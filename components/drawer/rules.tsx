@@ -1,7 +1,8 @@
 'use client'
 
 import { useState } from 'react'
-import type { RuleDefinition } from '@/drafting/contract'
+import { rulesInForce } from '@/drafting'
+import type { RuleInForce } from '@/drafting/contract'
 import { formatLength } from '@/drafting/lengths'
 import { FieldFrame, controlClass } from '@/components/ui/field'
 import { typeset } from '@/components/ui/typeset'
@@ -12,20 +13,21 @@ import { useStudio, useStudioState } from '@/components/studio/use-store'
 /** The formulas the draft works by: change one, see its sum and the pattern follow, or put the garment's own back. */
 export function Rules() {
   const { garment } = useStudio()
+  const method = useStudioState((state) => state.order.method)
   return (
     <div className="grid gap-6 p-4">
       <p className="text-sm text-walnut">
         Write with the names of measurements, choices and other rules, numbers with or without a unit, + − × ÷
         and brackets.
       </p>
-      {garment.rules.map((rule) => (
+      {rulesInForce({ garment: garment.id, ...(method ? { method } : {}) }).map((rule) => (
         <Rule key={rule.id} rule={rule} />
       ))}
     </div>
   )
 }
 
-function Rule({ rule }: { readonly rule: RuleDefinition }) {
+function Rule({ rule }: { readonly rule: RuleInForce }) {
   const { store, writable } = useStudio()
   const ref: FieldRef = `rules.${rule.id}`
   const [editing, setEditing] = useState<string>()
@@ -86,7 +88,7 @@ function Rule({ rule }: { readonly rule: RuleDefinition }) {
                 onClick={() => store.change(ref, undefined, rule.name)}
                 className="min-h-6 font-semibold text-indigo underline underline-offset-2"
               >
-                Put the garment’s own back
+                {rule.from === 'method' ? 'Put the method’s own back' : 'Put the garment’s own back'}
               </button>
             )}
           </p>

@@ -2,7 +2,8 @@ import * as z from 'zod'
 import { idShape, lines, requiredLine } from './ids'
 import { lengthShape, unitShape } from './length'
 
-const measurementId = z.string().regex(/^[a-zA-Z][a-zA-Z0-9]{0,39}$/, 'This measurement is not known.')
+/** A measurement of the engine's, or one of the workroom's own, whose words are joined by underscores. */
+const measurementId = z.string().regex(/^[a-zA-Z][a-zA-Z0-9_]{0,39}$/, 'This measurement is not known.')
 
 /** A measure card as it is written. Without a client it holds the member's own measurements. */
 export const cardShape = z.strictObject({

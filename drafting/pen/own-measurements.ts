@@ -1,15 +1,9 @@
 import type { OwnMeasurement, Problem, Unit } from '../contract'
 import { formatLength } from '../lengths'
+import { isOwnName } from '../own-names'
 import { isNumber, isRecord } from './plain-data'
 
-/** Words joined by underscores. Names of the engine's are written in one word, so the two can never be confused. */
-const ownName = /^[a-z][a-z0-9]*(?:_[a-z0-9]+)+$/
 const mostOwn = 100
-
-/** Whether a name can be that of a workroom's own measurement. */
-export function isOwnName(id: unknown): id is string {
-  return typeof id === 'string' && id.length <= 40 && ownName.test(id)
-}
 
 function wrong(one: unknown): string | undefined {
   if (!isRecord(one)) return 'An own measurement has a name, how it is taken, and its range.'

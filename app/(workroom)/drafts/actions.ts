@@ -5,11 +5,14 @@ import * as z from 'zod'
 import { workroomAction } from '@/app/_server/session'
 import { getCard } from '@/db/access/cards'
 import { createDraft, renameDraft as rename } from '@/db/access/drafts'
+import { getMethod } from '@/db/access/methods'
+import { engineMeasurements } from '@/db/access/own-measurements'
 import { getWorkroom } from '@/db/access/workrooms'
+import type { Actor } from '@/db/permissions'
 import { draftNameShape } from '@/db/shapes/draft'
 import { idShape } from '@/db/shapes/ids'
 import { invalid } from '@/db/access-error'
-import { garments } from '@/drafting'
+import { garments, methods } from '@/drafting'
 import { firstOrder } from './_parts/first-order'
 import { publishedSize } from './_parts/published-sizes'
 
@@ -21,24 +24,38 @@ const started = z
     garment: z.string().max(60),
     cardId: idShape.optional(),
     sizeId: z.string().max(80).optional(),
+    /** A built-in method's, or that of one of the workroom's own. */
+    methodId: z.string().max(60).optional(),
   })
   .refine(({ cardId, sizeId }) => (cardId === undefined) !== (sizeId === undefined), {
     path: ['cardId'],
     message: 'Choose a measure card or a published size.',
   })
 
-/** Starts a draft: a garment on a measure card or a published size, with the workroom's usual allowances. */
+/** The drafting method chosen. @throws AccessError not-found */
+async function chosenMethod(actor: Actor, id: string | undefined) {
+  if (id === undefined) return undefined
+  return methods.find((method) => method.id === id) ?? getMethod(actor, id)
+}
+
+/** Starts a draft: a garment on a measure card or a published size, by a drafting method, with the workroom's usual allowances. */
 export const startDraft = workroomAction(
   started,
-  async (actor, { id, revisionId, name, garment, cardId, sizeId }) => {
+  async (actor, { id, revisionId, name, garment, cardId, sizeId, methodId }) => {
     const definition = garments.find((each) => each.id === garment)
     if (!definition) throw invalid('garment', 'Choose a garment from the list.')
-    const [card, workroom] = await Promise.all([
+    const [card, workroom, method, own] = await Promise.all([
       cardId === undefined ? undefined : getCard(actor, cardId),
       getWorkroom(actor),
+      chosenMethod(actor, methodId),
+      engineMeasurements(actor),
     ])
     const body = card ?? { unit: workroom.unit, values: publishedSize(sizeId) }
-    const { order, typed } = firstOrder(definition, body, workroom.allowances)
+    const { order, typed } = firstOrder(definition, body, {
+      allowances: workroom.allowances,
+      method,
+      own,
+    })
     await createDraft(actor, { id, revisionId, name, clientId: card?.clientId, cardId, order, typed })
     revalidatePath('/drafts')
     return { id }

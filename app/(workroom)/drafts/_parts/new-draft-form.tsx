@@ -16,17 +16,24 @@ interface Named {
   readonly name: string
 }
 
+interface Method extends Named {
+  readonly description: string
+}
+
 /** A garment, a measure card, a name: what a draft starts from. */
 export function NewDraftForm({
   garments,
   cards,
   sizes,
+  methods,
   cardId,
 }: {
   readonly garments: readonly Named[]
   readonly cards: readonly Named[]
   /** Published sizes, where the draft is for nobody in particular. */
   readonly sizes: readonly Named[]
+  /** Built in, and the workroom's own. */
+  readonly methods: readonly Method[]
   readonly cardId: string | undefined
 }) {
   const router = useRouter()
@@ -35,6 +42,7 @@ export function NewDraftForm({
   const [body, setBody] = useState(
     (cards.find((each) => each.id === cardId) ?? cards[0] ?? sizes[0])?.id ?? '',
   )
+  const [method, setMethod] = useState(methods[0]?.id ?? '')
   const onCard = cards.some((each) => each.id === body)
   const [named, setNamed] = useState<string>()
   const [problems, setProblems] = useState<readonly { field: string; message: string }[]>([])
@@ -50,6 +58,7 @@ export function NewDraftForm({
           ...ids,
           name,
           garment,
+          methodId: method,
           ...(onCard ? { cardId: body } : { sizeId: body }),
         })
         if (result.ok) router.push(`/drafts/${ids.id}`)
@@ -94,6 +103,14 @@ export function NewDraftForm({
         onChange={(event) => setBody(event.target.value)}
         error={problem('cardId') ?? problem('sizeId')}
         choices={[...cards, ...sizes].map((each) => ({ value: each.id, label: each.name }))}
+      />
+      <Select
+        label="Drafting method"
+        value={method}
+        onChange={(event) => setMethod(event.target.value)}
+        error={problem('methodId')}
+        hint={methods.find((each) => each.id === method)?.description}
+        choices={methods.map((each) => ({ value: each.id, label: each.name }))}
       />
       <Field
         label="Name of the draft"

@@ -5,8 +5,9 @@ import { EmptyState } from '@/components/ui/empty-state'
 import { Page } from '@/components/ui/page'
 import { listCards } from '@/db/access/cards'
 import { getClient, listClients } from '@/db/access/clients'
+import { listMethods } from '@/db/access/methods'
 import { may } from '@/db/permissions'
-import { garments } from '@/drafting'
+import { garments, methods } from '@/drafting'
 import { dayText } from '../../_data/dates'
 import { one, type SearchParams } from '../../_data/list-address'
 import { NewDraftForm } from '../_parts/new-draft-form'
@@ -32,10 +33,11 @@ export default async function NewDraftPage({ searchParams }: { searchParams: Sea
     )
   }
 
-  const [client, cards] = await forPage(
+  const [client, cards, own] = await forPage(
     Promise.all([
       clientId ? getClient(actor, clientId) : undefined,
       clientId || may(actor, 'cards', 'read') ? listCards(actor, clientId ?? null) : [],
+      listMethods(actor),
     ]),
   )
   // A draft for a client stands on her own measurements; any other may stand on a published size.
@@ -70,6 +72,7 @@ export default async function NewDraftPage({ searchParams }: { searchParams: Sea
         garments={garments.map(({ id, name }) => ({ id, name }))}
         cards={cards.map((card) => ({ id: card.id, name: `${card.name}, ${dayText(card.takenOn)}` }))}
         sizes={sizes}
+        methods={[...methods, ...own].map(({ id, name, description }) => ({ id, name, description }))}
         cardId={one(asked.card)}
       />
     </Page>
