@@ -41,11 +41,15 @@ export async function openReset(token: string): Promise<{ readonly email: string
   return found && { email: found.email }
 }
 
-/** Sets a new password by the link of a mail and ends every session of the person. @throws AccessError invalid */
+/**
+ * Sets a new password by the link of a mail and ends every session of the person. Whoever holds the link has the mailbox,
+ * so wrong tries before it no longer close the account.
+ * @throws AccessError invalid
+ */
 export async function resetPassword(input: z.input<typeof resetShape>): Promise<{ email: string }> {
   const { token, password } = checkInput(resetShape, input)
   const passwordHash = await hashPassword(password)
-  return inTransaction(async (transaction) => {
+  const { email } = await inTransaction(async (transaction) => {
     const { userId, email } = await spendToken('reset', token, transaction)
     const user = await User.findOne({ where: { id: userId ?? '' }, transaction })
     if (!user) throw notFound('account')
@@ -54,6 +58,8 @@ export async function resetPassword(input: z.input<typeof resetShape>): Promise<
     await enqueue('mail-password-changed', { email, name: user.name }, { transaction })
     return { email }
   })
+  await giveBack('sign-in account', email, true)
+  return { email }
 }
 
 /**

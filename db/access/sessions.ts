@@ -1,5 +1,5 @@
 import 'server-only'
-import { Op, QueryTypes, type Transaction } from 'sequelize'
+import { Op, QueryTypes, type Transaction, type WhereOptions } from 'sequelize'
 import { notFound } from '../access-error'
 import { connection } from '../connection'
 import { Membership } from '../models/membership'
@@ -14,6 +14,15 @@ const day = 24 * 60 * minute
 /** A session ends when it was not used for so long, and at the latest so long after sign-in. */
 const idleLimit = 14 * day
 const absoluteLimit = 60 * day
+
+/** The condition that a session still counts: not ended, used not too long ago, not too old. */
+export function livingSessions(now: Date): WhereOptions<Session> {
+  return {
+    endedAt: null,
+    lastSeenAt: { [Op.gt]: new Date(now.getTime() - idleLimit) },
+    startedAt: { [Op.gt]: new Date(now.getTime() - absoluteLimit) },
+  }
+}
 
 /** Who is signed in, whether or not they still belong to a workroom. */
 export interface SignedIn {
@@ -38,29 +47,34 @@ interface Row {
   readonly roles: string | null
 }
 
-/** Starts a session in the workroom that the person used last. @returns its id */
-export async function startSession(userId: string, transaction?: Transaction): Promise<string> {
+/**
+ * Starts a session in the workroom that the person used last.
+ * @param device in words
+ * @returns its id
+ */
+export async function startSession(userId: string, device = ''): Promise<string> {
   const latest = await Session.findOne({
     where: { userId, workroomId: { [Op.ne]: null } },
     order: [['lastSeenAt', 'desc']],
-    transaction,
   })
   const memberships = await Membership.findAll({
     where: { userId, disabledAt: null },
     order: [['createdAt', 'asc']],
-    transaction,
   })
   const usual = memberships.find((each) => each.workroomId === latest?.workroomId) ?? memberships[0]
-  return openSession(userId, usual?.workroomId ?? null, transaction)
+  return openSession({ userId, workroomId: usual?.workroomId ?? null, device })
 }
 
-async function openSession(userId: string, workroomId: string | null, transaction?: Transaction) {
+async function openSession(
+  about: { readonly userId: string; readonly workroomId: string | null; readonly device: string },
+  transaction?: Transaction,
+): Promise<string> {
   const now = new Date()
-  const session = await Session.create(
-    { id: newId(), userId, workroomId, startedAt: now, lastSeenAt: now, endedAt: null },
+  const { id } = await Session.create(
+    { id: newId(), ...about, startedAt: now, lastSeenAt: now, endedAt: null },
     { transaction },
   )
-  return session.id
+  return id
 }
 
 async function rowFor(sessionId: string, now: Date): Promise<Row | undefined> {
@@ -125,11 +139,13 @@ export async function endAllSessions(userId: string, transaction?: Transaction):
  * worth nothing, and this device goes on. @returns its id
  */
 export async function replaceSessions(
-  { userId, workroom }: Pick<SignedIn, 'userId' | 'workroom'>,
+  { sessionId, userId, workroom }: Pick<SignedIn, 'sessionId' | 'userId' | 'workroom'>,
   transaction: Transaction,
 ): Promise<string> {
+  const before = await Session.findOne({ where: { id: sessionId, userId }, transaction })
   await endAllSessions(userId, transaction)
-  return openSession(userId, workroom?.id ?? null, transaction)
+  const about = { userId, workroomId: workroom?.id ?? null, device: before?.device ?? '' }
+  return openSession(about, transaction)
 }
 
 /** Moves a session to another workroom of the same person. @throws AccessError not-found */

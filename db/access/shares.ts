@@ -29,6 +29,8 @@ export interface OpenedShare {
   readonly scope: ShareScope
   readonly draftName: string
   readonly workroomName: string
+  /** Of the workroom. */
+  readonly timeZone: string
   readonly order: DraftOrder
   readonly revisionId: string
   readonly savedAt: string
@@ -132,6 +134,7 @@ export async function openShare(token: string): Promise<OpenedShare | null> {
     scope: share.scope,
     draftName: draft.name,
     workroomName: workroom.name,
+    timeZone: workroom.timeZone,
     order: head.order,
     revisionId: head.id,
     savedAt: head.savedAt.toISOString(),

@@ -13,11 +13,13 @@ const signInShape = z.strictObject({ email: emailShape, password: z.string().min
  * Checks an e-mail address and a password and starts a session.
  * The same answer, after about the same time, for an unknown address, a wrong password and a disabled person.
  * @param address where the request came from, for the limits
+ * @param device in words, for the person's list of sessions
  * @throws AccessError not-signed-in, limited, unavailable
  */
 export async function signIn(
   input: { readonly email: string; readonly password: string },
   address: string,
+  device = '',
 ): Promise<{ userId: string; sessionId: string }> {
   const refused = new AccessError('not-signed-in', 'The e-mail address or the password is not right.')
   const checked = signInShape.safeParse(input)
@@ -30,5 +32,5 @@ export async function signIn(
   if (!user || !matches || user.disabledAt) throw refused
   await giveBack('sign-in account', email, true)
   await giveBack('sign-in address', address, false)
-  return { userId: user.id, sessionId: await startSession(user.id) }
+  return { userId: user.id, sessionId: await startSession(user.id, device) }
 }

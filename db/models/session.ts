@@ -1,7 +1,7 @@
 import 'server-only'
-import { type InferAttributes, type InferCreationAttributes, Model } from 'sequelize'
+import { type CreationOptional, type InferAttributes, type InferCreationAttributes, Model } from 'sequelize'
 import { connection } from '../connection'
-import { id, maybeMoment, maybeReference, moment, reference } from './columns'
+import { id, maybeMoment, maybeReference, moment, reference, text } from './columns'
 
 /** One sign-in on one device. The cookie carries its id; the row decides whether it still counts. */
 export class Session extends Model<InferAttributes<Session>, InferCreationAttributes<Session>> {
@@ -11,6 +11,8 @@ export class Session extends Model<InferAttributes<Session>, InferCreationAttrib
   declare startedAt: Date
   declare lastSeenAt: Date
   declare endedAt: Date | null
+  /** In words; '' when it is not known. */
+  declare device: CreationOptional<string>
 }
 
 Session.init(
@@ -21,6 +23,7 @@ Session.init(
     startedAt: moment(),
     lastSeenAt: moment(),
     endedAt: maybeMoment(),
+    device: { ...text(80), defaultValue: '' },
   },
   { sequelize: connection, tableName: 'sessions', modelName: 'Session', timestamps: false },
 )

@@ -135,6 +135,33 @@ test('forgotten password: the link works once, and every device is signed out', 
   await elsewhere.close()
 })
 
+test('a forgotten device is seen on the account page and signed out from there', async ({
+  page,
+  browser,
+}) => {
+  const email = await joinAs(page, { name: 'Ines Fern', workroom: 'Fern' })
+  const elsewhere = await browser.newContext({
+    userAgent:
+      'Mozilla/5.0 (Linux; Android 15; Pixel 8) AppleWebKit/537.36 (KHTML, like Gecko) Chrome/142.0.0.0 Mobile Safari/537.36',
+  })
+  const phone = await elsewhere.newPage()
+  await signInAs(phone, email)
+
+  await page.goto('/account')
+  await expect(page.getByRole('listitem').filter({ hasText: 'this device' })).toContainText(/on Linux/)
+  const other = page.getByRole('listitem').filter({ hasText: 'Chrome on Android' })
+  await expect(other).toContainText('Last seen')
+  await expectAccessible(page)
+  await other.getByRole('button', { name: 'Sign out Chrome on Android' }).click()
+  await expect(other).toHaveCount(0)
+
+  await phone.goto('/clients')
+  await expect(phone).toHaveURL(/\/sign-in/)
+  await page.reload()
+  await expect(page.getByRole('heading', { name: 'Your account' })).toBeVisible()
+  await elsewhere.close()
+})
+
 test('settings keep what was typed, and say what is wrong where it is', async ({ page }) => {
   const email = await joinAs(page, { name: 'Eva Lark', workroom: 'Lark' })
   await page.goto('/settings')

@@ -24,7 +24,7 @@ async function shareLink(page: Page, scope: 'Drawing' | 'Lesson'): Promise<strin
 
 /** Somebody who was only sent the link, and everything the server sends them, page scripts apart. */
 async function visitorOf(browser: Browser, link: string) {
-  const context = await browser.newContext()
+  const context = await browser.newContext({ timezoneId: 'Asia/Kolkata' })
   const page = await context.newPage()
   const sent: string[] = []
   page.on('response', async (response) => {
@@ -77,6 +77,15 @@ test('a shared drawing: seen, switched, printed, refreshed, taken back, and noth
     expect(visitor.first?.headers()['cache-control']).toContain('no-store')
     await expect(visitor.page.locator('meta[name=robots]')).toHaveAttribute('content', /noindex/)
     await expect(visitor.page.getByRole('heading', { level: 1 })).toHaveText('Blue dress')
+  })
+
+  await test.step('says when it was saved by the visitor’s own clock', async () => {
+    const saved = await visitor.page.locator('time').getAttribute('datetime')
+    const there = new Date(saved ?? '').toLocaleTimeString('en-GB', {
+      timeStyle: 'short',
+      timeZone: 'Asia/Kolkata',
+    })
+    await expect(visitor.page.getByText(/^Flared dress, drafted by/)).toContainText(`at ${there}.`)
   })
 
   await test.step('its scripts weigh little beside the framework’s', async () => {

@@ -186,6 +186,16 @@ describe('a forgotten password', () => {
     expect(smtp.received.at(-1)?.subject).toBe('Your password was changed')
   })
 
+  it('opens an account again that wrong tries had closed', async () => {
+    const { email, token } = await askFor()
+    const tries = Array.from({ length: 10 }, () => signIn({ email, password: 'a wrong one' }, 'a place'))
+    await Promise.allSettled(tries)
+    await refusal(signIn({ email, password: testPassword }, 'a place'), 'limited')
+    const password = 'seven green buttons'
+    await resetPassword({ token, password })
+    await signIn({ email, password }, 'a place')
+  })
+
   it('gives way to one only when a link is used twice at once', async () => {
     const { token } = await askFor()
     const tries = ['eleven red needles', 'twelve blue needles'].map((password) =>

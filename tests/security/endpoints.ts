@@ -169,6 +169,11 @@ export const endpoints: Readonly<Record<string, Endpoint>> = {
     access: 'signed-in',
     input: () => ({ current: 'not the password', next: 'plum tree by the river' }),
   },
+  'app/(workroom)/account/actions.ts#endSession': {
+    access: 'signed-in',
+    input: () => ({ id: newId() }),
+    stranger: 'not-found',
+  },
   'app/(workroom)/members/actions.ts#invite': {
     access: owner,
     input: () => ({ id: newId(), email: `${newId()}@people.example`, roles: ['maker'] }),

@@ -10,8 +10,10 @@ export interface Printable {
   readonly version?: string | null
   readonly maker: string
   readonly savedAt: string
-  /** Of the workroom; a visitor's paper says UTC. */
-  readonly timeZone?: string
+  /** Of the workroom. */
+  readonly timeZone: string
+  /** Whether the paper goes to somebody who may live in another zone: then it says whose time it is. */
+  readonly zoneSaid?: boolean
   readonly order: DraftOrder
 }
 
@@ -22,7 +24,7 @@ export function garmentName(id: string): string {
 
 /** What stands on the sheets: the draft, its version, and when that was saved. The client is nowhere in it. */
 export function titleOf(printable: Printable): PatternTitle {
-  const { date, time } = inWords(new Date(printable.savedAt), printable.timeZone ?? 'UTC')
+  const { date, time } = inWords(printable)
   return {
     name: printable.name,
     garment: garmentName(printable.order.garment),
@@ -32,10 +34,16 @@ export function titleOf(printable: Printable): PatternTitle {
   }
 }
 
-function inWords(at: Date, timeZone: string): { date: string; time: string } {
+function inWords({ savedAt, timeZone, zoneSaid }: Printable): { date: string; time: string } {
+  const at = new Date(savedAt)
   const date = at.toLocaleDateString('en-GB', { day: 'numeric', month: 'short', year: 'numeric', timeZone })
-  const time = at.toLocaleTimeString('en-GB', { hour: '2-digit', minute: '2-digit', timeZone })
-  return { date, time: timeZone === 'UTC' ? `${time} UTC` : time }
+  const time = at.toLocaleTimeString('en-GB', {
+    hour: '2-digit',
+    minute: '2-digit',
+    timeZone,
+    timeZoneName: zoneSaid ? 'short' : undefined,
+  })
+  return { date, time }
 }
 
 /** The draft of a version, as it was kept when it was first printed, else drawn afresh. @throws DraftingError */

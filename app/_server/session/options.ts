@@ -7,6 +7,7 @@ import { requestAddress } from '../address'
 import { appOrigin } from '../config'
 import { log } from '../log'
 import { refusalOf } from '../problems'
+import { deviceWords } from './device-words'
 import { safePath } from './safe-path'
 import { cookieAge } from './session-cookie'
 
@@ -32,10 +33,12 @@ export function authOptions(): NextAuthOptions {
       CredentialsProvider({
         credentials: { email: { type: 'email' }, password: { type: 'password' } },
         async authorize(credentials, request) {
-          const address = requestAddress(new Headers(request.headers as Record<string, string>))
+          const headers = new Headers(request.headers as Record<string, string>)
+          const address = requestAddress(headers)
+          const device = deviceWords(headers.get('user-agent'))
           const { email, password } = credentials ?? { email: '', password: '' }
           try {
-            const { userId, sessionId } = await signIn({ email, password }, address)
+            const { userId, sessionId } = await signIn({ email, password }, address, device)
             log.info({ userId, sessionId }, 'signed in')
             return { id: userId, sessionId }
           } catch (error) {

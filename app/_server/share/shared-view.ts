@@ -27,8 +27,8 @@ export interface SharedView {
   readonly name: string
   readonly garment: string
   readonly workroom: string
-  /** When the version was saved, in words. */
-  readonly saved: string
+  /** When the version was saved, ISO 8601: the visitor's page says it in the visitor's own time zone. */
+  readonly savedAt: string
   /** The unit that the drafter works in. */
   readonly unit: Unit
   /** The drawing with its lengths in both units, as SVG text. */
@@ -60,7 +60,7 @@ export function sharedView(share: OpenedShare): SharedView {
     name: share.draftName,
     garment,
     workroom: share.workroomName,
-    saved: savedInWords(share.savedAt),
+    savedAt: share.savedAt,
     unit: share.order.unit ?? 'cm',
     svg: sharedSvg(draft, `${share.draftName}: ${garment.toLowerCase()}`),
     pieces: draft.pieces.map(({ name, cut }) => ({ name, cut: cut.map(cuttingWords) })),
@@ -69,12 +69,6 @@ export function sharedView(share: OpenedShare): SharedView {
     sheets: { a4: sheets(draft, 'a4'), letter: sheets(draft, 'letter') },
     steps: share.scope === 'lesson' ? stepsOf(draft, draftGarment({ ...share.order, unit: 'in' })) : null,
   }
-}
-
-function savedInWords(savedAt: string): string {
-  const at = new Date(savedAt)
-  const words = at.toLocaleString('en-GB', { dateStyle: 'long', timeStyle: 'short', timeZone: 'UTC' })
-  return `${words} UTC`
 }
 
 function sharedSvg(draft: Draft, title: string): string {

@@ -6,6 +6,7 @@ import type { SharedView } from '@/app/_server/share/shared-view'
 import { useShared } from '@/app/(site)/_data/shared'
 import { firstChoices } from '@/components/print/print-choices'
 import { PrintForm } from '@/components/print/print-form'
+import { Moment } from '@/components/ui/moment'
 import NoSuchLink from '../not-found'
 import { Checks, Lengths, Pieces } from './lists'
 import { Steps } from './steps'
@@ -26,7 +27,7 @@ export function SharedDraft({ token, opened }: { readonly token: string; readonl
             {view.name}
           </h1>
           <p className="mt-1 text-walnut">
-            {view.garment}, drafted by {view.workroom}. Saved {view.saved}.
+            {view.garment}, drafted by {view.workroom}. Saved <Moment at={view.savedAt} />.
           </p>
         </div>
         <UnitChoice unit={unit} onChange={setUnit} />
