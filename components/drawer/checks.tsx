@@ -5,9 +5,10 @@ import { formatLength } from '@/drafting/lengths'
 import type { Fit, SeamCheck } from '@/drafting/contract'
 import { classes } from '@/components/ui/classes'
 import { Note } from '@/components/ui/error-note'
-import { typeset } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
 import { useStudioState } from '@/components/studio/use-store'
-import { runsLength, seamAgrees } from './runs'
+import { piecesById, runsLength } from '@/drafting/pieces/runs'
+import { seamAgrees } from '@/drafting/pieces/seam-agrees'
 import { wordsOf } from './choices'
 
 /** What a look over the pattern would find: seams walked, the body it closes on, and what is odd. */
@@ -22,11 +23,11 @@ export function Checks({
   const draft = useStudioState((state) => state.draft)
   const unit = useStudioState((state) => state.unit)
   if (!draft) return <p className="p-4 text-walnut">Nothing is drawn yet, so there is nothing to check.</p>
-  const length = (mm: number) => typeset(formatLength(mm, unit))
+  const byId = piecesById(draft.pieces)
+  const length = (mm: number) => typesetFractions(formatLength(mm, unit))
 
   function seamWords(seam: SeamCheck): string {
-    if (!draft) return ''
-    const sides = `${length(runsLength(draft, seam.a))} on ${length(runsLength(draft, seam.b))}`
+    const sides = `${length(runsLength(seam.a, byId))} on ${length(runsLength(seam.b, byId))}`
     const ease = seam.ease
       ? `, ${length(seam.ease)} ${seam.join === 'gathered' ? 'gathered' : 'eased'} in`
       : ''
@@ -45,7 +46,7 @@ export function Checks({
           <h2 className="font-semibold">Worth a look</h2>
           {draft.cautions.map((caution, index) => (
             <Note key={`${caution.code}:${index}`} kind="caution" className="text-sm">
-              {typeset(caution.message)}
+              {typesetFractions(caution.message)}
             </Note>
           ))}
         </section>

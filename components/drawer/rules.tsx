@@ -5,7 +5,7 @@ import { rulesInForce } from '@/drafting'
 import type { RuleInForce } from '@/drafting/contract'
 import { formatLength } from '@/drafting/lengths'
 import { FieldFrame, controlClass } from '@/components/ui/field'
-import { typeset } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
 import type { FieldRef } from '@/components/studio/field-ref'
 import { problemsAt } from '@/components/studio/store'
 import { useStudio, useStudioState } from '@/components/studio/use-store'
@@ -54,7 +54,7 @@ function Rule({ rule }: { readonly rule: RuleInForce }) {
   }
 
   return (
-    <FieldFrame label={rule.name} error={problem} hint={sum ? typeset(sum) : undefined}>
+    <FieldFrame label={rule.name} error={problem} hint={sum ? typesetFractions(sum) : undefined}>
       {(control) => (
         <>
           <input

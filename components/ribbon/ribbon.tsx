@@ -2,7 +2,8 @@
 
 import { useRef, type KeyboardEvent, type PointerEvent } from 'react'
 import type { Step } from '@/drafting/contract'
-import { plainText, typeset } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
+import { plainText } from '@/components/ui/typed-fractions'
 
 /** The sentence of a step: what is done, then the sum behind it. */
 export function stepWords(step: Step): string {
@@ -83,7 +84,7 @@ export function Ribbon({
         <p className="absolute inset-x-0 top-1 truncate text-sm" aria-hidden>
           {step ? (
             <>
-              <span className="font-semibold">{now + 1}</span> {typeset(stepWords(step))}
+              <span className="font-semibold">{now + 1}</span> {typesetFractions(stepWords(step))}
             </>
           ) : (
             <span className="text-walnut">

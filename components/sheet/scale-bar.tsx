@@ -1,4 +1,4 @@
-import { typeset } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
 
 /** Lengths that a scale bar may show. */
 const rounds = {
@@ -19,7 +19,7 @@ export function ScaleBar({ scale, unit }: { readonly scale: number; readonly uni
       aria-hidden
     >
       <div>
-        <span className="measure">{typeset(bar?.words ?? '')}</span>
+        <span className="measure">{typesetFractions(bar?.words ?? '')}</span>
         <svg width={width + 2} height="8" fill="none" stroke="currentColor" className="block">
           <path d={`M1 1v6h${width}v-6`} />
         </svg>

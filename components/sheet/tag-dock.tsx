@@ -6,7 +6,8 @@ import type { Dimension } from '@/drafting/contract'
 import type { FieldRef } from '@/components/studio/field-ref'
 import { useField } from '@/components/studio/use-field'
 import { useStudioState } from '@/components/studio/use-store'
-import { plainText, typeset } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
+import { plainText } from '@/components/ui/typed-fractions'
 import { withFraction } from './with-fraction'
 
 const eighths = ['0', '1/8', '1/4', '3/8', '1/2', '5/8', '3/4', '7/8'] as const
@@ -61,7 +62,7 @@ export function TagDock({
               name={part}
               onPress={() => field.type(withFraction(plainText(field.input.value), part))}
             >
-              {part === '0' ? '0' : typeset(part)}
+              {part === '0' ? '0' : typesetFractions(part)}
             </Key>
           ))}
         </div>

@@ -2,7 +2,7 @@
 
 import { memo } from 'react'
 import { classes } from '@/components/ui/classes'
-import { typeset } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
 import type { FieldRef } from '@/components/studio/field-ref'
 import { useField } from '@/components/studio/use-field'
 import { useStudioState } from '@/components/studio/use-store'
@@ -32,14 +32,14 @@ export const ResultTag = memo(function ResultTag({
   return (
     <li data-tag={id} className={classes(shape, 'text-walnut')} title={label}>
       <span aria-hidden className="measure block bg-sheet/85 px-1.5 py-0.5 group-data-folded:hidden">
-        {typeset(formatLength(length, unit))}
+        {typesetFractions(formatLength(length, unit))}
       </span>
       <span
         aria-hidden
         className="m-2 hidden size-2 rounded-full bg-rule group-data-folded:block group-hover:hidden"
       />
       <span aria-hidden className="measure hidden bg-sheet px-1.5 py-0.5 group-data-folded:group-hover:block">
-        {label} {typeset(formatLength(length, unit))}
+        {label} {typesetFractions(formatLength(length, unit))}
       </span>
       <span className="sr-only">{`${label} ${lengthInWords(length, unit)}`}</span>
     </li>
@@ -81,7 +81,7 @@ export const ValueTag = memo(function ValueTag({
             'measure min-h-6 min-w-6 px-1.5 group-data-folded:rounded-full group-data-folded:px-0',
           )}
         >
-          <span className="group-data-folded:hidden">{typeset(field.input.value)}</span>
+          <span className="group-data-folded:hidden">{typesetFractions(field.input.value)}</span>
           <span
             aria-hidden
             className="mx-auto hidden size-2 rounded-full bg-indigo group-data-folded:block"

@@ -1,6 +1,6 @@
 import type { Draft, Run } from '@/drafting/contract'
 import type { Emphasis } from '@/components/sheet/stage'
-import { runPath } from '@/components/drawer/runs'
+import { piecesById, runPath } from '@/drafting/pieces/runs'
 
 /** Both sides of a chosen seam, or the lines along which a chosen fit is measured. */
 export function chosenEmphasis(draft: Draft, chosen: string | undefined): readonly Emphasis[] {
@@ -21,8 +21,9 @@ export function chosenEmphasis(draft: Draft, chosen: string | undefined): readon
 }
 
 function side(draft: Draft, runs: readonly Run[], kind: Emphasis['kind']): readonly Emphasis[] {
+  const pieces = piecesById(draft.pieces)
   return runs.flatMap((run, index) => {
-    const path = runPath(draft, run)
+    const path = runPath(run, pieces)
     return path ? [{ id: `${run.piece}/${run.edge}:${index}`, piece: run.piece, path, kind }] : []
   })
 }

@@ -2,7 +2,7 @@
 
 import { useState, type ChangeEvent, type FocusEvent, type KeyboardEvent } from 'react'
 import { DraftingError } from '@/drafting/drafting-error'
-import { typesetTyped } from '@/components/ui/typeset'
+import { typesetTyped } from '@/components/ui/typed-fractions'
 import type { FieldRef } from './field-ref'
 import { problemsAt } from './store'
 import { useStudio, useStudioState } from './use-store'

@@ -1,7 +1,7 @@
 import type { DesignValue, DraftOrder, GarmentDefinition } from '@/drafting/contract'
 import { DraftingError } from '@/drafting/drafting-error'
 import { lengthDigits, parseLength, readNumber } from '@/drafting/lengths'
-import { plainText } from '@/components/ui/typeset'
+import { plainText } from '@/components/ui/typed-fractions'
 import type { FieldRef, FieldValue } from './field-ref'
 import { partsOf, valueOf } from './field-ref'
 import type { Unit } from './state'

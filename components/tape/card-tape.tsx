@@ -3,7 +3,8 @@
 import { TriangleAlert } from 'lucide-react'
 import { useId, type ReactNode } from 'react'
 import { classes } from '@/components/ui/classes'
-import { typeset, typesetTyped } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
+import { typesetTyped } from '@/components/ui/typed-fractions'
 import { Figure } from './figure'
 
 /** One measurement as it hangs on the tape. */
@@ -140,10 +141,10 @@ function Row({
         {row.caution && (
           <p className="flex gap-1.5 text-weld">
             <TriangleAlert size={16} aria-hidden className="mt-0.5 shrink-0" />
-            <span className="max-w-120">{typeset(row.caution)}</span>
+            <span className="max-w-120">{typesetFractions(row.caution)}</span>
           </p>
         )}
-        {row.estimate && !row.text && <p className="measure text-walnut">{typeset(row.estimate)}</p>}
+        {row.estimate && !row.text && <p className="measure text-walnut">{typesetFractions(row.estimate)}</p>}
       </div>
     </li>
   )

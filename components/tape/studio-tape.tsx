@@ -3,7 +3,7 @@
 import { PanelLeftClose, Ruler } from 'lucide-react'
 import { useState } from 'react'
 import type { MeasurementDefinition } from '@/drafting/contract'
-import { typeset } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
 import { ValueField } from '@/components/studio/value-field'
 import { useStudio, useStudioState } from '@/components/studio/use-store'
 import { shownText } from '@/components/studio/values'
@@ -85,7 +85,7 @@ function RailEntry({
         onClick={onOpen}
         className="relative block min-h-11 w-full px-1.5 py-0.5 text-left hover:text-indigo"
       >
-        <span className="measure block font-semibold">{text ? typeset(text) : '–'}</span>
+        <span className="measure block font-semibold">{text ? typesetFractions(text) : '–'}</span>
         <span className="line-clamp-2 block pr-3 text-[12px] leading-3.5 text-walnut">{name}</span>
       </button>
     </li>

@@ -1,4 +1,4 @@
-import { typeset } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
 
 /** A quarter of a dress marked on folded cloth, the way the first steps of a draft look. Ours; a picture, not a pattern. */
 const outline =
@@ -53,7 +53,7 @@ export function CuttingTable() {
       <g fill="var(--walnut)" fontSize="15" className="measure">
         {tags.map(({ x, y, text, turn }) => (
           <text key={text} x={x} y={y} transform={`rotate(${turn} ${x} ${y})`}>
-            {typeset(text)}
+            {typesetFractions(text)}
           </text>
         ))}
       </g>

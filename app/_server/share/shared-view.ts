@@ -4,7 +4,8 @@ import { draftGarment } from '@/drafting'
 import type { Draft, Unit } from '@/drafting/contract'
 import { arrange, cuttingWords, drawing, layOut, paperOf, toSvg, typesetFractions } from '@/drafting/drawing'
 import { formatLength } from '@/drafting/lengths'
-import { runLength } from '@/drafting/pieces/runs'
+import { piecesById, runsLength } from '@/drafting/pieces/runs'
+import { seamAgrees } from '@/drafting/pieces/seam-agrees'
 import { garmentName } from '../print/pattern-of'
 
 /** The same words in either unit: the visitor chooses, the server is not asked again. */
@@ -42,8 +43,6 @@ export interface SharedView {
   readonly steps: readonly SharedStep[] | null
 }
 
-/** More than this apart, mm, two edges do not sew together. */
-const seamTolerance = 0.5
 /** Texts must be read on a screen on which the whole sheet shows. */
 const textScale = 3.2
 
@@ -97,17 +96,14 @@ function tagsOf(draft: Draft): SharedView['tags'] {
 }
 
 function checksOf(draft: Draft): readonly SharedCheck[] {
-  const pieces = new Map(draft.pieces.map((piece) => [piece.id, piece]))
+  const pieces = piecesById(draft.pieces)
   return draft.seams.map((seam) => {
-    const [a, b] = [seam.a, seam.b].map((runs) =>
-      both(runs.reduce((sum, run) => sum + runLength(run, pieces), 0)),
-    )
+    const [a, b] = [seam.a, seam.b].map((runs) => both(runsLength(runs, pieces)))
     const ease = both(seam.ease)
     const eased = seam.join === 'gathered' ? 'gathered' : 'eased'
     const say = (unit: Unit) =>
       `${a?.[unit]} on ${b?.[unit]}${seam.ease ? `, ${ease[unit]} ${eased} in` : ''}`
-    const good = Math.abs(seam.difference) <= seamTolerance
-    return { name: seam.name, good, words: { in: say('in'), cm: say('cm') } }
+    return { name: seam.name, good: seamAgrees(seam), words: { in: say('in'), cm: say('cm') } }
   })
 }
 

@@ -1,7 +1,7 @@
 import { DraftingError } from '@/drafting/drafting-error'
 import { completeCard, estimates, measurementById, reviewMeasurements } from '@/drafting/body'
 import { formatLength, lengthDigits, parseLength } from '@/drafting/lengths'
-import { plainText } from '@/components/ui/typeset'
+import { plainText } from '@/components/ui/typed-fractions'
 
 export type Unit = 'in' | 'cm'
 

@@ -1,5 +1,5 @@
 import Link from 'next/link'
-import { typeset } from '@/components/ui/typeset'
+import { typesetFractions } from '@/drafting/drawing/typeset'
 import type { Card } from '@/db/access/cards'
 import { formatLength } from '@/drafting/lengths'
 import { dayText } from '../../_data/dates'
@@ -18,7 +18,7 @@ export function CardRows({ cards }: { readonly cards: readonly Card[] }) {
       {cards.map((card) => {
         const figures = shown.flatMap(([id, word]) => {
           const value = card.values[id]
-          return value ? [`${word} ${typeset(formatLength(value.mm, card.unit))}`] : []
+          return value ? [`${word} ${typesetFractions(formatLength(value.mm, card.unit))}`] : []
         })
         return (
           <li key={card.id} className="border-t hairline first:border-t-0">
