@@ -4,7 +4,6 @@ import { invalid, notFound } from '../access-error'
 import { checkInput } from '../check-input'
 import { Client } from '../models/client'
 import { Draft } from '../models/draft'
-import { Membership } from '../models/membership'
 import { Revision } from '../models/revision'
 import { type Actor, reachOf, requireReach } from '../permissions'
 import {
@@ -19,6 +18,7 @@ import { inTransaction } from '../transactions'
 import { getCard } from './cards'
 import { getClient } from './clients'
 import { knownId } from './known-id'
+import { memberNames } from './member-names'
 import { type Listed, containing, listed, pageWindow } from './pages'
 import { draftsWithin, mayKnowClients } from './reaches'
 import { type SavedRevision, plainRevision, revisionRow } from './revisions'
@@ -32,8 +32,9 @@ export interface DraftSummary {
   readonly clientId: string | null
   readonly clientName: string | null
   readonly cardId: string | null
-  /** The member who is to make it up. */
+  /** The member who is to make it up, and that member's name; null for tutors and students. */
   readonly assignedTo: string | null
+  readonly assignedToName: string | null
   readonly archived: boolean
   readonly updatedAt: string
 }
@@ -54,6 +55,12 @@ async function summaries(actor: Actor, drafts: readonly Draft[]): Promise<DraftS
         raw: true,
       })
     : []
+  const names = known
+    ? await memberNames(
+        actor,
+        drafts.flatMap((draft) => draft.assignedTo ?? []),
+      )
+    : new Map()
   return drafts.map((draft) => {
     const client = clients.find((each) => each.id === draft.clientId)
     return {
@@ -64,14 +71,16 @@ async function summaries(actor: Actor, drafts: readonly Draft[]): Promise<DraftS
       clientId: client?.id ?? null,
       clientName: client?.name ?? null,
       cardId: known || draft.madeBy === actor.membershipId ? draft.cardId : null,
-      assignedTo: draft.assignedTo,
+      assignedTo: known ? draft.assignedTo : null,
+      assignedToName: (draft.assignedTo && names.get(draft.assignedTo)) || null,
       archived: draft.archivedAt !== null,
       updatedAt: draft.updatedAt.toISOString(),
     }
   })
 }
 
-async function findDraft(actor: Actor, id: string, action: 'read' | 'write'): Promise<Draft> {
+/** The row of a draft that the actor may read or write. @throws AccessError not-found */
+export async function findDraft(actor: Actor, id: string, action: 'read' | 'write'): Promise<Draft> {
   const draft = await Draft.findOne({
     where: { [Op.and]: [await draftsWithin(actor, action), { id: knownId(id, 'draft') }] },
   })
@@ -79,7 +88,8 @@ async function findDraft(actor: Actor, id: string, action: 'read' | 'write'): Pr
   return draft
 }
 
-async function summaryOf(actor: Actor, draft: Draft): Promise<DraftSummary> {
+/** One draft as lists show it. */
+export async function summaryOf(actor: Actor, draft: Draft): Promise<DraftSummary> {
   const [summary] = await summaries(actor, [draft])
   if (!summary) throw notFound('draft')
   return summary
@@ -173,20 +183,4 @@ export async function renameDraft(actor: Actor, id: string, name: string): Promi
 export async function archiveDraft(actor: Actor, id: string, archived = true): Promise<DraftSummary> {
   const draft = await findDraft(actor, id, 'write')
   return summaryOf(actor, await draft.update({ archivedAt: archived ? new Date() : null }))
-}
-
-/** Gives a draft to a member to make up; null takes it back. @throws AccessError not-found */
-export async function assignDraft(
-  actor: Actor,
-  id: string,
-  membershipId: string | null,
-): Promise<DraftSummary> {
-  const draft = await findDraft(actor, id, 'write')
-  if (membershipId !== null) {
-    const member = await Membership.count({
-      where: { id: knownId(membershipId, 'member'), workroomId: actor.workroomId, disabledAt: null },
-    })
-    if (member === 0) throw notFound('member')
-  }
-  return summaryOf(actor, await draft.update({ assignedTo: membershipId }))
 }

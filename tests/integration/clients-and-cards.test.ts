@@ -1,7 +1,9 @@
 import { beforeAll, describe, expect, it } from 'vitest'
 import { createCard, getCard, listCards, updateCard } from '@/db/access/cards'
 import { archiveClient, createClient, getClient, listClients, updateClient } from '@/db/access/clients'
-import { assignDraft } from '@/db/access/drafts'
+import { assignDraft, listMakers } from '@/db/access/assigning'
+import { listDrafts } from '@/db/access/drafts'
+import type { Actor } from '@/db/permissions'
 import { newId } from '@/db/new-id'
 import { cardInput, clientInput, startDraft } from '../support/draft-inputs'
 import { refusal } from '../support/refusal'
@@ -145,6 +147,33 @@ describe('measure cards', () => {
     expect((await getCard(maker.actor, card.id)).values.bust?.typed).toBe('36 1/2')
     await refusal(getClient(maker.actor, other.id), 'not-found')
     await refusal(updateCard(maker.actor, card), 'forbidden')
+  })
+
+  it('go with the draft: given on or taken back, the maker sees it no more', async () => {
+    const [maker, other] = [await workroom.person('maker'), await workroom.person('maker')]
+    const draft = await startDraft(owner.actor)
+    const seen = async (actor: Actor) => (await listDrafts(actor)).items.map(({ id }) => id)
+    const given = await assignDraft(owner.actor, draft.id, maker.actor.membershipId)
+    expect(given.assignedToName).toBe('Test maker')
+    expect([await seen(maker.actor), await seen(other.actor)]).toEqual([[draft.id], []])
+    await assignDraft(owner.actor, draft.id, other.actor.membershipId)
+    expect([await seen(maker.actor), await seen(other.actor)]).toEqual([[], [draft.id]])
+    await assignDraft(owner.actor, draft.id, null)
+    expect([await seen(maker.actor), await seen(other.actor)]).toEqual([[], []])
+  })
+
+  it('are given to makers of the workroom only, by its owner and drafters only', async () => {
+    const [maker, tutor] = [await workroom.person('maker'), await workroom.person('tutor')]
+    const stranger = await (await makeWorkroom()).person('maker')
+    const draft = await startDraft(owner.actor)
+    for (const { actor } of [tutor, stranger])
+      await refusal(assignDraft(owner.actor, draft.id, actor.membershipId), 'invalid')
+    const own = await startDraft(tutor.actor)
+    await refusal(assignDraft(tutor.actor, own.id, maker.actor.membershipId), 'forbidden')
+    await refusal(listMakers(maker.actor), 'forbidden')
+    const makers = (await listMakers(owner.actor)).map(({ membershipId }) => membershipId)
+    expect(makers).toContain(maker.actor.membershipId)
+    expect(makers).not.toContain(tutor.actor.membershipId)
   })
 
   it('are not for tutors', async () => {

@@ -257,4 +257,8 @@ export const endpoints: Readonly<Record<string, Endpoint>> = {
     outOfReach: ['tutor', 'student'],
     input: ({ draftId }) => ({ id: draftId, name: 'Renamed' }),
   },
+  'app/(workroom)/drafts/actions.ts#giveDraft': {
+    access: drafters,
+    input: ({ draftId, membershipId }) => ({ id: draftId, membershipId }),
+  },
 }

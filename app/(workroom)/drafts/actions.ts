@@ -3,6 +3,7 @@
 import { revalidatePath } from 'next/cache'
 import * as z from 'zod'
 import { workroomAction } from '@/app/_server/session'
+import { assignDraft } from '@/db/access/assigning'
 import { getCard } from '@/db/access/cards'
 import { createDraft, renameDraft as rename } from '@/db/access/drafts'
 import { getMethod } from '@/db/access/methods'
@@ -68,5 +69,15 @@ export const renameDraft = workroomAction(
   async (actor, { id, name }) => {
     await rename(actor, id, name)
     revalidatePath('/drafts')
+  },
+)
+
+/** Gives a draft to a maker, or takes it back. */
+export const giveDraft = workroomAction(
+  z.strictObject({ id: idShape, membershipId: idShape.nullable() }),
+  async (actor, { id, membershipId }) => {
+    const { assignedToName } = await assignDraft(actor, id, membershipId)
+    revalidatePath('/drafts')
+    return { assignedToName }
   },
 )

@@ -3,7 +3,7 @@ import { expect, type Page } from '@playwright/test'
 /** Signs in one of the invented people of the demo workroom. */
 export async function signInToDemo(
   page: Page,
-  who: 'owner' | 'drafter' | 'maker' | 'student' = 'owner',
+  who: 'owner' | 'drafter' | 'tutor' | 'maker' | 'student' = 'owner',
 ): Promise<void> {
   await page.goto('/sign-in')
   await page.getByLabel('E-mail address').fill(`${who}@linden-lane.example`)

@@ -5,10 +5,11 @@ import { forPage, requireActor } from '@/app/_server/session'
 import { ButtonLink } from '@/components/ui/button'
 import { Card } from '@/components/ui/card'
 import { Page } from '@/components/ui/page'
+import { listMakers } from '@/db/access/assigning'
 import { listCards } from '@/db/access/cards'
 import { getClient } from '@/db/access/clients'
 import { listDrafts } from '@/db/access/drafts'
-import { may } from '@/db/permissions'
+import { may, reachOf } from '@/db/permissions'
 import { dayText } from '../../_data/dates'
 import { DraftRows } from '../../drafts/_parts/draft-rows'
 import { ArchiveButton } from '../_parts/archive-button'
@@ -20,8 +21,12 @@ export default async function ClientPage({ params }: { params: Promise<{ id: str
   const { id } = await params
   const actor = await requireActor(`/clients/${id}`)
   const client = await forPage(getClient(actor, id))
-  const [cards, drafts] = await forPage(
-    Promise.all([listCards(actor, id), listDrafts(actor, { clientId: id })]),
+  const [cards, drafts, makers] = await forPage(
+    Promise.all([
+      listCards(actor, id),
+      listDrafts(actor, { clientId: id }),
+      reachOf(actor, 'drafts', 'write').has('all') ? listMakers(actor) : [],
+    ]),
   )
   const writable = may(actor, 'clients', 'write')
   const draftable = may(actor, 'drafts', 'write')
@@ -69,7 +74,7 @@ export default async function ClientPage({ params }: { params: Promise<{ id: str
                   : 'Nothing drafted yet. Choose a garment and a measure card with “New draft”.'}
               </p>
             ) : (
-              <DraftRows drafts={drafts.items} withClient={false} />
+              <DraftRows drafts={drafts.items} withClient={false} makers={makers} />
             )}
             {drafts.pages > 1 && (
               <p className="mt-4 text-sm">

@@ -1,8 +1,10 @@
 import Link from 'next/link'
 import { Table } from '@/components/ui/table'
+import type { Maker } from '@/db/access/assigning'
 import type { DraftSummary } from '@/db/access/drafts'
 import { garments } from '@/drafting'
 import { dayText } from '../../_data/dates'
+import { MakerChoice } from './maker-choice'
 
 const garmentName = (id: string) => garments.find((garment) => garment.id === id)?.name ?? id
 
@@ -10,9 +12,12 @@ const garmentName = (id: string) => garments.find((garment) => garment.id === id
 export function DraftRows({
   drafts,
   withClient = true,
+  makers = [],
 }: {
   readonly drafts: readonly DraftSummary[]
   readonly withClient?: boolean
+  /** Whom the drafts can be given to, where the person may give them out. */
+  readonly makers?: readonly Maker[]
 }) {
   return (
     <Table
@@ -42,6 +47,15 @@ export function DraftRows({
             ]
           : []),
         { id: 'garment', head: 'Garment', cell: (draft) => garmentName(draft.garment) },
+        ...(makers.length > 0
+          ? [
+              {
+                id: 'maker',
+                head: 'Made up by',
+                cell: (draft: DraftSummary) => <MakerChoice draft={draft} makers={makers} />,
+              },
+            ]
+          : []),
         { id: 'changed', head: 'Last change', end: true, cell: (draft) => dayText(draft.updatedAt) },
       ]}
     />
