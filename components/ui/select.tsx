@@ -14,22 +14,34 @@ export function Select({
   hideLabel,
   className,
   choices,
+  groups = [],
   ...rest
 }: FieldWords & {
   readonly className?: string
   readonly choices: readonly Choice[]
+  /** More choices, under headings, after the others. */
+  readonly groups?: readonly { readonly label: string; readonly choices: readonly Choice[] }[]
 } & ComponentProps<'select'>) {
   return (
     <FieldFrame {...{ label, hint, error, hideLabel, className }}>
       {(control) => (
         <select {...rest} {...control} className={controlClass}>
-          {choices.map((choice) => (
-            <option key={choice.value} value={choice.value}>
-              {choice.label}
-            </option>
+          {choices.map(option)}
+          {groups.map((group) => (
+            <optgroup key={group.label} label={group.label}>
+              {group.choices.map(option)}
+            </optgroup>
           ))}
         </select>
       )}
     </FieldFrame>
+  )
+}
+
+function option({ value, label }: Choice) {
+  return (
+    <option key={value} value={value}>
+      {label}
+    </option>
   )
 }

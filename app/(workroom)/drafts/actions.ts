@@ -10,7 +10,7 @@ import { getMethod } from '@/db/access/methods'
 import { engineMeasurements } from '@/db/access/own-measurements'
 import { getWorkroom } from '@/db/access/workrooms'
 import type { Actor } from '@/db/permissions'
-import { draftNameShape } from '@/db/shapes/draft'
+import { draftNameShape, draftPurposes } from '@/db/shapes/draft'
 import { idShape } from '@/db/shapes/ids'
 import { invalid } from '@/db/access-error'
 import { garments, methods } from '@/drafting'
@@ -27,6 +27,7 @@ const started = z
     sizeId: z.string().max(80).optional(),
     /** A built-in method's, or that of one of the workroom's own. */
     methodId: z.string().max(60).optional(),
+    purpose: z.enum(draftPurposes).optional(),
   })
   .refine(({ cardId, sizeId }) => (cardId === undefined) !== (sizeId === undefined), {
     path: ['cardId'],
@@ -42,7 +43,7 @@ async function chosenMethod(actor: Actor, id: string | undefined) {
 /** Starts a draft: a garment on a measure card or a published size, by a drafting method, with the workroom's usual allowances. */
 export const startDraft = workroomAction(
   started,
-  async (actor, { id, revisionId, name, garment, cardId, sizeId, methodId }) => {
+  async (actor, { id, revisionId, name, garment, cardId, sizeId, methodId, purpose }) => {
     const definition = garments.find((each) => each.id === garment)
     if (!definition) throw invalid('garment', 'Choose a garment from the list.')
     const [card, workroom, method, own] = await Promise.all([
@@ -57,7 +58,16 @@ export const startDraft = workroomAction(
       method,
       own,
     })
-    await createDraft(actor, { id, revisionId, name, clientId: card?.clientId, cardId, order, typed })
+    await createDraft(actor, {
+      id,
+      revisionId,
+      name,
+      purpose,
+      clientId: card?.clientId,
+      cardId,
+      order,
+      typed,
+    })
     revalidatePath('/drafts')
     return { id }
   },

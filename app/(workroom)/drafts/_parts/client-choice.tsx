@@ -11,18 +11,26 @@ export function ClientChoice({
   readonly clients: readonly { readonly id: string; readonly name: string }[]
   readonly search: string
 }) {
+  const forNobody = (
+    <p className="mt-6">
+      <ButtonLink href="/drafts/new?for=nobody">For nobody in particular: a published size</ButtonLink>
+    </p>
+  )
   if (clients.length === 0 && !search) {
     return (
-      <EmptyState
-        title="No clients yet"
-        action={
-          <ButtonLink href="/clients/new" look="primary">
-            Add a client
-          </ButtonLink>
-        }
-      >
-        <p>Add the person first, take the measurements, then draft.</p>
-      </EmptyState>
+      <>
+        <EmptyState
+          title="No clients yet"
+          action={
+            <ButtonLink href="/clients/new" look="primary">
+              Add a client
+            </ButtonLink>
+          }
+        >
+          <p>Add the person first, take the measurements, then draft.</p>
+        </EmptyState>
+        {forNobody}
+      </>
     )
   }
   return (
@@ -41,11 +49,7 @@ export function ClientChoice({
           </li>
         ))}
       </ul>
-      <p className="mt-6">
-        <Link href="/drafts/new?for=nobody" className="text-indigo underline underline-offset-4">
-          For nobody in particular: a published size
-        </Link>
-      </p>
+      {forNobody}
     </>
   )
 }

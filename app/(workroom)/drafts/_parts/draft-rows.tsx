@@ -52,7 +52,8 @@ export function DraftRows({
               {
                 id: 'maker',
                 head: 'Made up by',
-                cell: (draft: DraftSummary) => <MakerChoice draft={draft} makers={makers} />,
+                cell: (draft: DraftSummary) =>
+                  draft.purpose === 'work' && <MakerChoice draft={draft} makers={makers} />,
               },
             ]
           : []),

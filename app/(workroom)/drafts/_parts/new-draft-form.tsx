@@ -3,13 +3,15 @@
 import { useRouter } from 'next/navigation'
 import { useState, useTransition, type FormEvent } from 'react'
 import { v7 as newId } from 'uuid'
-import { classes } from '@/components/ui/classes'
 import { Button } from '@/components/ui/button'
+import { Checkbox } from '@/components/ui/checkbox'
 import { ErrorNote } from '@/components/ui/error-note'
 import { Field } from '@/components/ui/field'
 import { Select } from '@/components/ui/select'
-import { GarmentPicture } from '@/components/forms/garment-picture'
 import { startDraft } from '../actions'
+import { GarmentChoice } from './garment-choice'
+import type { PicturedGarment } from './garment-pictures'
+import type { SizeTable } from './published-sizes'
 
 interface Named {
   readonly id: string
@@ -26,22 +28,26 @@ export function NewDraftForm({
   cards,
   sizes,
   methods,
-  cardId,
+  first,
+  teachable,
 }: {
-  readonly garments: readonly Named[]
+  readonly garments: readonly PicturedGarment[]
   readonly cards: readonly Named[]
   /** Published sizes, where the draft is for nobody in particular. */
-  readonly sizes: readonly Named[]
+  readonly sizes: readonly SizeTable[]
   /** Built in, and the workroom's own. */
   readonly methods: readonly Method[]
-  readonly cardId: string | undefined
+  /** The card or the size that the choice begins with. */
+  readonly first: string
+  /** Whether the person may make it a teaching draft, which others may read. */
+  readonly teachable: boolean
 }) {
   const router = useRouter()
   const [ids] = useState(() => ({ id: newId(), revisionId: newId() }))
   const [garment, setGarment] = useState(garments[0]?.id ?? '')
-  const [body, setBody] = useState(
-    (cards.find((each) => each.id === cardId) ?? cards[0] ?? sizes[0])?.id ?? '',
-  )
+  const [body, setBody] = useState(first)
+  const [teaching, setTeaching] = useState(false)
+  const table = sizes.find((each) => each.sizes.some(({ id }) => id === body))
   const [method, setMethod] = useState(methods[0]?.id ?? '')
   const onCard = cards.some((each) => each.id === body)
   const [named, setNamed] = useState<string>()
@@ -60,6 +66,7 @@ export function NewDraftForm({
           garment,
           methodId: method,
           ...(onCard ? { cardId: body } : { sizeId: body }),
+          ...(teaching ? { purpose: 'teaching' } : {}),
         })
         if (result.ok) router.push(`/drafts/${ids.id}`)
         else setProblems(result.problems)
@@ -72,37 +79,18 @@ export function NewDraftForm({
   return (
     <form onSubmit={submit} noValidate className="grid gap-6">
       <ErrorNote>{problem('') ?? problem('id') ?? problem('garment') ?? problem('order')}</ErrorNote>
-      <fieldset>
-        <legend className="mb-2 text-sm font-semibold">Garment</legend>
-        <div className="grid grid-cols-2 gap-3 sm:grid-cols-3">
-          {garments.map((each) => (
-            <label
-              key={each.id}
-              className={classes(
-                'grid cursor-pointer justify-items-center gap-2 border bg-sheet p-4 has-focus-visible:outline-2 has-focus-visible:outline-indigo',
-                garment === each.id ? 'border-indigo' : 'hairline',
-              )}
-            >
-              <input
-                type="radio"
-                name="garment"
-                value={each.id}
-                checked={garment === each.id}
-                onChange={() => setGarment(each.id)}
-                className="sr-only"
-              />
-              <GarmentPicture garment={each.id} className="h-32" />
-              <span className={garment === each.id ? 'font-semibold' : undefined}>{each.name}</span>
-            </label>
-          ))}
-        </div>
-      </fieldset>
+      <GarmentChoice garments={garments} chosen={garment} onChoose={setGarment} />
       <Select
         label={sizes.length > 0 ? 'Measurements' : 'Measure card'}
         value={body}
         onChange={(event) => setBody(event.target.value)}
         error={problem('cardId') ?? problem('sizeId')}
-        choices={[...cards, ...sizes].map((each) => ({ value: each.id, label: each.name }))}
+        hint={table && `A published size of ${table.name}.`}
+        choices={cards.map((each) => ({ value: each.id, label: each.name }))}
+        groups={sizes.map((table) => ({
+          label: table.name,
+          choices: table.sizes.map((size) => ({ value: size.id, label: size.name })),
+        }))}
       />
       <Select
         label="Drafting method"
@@ -119,6 +107,14 @@ export function NewDraftForm({
         error={problem('name')}
         hint="As you will look for it: Wedding guest dress, Sunday skirt."
       />
+      {teachable && (
+        <Checkbox
+          label="A teaching draft"
+          hint="The workroom’s tutors may read it, and its students once it is shared by link."
+          checked={teaching}
+          onChange={(event) => setTeaching(event.target.checked)}
+        />
+      )}
       <div>
         <Button type="submit" look="primary" busy={busy}>
           Start drafting

@@ -6,13 +6,14 @@ import { Page } from '@/components/ui/page'
 import { listCards } from '@/db/access/cards'
 import { getClient, listClients } from '@/db/access/clients'
 import { listMethods } from '@/db/access/methods'
-import { may } from '@/db/permissions'
-import { garments, methods } from '@/drafting'
+import { may, reachOf } from '@/db/permissions'
+import { methods } from '@/drafting'
 import { dayText } from '../../_data/dates'
 import { one, type SearchParams } from '../../_data/list-address'
+import { picturedGarments } from '../_parts/garment-pictures'
 import { NewDraftForm } from '../_parts/new-draft-form'
 import { ClientChoice } from '../_parts/client-choice'
-import { publishedSizes } from '../_parts/published-sizes'
+import { middleSize, publishedSizes } from '../_parts/published-sizes'
 
 export const metadata: Metadata = { title: 'New draft' }
 
@@ -65,15 +66,16 @@ export default async function NewDraftPage({ searchParams }: { searchParams: Sea
     <Page
       title="New draft"
       trail={trail}
-      lead={client ? `For ${client.name}` : 'For nobody in particular'}
+      lead={client ? `For ${client.name}` : withClients ? 'For nobody in particular' : undefined}
       narrow
     >
       <NewDraftForm
-        garments={garments.map(({ id, name }) => ({ id, name }))}
+        garments={picturedGarments()}
         cards={cards.map((card) => ({ id: card.id, name: `${card.name}, ${dayText(card.takenOn)}` }))}
         sizes={sizes}
         methods={[...methods, ...own].map(({ id, name, description }) => ({ id, name, description }))}
-        cardId={one(asked.card)}
+        first={(cards.find(({ id }) => id === one(asked.card)) ?? cards[0] ?? middleSize()).id}
+        teachable={!client && reachOf(actor, 'drafts', 'write').has('all')}
       />
     </Page>
   )
