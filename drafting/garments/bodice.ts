@@ -1,8 +1,9 @@
 import { garment } from '../pen/garment'
-import { choice, length } from '../pen/design'
+import { choice } from '../pen/design'
 import { drawBodice, finishBodice, fitBodice } from '../parts/bodice'
 import { bodiceAllowances, bodiceEaseDesign, dartDesign, upperBodiceDesign } from '../parts/bodice/design'
 import { bodiceEstimates, bodiceFound, bodiceWaistRules, upperBodiceRules } from '../parts/bodice/rules'
+import { buttonRules, openingDesign } from '../parts/openings'
 import { sleeveDesign, sleeveRules } from '../parts/sleeves'
 
 /** The fitted bodice with bust and waist darts; the bust dart opens where the style puts it. */
@@ -17,13 +18,17 @@ export const bodice = garment({
     ...bodiceEaseDesign,
     choice('sleeve', 'Sleeve', 'sleeve', ['none', 'plain', 'flared', 'bell', 'puff']),
     ...sleeveDesign,
-    length('zipLength', 'Zip length', 'opening', { default: 350, min: 150, max: 500 }),
+    ...openingDesign(['zip', 'button band'], 350),
     ...bodiceAllowances,
   ],
-  rules: [...upperBodiceRules, ...bodiceWaistRules, ...sleeveRules],
+  rules: [...upperBodiceRules, ...bodiceWaistRules, ...sleeveRules, ...buttonRules],
   found: bodiceFound,
   draft(pen) {
-    const drawn = drawBodice(pen, { waist: 'bound', zip: 'own' })
+    const drawn = drawBodice(pen, {
+      waist: 'bound',
+      zip: 'own',
+      buttons: pen.chosen('backOpening') === 'button band',
+    })
     fitBodice(pen, drawn)
     finishBodice(pen, drawn)
   },

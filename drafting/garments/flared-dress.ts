@@ -13,7 +13,8 @@ import { fitLevels } from '../parts/levels'
 import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/in-seam-pocket'
 import { setInSleeve, wholeArmhole } from '../parts/set-in-sleeve'
 import { sleeveDesign, sleeveRules } from '../parts/sleeves'
-import { backOpening, openingDesign, openingRules } from '../parts/back-opening'
+import { drawOpening, openingDesign, openingRules } from '../parts/openings'
+import { pocketGivesWay } from '../parts/openings/side-zip'
 
 /**
  * The one-piece flared dress of freehand cutting, in quarters: front on the fold, back on the fold or with a centre seam for
@@ -32,6 +33,7 @@ export const flaredDress = garment({
     'acrossFront',
     'napeToWaist',
     'frontWaistLength',
+    'bustHeight',
     'waistToHip',
     'upperArm',
     'armLength',
@@ -63,7 +65,7 @@ export const flaredDress = garment({
     ),
     choice('sleeve', 'Sleeve', 'sleeve', ['plain', 'flared', 'none', 'bell', 'puff']),
     ...sleeveDesign,
-    ...openingDesign,
+    ...openingDesign(['zip', 'none', 'button band', 'keyhole', 'side zip']),
     ...pocketDesign,
     length('neckAllowance', 'Neck allowance', 'allowances', { default: 10, min: 0, max: 20 }),
     length('shoulderAllowance', 'Shoulder allowance', 'allowances', { default: 12.7, min: 0, max: 30 }),
@@ -143,14 +145,19 @@ export const flaredDress = garment({
     drawHalf(pen, back, 'back', leans.back, necks)
     drawFrontHem(pen, front)
     hemOf(pen, back, 'lengthMark')
-    front.line('centre', hemCentre(pen), 'centreNeck', {
-      role: 'fold',
-      say: 'The centre front lies on the fold',
-    })
-    const onFold = backOpening(pen, back)
-
-    front.cut({ cloth: 'main', count: 1, onFold: true, handed: false })
-    back.cut({ cloth: 'main', count: onFold ? 1 : 2, onFold, handed: !onFold })
+    const below = { edge: 'hem', role: 'hem', allowance: 'hemAllowance' } as const
+    const centres = drawOpening(
+      pen,
+      { piece: front, foot: hemCentre(pen), below },
+      { piece: back, foot: 'lengthMark', below },
+    )
+    for (const [piece, { kind }] of [
+      [front, centres.front],
+      [back, centres.back],
+    ] as const) {
+      const onFold = kind === 'fold'
+      piece.cut({ cloth: 'main', count: onFold ? 1 : 2, onFold, handed: !onFold })
+    }
     for (const piece of [front, back]) {
       const long = piece.at('lengthMark').y
       piece.grain({ x: 60, y: long * 0.45 }, { x: 60, y: long * 0.8 })
@@ -166,7 +173,7 @@ export const flaredDress = garment({
     fitLevels(pen, front, back)
     const bare = pen.chosen('sleeve') === 'none'
     if (!bare) setInSleeve(pen, wholeArmhole(front), wholeArmhole(back))
-    faceNeckAndArmholes(pen, [facedBody(front), true], [facedBody(back), onFold], bare)
+    faceNeckAndArmholes(pen, [facedBody(front), centres.front], [facedBody(back), centres.back], bare)
     sayWhatIsOdd(pen)
   },
 })
@@ -200,9 +207,10 @@ function sewSides(pen: Pen, front: PiecePen): void {
   const a = { piece: 'front', edge: 'side' }
   const b = { piece: 'back', edge: 'side' }
   const seam = { id: 'side', name: 'Side seam', smooth: true }
-  const mouth = pen.chosen('pockets')
-    ? pocketMouth(pen, front.edge('side').path, pen.value('waistLevel'))
-    : undefined
+  const mouth =
+    pen.chosen('pockets') && !pocketGivesWay(pen)
+      ? pocketMouth(pen, front.edge('side').path, pen.value('waistLevel'))
+      : undefined
   pen.settle()
   if (!mouth) return pen.sew({ ...seam, a: [a], b: [b] })
   const whole = pathLength(front.edge('side').path)

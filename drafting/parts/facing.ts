@@ -1,67 +1,12 @@
 import type { Path, Point } from '../contract'
-import {
-  add,
-  distance,
-  endOf,
-  intersections,
-  line,
-  offsetPath,
-  openPath,
-  reversePath,
-  scale,
-  startOf,
-  startTangent,
-  unit,
-  cross,
-  endTangent,
-} from '../geometry'
+import { endOf, reversePath, startOf, startTangent, unit } from '../geometry'
 import type { Mask } from '../pen/masks'
 import type { Pen } from '../pen/pen'
-import { between, straight, type PiecePen } from '../pen/piece-pen'
+import { between, type PiecePen } from '../pen/piece-pen'
 import { fairCurve } from './hem'
 import { armholeCurve } from './armhole'
-import { leaning, neckCurve } from './necklines'
-import { mostCurvedLean } from './necklines/neckline'
-import { v } from './necklines/v'
-import { trimBetween } from './trim'
-
-const down = { x: 0, y: 1 }
-
-/**
- * The outer edge of a band of even depth beside a neckline, from the centre to the shoulder. It meets the shoulder at
- * exactly the same distance in front and back. Where the neckline bends too sharply for an even band, the outer
- * edge is a plain neck curve of its own, pointed where the neckline is.
- */
-function evenBand(neckline: Path, depth: number, body: PiecePen, shoulder: Point): Path {
-  const centre = body.at('centreNeck')
-  const side = body.at('sideNeck')
-  // A neckline that is not square to the shoulder crosses it slanting; front and back do so alike, so they still meet.
-  const along = depth / Math.abs(cross(shoulder, endTangent(neckline)))
-  const end = { x: side.x + shoulder.x * along, y: side.y + shoulder.y * along }
-  const beside = offsetPath(neckline, -depth)
-  const even = beside.clipped
-    ? undefined
-    : trimBetween(beside.path, { at: centre, along: down }, { at: side, along: shoulder })
-  const last = even?.segments.at(-1)
-  if (even && last && distance(last.to, end) < 0.3) {
-    return { closed: false, segments: [...even.segments.slice(0, -1), { ...last, to: end }] }
-  }
-  const low = { x: centre.x, y: Math.max(centre.y, end.y) + depth }
-  // It leaves the shoulder as the neckline does, so that front and back still run on into each other.
-  const arrives = endTangent(neckline)
-  const pointed = Math.abs(startTangent(neckline).y) > 0.2
-  const corner = neckline.segments.length > 1 ? neckline.segments.at(-1)?.from : undefined
-  if (pointed && corner) {
-    const knee = add(end, scale(arrives, -Math.max(10, corner.y + depth * 0.4 - end.y)))
-    return openPath([line(low, knee), line(knee, end)])
-  }
-  if (pointed) return v.draw(low, end, { x: -arrives.x, y: -arrives.y })
-  const lean = Math.min(
-    (Math.atan2(arrives.x, -arrives.y) * 180) / Math.PI,
-    mostCurvedLean(end.x - low.x, low.y - end.y),
-  )
-  return neckCurve(low, end, leaning(lean), 0.52, 0.5)
-}
+import { closeFacing, copyMarks } from './facing-centre'
+import type { Centre } from './openings/opening'
 
 /** What a facing is traced from: a body with its darts closed. */
 export interface Faced {
@@ -84,66 +29,6 @@ export function facedBody(piece: PiecePen): Faced {
     side: startTangent(piece.edge('side').path),
     uses: neckline.uses | armhole.uses,
   }
-}
-
-/** Facings are cut once in the cloth and once in interfacing. */
-function cutFacing(facing: PiecePen, onFold: boolean): void {
-  const count = onFold ? 1 : 2
-  facing.cut(
-    { cloth: 'main', count, onFold, handed: !onFold },
-    { cloth: 'interfacing', count, onFold, handed: !onFold },
-  )
-}
-
-/**
- * The facing of one half of a neckline: a band of even depth measured from the stitched neckline, from the centre to the
- * shoulder. Its neckline is the garment's own, so it lies on it exactly.
- *
- * @param depth mm.
- * @param onFold whether the centre lies on the fold; otherwise it is turned in beside the zip.
- */
-export function neckFacing(pen: Pen, faced: Faced, depth: number, onFold: boolean): PiecePen {
-  const body = faced.piece
-  const facing = pen.piece(`${body.id}-neck-facing`, `${body.name} neck facing`)
-  const shoulder = unit(between(body.at('sideNeck'), body.at('shoulderTip')))
-  const inside = evenBand(faced.neckline, depth, body, shoulder)
-  const names = ['facingDepth']
-  const through = ['centreNeck', 'sideNeck', 'shoulderTip']
-  copyMarks(facing, body, ['centreNeck', 'sideNeck'], faced.uses)
-  facing.aid('shoulderTip', body)
-  facing.place('shoulderEdge', endOf(inside), {
-    say: 'Along the shoulder come out the depth of the facing',
-    from: 'sideNeck',
-    uses: names,
-    through: ['sideNeck', 'shoulderTip'],
-  })
-  facing.place('centreEdge', startOf(inside), {
-    say: 'Down the centre come the depth of the facing',
-    from: 'centreNeck',
-    uses: names,
-    through,
-  })
-  facing.curve('neckline', faced.neckline, 'centreNeck', 'sideNeck', {
-    role: 'neckline',
-    allowance: 'neckAllowance',
-    kind: 'copy',
-    say: `Trace the neckline from the ${body.name.toLowerCase()}`,
-    through,
-  })
-  facing.line('shoulder', 'sideNeck', 'shoulderEdge', {
-    role: 'seam',
-    allowance: 'shoulderAllowance',
-    say: 'Trace the shoulder as far as the facing goes',
-  })
-  facing.curve('outer', reversePath(inside), 'shoulderEdge', 'centreEdge', {
-    role: 'free',
-    say: 'Draw the outer edge even with the neckline',
-    uses: names,
-    through,
-  })
-  centreEdge(facing, onFold, 'centreEdge')
-  finishFacing(facing, onFold)
-  return facing
 }
 
 /**
@@ -221,7 +106,7 @@ export function armholeFacing(pen: Pen, faced: Faced, depth: number): PiecePen {
  *
  * @param depth how far below the underarm and the neckline it ends, mm.
  */
-export function shoulderFacing(pen: Pen, faced: Faced, depth: number, onFold: boolean): PiecePen {
+export function shoulderFacing(pen: Pen, faced: Faced, depth: number, centre: Centre): PiecePen {
   const body = faced.piece
   const facing = pen.piece(`${body.id}-neck-facing`, `${body.name} facing, neck and armhole`)
   const through = ['centreNeck', 'sideNeck', 'shoulderTip', 'hollow', 'underarm']
@@ -229,7 +114,8 @@ export function shoulderFacing(pen: Pen, faced: Faced, depth: number, onFold: bo
   copyMarks(facing, body, through, faced.uses)
   const underarm = body.at('underarm')
   const sideEdge = { x: underarm.x + side.x * depth, y: underarm.y + side.y * depth }
-  const lowest = Math.max(body.at('centreNeck').y + depth, underarm.y + depth + 5)
+  const covered = centre.keyhole ? centre.keyhole.depth + 35 : depth
+  const lowest = Math.max(body.at('centreNeck').y + covered, underarm.y + depth + 5)
   const names = ['facingDepth']
   facing.place('sideEdge', sideEdge, {
     say: 'Down the side seam come the depth of the facing',
@@ -245,6 +131,7 @@ export function shoulderFacing(pen: Pen, faced: Faced, depth: number, onFold: bo
       from: 'centreNeck',
       uses: names,
       through: ['underarm', 'centreNeck'],
+      ...(centre.keyhole ? { mask: body.usesOf('keyholeEnd') } : {}),
     },
   )
   facing.curve('neckline', faced.neckline, 'centreNeck', 'sideNeck', {
@@ -275,8 +162,7 @@ export function shoulderFacing(pen: Pen, faced: Faced, depth: number, onFold: bo
     uses: names,
     through: ['underarm', 'centreNeck'],
   })
-  centreEdge(facing, onFold, 'centreEdge')
-  finishFacing(facing, onFold)
+  closeFacing(pen, facing, centre)
   return facing
 }
 
@@ -301,39 +187,5 @@ function lowerEdge(
         to,
       },
     ],
-  }
-}
-
-/** Marks traced from the body, so that corrections there follow here. */
-function copyMarks(facing: PiecePen, body: PiecePen, ids: readonly string[], uses: bigint): void {
-  for (const id of ids) facing.trace(id, body, uses)
-}
-
-function centreEdge(facing: PiecePen, onFold: boolean, from: string): void {
-  facing.line('centre', from, 'centreNeck', {
-    role: onFold ? 'fold' : 'opening',
-    ...(onFold ? {} : { allowance: 'centreBackAllowance' }),
-    say: onFold ? 'The centre lies on the fold' : 'The centre is turned in beside the zip',
-  })
-}
-
-function finishFacing(facing: PiecePen, onFold: boolean): void {
-  cutFacing(facing, onFold)
-  const top = facing.at('centreNeck')
-  const bottom = facing.at('centreEdge')
-  const inset = Math.min(14, Math.abs(facing.at('sideNeck').x) / 3)
-  const column = straight({ x: inset, y: -200 }, { x: inset, y: 2000 })
-  const upper = intersections(facing.edge('neckline').path, column)[0]?.point.y ?? top.y
-  const lower = intersections(facing.edge('outer').path, column)[0]?.point.y ?? bottom.y
-  facing.grain({ x: inset, y: upper + 5 }, { x: inset, y: Math.max(upper + 15, lower - 5) })
-  // A zip needs the facing a little clear of its teeth; the turn is marked, the neckline stays whole.
-  if (!onFold && facing.at('centreEdge').y - top.y > 10) {
-    facing.inner(
-      'zip-turn',
-      'turn',
-      { closed: false, segments: [{ kind: 'line', from: { x: 4, y: top.y }, to: { x: 4, y: bottom.y } }] },
-      'Turn in 4 mm short of the centre, clear of the zip',
-      facing.usesOf('centreNeck', 'centreEdge'),
-    )
   }
 }

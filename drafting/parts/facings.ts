@@ -1,10 +1,12 @@
 import type { Run } from '../contract'
 import { distance } from '../geometry'
 import type { Pen } from '../pen/pen'
-import { armholeFacing, neckFacing, shoulderFacing, type Faced } from './facing'
+import { armholeFacing, shoulderFacing, type Faced } from './facing'
+import { neckFacing } from './neck-facing'
+import type { Centre } from './openings/opening'
 
-/** A body to be faced, and whether its centre lies on the fold. */
-export type FacedHalf = readonly [Faced, boolean]
+/** A body to be faced, and how its centre ends. */
+export type FacedHalf = readonly [Faced, Centre]
 
 /** Shorter shoulders, mm, carry one facing for neck and armhole together. Common practice. */
 const narrowShoulder = 70
@@ -28,7 +30,8 @@ export function faceNeckAndArmholes(
 ): void {
   const body = front[0].piece
   const shoulder = distance(body.at('sideNeck'), body.at('shoulderTip'))
-  const together = bare && shoulder < narrowShoulder
+  // A lapped front is faced to its foot, which no facing of neck and armhole together reaches.
+  const together = bare && shoulder < narrowShoulder && front[1].kind !== 'lap'
   const asked = pen.length('facingDepth')
   const depth = Math.min(asked, shoulder - 12)
   if (!together && depth < asked) {
@@ -47,8 +50,8 @@ export function faceNeckAndArmholes(
       b: [{ piece: facing, edge }],
       join: 'faced',
     })
-  for (const [faced, onFold] of [front, back]) {
-    const neck = together ? shoulderFacing(pen, faced, asked, onFold) : neckFacing(pen, faced, depth, onFold)
+  for (const [faced, centre] of [front, back]) {
+    const neck = together ? shoulderFacing(pen, faced, asked, centre) : neckFacing(pen, faced, depth, centre)
     sewOn('neckline', faced, neck.id)
     if (together) sewOn('armhole', faced, neck.id)
   }

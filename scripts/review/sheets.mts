@@ -26,8 +26,11 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     puff: { sleeve: 'puff' },
     bell: { sleeve: 'bell' },
     narrowShoulder: { sleeve: 'none', neckWidening: 70, frontNeckDrop: 80, backOpening: 'none', flare: 0.5 },
+    buttons: { backOpening: 'button band', neckShape: 'V', buttonSize: 22 },
+    keyhole: { backOpening: 'keyhole', sleeve: 'none' },
   },
   bodice: {
+    buttons: { backOpening: 'button band', dartTo: 'shoulder', sleeve: 'plain' },
     side: {},
     shoulder: { dartTo: 'shoulder', sleeve: 'plain' },
     armhole: { dartTo: 'armhole', neckShape: 'V' },

@@ -2,18 +2,15 @@ import { describe, expect, it } from 'vitest'
 import type { DraftOrder, GarmentDefinition } from '@/drafting/contract'
 import * as engine from '@/drafting/index'
 import { honestNeeds, idleNeeds } from '../support/laws/law-15-honest-needs'
-import { namedBodies, tellingStyle } from '../support/laws/orders'
+import { namedBodies, tellingStyles } from '../support/laws/orders'
 
-/** Named bodies in a sleeved style that goes over the head, so that each measurement can have its say. */
+/** Named bodies in styles that between them ask for every measurement. */
 function orders(garment: GarmentDefinition): readonly DraftOrder[] {
-  const design = tellingStyle(garment)
-  return namedBodies
-    .filter((_, index) => index % 5 === 0)
-    .map(({ card }) => ({
-      garment: garment.id,
-      measurements: card,
-      design,
-    }))
+  return tellingStyles(garment).flatMap((design) =>
+    namedBodies
+      .filter((_, index) => index % 5 === 0)
+      .map(({ card }) => ({ garment: garment.id, measurements: card, design })),
+  )
 }
 
 describe.each(engine.garments.map((garment): [string, GarmentDefinition] => [garment.id, garment]))(

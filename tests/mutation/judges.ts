@@ -2,7 +2,7 @@ import type { Correction, DraftOrder, MeasurementDefinition } from '@/drafting/c
 import { sanityBodies, sizeBodies } from '../support/bodies'
 import { draftLaws, orderLaws } from '../support/laws/all'
 import { honestNeeds, idleNeeds } from '../support/laws/law-15-honest-needs'
-import { tellingStyle } from '../support/laws/orders'
+import { tellingStyles } from '../support/laws/orders'
 import { drafted } from '../support/laws/redraft'
 import type { Engine, Violation } from '../support/laws/violation'
 
@@ -33,6 +33,8 @@ const orders: readonly DraftOrder[] = [
   dress(one, { backOpening: 'none', hemWay: 'swung' }),
   dress({ ...one, upperArm: 380 }),
   dress(one, { neckWidening: 60, neckAllowance: 20 }),
+  dress(two, { backOpening: 'button band', neckShape: 'scoop' }),
+  dress(one, { backOpening: 'keyhole', backKeyhole: 60 }),
   skirt({}),
   { ...skirt({ share: '1', pockets: true, waistEasedIn: 5 }, two), unit: 'in' },
   skirt({ share: '1 1/2', panels: 5 }),
@@ -88,12 +90,10 @@ export function* breaches(law: number, engine: MeasuringEngine): Generator<Viola
   for (const order of [orders[0], orders[4], orders[7]]) if (order) yield* honestNeeds(order, engine)
   for (const garment of engine.garments) {
     const cards = sizeBodies.filter((_, index) => index % 9 === 0).map(({ card }) => card)
-    const design = tellingStyle(garment)
-    const idle = idleNeeds(
-      garment,
+    const asked = tellingStyles(garment).flatMap((design) =>
       cards.map((measurements) => ({ garment: garment.id, measurements, design })),
-      engine,
     )
+    const idle = idleNeeds(garment, asked, engine)
     for (const id of idle) yield { law, where: id, message: 'is declared and changes nothing' }
   }
 }

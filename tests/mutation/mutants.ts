@@ -66,6 +66,12 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
       'from + length - within + 3 : from + within + 3 }',
     ],
     [
+      'the facing of a lapped front is not sewn to its edge',
+      'parts/neck-facing.ts',
+      "['front-edge', 'opening', 'Front edge to its facing'],",
+      '',
+    ],
+    [
       'a stretch beside the pocket is sewn twice',
       'parts/in-seam-pocket.ts',
       'a: [stretch(a, mouth.to, length)],',
@@ -267,9 +273,27 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
   17: [
     [
       'slits are half as long as they must be',
-      'parts/back-opening.ts',
-      'Math.max(60, Math.ceil(short / 2 / 5) * 5)',
-      'Math.ceil(short / 4)',
+      'parts/openings/head-room.ts',
+      'Math.max(60, Math.ceil(short / 5) * 5)',
+      'Math.ceil(short / 2)',
+    ],
+    [
+      'a lapped front carries half its button',
+      'parts/openings/button-band.ts',
+      "'buttonSize / 2 + 0.6cm'",
+      "'buttonSize / 4 + 0.6cm'",
+    ],
+    [
+      'buttons run past the bust',
+      'parts/openings/button-levels.ts',
+      'const even = (bust - first) / spaces',
+      'const even = (bust - first) / (spaces + 0.5)',
+    ],
+    [
+      'a keyhole is too shallow for the head',
+      'parts/openings/keyhole.ts',
+      'Math.max(wanted, ',
+      'Math.min(wanted, ',
     ],
     [
       'the close neck is much wider than the neck',

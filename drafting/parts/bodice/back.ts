@@ -137,18 +137,12 @@ export function drawBodiceBack(
   })
   const ends = { centre: 'centreWaist', side: 'sideWaist' }
   const edges = drawWaist(back, waist, ends, false, names, way.waist)
-  centreBack(pen, back, centreDown, names, way.zip)
+  centreBack(pen, back, centreDown, names, way)
   return { faced: facedBody(back), waist: edges }
 }
 
 /** The centre back: straight to the level of the underarm, then in to the waist, where it meets it square. */
-function centreBack(
-  pen: Pen,
-  back: PiecePen,
-  down: Point,
-  uses: readonly string[],
-  opening: BodiceWay['zip'],
-): void {
+function centreBack(pen: Pen, back: PiecePen, down: Point, uses: readonly string[], way: BodiceWay): void {
   const waist = back.at('centreWaist')
   const neck = back.at('centreNeck')
   const bend = { x: 0, y: Math.max(neck.y + 20, back.at('scyeLevel').y) }
@@ -162,9 +156,18 @@ function centreBack(
     ),
     { kind: 'line', from: bend, to: neck },
   ])
-  const runsOn = opening === 'runs on'
-  const zip = runsOn ? pathLength(whole) : Math.min(pen.length('zipLength'), pathLength(whole))
   const options = { allowance: 'centreBackAllowance', uses }
+  if (way.buttons) {
+    back.curve('centre', whole, 'centreWaist', 'centreNeck', {
+      role: 'seam',
+      say: 'The centre back seam, closed from the neck to the waist',
+      ...options,
+    })
+    sewCentre(pen)
+    return
+  }
+  const runsOn = way.zip === 'runs on'
+  const zip = runsOn ? pathLength(whole) : Math.min(pen.length('zipLength'), pathLength(whole))
   if (!runsOn) pen.notion({ kind: 'zip', length: zip, count: 1 })
   const below = pathLength(whole) - zip
   if (below < 25) {
@@ -194,6 +197,10 @@ function centreBack(
     'centreNeck',
     { role: 'opening', say: 'The opening for the zip', ...options },
   )
+  sewCentre(pen)
+}
+
+function sewCentre(pen: Pen): void {
   pen.sew({
     id: 'centre-back',
     name: 'Centre back',

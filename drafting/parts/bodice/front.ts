@@ -8,6 +8,8 @@ import { openDart, type PlacedEdge, type UpperEdge } from './bust-dart'
 import { drawWaist, fitWaist, pinned, waistDarts, type FittedWaist } from '../fitted-waist'
 import type { Faced } from '../facing'
 import { chosenNeckline, leaning } from '../necklines'
+import { lapFront } from '../openings/button-band'
+import { onFold, type Centre } from '../openings/opening'
 
 /** Where the bust dart may open: the edge, and how far along: a share of it, or a named length. */
 const places: Readonly<
@@ -16,7 +18,7 @@ const places: Readonly<
   side: { edge: 'side', by: 'dartBelowArmhole' },
   shoulder: { edge: 'shoulder', share: 0.5 },
   armhole: { edge: 'armhole', share: 0.6 },
-  neck: { edge: 'neckline', share: 0.5 },
+  neck: { edge: 'neckline' },
 }
 
 /** The front of a fitted bodice, and what the other pieces need of it. */
@@ -26,6 +28,7 @@ export interface BodiceFront {
   readonly runs: (edge: string) => Run[]
   /** Its waist edges from the side to the centre, as they are drawn. */
   readonly waist: readonly string[]
+  readonly centre: Centre
 }
 
 /** Marks of neck, shoulder, bust and levels, in drafting order. */
@@ -138,10 +141,13 @@ export function drawBodiceFront(
   const turned = opened.beyond ? waist : swingWaist(waist, upper.point, -angle)
   const ends = { centre: 'centreWaist', side: 'sideWaistEnd' }
   const waistEdges = drawWaist(front, turned, ends, false, names, way.waist)
-  front.line('centre', 'centreWaist', 'centreNeck', {
-    role: 'fold',
-    say: 'The centre front lies on the fold',
-  })
+  const half = {
+    piece: front,
+    foot: 'centreWaist',
+    below: { edge: 'waist', role: 'waist', allowance: 'waistAllowance', finish: way.waist },
+  } as const
+  if (way.buttons) lapFront(pen, half)
+  else onFold(half)
 
   const [neckline, , armhole, side] = upper.edges as [UpperEdge, UpperEdge, UpperEdge, UpperEdge]
   return {
@@ -155,6 +161,7 @@ export function drawBodiceFront(
     runs: (edge) =>
       opened.edges.filter((one) => one.of === edge).map((one) => ({ piece: 'front', edge: one.id })),
     waist: waistEdges,
+    centre: way.buttons ? { kind: 'lap', below: half.below } : { kind: 'fold' },
   }
 }
 
@@ -241,7 +248,8 @@ function dartPoint(
 
 function mouthAlong(pen: Pen, edges: readonly UpperEdge[], place: (typeof places)[string]): number {
   const edge = edges.find((one) => one.id === place.edge) as UpperEdge
-  return place.by ? pen.length(place.by) : pathLength(edge.path) * (place.share ?? 0.5)
+  const share = place.edge === 'neckline' ? chosenNeckline(pen).dartAt : place.share
+  return place.by ? pen.length(place.by) : pathLength(edge.path) * (share ?? 0.5)
 }
 
 /** The waist of a front whose bust dart is at the waist: the side part swings with the side. */

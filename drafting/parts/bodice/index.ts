@@ -5,6 +5,7 @@ import { deepenFitted } from '../armhole-room'
 import type { Faced } from '../facing'
 import { faceNeckAndArmholes } from '../facings'
 import { neckLeans } from '../neck-lean'
+import type { Centres } from '../openings/opening'
 import { setInSleeve } from '../set-in-sleeve'
 import { bodiceBackMarks, drawBodiceBack } from './back'
 import { bodiceFrontMarks, drawBodiceFront } from './front'
@@ -17,6 +18,8 @@ export interface BodiceWay {
   readonly waist: 'bound' | 'seam'
   /** `own`: the bodice has a zip of its own. `runs on`: the whole centre back opens, and the zip runs on below the waist. */
   readonly zip: 'own' | 'runs on'
+  /** A front that laps over and buttons has no zip behind. */
+  readonly buttons?: boolean
 }
 
 /** A drawn bodice and where its edges are: darts divide them. */
@@ -29,6 +32,7 @@ export interface Bodice {
   readonly waist: { readonly front: readonly Run[]; readonly back: readonly Run[] }
   /** The halves with their darts closed, as facings are traced from them. */
   readonly faced: { readonly front: Faced; readonly back: Faced }
+  readonly centres: Centres
 }
 
 /**
@@ -50,7 +54,8 @@ export function drawBodice(pen: Pen, way: BodiceWay): Bodice {
     const top = Math.max(piece.at('scyeLevel').y, piece.at('centreNeck').y + 15)
     piece.grain({ x: 35, y: top }, { x: 35, y: piece.at('centreWaist').y - 25 })
   }
-  front.cut({ cloth: 'main', count: 1, onFold: true, handed: false })
+  const onFold = !way.buttons
+  front.cut({ cloth: 'main', count: onFold ? 1 : 2, onFold, handed: !onFold })
   back.cut({ cloth: 'main', count: 2, onFold: false, handed: true })
   const runs: Bodice['runs'] = (half, edge) =>
     half === 'front' ? ofFront.runs(edge) : [{ piece: 'back', edge }]
@@ -63,6 +68,7 @@ export function drawBodice(pen: Pen, way: BodiceWay): Bodice {
     runs,
     waist: { front: waistOf(front, ofFront.waist), back: waistOf(back, ofBack.waist) },
     faced: { front: ofFront.faced, back: ofBack.faced },
+    centres: { front: ofFront.centre, back: { kind: way.buttons ? 'seam' : 'zip' } },
   }
 }
 
@@ -87,8 +93,14 @@ export function finishBodice(pen: Pen, bodice: Bodice): void {
     edges: bodice.runs(half, 'armhole').map((run) => run.edge),
   })
   if (!bare) setInSleeve(pen, armhole('front'), armhole('back'))
-  faceNeckAndArmholes(pen, [bodice.faced.front, true], [bodice.faced.back, false], bare, {
-    runs: (piece, edge) => bodice.runs(piece === 'front' ? 'front' : 'back', edge),
-    shoulderEase: 'shoulderEase',
-  })
+  faceNeckAndArmholes(
+    pen,
+    [bodice.faced.front, bodice.centres.front],
+    [bodice.faced.back, bodice.centres.back],
+    bare,
+    {
+      runs: (piece, edge) => bodice.runs(piece === 'front' ? 'front' : 'back', edge),
+      shoulderEase: 'shoulderEase',
+    },
+  )
 }

@@ -10,6 +10,12 @@ export interface Neckline {
   readonly lean: (slope: number) => number
   /** The most that it may lean there without bending both ways, for a width and depth in mm. Degrees. */
   readonly mostLean: (width: number, depth: number) => number
+  /** Style value that gives the depth of a keyhole below its centre, where it has one. */
+  readonly keyhole?: string
+  /** Where a dart may open on it, share of its length from the centre: clear of a corner. Half way unless it says so. */
+  readonly dartAt?: number
+  /** How it goes on over a lapped front: straight on from a point, or level; otherwise the overlap mirrors it. */
+  readonly over?: 'straight on' | 'level'
   /** @param leaves unit direction in which it leaves the side neck. */
   readonly draw: (centre: Point, side: Point, leaves: Point) => Path
 }

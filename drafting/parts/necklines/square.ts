@@ -5,6 +5,7 @@ import type { Neckline } from './neckline'
 export const square: Neckline = {
   depth: 'frontNeckDepth',
   widening: 'neckWidening',
+  dartAt: 0.27,
   lean: () => 0,
   mostLean: (width, depth) => (Math.atan2(0.5 * width, depth) * 180) / Math.PI,
   draw: (centre, side, leaves) => {

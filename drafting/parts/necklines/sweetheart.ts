@@ -17,6 +17,8 @@ const from = (start: Point, degrees: number, reach: number): Point => ({
 export const sweetheart: Neckline = {
   depth: 'sweetheartNeckDepth',
   widening: 'sweetheartWidening',
+  over: 'level',
+  dartAt: 0.26,
   lean: () => 0,
   mostLean: (width, depth) => (Math.atan2(0.6 * width, depth) * 180) / Math.PI,
   draw: (centre, side, leaves) => {

@@ -7,6 +7,7 @@ export const v: Neckline = {
   widening: 'neckWidening',
   lean: (slope) => slope,
   mostLean: () => 60,
+  over: 'straight on',
   draw: (centre, side, leaves) => {
     const depth = centre.y - side.y
     const width = side.x - centre.x

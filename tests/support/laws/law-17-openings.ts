@@ -27,16 +27,20 @@ export const openings: DraftLaw = (draft, order, engine) => {
       found.add('neck', `is ${more.toFixed(1)} mm more than the neck; 3 to 12 are due`)
   }
   const overTheHead = [...garment.needs, ...garment.estimates].includes('head')
-  if (style('backOpening') === 'none' && overTheHead) {
-    const slit = draft.pieces.find((one) => one.id === 'back')?.lines.find((one) => one.id === 'slit')
-    const opening = neck + (slit ? 2 * lengthOfPath(slit.path) : 0)
+  const opens = style('backOpening')
+  if (opens === 'zip' || opens === 'button band') {
+    const half = opens === 'zip' ? 'back' : 'front'
+    if (!draft.pieces.some((piece) => piece.id === half && piece.edges.some((one) => one.role === 'opening')))
+      found.add(half, `is to be closed with a ${opens} and has no opening`)
+  } else if (overTheHead) {
+    const slits = draft.pieces
+      .filter((piece) => piece.id === 'front' || piece.id === 'back')
+      .flatMap((piece) => piece.lines)
+      .filter((one) => one.id === 'slit' || one.id === 'keyhole')
+    const opening = neck + slits.reduce((sum, one) => sum + 2 * lengthOfPath(one.path), 0)
     found.atMost('neck', 'does not go over the head by', body('head') + 20 - opening, 1e-6)
-  } else if (
-    style('backOpening') !== 'none' &&
-    !draft.pieces.some((piece) => piece.id === 'back' && piece.edges.some((one) => one.role === 'opening'))
-  ) {
-    found.add('back', 'is to be closed with a zip and has no opening')
   }
+  if (opens === 'button band') buttoned(found, draft, style('buttonSize') as number)
   const armhole = edges(draft, 'armhole')
   const ease = style('sleeve') === 'none' ? 0 : (numberOf('sleeveEase', order, garment, draft.used) ?? NaN)
   found.atMost('armhole', 'tighter than the arm and its ease by', body('upperArm') + ease - armhole, 1e-6)
@@ -50,4 +54,28 @@ function edges(draft: Draft, role: 'neckline' | 'armhole'): number {
     .flatMap((piece) => piece.edges)
     .filter((one) => one.role === role)
     .reduce((sum, one) => sum + lengthOfPath(one.path), 0)
+}
+
+/** Buttons stand on the centre front, clear of each other, and the front laps over by enough to carry them. */
+function buttoned(found: Findings, draft: Draft, size: number): void {
+  const front = draft.pieces.find((piece) => piece.id === 'front')
+  const buttons = front?.marks.filter((mark) => mark.kind === 'button') ?? []
+  const levels = buttons.map((mark) => mark.at.y)
+  if (buttons.length < 2) found.add('front', `has ${buttons.length} buttons`)
+  if (draft.notions.find((one) => one.kind === 'button')?.count !== buttons.length)
+    found.add('front', 'does not say how many buttons it takes')
+  for (const { at, id } of buttons) found.atMost(id, 'off the centre front', Math.abs(at.x), 1e-6)
+  levels.slice(1).forEach((y, index) => {
+    if (!(y - (levels[index] as number) > size)) found.add('front', 'has buttons that lie on each other')
+  })
+  const top = front?.marks.find((mark) => mark.id === 'centreNeck')?.at.y ?? NaN
+  if (!((levels[0] as number) - size / 2 > top)) found.add('front', 'has its first button in the neckline')
+  const edge = Math.min(
+    ...(front?.edges.find((one) => one.id === 'opening')?.path.segments ?? []).map((one) => -one.to.x),
+  )
+  if (!(edge >= size / 2 + 5 - 1e-6)) found.add('front', `laps over by ${edge.toFixed(1)} mm only`)
+  const bust = draft.used.bustHeight?.mm
+  const spoken = draft.cautions.some((one) => one.code === 'no-button-at-bust')
+  if (bust !== undefined && !spoken && !levels.some((y) => Math.abs(y - bust) < 0.01))
+    found.add('front', 'has no button at the bust')
 }

@@ -1,7 +1,7 @@
 import type { Draft, Fit } from '@/drafting/contract'
 import { chordsOf, endOfPath, lengthOfPath, startOfPath } from './curves'
 import { garmentOf, numberOf } from './formulas'
-import { closedChain, ringOf, stitchPath, type Chain } from './outline'
+import { Chain, closedChain, ringOf, stitchPath } from './outline'
 import { Findings, type DraftLaw } from './violation'
 
 /** Which body measurement and which ease each fit is about. */
@@ -86,8 +86,12 @@ function measured(found: Findings, draft: Draft, fit: Fit, lines: Map<string, Ch
     }
     let line = lines.get(id)
     if (!line) lines.set(id, (line = closedChain(ringOf(stitchPath(piece), 0.0005))))
+    // A lapped front runs on beyond its centre, from which a girth is measured.
+    const lapped = piece.edges.some((one) => one.id === 'overlap-neck')
+    const centre = piece.lines.find((one) => lapped && one.id === 'centre-front')
     for (const end of [startOfPath(path), endOfPath(path)]) {
-      found.atMost(`${fit.id} on ${id}`, 'end off the stitch line', line.gap(end), 0.01)
+      const onCentre = centre ? new Chain(chordsOf(centre.path)).gap(end) : Infinity
+      found.atMost(`${fit.id} on ${id}`, 'end off the stitch line', Math.min(line.gap(end), onCentre), 0.01)
     }
     if (draft.garment === 'circle-skirt' && ['waist', 'hip', 'hem'].includes(fit.id))
       sagging(found, fit, path)

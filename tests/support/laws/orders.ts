@@ -198,12 +198,13 @@ export function correctedOrder(garment: GarmentDefinition): fc.Arbitrary<DraftOr
     .map(([order, list]) => ({ ...order, corrections: list }))
 }
 
-/** A sleeved style that goes over the head, so that every measurement of a garment can have its say. */
-export function tellingStyle(garment: GarmentDefinition): Readonly<Record<string, string>> {
-  const chosen = { backOpening: 'none', sleeve: 'plain' }
-  return Object.fromEntries(
-    Object.entries(chosen).filter(([id, is]) =>
-      garment.design.some((value) => value.id === id && value.choices?.includes(is)),
+/** Styles in which every measurement of a garment can have its say: sleeved and pulled on over the head, and buttoned. */
+export function tellingStyles(garment: GarmentDefinition): readonly Readonly<Record<string, string>>[] {
+  return [{ backOpening: 'none', sleeve: 'plain' }, { backOpening: 'button band' }].map((chosen) =>
+    Object.fromEntries(
+      Object.entries(chosen).filter(([id, is]) =>
+        garment.design.some((value) => value.id === id && value.choices?.includes(is)),
+      ),
     ),
   )
 }

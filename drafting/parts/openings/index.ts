@@ -1,0 +1,68 @@
+import type { DesignValue, RuleDefinition } from '../../contract'
+import { choice, length } from '../../pen/design'
+import type { Pen } from '../../pen/pen'
+import { chosenNeckline } from '../necklines'
+import { buttonBand, buttonDesign, buttonRules } from './button-band'
+
+export { buttonRules }
+import { centreBackZip } from './centre-back-zip'
+import { drawDrop } from './drop'
+import { headRules } from './head-room'
+import { keyhole, keyholeDesign } from './keyhole'
+import { none } from './none'
+import type { Centres, OpenHalf, Opening } from './opening'
+import { sideZip } from './side-zip'
+
+/** The openings by their names in the style. */
+const openings: Readonly<Record<string, Opening>> = {
+  zip: centreBackZip,
+  none,
+  'button band': buttonBand,
+  keyhole,
+  'side zip': sideZip,
+}
+
+/**
+ * The style values of the openings that a garment offers; the first is its usual one.
+ *
+ * @param zip length of its zip unless the style says otherwise, mm.
+ */
+export function openingDesign(offered: readonly [string, ...string[]], zip = 380): readonly DesignValue[] {
+  const values = [
+    length(
+      'zipLength',
+      'Zip length',
+      'opening',
+      { default: zip, min: 150, max: 500 },
+      { id: 'backOpening', is: ['zip', 'side zip'] },
+    ),
+    ...buttonDesign,
+    ...keyholeDesign,
+  ]
+  return [
+    choice('backOpening', 'Opening', 'opening', offered),
+    ...values.filter(({ when }) => when?.is.some((name) => offered.includes(String(name)))),
+  ]
+}
+
+export const openingRules: readonly RuleDefinition[] = [...headRules, ...buttonRules]
+
+/** Draws both centres of a body, and with them the way into it. */
+export function drawOpening(pen: Pen, front: OpenHalf, back: OpenHalf): Centres {
+  const opening = openings[String(pen.chosen('backOpening'))]
+  if (!opening) throw new Error('Every opening offered has its kind.')
+  const value = chosenNeckline(pen).keyhole
+  const depth = value ? pen.length(value) : 0
+  const centres = opening.draw(pen, front, back, depth)
+  if (!value) return centres
+  if (centres.front.kind === 'fold') {
+    return { ...centres, front: { ...centres.front, keyhole: drawDrop(pen, front.piece, value) } }
+  }
+  pen.caution(
+    'keyhole-left-out',
+    'The front opens from top to bottom, so no keyhole is drawn in it. Close the garment elsewhere for a keyhole.',
+    'neckShape',
+    'backOpening',
+  )
+  return centres
+}
