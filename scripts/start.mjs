@@ -17,7 +17,8 @@ import { productionProblems } from './local/production.mjs'
 import { runMain, say, SetUpError } from './local/say.mjs'
 import { demoFile, seedDemo } from './local/seed.mjs'
 import { serve } from './local/serve.mjs'
-import { localDatabase, localMail } from './local/services.mjs'
+import { localDatabase, localFiles, localMail, localPayments } from './local/services.mjs'
+import { halfGivenSettings } from './local/setting-groups.mjs'
 import { openSettings } from './local/settings.mjs'
 import { createStopping } from './local/stopping.mjs'
 import { migrate } from './migrate.mjs'
@@ -29,7 +30,8 @@ const running = join(dataFolder, 'running.json')
 await runMain(async () => {
   readEnvFile(join(root, '.env'))
   const production = process.env.CHALKFOLD_ENV === 'production'
-  if (production) refuseUnsafe(process.env)
+  refuse('Not started in production', production ? productionProblems(process.env) : [])
+  refuse('Not started', halfGivenSettings(process.env))
 
   const lock = takeLock(join(dataFolder, 'start.lock'))
   if (!lock.release) {
@@ -47,10 +49,9 @@ await runMain(async () => {
   }
 })
 
-function refuseUnsafe(env) {
-  const problems = productionProblems(env)
+function refuse(words, problems) {
   if (problems.length > 0)
-    throw new SetUpError(`Not started in production:\n${problems.map((line) => `- ${line}`).join('\n')}`)
+    throw new SetUpError(`${words}:\n${problems.map((line) => `- ${line}`).join('\n')}`)
 }
 
 async function bringUp(stopping, production) {
@@ -83,7 +84,13 @@ async function bringUp(stopping, production) {
       database: { name: 'chalkfold' },
     })
   }
-  if (!process.env.SMTP_URL) Object.assign(env, await localMail({ folder, installation, stopping }))
+  const local = { folder, installation, stopping, origin }
+  if (!process.env.SMTP_URL) Object.assign(env, await localMail(local))
+  const [ownFiles, ownPayments] = [!process.env.FILES_ENDPOINT, !process.env.STRIPE_SECRET_KEY].map(
+    (missing) => missing && !production,
+  )
+  if (ownFiles) Object.assign(env, await localFiles(local))
+  if (ownPayments) Object.assign(env, await localPayments(local))
 
   const ran = await migrate(env.DATABASE_URL)
   if (ran.length > 0)
@@ -95,7 +102,12 @@ async function bringUp(stopping, production) {
   stopping.onStop(() => rmSync(running, { force: true }))
   stopping.onStop(app.stop)
   writeJson(running, { address: origin, server: app.pid })
-  announce({ origin, mailPage: env.MAIL_PAGE_URL, signIns, password: settings.demoPassword })
+  const pages = {
+    Mailbox: [env.MAIL_PAGE_URL, 'mail it sends, kept on this machine'],
+    Files: [ownFiles && env.FILES_ENDPOINT, 'what it stores, kept on this machine'],
+    Payments: [ownPayments && env.PAYMENTS_ENDPOINT, 'cards for practice, no money moves'],
+  }
+  announce({ origin, pages, signIns, password: settings.demoPassword })
   return app
 }
 
@@ -128,9 +140,10 @@ async function demoSignIns(env, password) {
   return signIns
 }
 
-function announce({ origin, mailPage, signIns, password }) {
+function announce({ origin, pages, signIns, password }) {
   say(`\n  Chalkfold     ${origin}`)
-  if (mailPage) say(`  Mailbox       ${mailPage}  (mail it sends, kept on this machine)`)
+  for (const [name, [address, words]] of Object.entries(pages))
+    if (address) say(`  ${name.padEnd(13)} ${address}  (${words})`)
   if (signIns.length > 0) {
     say(`\n  Demo sign-ins, all with the password  ${password}`)
     for (const { name, email, roles } of signIns)

@@ -27,3 +27,8 @@ export async function portFrom(wanted, host) {
     if (await isFree(port, host)) return port
   return freePort()
 }
+
+/** The port of the time before when it is still free, else another. */
+export async function portLike(remembered) {
+  return remembered && (await isFree(remembered)) ? remembered : freePort()
+}

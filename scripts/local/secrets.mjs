@@ -5,6 +5,9 @@ export function newSecret() {
   return randomBytes(32).toString('base64url')
 }
 
+/** What the key of a local payment service begins with: no real one does. */
+export const localKeyPrefix = 'sk_test_local_'
+
 const words = [
   'chalk',
   'linen',

@@ -1,7 +1,7 @@
 import { chmodSync } from 'node:fs'
 import { join } from 'node:path'
 import { readJson, writeJson } from './json-file.mjs'
-import { newDemoPassword, newSecret } from './secrets.mjs'
+import { localKeyPrefix, newDemoPassword, newSecret } from './secrets.mjs'
 
 /**
  * What one local installation remembers between starts: its secrets, made at the first start, and its ports.
@@ -11,6 +11,11 @@ import { newDemoPassword, newSecret } from './secrets.mjs'
  * @property {string} demoPassword of every demo sign-in
  * @property {{ port?: number, socketFolder?: string }} database
  * @property {{ smtpPort?: number, pagePort?: number }} mail
+ * @property {string} filesSecret signs requests to the local store of files
+ * @property {{ port?: number }} files
+ * @property {string} paymentsKey of the local payment service
+ * @property {string} webhookSecret signs what the local payment service tells
+ * @property {{ port?: number }} payments
  */
 
 /**
@@ -26,6 +31,11 @@ export function openSettings(folder) {
     demoPassword: newDemoPassword(),
     database: {},
     mail: {},
+    filesSecret: newSecret(),
+    files: {},
+    paymentsKey: `${localKeyPrefix}${newSecret()}`,
+    webhookSecret: `whsec_${newSecret()}`,
+    payments: {},
     ...readJson(path),
   }
   function remember(changes) {

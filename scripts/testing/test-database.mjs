@@ -1,6 +1,6 @@
 import { ensureCommands } from '../local/debian.mjs'
 import { freePort } from '../local/ports.mjs'
-import { localDatabase, localMail } from '../local/services.mjs'
+import { localDatabase, localFiles, localMail, localPayments } from '../local/services.mjs'
 import { openSettings } from '../local/settings.mjs'
 import { migrate } from '../migrate.mjs'
 
@@ -19,6 +19,7 @@ export async function bringUpDatabase({ folder, stopping, keep }) {
   const { settings } = installation
   const port = await freePort()
   const origin = `http://localhost:${port}`
+  const local = { folder, installation, stopping, origin }
   const database = { name: 'chalkfold_test', fresh: !keep, family: 'chalkfold_test_' }
   const env = {
     ...testEnvironment(),
@@ -29,8 +30,10 @@ export async function bringUpDatabase({ folder, stopping, keep }) {
     MAIL_FROM: 'Chalkfold <post@chalkfold.example>',
     DEMO_PASSWORD: settings.demoPassword,
     NEXT_DIST_DIR: testDistDir,
-    ...(await localMail({ folder, installation, stopping })),
-    DATABASE_URL: await localDatabase({ folder, installation, stopping, database }),
+    ...(await localMail(local)),
+    ...(await localFiles(local)),
+    ...(await localPayments(local)),
+    DATABASE_URL: await localDatabase({ ...local, database }),
   }
   await migrate(env.DATABASE_URL)
   return env

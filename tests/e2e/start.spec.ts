@@ -39,6 +39,13 @@ test('a first start makes everything and says where it is', async ({ request }) 
   expect((await request.get(`http://localhost:${port}/`)).status()).toBeLessThan(400)
   const mailbox = /Mailbox\s+(\S+)/.exec(app.output())?.[1] ?? ''
   expect(await (await request.get(mailbox)).text()).toContain('Local mailbox')
+  for (const [name, title] of [
+    ['Files', 'Local files'],
+    ['Payments', 'Local payments'],
+  ] as const) {
+    const page = new RegExp(`${name}\\s+(\\S+)`).exec(app.output())?.[1] ?? ''
+    expect(await (await request.get(page)).text()).toContain(title)
+  }
 })
 
 test('a second start beside it is refused and says where it runs', async () => {
@@ -75,6 +82,12 @@ test('after it was killed outright the next start takes over what was left runni
   app.process.kill('SIGINT')
   expect(await app.ended).toBe(0)
   expect(processes.some(isAlive)).toBe(false)
+})
+
+test('half of a group of settings is refused, whatever the other services are', async () => {
+  const refused = startApp(data, { STRIPE_SECRET_KEY: 'sk_live_of_nobody' })
+  expect(await refused.ended).toBe(1)
+  expect(refused.output()).toContain('STRIPE_WEBHOOK_SECRET is missing, while STRIPE_SECRET_KEY is given')
 })
 
 test('production refuses to start without real settings, and names each', async () => {

@@ -47,7 +47,15 @@ it('keeps secrets out of what browsers load', () => {
     entry.isFile(),
   )
   const password = new URL(process.env.DATABASE_URL ?? '').password
-  const secrets = [process.env.NEXTAUTH_SECRET ?? '', password, 'sequelize', 'argon2', 'memoryCost']
+  const secrets = [
+    process.env.NEXTAUTH_SECRET ?? '',
+    process.env.FILES_SECRET_KEY ?? '',
+    process.env.STRIPE_SECRET_KEY ?? '',
+    password,
+    'sequelize',
+    'argon2',
+    'memoryCost',
+  ]
   expect(secrets.every((secret) => secret.length > 5)).toBe(true)
   const leaks = files.filter((file) => {
     const text = readFileSync(join(file.parentPath, file.name), 'utf8')

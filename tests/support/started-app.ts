@@ -21,6 +21,14 @@ const ownSettings = [
   'APP_ORIGIN',
   'NEXTAUTH_URL',
   'NEXTAUTH_SECRET',
+  'FILES_ENDPOINT',
+  'FILES_BUCKET',
+  'FILES_REGION',
+  'FILES_ACCESS_KEY',
+  'FILES_SECRET_KEY',
+  'PAYMENTS_ENDPOINT',
+  'STRIPE_SECRET_KEY',
+  'STRIPE_WEBHOOK_SECRET',
 ]
 
 /** Starts it; does not wait until it serves. */

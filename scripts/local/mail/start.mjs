@@ -1,12 +1,10 @@
 import { join } from 'node:path'
 import { listenHttp } from '../http.mjs'
-import { freePort, isFree } from '../ports.mjs'
+import { pageHeaders } from '../page.mjs'
+import { portLike } from '../ports.mjs'
 import { openMailbox } from './mailbox.mjs'
 import { mailPage } from './page.mjs'
 import { listenForMail } from './smtp.mjs'
-
-/** The page needs nothing but its own style sheet. */
-const policy = "default-src 'none'; style-src 'unsafe-inline'; base-uri 'none'; frame-ancestors 'none'"
 
 /**
  * A local stand-in for a mail service: SMTP in, a page (`/`) and JSON (`/messages.json?to=address`) out.
@@ -15,27 +13,20 @@ const policy = "default-src 'none'; style-src 'unsafe-inline'; base-uri 'none'; 
  */
 export async function startMail({ folder, remembered }) {
   const mailbox = openMailbox(join(folder, 'mail'))
-  const smtpPort = await keepOrFind(remembered.smtpPort)
+  const smtpPort = await portLike(remembered.smtpPort)
   const smtp = await listenForMail(mailbox, smtpPort)
-  const pagePort = await keepOrFind(remembered.pagePort)
+  const pagePort = await portLike(remembered.pagePort)
   const page = await listenHttp(pagePort, (request, response) => {
     const { pathname, searchParams } = new URL(request.url, 'http://localhost')
-    const headers = {
-      'cache-control': 'no-store',
-      'content-security-policy': policy,
-      'x-content-type-options': 'nosniff',
-    }
     if (pathname === '/') {
-      response
-        .writeHead(200, { ...headers, 'content-type': 'text/html; charset=utf-8' })
-        .end(mailPage(mailbox.list()))
+      response.writeHead(200, pageHeaders()).end(mailPage(mailbox.list()))
     } else if (pathname === '/messages.json') {
       const messages = mailbox.list(searchParams.get('to') ?? undefined)
       response
-        .writeHead(200, { ...headers, 'content-type': 'application/json' })
+        .writeHead(200, { ...pageHeaders(), 'content-type': 'application/json' })
         .end(JSON.stringify(messages))
     } else {
-      response.writeHead(404, headers).end()
+      response.writeHead(404, pageHeaders()).end()
     }
   })
   return {
@@ -47,8 +38,4 @@ export async function startMail({ folder, remembered }) {
       await smtp.stop()
     },
   }
-}
-
-async function keepOrFind(port) {
-  return port && (await isFree(port)) ? port : freePort()
 }
