@@ -77,6 +77,8 @@ export interface Mark {
   readonly letter?: string
   readonly at: Point
   readonly kind: 'construction' | 'drill' | 'button' | 'end'
+  /** Why no correction can move it, and what to correct instead. */
+  readonly fixed?: string
 }
 
 export interface Dart {

@@ -10,7 +10,7 @@ import { drawHalf, flareDirection, hemOf, lowerMarks, upperMarks } from '../part
 import { neckRules } from '../parts/neck-rules'
 import { neckLeans } from '../parts/neck-lean'
 import { fitLevels } from '../parts/levels'
-import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/in-seam-pocket'
+import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/pockets/in-seam'
 import { setInSleeve, wholeArmhole } from '../parts/set-in-sleeve'
 import { sleeveDesign, sleeveRules } from '../parts/sleeves'
 import { drawOpening, openingDesign, openingRules } from '../parts/openings'

@@ -60,6 +60,16 @@ export const compose = (a: Transform, b: Transform): Transform => ({
   f: a.b * b.e + a.d * b.f + a.f,
 })
 
+/** The map that undoes a rigid one: turns, moves and mirrors. */
+export const undo = ({ a, b, c, d, e, f }: Transform): Transform => ({
+  a,
+  b: c,
+  c: b,
+  d,
+  e: -(a * e + b * f),
+  f: -(c * e + d * f),
+})
+
 export const applyTo = (transform: Transform, point: Point): Point => ({
   x: transform.a * point.x + transform.c * point.y + transform.e,
   y: transform.b * point.x + transform.d * point.y + transform.f,

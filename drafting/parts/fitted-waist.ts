@@ -1,5 +1,6 @@
 import type { Path, Point } from '../contract'
 import { reversePath, unit } from '../geometry'
+import { nothing, type Mask } from '../pen/masks'
 import type { Pen } from '../pen/pen'
 import { between, type PiecePen } from '../pen/piece-pen'
 import { solveBetween } from '../pen/solve'
@@ -87,6 +88,7 @@ export function drawWaist(
   outwards: boolean,
   uses: readonly string[],
   finish: 'bound' | 'seam',
+  mask: Mask = nothing,
 ): string[] {
   const { darts, waist } = fitted
   const order = outwards ? waist.stretches : waist.stretches.map(reversePath).reverse()
@@ -94,14 +96,15 @@ export function drawWaist(
   darts.forEach((dart, index) => {
     const [inner, outer] = [waist.stretches[index], waist.stretches[index + 1]] as [Path, Path]
     const name = `waistDart${index + 1}`
-    piece.place(`${name}Point`, dart.point, { say: 'Mark the point of the waist dart', uses })
+    const follows = { uses, mask, fixed: 'It follows from the waist: take in the seams beside it instead.' }
+    piece.place(`${name}Point`, dart.point, { say: 'Mark the point of the waist dart', ...follows })
     piece.place(`${name}Inner`, inner.segments.at(-1)?.to as Point, {
       say: 'Mark its leg towards the centre',
-      uses,
+      ...follows,
     })
     piece.place(`${name}Outer`, outer.segments[0]?.from as Point, {
       say: 'Mark its leg towards the side',
-      uses,
+      ...follows,
     })
   })
   order.forEach((path, index) => {
@@ -117,6 +120,7 @@ export function drawWaist(
       allowance: 'waistAllowance',
       say: 'Draw the waist as it runs with its darts closed, then open them',
       uses,
+      mask,
     })
     if (index === order.length - 1) return
     const number = outwards ? fromCentre + 1 : fromCentre

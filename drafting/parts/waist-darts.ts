@@ -12,6 +12,7 @@ import {
   scale,
   slicePath,
   transformPath,
+  undo,
   type Transform,
 } from '../geometry'
 import { straight } from '../pen/piece-pen'
@@ -31,6 +32,8 @@ export interface OpenWaist {
   readonly stretches: readonly Path[]
   /** Length of the waist with all darts closed, mm. */
   readonly length: number
+  /** mm along it from the centre to each dart. */
+  readonly joints: readonly number[]
 }
 
 /**
@@ -85,20 +88,15 @@ export function openWaist(
     return undefined
   }
   const stretches = closing.map((move, index) =>
-    transformPath(inverse(move), slicePath(closed, cuts[index] as number, cuts[index + 1] as number)),
+    transformPath(undo(move), slicePath(closed, cuts[index] as number, cuts[index + 1] as number)),
   )
-  return { stretches, length }
+  return { stretches, length, joints: cuts.slice(1, -1) }
 }
 
 /** Square at both ends, bending both ways where it must. */
 function smooth(from: Point, leaves: Point, to: Point, arrives: Point): Path {
   const reach = Math.hypot(to.x - from.x, to.y - from.y) / 3
   return openPath([cubic(from, add(from, scale(leaves, reach)), add(to, scale(arrives, -reach)), to)])
-}
-
-/** The move that undoes a rigid move. */
-function inverse({ a, b, c, d, e, f }: Transform): Transform {
-  return { a, b: c, c: b, d, e: -(a * e + b * f), f: -(c * e + d * f) }
 }
 
 /** The angle of a dart that takes out an intake at a distance from its point: both legs as long as that distance. Degrees. */

@@ -44,7 +44,11 @@ export function waistband(
   matches: SeamPlan['matches'] = [],
   gathered?: string,
 ): void {
-  const band = pen.piece('waistband', 'Waistband')
+  const band = pen.piece(
+    'waistband',
+    'Waistband',
+    'The band follows the waist: take in a seam there, or change its depth or underlap.',
+  )
   band.start('end', { x: 0, y: 0 }, 'Mark the end of the band on a straight line')
   band.go('foldEnd', 'end', 'down', 'waistbandDepth', {
     say: 'Come down the finished depth: here the band folds',

@@ -17,10 +17,15 @@ export class Corrections {
   constructor(private readonly all: readonly Correction[]) {}
 
   /** How a mark is to be moved. A shared mark listens to a correction of the same mark in a sewn neighbour. */
-  forMark(piece: string, mark: string, shared: boolean): { by: Point; note?: string } | undefined {
+  forMark(
+    piece: string,
+    mark: string,
+    shared: boolean,
+  ): { readonly id: string; readonly by: Point; readonly note?: string } | undefined {
     if (this.all.length === 0) return undefined
     let by: Point | undefined
     let note: string | undefined
+    let id = ''
     for (const correction of this.all) {
       if (!('mark' in correction.on) || correction.on.mark !== mark) continue
       if (correction.on.piece !== piece && !shared) continue
@@ -28,8 +33,9 @@ export class Corrections {
       if (correction.off || typeof correction.by === 'number') continue
       by = by ? { x: by.x + correction.by.x, y: by.y + correction.by.y } : correction.by
       note ??= correction.note
+      id ||= correction.id
     }
-    return by && { by, ...(note ? { note } : {}) }
+    return by && { id, by, ...(note ? { note } : {}) }
   }
 
   /** What a seam is taken in by, lowest level last. */
@@ -42,6 +48,11 @@ export class Corrections {
       found.push({ id, level: on.level, by, ...(note ? { note } : {}) })
     }
     return found.sort((a, b) => a.level - b.level)
+  }
+
+  /** Ids of the corrections that are switched on. */
+  get active(): readonly string[] {
+    return this.all.filter((one) => !one.off).map((one) => one.id)
   }
 
   /** Corrections of marks and seams that this draft does not have. */

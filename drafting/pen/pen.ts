@@ -55,9 +55,13 @@ export class Pen {
     readonly explains: boolean,
   ) {}
 
-  /** Begins a piece. */
-  piece(id: string, name: string): PiecePen {
-    const piece = new PiecePen(this, id, name)
+  /**
+   * Begins a piece.
+   *
+   * @param fixed why no correction can move any of its marks, and what to correct instead.
+   */
+  piece(id: string, name: string, fixed?: string): PiecePen {
+    const piece = new PiecePen(this, id, name, fixed)
     this.pieces.push(piece)
     return piece
   }

@@ -47,4 +47,8 @@ export interface MarkOptions {
   readonly drag?: readonly string[]
   /** Sewn neighbours hold the same mark in the same place, so a correction of one moves all of them. */
   readonly shared?: boolean
+  /** It stands on the centre line, so a correction moves it up and down only. */
+  readonly onCentre?: boolean
+  /** Why no correction can move it, and what to correct instead. */
+  readonly fixed?: string
 }

@@ -48,6 +48,8 @@ export class PiecePen {
   readonly drags = new Map<string, readonly string[]>()
   /** Marks traced from another piece only to draw by; they are not on this one. */
   private readonly aids = new Set<string>()
+  /** Marks that no correction moves, and why. */
+  private readonly held = new Map<string, string>()
   readonly edges: DrawnEdge[] = []
   readonly darts: Dart[] = []
   readonly lines: InnerLine[] = []
@@ -59,11 +61,18 @@ export class PiecePen {
     readonly pen: Pen,
     readonly id: string,
     readonly name: string,
+    /** Why no correction can move any of its marks, and what to correct instead. */
+    private readonly fixed?: string,
   ) {}
 
   /** Where a mark stands. */
   at(id: string): Point {
     return this.mark(id).at
+  }
+
+  /** The place that rules and style gave a mark, before any correction moved it: what others are measured from. */
+  byRule(id: string): string {
+    return this.marks.has(`${id}-by-rule`) ? `${id}-by-rule` : id
   }
 
   /** A mark with its dependencies. */
@@ -84,8 +93,8 @@ export class PiecePen {
   }
 
   /** The first mark of a piece. */
-  start(id: string, at: Point, say: string): void {
-    this.put(id, at, nothing, nothing, { say, from: undefined })
+  start(id: string, at: Point, say: string, options: Pick<MarkOptions, 'onCentre' | 'fixed'> = {}): void {
+    this.put(id, at, nothing, nothing, { ...options, say, from: undefined })
   }
 
   /** From a mark, go so far in a direction: the length is the value of the named rule or style value. */
@@ -189,6 +198,26 @@ export class PiecePen {
     })
   }
 
+  /** Some marks follow from others, and some stand on the centre line: saying so is better than a crooked piece. */
+  private refuseToMove(
+    mark: string,
+    correction: { readonly id: string; readonly by: Point },
+    fixed: string | undefined,
+    onCentre: boolean,
+  ): void {
+    const why =
+      fixed ??
+      (onCentre && Math.abs(correction.by.x) > 1e-9
+        ? 'It stands on the centre line: move it up or down only.'
+        : undefined)
+    if (!why) return
+    this.pen.refuse({
+      field: `corrections.${correction.id}`,
+      code: 'impossible-shape',
+      message: `The point “${mark}” of the ${this.name.toLowerCase()} cannot be moved like that. ${why}`,
+    })
+  }
+
   private put(
     id: string,
     at: Point,
@@ -203,6 +232,9 @@ export class PiecePen {
     },
   ): void {
     const correction = this.pen.corrections.forMark(this.id, id, options.shared ?? false)
+    const fixed = options.fixed ?? this.fixed
+    if (fixed) this.held.set(id, fixed)
+    if (correction) this.refuseToMove(id, correction, fixed, options.onCentre ?? false)
     const own = correction ? `${id}-by-rule` : id
     this.kinds.set(id, options.kind ?? 'construction')
     if (options.drag) this.drags.set(id, options.drag)
@@ -297,6 +329,7 @@ export class PiecePen {
     this.place(`${id}-drill`, drillPoint(first, second, at), {
       say: 'Drill inside the point, where the hole is hidden when the dart is sewn',
       kind: 'drill',
+      fixed: 'It follows the point of the dart.',
       mask: this.edge(edges[0]).uses | this.edge(edges[1]).uses,
     })
     this.pen.sew({
@@ -362,6 +395,7 @@ export class PiecePen {
       letter: letter(index++),
       at: mark.at,
       kind: this.kinds.get(mark.id) ?? 'construction',
+      ...(this.held.has(mark.id) ? { fixed: this.held.get(mark.id) as string } : {}),
     }))
   }
 }

@@ -17,7 +17,7 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
   1: [
     [
       'an arc’s end no longer stands on its mark',
-      'garments/circle-skirt.ts',
+      'parts/fitted-waist.ts',
       '...(index === last ? { to } : {}),',
       '',
     ],
@@ -73,7 +73,7 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
     ],
     [
       'a stretch beside the pocket is sewn twice',
-      'parts/in-seam-pocket.ts',
+      'parts/pockets/in-seam.ts',
       'a: [stretch(a, mouth.to, length)],',
       'a: [stretch(a, mouth.to - 5, length)],',
     ],
@@ -164,11 +164,11 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
   8: [
     [
       'the waist is swung 0.5 mm wide',
-      'garments/circle-skirt.ts',
+      'parts/skirts/circle.ts',
       'arcPath(apex, radius, from, to)',
       'arcPath(apex, radius + 0.5, from, to)',
     ],
-    ['π is 3.14', 'garments/circle-skirt.ts', '2 * pi *', '2 * 3.14 *'],
+    ['π is 3.14', 'parts/skirts/circle.ts', '2 * pi *', '2 * 3.14 *'],
   ],
   9: [
     [

@@ -1,9 +1,9 @@
-import type { DesignValue, Path, Run } from '../contract'
-import { endOf, intersections, pathLength } from '../geometry'
-import { length, yesNo } from '../pen/design'
-import { nothing, type Mask } from '../pen/masks'
-import type { Pen } from '../pen/pen'
-import { straight, type PiecePen } from '../pen/piece-pen'
+import type { DesignValue, Path, Run } from '../../contract'
+import { endOf, intersections, pathLength } from '../../geometry'
+import { length, yesNo } from '../../pen/design'
+import { nothing, type Mask } from '../../pen/masks'
+import type { Pen } from '../../pen/pen'
+import { straight, type PiecePen } from '../../pen/piece-pen'
 
 const worn = { id: 'pockets', is: [true] }
 
@@ -14,6 +14,10 @@ export const pocketDesign: readonly DesignValue[] = [
   length('pocketDepth', 'Depth of the bag', 'pockets', { default: 310, min: 250, max: 360 }, worn),
   length('pocketAllowance', 'Pocket bag allowance', 'allowances', { default: 12.7, min: 0, max: 30 }, worn),
 ]
+
+/** The same, offered with them or without by default. */
+export const seamPockets = (byDefault: boolean): readonly DesignValue[] =>
+  pocketDesign.map((value) => (value.id === 'pockets' ? { ...value, default: byDefault } : value))
 
 /** Common practice: the mouth ends at least so far above the hem, mm. */
 const aboveHem = 80
@@ -64,7 +68,7 @@ export function pocketMouth(pen: Pen, seam: Path, waistLevel: number): PocketMou
  * @param least how deep the bag may hang before it shows below the hem, mm.
  */
 export function pocketBag(pen: Pen, least: number, uses: Mask): PiecePen {
-  const bag = pen.piece('pocket-bag', 'Pocket bag')
+  const bag = pen.piece('pocket-bag', 'Pocket bag', 'The bag follows its opening and its depth: change those instead.')
   const opening = pen.length('pocketOpening')
   const wanted = pen.length('pocketDepth')
   const depth = Math.max(opening + 40, Math.min(wanted, least))

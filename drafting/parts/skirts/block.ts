@@ -1,6 +1,6 @@
-import type { DesignValue, RuleDefinition } from '../contract'
-import { choice, count, length } from '../pen/design'
-import { geometry, lengthRule } from '../pen/garment'
+import type { DesignValue, RuleDefinition } from '../../contract'
+import { choice, count, length } from '../../pen/design'
+import { geometry, lengthRule } from '../../pen/garment'
 
 const atCentreBack = { id: 'opening', is: ['centre-back zip'] }
 
@@ -32,13 +32,13 @@ export const skirtBlockRules: readonly RuleDefinition[] = [
   lengthRule('waistQuarter', 'Quarter of the waist', '(waist + waistEase) / 4', geometry),
   lengthRule('skirtQuarter', 'Quarter of the skirt', 'max((hip + hipEase) / 4, waistQuarter)'),
   lengthRule('hipLine', 'Hip below the waist', 'waistToHip'),
-  lengthRule('suppression', 'Taken out at the waist, each quarter', 'skirtQuarter - waistQuarter', geometry),
-  lengthRule('sideTakes', 'Of it at the side seam', 'min(suppression * 0.42, 3cm)'),
-  lengthRule('waistShift', 'Front waist wider than the back', 'min(1cm, suppression - sideTakes)'),
-  lengthRule('frontTakes', 'Front darts in all', 'suppression - sideTakes - waistShift', geometry),
-  lengthRule('backTakes', 'Back darts in all', 'suppression - sideTakes + waistShift', geometry),
-  lengthRule('sideRise', 'Waist higher at the side', 'min(1.2cm, suppression * 0.3)'),
-  lengthRule('centreBackDrop', 'Waist lower at the centre back', 'min(0.8cm, suppression * 0.15)'),
+  lengthRule('quarterSuppression', 'Taken out at the waist, each quarter', 'skirtQuarter - waistQuarter', geometry),
+  lengthRule('sideTakes', 'Of it at the side seam', 'min(quarterSuppression * 0.42, 3cm)'),
+  lengthRule('waistShift', 'Front waist wider than the back', 'min(1cm, quarterSuppression - sideTakes)'),
+  lengthRule('frontTakes', 'Front darts in all', 'quarterSuppression - sideTakes - waistShift', geometry),
+  lengthRule('backTakes', 'Back darts in all', 'quarterSuppression - sideTakes + waistShift', geometry),
+  lengthRule('sideRise', 'Waist higher at the side', 'min(1.2cm, quarterSuppression * 0.3)'),
+  lengthRule('centreBackDrop', 'Waist lower at the centre back', 'min(0.8cm, quarterSuppression * 0.15)'),
   lengthRule('frontDartOut', 'First front dart from the centre', 'skirtQuarter * (0.52 - frontDarts * 0.1)'),
   lengthRule('frontDartBetween', 'From one front dart to the next', 'skirtQuarter * 0.3'),
   lengthRule('frontDartLong', 'Front dart length', 'min(9.5cm, waistToHip * 0.48)'),

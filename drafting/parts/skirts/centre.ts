@@ -1,8 +1,9 @@
-import type { DesignValue, RuleDefinition } from '../contract'
-import { choice, length } from '../pen/design'
-import { lengthRule } from '../pen/garment'
-import type { Pen } from '../pen/pen'
-import type { SkirtHalf } from './skirt-marks'
+import type { DesignValue, RuleDefinition } from '../../contract'
+import { choice, length } from '../../pen/design'
+import { lengthRule } from '../../pen/garment'
+import type { Pen } from '../../pen/pen'
+import type { SkirtHalf } from './marks'
+import type { SkirtUse } from './skirt'
 
 const walking = { id: 'walkingRoom', is: ['vent', 'slit'] }
 
@@ -31,19 +32,24 @@ export const walkingRules: readonly RuleDefinition[] = [
   lengthRule('ventSlope', 'Slope of the top of the vent', 'ventWidth * 0.5'),
 ]
 
-const openAtBack = (pen: Pen, half: Pick<SkirtHalf, 'piece' | 'side'>): boolean =>
-  half.side === 'back' && pen.chosen('opening') === 'centre-back zip'
+type Half = Pick<SkirtHalf, 'piece' | 'side'>
+
+const openAtBack = (half: Half, use: SkirtUse): boolean =>
+  half.side === 'back' && use.opening === 'centre-back zip'
+
+const ofVent = 'Change the height or the width of the vent instead.'
 
 /** What opens below the zip so that one can walk. */
 export type WalkingRoom = 'vent' | 'slit' | 'none'
 
 /** Marks of zip, vent and slit on a centre back; none on a fold. */
-export function skirtCentreMarks(pen: Pen, half: Pick<SkirtHalf, 'piece' | 'side'>, way: WalkingRoom): void {
-  if (!openAtBack(pen, half)) return
+export function skirtCentreMarks(pen: Pen, half: Half, use: SkirtUse, way: WalkingRoom): void {
+  if (!openAtBack(half, use)) return
   const { piece } = half
-  piece.go('zipEnd', 'centreWaist', 'down', 'zipLength', {
+  piece.go('zipEnd', 'centreWaist', 'down', use.zip, {
     say: 'Mark the end of the zip',
-    drag: ['zipLength'],
+    drag: [use.zip],
+    fixed: 'Change the length of the zip instead.',
   })
   if (way === 'none') return
   const short = pen.value('ventHeight') - pen.value('ventDrawn')
@@ -59,6 +65,7 @@ export function skirtCentreMarks(pen: Pen, half: Pick<SkirtHalf, 'piece' | 'side
     say: `From the hem go up the height of the ${way}`,
     round: 'down',
     drag: ['ventHeight'],
+    fixed: ofVent,
   })
   pen.tag({
     piece: piece.id,
@@ -71,15 +78,16 @@ export function skirtCentreMarks(pen: Pen, half: Pick<SkirtHalf, 'piece' | 'side
   piece.go('ventHem', 'centreHem', 'left', 'ventWidth', {
     say: 'Go out the width of the vent',
     drag: ['ventWidth'],
+    fixed: ofVent,
   })
-  piece.go('ventOut', 'ventTop', 'left', 'ventWidth', { say: 'Go out as far at its top' })
-  piece.go('ventCorner', 'ventOut', 'down', 'ventSlope', { say: 'Slope the top down' })
+  piece.go('ventOut', 'ventTop', 'left', 'ventWidth', { say: 'Go out as far at its top', fixed: ofVent })
+  piece.go('ventCorner', 'ventOut', 'down', 'ventSlope', { say: 'Slope the top down', fixed: ofVent })
 }
 
 /** Draws the centre from the hem up to the waist: a fold, or seam and opening with their vent or slit. */
-export function drawSkirtCentre(pen: Pen, half: Pick<SkirtHalf, 'piece' | 'side'>, way: WalkingRoom): void {
+export function drawSkirtCentre(pen: Pen, half: Half, use: SkirtUse, way: WalkingRoom): void {
   const { piece } = half
-  if (!openAtBack(pen, half)) {
+  if (!openAtBack(half, use)) {
     piece.line('centre', 'centreHem', 'centreWaist', { role: 'fold', say: 'The centre lies on the fold' })
     return
   }
@@ -121,8 +129,8 @@ export function drawSkirtCentre(pen: Pen, half: Pick<SkirtHalf, 'piece' | 'side'
     say: 'The opening for the zip',
   })
   pen.sew({
-    id: 'centre-back',
-    name: 'Centre back',
+    id: `${use.prefix}centre-back`,
+    name: use.prefix ? 'Centre back of the skirt' : 'Centre back',
     a: [{ piece: piece.id, edge: 'centre' }],
     b: [{ piece: piece.id, edge: 'centre', mirrored: true }],
   })

@@ -1,8 +1,9 @@
-import type { Fit, Path } from '../contract'
-import { intersections, pathLength } from '../geometry'
-import { fitAcross, type Pen } from '../pen/pen'
-import { straight, type PiecePen } from '../pen/piece-pen'
-import type { DrawnHalf } from './skirt-seams'
+import type { Fit, Path } from '../../contract'
+import { intersections, pathLength } from '../../geometry'
+import { fitAcross, type Pen } from '../../pen/pen'
+import { straight, type PiecePen } from '../../pen/piece-pen'
+import type { DrawnHalf } from './seams'
+import type { SkirtUse } from './skirt'
 
 type Across = Parameters<typeof fitAcross>[4]
 
@@ -28,10 +29,18 @@ export function findWaist(pen: Pen, halves: readonly DrawnHalf[], names: readonl
   return across
 }
 
-/** The waist of a fitted skirt against the body. */
-export function fitWaistOf(pen: Pen, halves: readonly DrawnHalf[]): void {
-  const waist = findWaist(pen, halves, ['waistQuarter'])
-  pen.fit(fitAcross('waist', 'equal', pen.value('waistEase'), pen.value('waist'), waist))
+/** The waist of a skirt against the body; sewn to a bodice, the bodice answers for it. */
+export function fitWaistOf(pen: Pen, halves: readonly DrawnHalf[], use: SkirtUse): void {
+  waistGirth(pen, findWaist(pen, halves, ['waistQuarter']), use)
+}
+
+/** Promises the waist and its ease, unless a correction took it in. */
+export function waistGirth(pen: Pen, across: Across, use: SkirtUse): void {
+  if (use.sewnTo) return
+  const drawn = across.reduce((sum, one) => sum + one.times * one.length, 0)
+  const asked = pen.tape ? drawn - pen.value('waist') : pen.value('waistEase')
+  const corrected = Math.abs(drawn - pen.value('waist') - asked) > 0.5 && pen.corrections.active.length > 0
+  pen.fit(fitAcross('waist', corrected ? 'shown' : 'equal', asked, pen.value('waist'), across))
 }
 
 /**
@@ -63,6 +72,15 @@ export function hipGirth(pen: Pen, across: Across, ...remedies: readonly string[
     'hip-tight',
     `At the hip the skirt is ${pen.say(girth)} round, the body with ease ${pen.say(wanted)}. Make it wider there.`,
     ...remedies,
+    'hip',
+  )
+}
+
+/** Says that nobody can judge the hip of a body whose hip was not measured. */
+export function hipUnknown(pen: Pen): void {
+  pen.caution(
+    'hip-unknown',
+    'The hip was not measured, so nobody can say whether the skirt is wide enough there. Measure the hip.',
     'hip',
   )
 }
