@@ -1,5 +1,6 @@
 import type { Draft, DraftOrder, Problem } from './contract'
 import { estimates } from './body'
+import { judgeCorrected, withCorrectionsNamed } from './corrected'
 import { DraftingError } from './drafting-error'
 import { engineVersion } from './engine-version'
 import { findGarment } from './garments'
@@ -26,6 +27,7 @@ export function draftGarment(order: DraftOrder): Draft {
   if (!ready) throw new DraftingError(problems)
   const pen = draw(garment, order, ready)
   const { pieces, seams } = finish(pen)
+  judgeCorrected(pen, pieces, seams)
   return {
     engineVersion,
     garment: garment.definition.id,
@@ -50,11 +52,27 @@ export function draw(garment: Garment, order: DraftOrder, ready: ReadyOrder): Pe
     order.tape,
     order.explain !== false,
   )
-  garment.draft(pen)
-  pen.settle()
+  try {
+    garment.draft(pen)
+    pen.settle()
+  } catch (error) {
+    throw withCorrectionsNamed(error, pen.corrections.active, () =>
+      drawsWell(garment, order, { ...ready, corrections: [] }),
+    )
+  }
   const unknown = pen.corrections.unknown()
   if (unknown.length) throw new DraftingError(unknown)
   return pen
+}
+
+function drawsWell(garment: Garment, order: DraftOrder, ready: ReadyOrder): boolean {
+  try {
+    draw(garment, order, ready)
+    return true
+  } catch (error) {
+    if (error instanceof DraftingError) return false
+    throw error
+  }
 }
 
 /** Estimated measurement → everything on the card that its estimate follows from. */

@@ -37,7 +37,7 @@ const bodice: readonly MethodRule[] = [
 ]
 
 const skirt: readonly MethodRule[] = [
-  rule('sideRise', 'min(1cm, suppression * 0.3)', `${sources.skirt}: 1 cm`),
+  rule('sideRise', 'min(1cm, quarterSuppression * 0.3)', `${sources.skirt}: 1 cm`),
   rule(
     'frontDartLong',
     'min(10cm, waistToHip * 0.5)',

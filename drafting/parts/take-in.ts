@@ -24,8 +24,12 @@ import { straight, type PiecePen } from '../pen/piece-pen'
 
 /** Nearer than this to each other two places cannot be told apart; nearer to an end, the end itself moves. mm */
 const apart = 30
+/** The last stretch above a hem stays straight, so that its allowance turns up flat. mm */
+const aboveHem = 90
 /** A seam that runs off by more than this, mm a mm, would not hang: the correction is too large for its length. */
-const steepest = 0.6
+const steepest = 0.4
+
+const atCorrection = 'It stands where a correction put it: change that correction.'
 
 interface Knot {
   readonly along: number
@@ -75,7 +79,7 @@ export function takeIn(pen: Pen, piece: PiecePen, path: Path, seam: Seam): Taken
   const origin = seam.origin ?? 0
   const spare = seam.ends === 'move' ? 0 : apart
   const least = (seam.alongSeam ? 0 : Math.max(0, startOf(path).y)) + origin + spare
-  const most = (seam.alongSeam ? long : endOf(path).y) + origin - 2 * spare
+  const most = (seam.alongSeam ? long : endOf(path).y) + origin - 4 * spare
   const asked = corrections.map(({ id, level, by }): Knot => {
     if (level < least || level > most) {
       pen.refuse({
@@ -90,24 +94,32 @@ export function takeIn(pen: Pen, piece: PiecePen, path: Path, seam: Seam): Taken
     const along = seam.alongSeam
       ? y
       : (intersections(path, straight({ x: -4000, y }, { x: 8000, y }))[0]?.a ?? 0)
-    return { id, by, along: along < apart ? 0 : along > long - apart ? long : along }
+    return { id, by, along: along < apart ? 0 : along > long - aboveHem - apart ? long - aboveHem : along }
   })
-  const knots = withRests(asked, [0, ...(seam.rests ?? []), long])
+  const knots = withRests(asked, [0, ...(seam.rests ?? []), long - aboveHem])
+  knots.push({ ...(knots.at(-1) as Knot), along: long })
   refuseSteep(pen, knots)
+  const drawn = moved(path, knots)
   const markOf = (id: string): string => `takenIn-${id}${seam.suffix ?? ''}`
   for (const { id, along, by } of knots) {
-    if (!id) continue
+    if (!id || along === long) continue
     const at = add(pointAt(path, along), scale(perpendicular(tangentOn(path, along)), by))
     piece.place(markOf(id), applyTo(turned, at), {
       say: `Correction: ${by < 0 ? 'let out' : 'take in'} the seam here, the same on both sides`,
-      fixed: 'It stands where a correction put it: change that correction.',
+      fixed: atCorrection,
     })
   }
   const [first, last] = [knots[0], knots.at(-1)]
+  if (last?.id) {
+    piece.place(`${markOf(last.id)}-hem`, applyTo(turned, endOf(drawn)), {
+      say: 'Correction: the same at the hem',
+      fixed: atCorrection,
+    })
+  }
   return {
-    path: transformPath(turned, moved(path, knots)),
+    path: transformPath(turned, drawn),
     ...(first?.id ? { top: markOf(first.id) } : {}),
-    ...(last?.id ? { end: markOf(last.id) } : {}),
+    ...(last?.id ? { end: `${markOf(last.id)}-hem` } : {}),
   }
 }
 
@@ -120,7 +132,7 @@ function withRests(asked: readonly Knot[], rests: readonly number[]): Knot[] {
 function refuseSteep(pen: Pen, knots: readonly Knot[]): void {
   for (const [index, knot] of knots.entries()) {
     const before = knots[index - 1]
-    if (!before) continue
+    if (!before || (knot.id && knot.id === before.id)) continue
     const long = knot.along - before.along
     const change = Math.abs(knot.by - before.by)
     if (long >= apart - 1e-6 && change * 1.5 <= steepest * long) continue
@@ -149,7 +161,8 @@ function shift(knots: readonly Knot[], along: number): readonly [by: number, slo
 function moved(path: Path, knots: readonly Knot[]): Path {
   const joints: number[] = []
   let reached = 0
-  for (const segment of path.segments) joints.push((reached += pathLength({ closed: false, segments: [segment] })))
+  for (const segment of path.segments)
+    joints.push((reached += pathLength({ closed: false, segments: [segment] })))
   const breaks = [0, ...joints, ...knots.map((knot) => knot.along)]
     .sort((a, b) => a - b)
     .filter((along, index, all) => index === 0 || along - (all[index - 1] as number) > 1e-6)

@@ -32,7 +32,12 @@ export const skirtBlockRules: readonly RuleDefinition[] = [
   lengthRule('waistQuarter', 'Quarter of the waist', '(waist + waistEase) / 4', geometry),
   lengthRule('skirtQuarter', 'Quarter of the skirt', 'max((hip + hipEase) / 4, waistQuarter)'),
   lengthRule('hipLine', 'Hip below the waist', 'waistToHip'),
-  lengthRule('quarterSuppression', 'Taken out at the waist, each quarter', 'skirtQuarter - waistQuarter', geometry),
+  lengthRule(
+    'quarterSuppression',
+    'Taken out at the waist, each quarter',
+    'skirtQuarter - waistQuarter',
+    geometry,
+  ),
   lengthRule('sideTakes', 'Of it at the side seam', 'min(quarterSuppression * 0.42, 3cm)'),
   lengthRule('waistShift', 'Front waist wider than the back', 'min(1cm, quarterSuppression - sideTakes)'),
   lengthRule('frontTakes', 'Front darts in all', 'quarterSuppression - sideTakes - waistShift', geometry),

@@ -29,7 +29,7 @@ export function drawCircleHalves(pen: Pen, use: SkirtUse, sewnTo: SewnTo): Drawn
     }))
   pen.fit(fitAcross('hem', 'shown', 0, undefined, over('hem')))
   const widest = Math.max(sewnTo.front.length, sewnTo.back.length) / radius
-  const level = levelOf(pen, radius, 90, 90 - (widest * 180) / Math.PI - 1)
+  const level = levelOf(pen, radius, 90, 90 - (widest * 180) / Math.PI)
   fitArcs(
     pen,
     halves.map(({ piece }) => ({ panel: piece, ends: [undefined, 'side'] as const, times: 2 })),
@@ -68,14 +68,20 @@ function drawHalf(
   skirtCentreMarks(pen, half, use, 'none')
   const arc = (reach: number, from: number, to: number, ends: readonly [string, string]) =>
     pinned(arcPath(apex, reach, from, to), piece.at(ends[0]), piece.at(ends[1]))
-  piece.curve('waist', arc(radius, 90, 90 - angle, ['centreWaist', 'sideWaist']), 'centreWaist', 'sideWaist', {
-    role: 'waist',
-    allowance: 'waistAllowance',
-    finish: waistFinish(pen, use),
-    say: 'Swing the waist',
-    uses: ['circleShare'],
-    mask,
-  })
+  piece.curve(
+    'waist',
+    arc(radius, 90, 90 - angle, ['centreWaist', 'sideWaist']),
+    'centreWaist',
+    'sideWaist',
+    {
+      role: 'waist',
+      allowance: 'waistAllowance',
+      finish: waistFinish(pen, use),
+      say: 'Swing the waist',
+      uses: ['circleShare'],
+      mask,
+    },
+  )
   const taken = takeIn(pen, piece, straight(piece.at('sideWaist'), piece.at('sideHem')), {
     seams: [`${use.prefix}side`],
     ends: 'stay',
@@ -83,12 +89,18 @@ function drawHalf(
     origin: use.origin,
     instead: atWaist,
   })
-  piece.curve('side', pinned(taken.path, piece.at('sideWaist'), piece.at('sideHem')), 'sideWaist', 'sideHem', {
-    role: 'seam',
-    allowance: 'sideAllowance',
-    kind: 'line',
-    say: 'Join waist to hem',
-  })
+  piece.curve(
+    'side',
+    pinned(taken.path, piece.at('sideWaist'), piece.at('sideHem')),
+    'sideWaist',
+    'sideHem',
+    {
+      role: 'seam',
+      allowance: 'sideAllowance',
+      kind: 'line',
+      say: 'Join waist to hem',
+    },
+  )
   piece.curve('hem', arc(outer, 90 - angle, 90, ['sideHem', 'centreHem']), 'sideHem', 'centreHem', {
     role: 'hem',
     allowance: 'hemAllowance',

@@ -10,7 +10,13 @@ export const byCompass =
 /** What to do about the ends of its seams. */
 export const atWaist = 'At the waist change its ease, at the hem the length.'
 
-/** The level of the hip: an arc about the point of the circle. Undefined where nobody knows it or the skirt ends above it. */
+/** No seam is let out by more, mm. */
+const letOut = 150
+
+/**
+ * The level of the hip: an arc about the point of the circle, a little longer than the piece, which a seam let out makes wider.
+ * Undefined where nobody knows it or the skirt ends above it.
+ */
 export function levelOf(pen: Pen, radius: number, from: number, to: number): Path | undefined {
   if (!pen.has('hip')) {
     hipUnknown(pen)
@@ -18,7 +24,8 @@ export function levelOf(pen: Pen, radius: number, from: number, to: number): Pat
   }
   const down = pen.value('waistToHip')
   if (down >= pen.length('length')) return undefined
-  return arcPath({ x: 0, y: -radius }, radius + down, from, to)
+  const more = ((letOut / (radius + down)) * 180) / Math.PI
+  return arcPath({ x: 0, y: -radius }, radius + down, from === 90 ? 90 : from + more, to - more)
 }
 
 /** The hip across pieces of a circle, from edge to edge as they are drawn. */

@@ -11,7 +11,15 @@ import { waistbandDesign, waistbandRules, waistEasedIn } from '../waistband'
 import { drawCircleHalves } from './circle-halves'
 import { atWaist, byCompass, fitArcs, levelOf } from './circle-levels'
 import { waistGirth } from './fits'
-import { bandOnPanels, overPanels, panelNames, seamsOfEdge, sewPanels, timesCut, waistOfPanels } from './panels'
+import {
+  bandOnPanels,
+  overPanels,
+  panelNames,
+  seamsOfEdge,
+  sewPanels,
+  timesCut,
+  waistOfPanels,
+} from './panels'
 import { skirtPiece, waistFinish, type Skirt, type SkirtUse } from './skirt'
 
 const shares: Readonly<Record<string, number>> = {

@@ -1,7 +1,7 @@
 import { choice, length, share } from '../../pen/design'
 import { geometry, lengthRule } from '../../pen/garment'
 import { fitAcross, type Pen } from '../../pen/pen'
-import { straight } from '../../pen/piece-pen'
+import { straight, type PiecePen } from '../../pen/piece-pen'
 import { pinned } from '../fitted-waist'
 import { seamPockets } from '../pockets/in-seam'
 import { takeIn } from '../take-in'
@@ -78,7 +78,7 @@ export function gatheringRule(pen: Pen): string {
 function drawRectangle(pen: Pen, side: 'front' | 'back', use: SkirtUse): DrawnHalf {
   const piece = skirtPiece(pen, use, side, side === 'front' ? 'Front' : 'Back')
   const half = { piece, side }
-  rectangleMarks(pen, half)
+  rectangleMarks(pen, piece)
   skirtCentreMarks(pen, half, use, 'none')
   const taken = takeIn(pen, piece, straight(piece.at('sideWaist'), piece.at('sideHem')), {
     seams: [`${use.prefix}side`],
@@ -121,7 +121,7 @@ function drawRectangle(pen: Pen, side: 'front' | 'back', use: SkirtUse): DrawnHa
 
 const level = 'A rectangle keeps its level edges: change the length instead.'
 
-function rectangleMarks(pen: Pen, { piece, side }: { piece: DrawnHalf['piece']; side: string }): void {
+function rectangleMarks(pen: Pen, piece: PiecePen): void {
   piece.start('centreWaist', { x: 0, y: 0 }, 'Mark the waist on the centre', { fixed: level })
   piece.go('hipLevel', 'centreWaist', 'down', 'hipLine', {
     say: 'Come down to the level of the hip',

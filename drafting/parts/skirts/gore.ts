@@ -21,6 +21,7 @@ import { straight, type PiecePen } from '../../pen/piece-pen'
 import { pinned } from '../fitted-waist'
 import { fairCurve } from '../hem'
 import { takeIn, type TakenIn } from '../take-in'
+import { hemFollows } from './marks'
 import { seamsOfEdge } from './panels'
 import { sewnToBodice, skirtPiece, waistFinish, type SkirtUse } from './skirt'
 
@@ -74,7 +75,8 @@ export function drawGore(pen: Pen, use: SkirtUse, { id, name, index, gores }: Go
     ...seam,
     say: 'Draw the edge over the hip to the hem',
   })
-  gore.curve('hem', hemOf(left.path, right.path, gore.at('hemMiddle')), low, lowLeft, {
+  const hem = hemOf(pen, left.path, right.path, gore.at('hemMiddle'))
+  gore.curve('hem', pinned(hem, gore.at(low), gore.at(lowLeft)), low, lowLeft, {
     role: 'hem',
     allowance: 'hemAllowance',
     corner: 'turned',
@@ -94,9 +96,14 @@ export function drawGore(pen: Pen, use: SkirtUse, { id, name, index, gores }: Go
 /** Middle, levels and the width at them. */
 function goreMarks(pen: Pen, gore: PiecePen, trumpet: boolean): void {
   const onCentre = true
-  gore.start('waistMiddle', { x: 0, y: 0 }, 'Mark the middle of the waist on a line that lies with the grain', {
-    fixed: 'It is where the drawing begins: move the end of the waist on the right edge.',
-  })
+  gore.start(
+    'waistMiddle',
+    { x: 0, y: 0 },
+    'Mark the middle of the waist on a line that lies with the grain',
+    {
+      fixed: 'It is where the drawing begins: move the end of the waist on the right edge.',
+    },
+  )
   gore.go('hipLevel', 'waistMiddle', 'down', 'hipLine', {
     say: 'Come down to the level of the hip',
     onCentre,
@@ -105,7 +112,7 @@ function goreMarks(pen: Pen, gore: PiecePen, trumpet: boolean): void {
   gore.go('hemMiddle', 'waistMiddle', 'down', 'length', {
     say: 'Come down the length',
     drag: ['length'],
-    onCentre,
+    fixed: hemFollows,
   })
   acrossAt(gore, 'hip', 'hipLevel')
   if (trumpet) {
@@ -158,13 +165,21 @@ function edgeEnds(
   // sin(lean)/lean and so on, which stay finite for an edge that stands straight.
   const [across, up] = lean < 1e-6 ? [1, 0] : [Math.sin(lean) / lean, (1 - Math.cos(lean)) / lean]
   const edge = { uses: waistUses, mask }
-  gore.place('waistRight', { x: half * across, y: -half * up }, {
+  gore.place(
+    'waistRight',
+    { x: half * across, y: -half * up },
+    {
+      ...edge,
+      say: 'Mark the end of the waist, its curve square to the edge',
+      shared: true,
+      ...(use.sewnTo ? { fixed: sewnToBodice } : {}),
+    },
+  )
+  gore.place('waistLeft', mirrored(gore.at('waistRight')), {
     ...edge,
-    say: 'Mark the end of the waist, its curve square to the edge',
-    shared: true,
-    ...(use.sewnTo ? { fixed: sewnToBodice } : {}),
+    say: 'Mark its other end',
+    fixed: alike,
   })
-  gore.place('waistLeft', mirrored(gore.at('waistRight')), { ...edge, say: 'Mark its other end', fixed: alike })
   const from = gore.at(trumpet ? 'flareRight' : 'hipRight')
   const long = gore.at(gore.byRule('hemMiddle')).y - from.y
   const flare = Math.min(pen.value('flareDrawn'), long * 0.75)
@@ -173,12 +188,12 @@ function edgeEnds(
     say: 'Mark the hem, flared from the straight',
     uses: hemUses,
     drag: ['hemFlare'],
-    shared: true,
+    fixed: hemFollows,
   })
   gore.place('hemLeft', mirrored(gore.at('hemRight')), {
     say: 'Mark it on the other edge',
     uses: hemUses,
-    fixed: alike,
+    fixed: hemFollows,
   })
 }
 
@@ -220,15 +235,18 @@ function waistBetween(left: Path, right: Path): Path {
 }
 
 /** From the right edge through the middle to the left, square to all three. */
-function hemOf(left: Path, right: Path, middle: Point): Path {
+function hemOf(pen: Pen, left: Path, right: Path, middle: Point): Path {
   const half = (edge: Path): Path => {
     const [low, down] = [endOf(edge), endTangent(edge)]
-    return fairCurve(low, { x: -down.y, y: down.x }, middle, { x: -1, y: 0 }) ?? straight(low, middle)
+    const fair = fairCurve(low, { x: -down.y, y: down.x }, middle, { x: -1, y: 0 })
+    if (fair || Math.abs(down.x) < 1e-9) return fair ?? straight(low, middle)
+    return pen.refuse({
+      field: 'hemFlare',
+      code: 'impossible-shape',
+      message: 'The hem of a gore does not run in one fair curve to its middle. Flare more.',
+    })
   }
-  return joinPaths(
-    half(right),
-    reversePath(transformPath(mirrorX, half(transformPath(mirrorX, left)))),
-  )
+  return joinPaths(half(right), reversePath(transformPath(mirrorX, half(transformPath(mirrorX, left)))))
 }
 
 /** The level of the hip, from edge to edge as they are drawn. */

@@ -7,6 +7,7 @@ import { fairCurve } from '../hem'
 import { takeIn } from '../take-in'
 import { drawSkirtCentre, skirtCentreMarks, type WalkingRoom } from './centre'
 import type { DrawnHalf } from './seams'
+import { hemFollows } from './marks'
 import { sewnToBodice, waistFinish, type SkirtUse } from './skirt'
 import { sideOf, waistTo, type FittedHalf } from './waist'
 
@@ -71,7 +72,8 @@ export function drawSkirtHalf(
     mask,
   })
   const centre = piece.marks.has('ventHem') ? 'ventHem' : 'centreHem'
-  piece.curve('hem', hemOf(side, piece.at('centreHem'), piece.at(centre)), end, centre, {
+  const hem = hemOf(side, piece.at('centreHem'), piece.at(centre))
+  piece.curve('hem', pinned(hem, piece.at(end), piece.at(centre)), end, centre, {
     role: 'hem',
     allowance: 'hemAllowance',
     corner: 'turned',
@@ -119,7 +121,7 @@ function sideMarks(
     ...follows,
     uses: [...follows.uses, 'length'],
     through: ['hip', 'centreHem'],
-    shared: true,
+    fixed: hemFollows,
     ...(flared ? { drag: ['flareMore'] } : {}),
   })
 }
@@ -148,26 +150,8 @@ function hemOf(side: Path, centre: Point, end: Point): Path {
   const from = endOf(side)
   const down = endTangent(side)
   const curve =
-    Math.abs(down.x) < 1e-9 && Math.abs(from.y - centre.y) < 1e-9
+    Math.abs(down.x) < 1e-9
       ? straight(from, centre)
-      : (fairCurve(from, { x: -down.y, y: down.x }, centre, { x: -1, y: 0 }) ??
-        squareBothWays(from, { x: -down.y, y: down.x }, centre))
+      : (fairCurve(from, { x: -down.y, y: down.x }, centre, { x: -1, y: 0 }) ?? straight(from, centre))
   return end.x < centre.x ? joinPaths(curve, straight(centre, end)) : curve
-}
-
-/** Square at both ends where one end stands so much higher that the curve must bend both ways. */
-function squareBothWays(from: Point, leaves: Point, to: Point): Path {
-  const reach = Math.hypot(to.x - from.x, to.y - from.y) / 3
-  return {
-    closed: false,
-    segments: [
-      {
-        kind: 'cubic',
-        from,
-        control1: { x: from.x + leaves.x * reach, y: from.y + leaves.y * reach },
-        control2: { x: to.x + reach, y: to.y },
-        to,
-      },
-    ],
-  }
 }

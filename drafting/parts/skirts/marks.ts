@@ -16,6 +16,10 @@ export const leastDart = 4
 /** Common practice: a dart that takes out more than this stands off the body at its point, mm. */
 const deepDart = 45
 
+/** Why no point of a hem is moved. */
+export const hemFollows =
+  'The hem follows from the length: change that, or take in the side near the hem to make it narrower.'
+
 /** mm that each dart of a half takes out, and how many there are: none where it would not be worth one. */
 export function dartsTaken(pen: Pen, side: 'front' | 'back'): Pick<SkirtHalf, 'darts' | 'intake'> {
   const darts = pen.value(`${side}Darts`)
@@ -51,7 +55,7 @@ export function skirtMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): S
   piece.go('centreHem', level, 'down', 'length', {
     say: 'Come down the length',
     drag: ['length'],
-    onCentre,
+    fixed: hemFollows,
   })
   piece.go('hip', 'hipLevel', 'right', 'skirtQuarter', {
     say: 'Go across a quarter of the hip with its ease, or of the waist where that is wider',

@@ -48,10 +48,11 @@ export function sewPanels(pen: Pen, pieces: readonly PiecePen[], panels: number,
   const first = pieces[0] as PiecePen
   const mouth = choosePocket(pen, first, panels, use)
   pen.settle()
-  const long = first.lengthOf('right')
+  const lengthOf = ({ piece, edge }: Run): number =>
+    pieces.find((panel) => panel.id === piece)?.lengthOf(edge) ?? 0
   const sew = (id: string, name: string, a: Run, b: Run, pocket?: PocketMouth): void => {
     const seam = { id: `${use.prefix}${id}`, name, smooth: true }
-    if (pocket) sewWithPocket(pen, seam, a, b, pocket, long)
+    if (pocket) sewWithPocket(pen, seam, a, b, pocket, lengthOf(a))
     else pen.sew({ ...seam, a: [a], b: [b] })
   }
   if (panels === 1) sew('seam', 'Seam', right(first), reversed(left(first)))

@@ -84,10 +84,7 @@ export function wholeWaist(front: DrawnHalf, back: DrawnHalf): DrawnSkirt {
   const [ofFront, ofBack] = [halfWaist(front), halfWaist(back)]
   return {
     waist: [...outward(back), ...inward(front), ...other(outward(front)), ...other(inward(back))],
-    places: placesAround(
-      { length: ofFront, joints: front.joints },
-      { length: ofBack, joints: back.joints },
-    ),
+    places: placesAround({ length: ofFront, joints: front.joints }, { length: ofBack, joints: back.joints }),
   }
 }
 

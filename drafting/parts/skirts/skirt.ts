@@ -67,7 +67,13 @@ export const alone = (pen: Pen): SkirtUse => ({
 })
 
 /** Begins a piece of a skirt. */
-export function skirtPiece(pen: Pen, { prefix }: SkirtUse, id: string, name: string, fixed?: string): PiecePen {
+export function skirtPiece(
+  pen: Pen,
+  { prefix }: SkirtUse,
+  id: string,
+  name: string,
+  fixed?: string,
+): PiecePen {
   return pen.piece(`${prefix}${id}`, prefix ? `Skirt ${name.toLowerCase()}` : name, fixed)
 }
 

@@ -25,8 +25,14 @@ export const seams: DraftLaw = (draft, order, engine) => {
     const ease = seam.easeFrom
       ? numberOf(seam.easeFrom, order, garmentOf(order, engine.garments), draft.used)
       : 0
-    if (ease === undefined) found.add(seam.id, `its ease comes from “${seam.easeFrom}”, which nothing states`)
-    else found.atMost(seam.id, 'ease against what it comes from', Math.abs(seam.ease - ease), 1e-6)
+    // Corrections move what a rule of the drawing follows from; the rule itself must still be stated.
+    const follows =
+      (order.corrections?.length ?? 0) > 0 &&
+      garmentOf(order, engine.garments).rules.some((rule) => rule.id === seam.easeFrom)
+    if (ease === undefined && !follows)
+      found.add(seam.id, `its ease comes from “${seam.easeFrom}”, which nothing states`)
+    else if (ease !== undefined)
+      found.atMost(seam.id, 'ease against what it comes from', Math.abs(seam.ease - ease), 1e-6)
     stretches(found, seam, a, b, seamTolerance(order))
     notches(found, draft, seam)
   }

@@ -52,7 +52,7 @@ export const fits: DraftLaw = (draft, order, engine) => {
     if (ids.indexOf(id) !== ids.lastIndexOf(id)) found.add(id, 'is measured twice')
   }
   for (const fit of draft.fits) {
-    measured(found, draft, fit, lines)
+    measured(found, draft, fit, lines, order.corrections?.some((one) => !one.off) ?? false)
     const meaning = meanings[fit.id]
     const asked = (name: string | undefined): number | undefined =>
       name === undefined ? undefined : numberOf(name, order, garment, draft.used)
@@ -75,7 +75,13 @@ export const fits: DraftLaw = (draft, order, engine) => {
   return found.all
 }
 
-function measured(found: Findings, draft: Draft, fit: Fit, lines: Map<string, Chain>): void {
+function measured(
+  found: Findings,
+  draft: Draft,
+  fit: Fit,
+  lines: Map<string, Chain>,
+  corrected: boolean,
+): void {
   let sum = 0
   for (const { piece: id, path, times } of fit.across) {
     sum += times * lengthOfPath(path)
@@ -93,7 +99,8 @@ function measured(found: Findings, draft: Draft, fit: Fit, lines: Map<string, Ch
       const onCentre = centre ? new Chain(chordsOf(centre.path)).gap(end) : Infinity
       found.atMost(`${fit.id} on ${id}`, 'end off the stitch line', Math.min(line.gap(end), onCentre), 0.01)
     }
-    if (draft.garment === 'circle-skirt' && ['waist', 'hip', 'hem'].includes(fit.id))
+    // A panel that is taken in on one side only does not lie level any more.
+    if (!corrected && draft.garment === 'circle-skirt' && ['waist', 'hip', 'hem'].includes(fit.id))
       sagging(found, fit, path)
   }
   found.atMost(fit.id, 'length as stated against measured', Math.abs(fit.length - sum), 0.01)

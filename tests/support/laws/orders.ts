@@ -3,10 +3,14 @@ import type {
   Correction,
   DesignChoice,
   DesignValue,
+  Draft,
   DraftOrder,
   GarmentDefinition,
 } from '@/drafting/contract'
+import * as engine from '@/drafting/index'
 import { extremeBodies, plausibleBody, sanityBodies, sizeBodies, type NamedBody } from '../bodies'
+import { lengthOfPath } from './curves'
+import { drafted } from './redraft'
 
 export type Design = Readonly<Record<string, DesignChoice>>
 
@@ -157,45 +161,87 @@ export function namedOrders(
 
 const small = fc.integer({ min: -100, max: 100 }).map((tenths) => tenths / 10)
 
-/** Small corrections of marks of the body pieces, and the side seam taken in or let out. */
-export function corrections(garment: GarmentDefinition): fc.Arbitrary<readonly Correction[]> {
-  if (garment.id !== 'flared-dress') {
-    return fc
-      .tuple(small, small)
-      .map(([x, y]) => [{ id: 'one', on: { piece: 'panel', mark: 'hemMiddle' }, by: { x, y } }])
-  }
-  const mark = fc.constantFrom(
-    'shoulderTip',
-    'sideNeck',
-    'centreNeck',
-    'hollow',
-    'underarm',
-    'sideHem',
-    'neckPoint',
-    'lengthMark',
+/** Garments whose points and seams cannot be corrected yet. */
+export const untouched: readonly string[] = ['bodice']
+
+/** Marks of the dress that a fitting moves. */
+const dressMarks = [
+  'shoulderTip',
+  'sideNeck',
+  'centreNeck',
+  'hollow',
+  'underarm',
+  'sideHem',
+  'neckPoint',
+  'lengthMark',
+]
+
+/** Every mark of a draft that a correction may move, by piece. */
+function movable(draft: Draft): readonly (readonly [piece: string, mark: string])[] {
+  return draft.pieces.flatMap((piece) =>
+    piece.marks
+      .filter((mark) => !mark.fixed && (draft.garment !== 'flared-dress' || onDress(piece.id, mark.id)))
+      .map((mark): [string, string] => [piece.id, mark.id]),
   )
-  const piece = fc.constantFrom('front', 'back')
-  const onMark = fc.tuple(piece, mark, small, small).map(([on, at, x, y], index = 0): Correction => ({
-    id: `mark-${index}`,
-    on: { piece: on, mark: at },
-    // Marks of the centre stay on the fold.
-    by: { x: at === 'centreNeck' || at === 'lengthMark' ? 0 : x, y },
-  }))
-  const onSeam = fc
-    .tuple(fc.integer({ min: 350, max: 700 }), small)
-    .map(([level, by]): Correction => ({ id: 'taken-in', on: { seam: 'side', level }, by }))
-  return fc.oneof(
-    onMark.map((one) => [one]),
-    onSeam.map((one) => [one]),
-    fc.tuple(onMark, onSeam).map(([one, other]) => [one, other]),
-  )
+}
+
+const onDress = (piece: string, mark: string): boolean =>
+  (piece === 'front' || piece === 'back') && dressMarks.includes(mark)
+
+/** Marks on the centre line stay there. */
+const onCentre = (draft: Draft, piece: string, mark: string): boolean =>
+  draft.pieces.find((one) => one.id === piece)?.marks.find((one) => one.id === mark)?.at.x === 0
+
+/** Seams that can be taken in, and between which levels. */
+function seamsOf(draft: Draft): readonly string[] {
+  if (draft.garment === 'flared-dress') return ['side']
+  const ids = draft.seams.map(({ id }) => id.replace(/-(above|below|pocket-front|pocket-back)$/, ''))
+  return [...new Set(ids)].filter((id) => /^(skirt-)?(side|first|first-left|last|seam(-\d+)?)$/.test(id))
+}
+
+/** A level somewhere on a seam, mm. The seams of a circle stay as they are at waist and hem. */
+function levelOf(draft: Draft, seam: string, share: number): number {
+  if (draft.garment === 'flared-dress') return 350 + 350 * share
+  const run = draft.seams.find(({ id }) => id.startsWith(seam))?.a[0]
+  const edge = draft.pieces.find(({ id }) => id === run?.piece)?.edges.find(({ id }) => id === run?.edge)
+  const long = edge ? lengthOfPath(edge.path) : 0
+  return draft.garment === 'circle-skirt' ? 31 + (long - 155) * share : long * 0.97 * share
+}
+
+/** Small corrections of the marks of a draft, and one of its seams taken in or let out. */
+export function corrections(draft: Draft): fc.Arbitrary<readonly Correction[]> {
+  if (untouched.includes(draft.garment)) return fc.constant([])
+  const marks = movable(draft)
+  const seams = seamsOf(draft)
+  const onMark = marks.length
+    ? fc.tuple(fc.constantFrom(...marks), small, small).map(([[piece, mark], x, y]): Correction => ({
+        id: `mark-${mark}`,
+        on: { piece, mark },
+        by: { x: onCentre(draft, piece, mark) ? 0 : x, y },
+      }))
+    : undefined
+  const onSeam = seams.length
+    ? fc
+        .tuple(fc.constantFrom(...seams), fc.integer({ min: 0, max: 100 }), small)
+        .map(([seam, share, by]): Correction => ({
+          id: 'taken-in',
+          on: { seam, level: levelOf(draft, seam, share / 100) },
+          by,
+        }))
+    : undefined
+  const lists: fc.Arbitrary<readonly Correction[]>[] = []
+  if (onMark) lists.push(onMark.map((one) => [one]))
+  if (onSeam) lists.push(onSeam.map((one) => [one]))
+  if (onMark && onSeam) lists.push(fc.tuple(onMark, onSeam))
+  return lists.length ? fc.oneof(...lists) : fc.constant([])
 }
 
 /** Orders with corrections on top. */
 export function correctedOrder(garment: GarmentDefinition): fc.Arbitrary<DraftOrder> {
-  return fc
-    .tuple(randomOrder(garment), corrections(garment))
-    .map(([order, list]) => ({ ...order, corrections: list }))
+  return randomOrder(garment).chain((order) => {
+    const draft = drafted(order, engine)
+    return draft ? corrections(draft).map((list) => ({ ...order, corrections: list })) : fc.constant(order)
+  })
 }
 
 /** Styles in which every measurement of a garment can have its say: sleeved and pulled on over the head, and buttoned. */
