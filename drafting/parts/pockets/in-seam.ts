@@ -68,7 +68,11 @@ export function pocketMouth(pen: Pen, seam: Path, waistLevel: number): PocketMou
  * @param least how deep the bag may hang before it shows below the hem, mm.
  */
 export function pocketBag(pen: Pen, least: number, uses: Mask): PiecePen {
-  const bag = pen.piece('pocket-bag', 'Pocket bag', 'The bag follows its opening and its depth: change those instead.')
+  const bag = pen.piece(
+    'pocket-bag',
+    'Pocket bag',
+    'The bag follows its opening and its depth: change those instead.',
+  )
   const opening = pen.length('pocketOpening')
   const wanted = pen.length('pocketDepth')
   const depth = Math.max(opening + 40, Math.min(wanted, least))
