@@ -1,10 +1,9 @@
 import { garment } from '../pen/garment'
-import { choice } from '../pen/design'
 import { drawBodice, finishBodice, fitBodice } from '../parts/bodice'
 import { bodiceAllowances, bodiceEaseDesign, dartDesign, upperBodiceDesign } from '../parts/bodice/design'
 import { bodiceEstimates, bodiceFound, bodiceWaistRules, upperBodiceRules } from '../parts/bodice/rules'
 import { buttonRules, openingDesign } from '../parts/openings'
-import { sleeveDesign, sleeveRules } from '../parts/sleeves'
+import { allSleeves, sleeveDesign, sleeveRules } from '../parts/sleeves'
 
 /** The fitted bodice with bust and waist darts; the bust dart opens where the style puts it. */
 export const bodice = garment({
@@ -16,12 +15,11 @@ export const bodice = garment({
     ...dartDesign,
     ...upperBodiceDesign,
     ...bodiceEaseDesign,
-    choice('sleeve', 'Sleeve', 'sleeve', ['none', 'plain', 'flared', 'bell', 'puff']),
-    ...sleeveDesign,
+    ...sleeveDesign('none', ...allSleeves),
     ...openingDesign(['zip', 'button band'], 350),
     ...bodiceAllowances,
   ],
-  rules: [...upperBodiceRules, ...bodiceWaistRules, ...sleeveRules, ...buttonRules],
+  rules: [...upperBodiceRules, ...bodiceWaistRules, ...sleeveRules(...allSleeves), ...buttonRules],
   found: bodiceFound,
   draft(pen) {
     const drawn = drawBodice(pen, {

@@ -11,8 +11,15 @@ import { neckRules } from '../parts/neck-rules'
 import { neckLeans } from '../parts/neck-lean'
 import { fitLevels } from '../parts/levels'
 import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/pockets/in-seam'
-import { setInSleeve, wholeArmhole } from '../parts/set-in-sleeve'
-import { sleeveDesign, sleeveRules } from '../parts/sleeves'
+import {
+  allSleeves,
+  sleeveDesign,
+  sleeveEstimates,
+  sleeveFound,
+  sleeveInto,
+  sleeveRules,
+  wholeArmhole,
+} from '../parts/sleeves'
 import { drawOpening, openingDesign, openingRules } from '../parts/openings'
 import { pocketGivesWay } from '../parts/openings/side-zip'
 
@@ -35,8 +42,7 @@ export const flaredDress = garment({
     'frontWaistLength',
     'bustHeight',
     'waistToHip',
-    'upperArm',
-    'armLength',
+    ...sleeveEstimates,
     'head',
   ],
   design: [
@@ -63,8 +69,7 @@ export const flaredDress = garment({
         is: ['equal drop'],
       },
     ),
-    choice('sleeve', 'Sleeve', 'sleeve', ['plain', 'flared', 'none', 'bell', 'puff']),
-    ...sleeveDesign,
+    ...sleeveDesign('plain', 'none', ...allSleeves.slice(1)),
     ...openingDesign(['zip', 'none', 'button band', 'keyhole', 'side zip']),
     ...pocketDesign,
     length('neckAllowance', 'Neck allowance', 'allowances', { default: 10, min: 0, max: 20 }),
@@ -113,7 +118,7 @@ export const flaredDress = garment({
     lengthRule('frontDip', 'Front hem lower by', 'min(balance, 1.5cm)'),
     lengthRule('leastBareArmhole', 'Least armhole without a sleeve', 'upperArm + 4cm'),
     ...openingRules,
-    ...sleeveRules,
+    ...sleeveRules(...allSleeves),
   ],
   found: {
     armholeDeepening: 'length',
@@ -121,10 +126,7 @@ export const flaredDress = garment({
     zipDrawn: 'length',
     hemDrop: 'length',
     swingLoss: 'length',
-    headHeight: 'length',
-    frontGirth: 'length',
-    backGirth: 'length',
-    underarmLength: 'length',
+    ...sleeveFound,
   },
   draft(pen) {
     const direction = flareDirection(pen.value('flareAngle'))
@@ -171,8 +173,7 @@ export const flaredDress = garment({
     })
     sewSides(pen, front)
     fitLevels(pen, front, back)
-    const bare = pen.chosen('sleeve') === 'none'
-    if (!bare) setInSleeve(pen, wholeArmhole(front), wholeArmhole(back))
+    const { bare } = sleeveInto(pen, wholeArmhole(front), wholeArmhole(back))
     faceNeckAndArmholes(pen, [facedBody(front), centres.front], [facedBody(back), centres.back], bare)
     sayWhatIsOdd(pen)
   },

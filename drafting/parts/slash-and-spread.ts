@@ -21,35 +21,54 @@ const clearOfUnderarm = 35
  * Cuts a sleeve from the hem up to the stitch line of its head, with the grain, and spreads each cut at the hem: the strips
  * turn about the ends of the cuts, the middle one stays on the grain.
  *
- * @param by names of the number of cuts, the spread of each and the length of the sleeve.
+ * @param by the number of cuts or its name, and the names of the spread of each, of the spread of those behind where it is
+ *   another, and of the length of the sleeve.
  * @returns the ids of the corners after spreading.
  */
 export function fanOut(
   pen: Pen,
   sleeve: PiecePen,
   head: Halves,
-  by: { readonly cuts: string; readonly spread: string; readonly length: string },
+  by: {
+    readonly cuts: string | number
+    readonly spread: string
+    readonly backSpread?: string
+    readonly length: string
+  },
 ): SleeveCorners {
-  const cuts = Math.round(pen.value(by.cuts))
-  const spread = pen.length(by.spread)
+  const cuts = typeof by.cuts === 'number' ? by.cuts : Math.round(pen.value(by.cuts))
   const hem = sleeve.at('hemLevel').y
   const front = sleeve.at('frontUnderarm')
   const back = sleeve.at('backUnderarm')
   const places = cutPlaces(cuts, back.x + clearOfUnderarm, front.x - clearOfUnderarm)
   const hinges = places.map((x) => hingeAt(x, sleeve, head))
   const shortest = Math.min(...hinges.map((hinge) => hem - hinge.y))
-  if (spread > shortest) {
+  const spreadBy = (index: number): string =>
+    by.backSpread !== undefined && index < cuts / 2 ? by.backSpread : by.spread
+  const spreads = places.map((_, index) => pen.length(spreadBy(index)))
+  const tooWide = spreads.findIndex((spread) => spread > shortest)
+  if (tooWide >= 0) {
     pen.refuse({
-      field: by.spread,
+      field: spreadBy(tooWide),
       code: 'impossible-shape',
       message: `Each cut is only ${pen.say(shortest)} long: spread it less than that, or lengthen the sleeve.`,
       max: shortest,
     })
   }
-  const angles = hinges.map((hinge) => (2 * Math.asin(spread / 2 / (hem - hinge.y)) * 180) / Math.PI)
+  const angles = hinges.map(
+    (hinge, index) => (2 * Math.asin((spreads[index] as number) / 2 / (hem - hinge.y)) * 180) / Math.PI,
+  )
   const turns = stripTurns(hinges, angles)
 
-  const names = [by.spread, by.cuts, by.length, 'biceps', 'frontHeadEase', 'backHeadEase']
+  const names = [
+    by.spread,
+    ...(by.backSpread === undefined ? [] : [by.backSpread]),
+    ...(typeof by.cuts === 'string' ? [by.cuts] : []),
+    by.length,
+    'biceps',
+    'frontHeadEase',
+    'backHeadEase',
+  ]
   const through = ['frontUnderarm', 'backUnderarm', 'hemLevel']
   places.forEach((x, index) => {
     const foot = { x, y: hem }
@@ -63,12 +82,13 @@ export function fanOut(
     })
     sleeve.turnOpen(`cut${index + 1}Right`, `cut${index + 1}Left`, right, {
       say: 'Spread the cut at the hem',
-      by: by.spread,
-      length: spread,
+      by: spreadBy(index),
+      length: spreads[index] as number,
       uses: names,
       through,
       draws: transformPath(turns[index] as Transform, straight(hinges[index] as Point, foot)),
       ...(index === cuts - 1 ? { drag: [by.spread] } : {}),
+      ...(index === 0 && by.backSpread !== undefined ? { drag: [by.backSpread] } : {}),
     })
   })
   pen.tag({
@@ -78,6 +98,15 @@ export function fanOut(
     label: 'Spread',
     value: by.spread,
   })
+  if (by.backSpread !== undefined) {
+    pen.tag({
+      piece: 'sleeve',
+      from: 'cut1Left',
+      to: 'cut1Right',
+      label: 'Spread behind',
+      value: by.backSpread,
+    })
+  }
   const corner = (id: string, at: Point, turn: Transform, say: string): string => {
     sleeve.place(id, applyTo(turn, at), { say, uses: names, through, stepKind: 'turn' })
     return id

@@ -38,6 +38,8 @@ const orders: readonly DraftOrder[] = [
   skirt({}),
   { ...skirt({ share: '1', pockets: true, waistEasedIn: 5 }, two), unit: 'in' },
   skirt({ share: '1 1/2', panels: 5 }),
+  dress(one, { sleeve: 'bishop' }),
+  dress(two, { sleeve: 'cap', neckShape: 'scoop' }),
   dress(one, { sleeve: 'puff', neckShape: 'sweetheart' }),
 ]
 

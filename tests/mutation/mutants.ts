@@ -36,6 +36,18 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
   ],
   2: [
     [
+      'the hem of a bishop sleeve is 2 mm longer than its cuff gathers',
+      'parts/sleeves/bishop.ts',
+      "+ pen.value('bishopGather')",
+      "+ pen.value('bishopGather') + 2",
+    ],
+    [
+      'the binding of an armhole under a cap is left off behind',
+      'parts/sleeves/armhole-binding.ts',
+      '.reverse(),',
+      '.slice(1),',
+    ],
+    [
       'the hem of a puff is 2 mm longer than its band gathers',
       'parts/sleeves/puff.ts',
       "+ pen.value('puffGather')",
@@ -150,15 +162,27 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
   7: [
     [
       'the front of the head is 1 mm short',
-      'parts/set-in-sleeve.ts',
+      'parts/sleeves/set-in.ts',
       'armhole.front + pen.value(kind.ease.front),',
       'armhole.front + pen.value(kind.ease.front) - 1,',
     ],
     [
       'cuts are spread 2 mm less',
       'parts/slash-and-spread.ts',
-      'Math.asin(spread / 2 /',
-      'Math.asin((spread - 2) / 2 /',
+      'Math.asin((spreads[index] as number) / 2 /',
+      'Math.asin(((spreads[index] as number) - 2) / 2 /',
+    ],
+    [
+      'the cuts of a bishop sleeve open alike in front and behind',
+      'parts/slash-and-spread.ts',
+      'index < cuts / 2 ? by.backSpread',
+      'index < 0 ? by.backSpread',
+    ],
+    [
+      'a cap covers 2 mm less of the front armhole',
+      'parts/sleeves/cap.ts',
+      'front: reach * armhole.front,',
+      'front: reach * armhole.front - 2,',
     ],
   ],
   8: [

@@ -6,7 +6,7 @@ import type { Faced } from '../facing'
 import { faceNeckAndArmholes } from '../facings'
 import { neckLeans } from '../neck-lean'
 import type { Centres } from '../openings/opening'
-import { setInSleeve } from '../set-in-sleeve'
+import { sleeveInto } from '../sleeves'
 import { bodiceBackMarks, drawBodiceBack } from './back'
 import { bodiceFrontMarks, drawBodiceFront } from './front'
 
@@ -87,12 +87,11 @@ function sewBodice(pen: Pen, runs: Bodice['runs']): void {
 
 /** Sets the sleeves of the style into a bodice, or none, and faces what stays open. */
 export function finishBodice(pen: Pen, bodice: Bodice): void {
-  const bare = pen.chosen('sleeve') === 'none'
   const armhole = (half: 'front' | 'back') => ({
     piece: bodice[half],
     edges: bodice.runs(half, 'armhole').map((run) => run.edge),
   })
-  if (!bare) setInSleeve(pen, armhole('front'), armhole('back'))
+  const { bare } = sleeveInto(pen, armhole('front'), armhole('back'))
   faceNeckAndArmholes(
     pen,
     [bodice.faced.front, bodice.centres.front],

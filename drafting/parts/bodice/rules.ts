@@ -2,6 +2,7 @@ import type { RuleDefinition } from '../../contract'
 import type { Garment } from '../../pen/garment'
 import { angleRule, lengthRule } from '../../pen/garment'
 import { neckRules } from '../neck-rules'
+import { sleeveEstimates, sleeveFound } from '../sleeves'
 
 /** Measurements that a fitted bodice can estimate when they were not taken. */
 export const bodiceEstimates: readonly string[] = [
@@ -15,8 +16,7 @@ export const bodiceEstimates: readonly string[] = [
   'frontWaistLength',
   'bustHeight',
   'bustSpan',
-  'upperArm',
-  'armLength',
+  ...sleeveEstimates,
 ]
 
 /** Neck, shoulders, quarters and bust of a fitted body. Common practice where no source is named. */
@@ -75,8 +75,5 @@ export const bodiceFound: Garment['found'] = {
   backTip: 'length',
   frontTip: 'length',
   neckFall: 'length',
-  headHeight: 'length',
-  frontGirth: 'length',
-  backGirth: 'length',
-  underarmLength: 'length',
+  ...sleeveFound,
 }

@@ -5,10 +5,10 @@ import type { PiecePen } from '../../pen/piece-pen'
 import { fairCurve } from '../hem'
 import { backFullness, frontFullness } from '../sleeve-head'
 import { fitHead } from '../solve-head'
-import { droppedHem } from './dropped-hem'
-import type { Halves, SleeveCorners, SleeveKind } from './sleeve-kind'
+import { dippedHem, droppedHem } from './dropped-hem'
+import type { Halves, SleeveCorners, SetInKind } from './sleeve-kind'
 
-const flip = (point: Point): Point => ({ x: -point.x, y: point.y })
+export const flip = (point: Point): Point => ({ x: -point.x, y: point.y })
 
 /** The back half of a head is drawn as a front half and turned over. */
 const turnedOver = (path: Path): Path => reversePath(transformPath(mirrorX, path))
@@ -21,7 +21,7 @@ const turnedOver = (path: Path): Path => reversePath(transformPath(mirrorX, path
 export function drawSleeve(
   pen: Pen,
   sleeve: PiecePen,
-  kind: SleeveKind,
+  kind: SetInKind,
   head: Halves,
   ends: SleeveCorners,
 ): void {
@@ -52,7 +52,7 @@ export function drawSleeve(
     allowance: 'sleeveAllowance',
     say: 'Join the front underarm to the hem',
   })
-  const gathered = kind.hem === 'gathered'
+  const gathered = kind.hem === 'gathered' || kind.hem === 'dipped'
   sleeve.curve('hem', sleeveHem(pen, sleeve, kind, ends), ends.frontHem, ends.backHem, {
     ...(gathered
       ? { role: 'seam', allowance: 'sleeveAllowance' }
@@ -74,24 +74,28 @@ export function drawSleeve(
 }
 
 /** Square to an underarm seam, outwards: the direction in which the head reaches it. */
-function squareTo(underarm: Point, hem: Point): Point {
+export function squareTo(underarm: Point, hem: Point): Point {
   const long = Math.hypot(hem.x - underarm.x, hem.y - underarm.y)
   return { x: (hem.y - underarm.y) / long, y: -(hem.x - underarm.x) / long }
 }
 
 /** One sweep from the front seam over the centre to the back seam. */
-function sleeveHem(pen: Pen, sleeve: PiecePen, kind: SleeveKind, ends: SleeveCorners): Path {
+function sleeveHem(pen: Pen, sleeve: PiecePen, kind: SetInKind, ends: SleeveCorners): Path {
   const front = sleeve.at(ends.frontHem)
   const back = sleeve.at(ends.backHem)
   const leaves = squareTo(sleeve.at(ends.front), front)
   const arrives = squareTo(flip(sleeve.at(ends.back)), flip(back))
+  const inwards = { front: { x: -leaves.x, y: -leaves.y }, back: { x: -arrives.x, y: arrives.y } }
   if (kind.hem === 'gathered') return droppedHem(front, back, sleeve.at('droppedHem'))
+  if (kind.hem === 'dipped')
+    return dippedHem(front, inwards.front, sleeve.at('droppedHem'), back, inwards.back)
   const bowed = kind.hem === 'bow'
   const centre = sleeve.at('hemLevel')
-  const right = bowed ? fairCurve(front, { x: -leaves.x, y: -leaves.y }, centre, { x: -1, y: 0 }) : undefined
-  const left = bowed ? fairCurve(centre, { x: -1, y: 0 }, back, { x: -arrives.x, y: arrives.y }) : undefined
+  const level = { x: -1, y: 0 }
+  const right = bowed ? fairCurve(front, inwards.front, centre, level) : undefined
+  const left = bowed ? fairCurve(centre, level, back, inwards.back) : undefined
   if (right && left) return { closed: false, segments: [...right.segments, ...left.segments] }
-  const whole = fairCurve(front, { x: -leaves.x, y: -leaves.y }, back, { x: -arrives.x, y: arrives.y })
+  const whole = fairCurve(front, inwards.front, back, inwards.back)
   if (!whole) {
     pen.refuse({ field: kind.blame.field, code: 'impossible-shape', message: kind.blame.hem })
   }

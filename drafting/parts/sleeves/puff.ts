@@ -7,12 +7,13 @@ import type { PiecePen } from '../../pen/piece-pen'
 import { solveBetween } from '../../pen/solve'
 import { bandOf } from './band'
 import { droppedHem } from './dropped-hem'
-import type { SleeveCorners, SleeveKind } from './sleeve-kind'
+import { setIn } from './set-in'
+import type { SetInKind, Sleeve, SleeveCorners } from './sleeve-kind'
 
 const worn = { id: 'sleeve', is: ['puff'] }
 
 /** Common practice, no published source: spread 5–10 cm in all, head raised 2.5–5, hem dropped 1.5–2, band 2–3 of ease. */
-export const puffDesign: readonly DesignValue[] = [
+const design: readonly DesignValue[] = [
   length('puffUnder', 'Puff below the underarm', 'sleeve', { default: 90, min: 70, max: 200 }, worn),
   length('puffSpread', 'Spread of the puff', 'sleeve', { default: 80, min: 50, max: 100 }, worn),
   length('puffRaise', 'Head raised by', 'sleeve', { default: 40, min: 25, max: 50 }, worn),
@@ -21,7 +22,7 @@ export const puffDesign: readonly DesignValue[] = [
   length('puffBandDepth', 'Arm band, finished depth', 'sleeve', { default: 25, min: 15, max: 40 }, worn),
 ]
 
-export const puffRules: readonly RuleDefinition[] = [
+const rules: readonly RuleDefinition[] = [
   lengthRule('puffLength', 'Puff sleeve: length', 'headHeight + puffUnder'),
   lengthRule('puffHalf', 'Puff: spread of each half', 'puffSpread / 2'),
   lengthRule('frontPuffEase', 'Gathers in the front', 'frontHeadEase + puffSpread * 0.5 + puffRaise * 0.6'),
@@ -31,8 +32,7 @@ export const puffRules: readonly RuleDefinition[] = [
   lengthRule('puffGather', 'Gathers into the arm band', 'biceps + puffSpread - puffBand'),
 ]
 
-/** A puff sleeve: spread evenly from the head to the hem, its head raised, gathered into the armhole and into a band. */
-export const puff: SleeveKind = {
+const kind: SetInKind = {
   length: 'puffLength',
   lengthField: 'puffUnder',
   ease: { front: 'frontPuffEase', back: 'backPuffEase' },
@@ -47,6 +47,9 @@ export const puff: SleeveKind = {
   finish: (pen) =>
     bandOf(pen, { length: 'puffBand', depth: 'puffBandDepth', fold: 'puffBandFold', gather: 'puffGather' }),
 }
+
+/** A puff sleeve: spread evenly from the head to the hem, its head raised, gathered into the armhole and into a band. */
+export const puff: Sleeve = { design, rules, turnedUp: false, draw: setIn(kind) }
 
 /** Where the five cuts stand: at the centre and two each side, shares of that side's girth. Common practice. */
 const cuts = [-0.44, -0.22, 0, 0.22, 0.44]
@@ -92,7 +95,7 @@ function spreadAlike(pen: Pen, sleeve: PiecePen): SleeveCorners {
     pathLength(droppedHem(...ends(taper), sleeve.at('droppedHem'))) - wanted
   const taper = solveBetween(over, -20, 60, 1e-9)
   if (taper === undefined)
-    pen.refuse({ field: puff.blame.field, code: 'impossible-shape', message: puff.blame.hem })
+    pen.refuse({ field: kind.blame.field, code: 'impossible-shape', message: kind.blame.hem })
   const [front, back] = ends(taper)
   const options = {
     say: 'Come in at the hem until it has the length that the band gathers',

@@ -3,46 +3,31 @@ import type { Pen } from '../../pen/pen'
 import type { PiecePen } from '../../pen/piece-pen'
 import { backFullness, frontFullness } from '../sleeve-head'
 import { solveHead } from '../solve-head'
-import type { Halves, SleeveKind } from './sleeve-kind'
+import type { Halves, SetInKind } from './sleeve-kind'
 
 /** Bounds of a sleeve head's height as a share of the armhole. Common practice: a shirt's is the lowest. */
 const lowestHead = 0.18
 const highestHead = 0.33
 
 /**
- * Marks the straight sleeve that every kind starts from: crown, underarm level found so that the head fits, and hem level.
+ * Marks the head that every kind starts from: the crown and the underarm level, found so that the head fits its armhole.
  *
  * @param armhole lengths of the armhole's halves, mm.
  * @param head lengths of the halves of the head, mm.
  * @param uses what those lengths follow from.
  */
-export function straightSleeve(
+export function markHead(
   pen: Pen,
   sleeve: PiecePen,
-  kind: SleeveKind,
+  join: SetInKind['join'],
   armhole: Halves,
   head: Halves,
   uses: Mask,
 ): void {
-  const shape = solveShape(pen, kind, armhole.front + armhole.back, head)
-
+  const shape = solveShape(pen, join, armhole.front + armhole.back, head)
   pen.find('headHeight', shape.height, uses)
   pen.find('frontGirth', shape.front, uses)
   pen.find('backGirth', shape.back, uses)
-  pen.find(
-    'underarmLength',
-    pen.length(kind.length) - pen.length('headHeight'),
-    uses | pen.usesOf([kind.length]),
-  )
-  if (pen.value('underarmLength') < 25) {
-    pen.refuse({
-      field: kind.lengthField,
-      code: 'impossible-shape',
-      message: `The sleeve ends above the underarm. Make it at least ${pen.say(shape.height + 25)} long.`,
-      ...(kind.lengthField === kind.length ? { min: shape.height + 25 } : {}),
-    })
-  }
-
   sleeve.start('crown', { x: 0, y: 0 }, 'Mark the top of the sleeve on a line that lies with the grain')
   sleeve.go('underarmLevel', 'crown', 'down', 'headHeight', {
     say: 'Come down the height of the head, found so that the head fits the armhole',
@@ -60,6 +45,24 @@ export function straightSleeve(
     round: 'up',
     stepKind: 'solve',
   })
+}
+
+/** Marks the hem level of a straight sleeve below its head. */
+export function markHem(pen: Pen, sleeve: PiecePen, kind: SetInKind): void {
+  const height = pen.value('headHeight')
+  pen.find(
+    'underarmLength',
+    pen.length(kind.length) - pen.length('headHeight'),
+    pen.usesOf(['headHeight', kind.length]),
+  )
+  if (pen.value('underarmLength') < 25) {
+    pen.refuse({
+      field: kind.lengthField,
+      code: 'impossible-shape',
+      message: `The sleeve ends above the underarm. Make it at least ${pen.say(height + 25)} long.`,
+      ...(kind.lengthField === kind.length ? { min: height + 25 } : {}),
+    })
+  }
   sleeve.go('hemLevel', 'crown', 'down', kind.length, {
     say: 'From the top come down the sleeve length',
     drag: [kind.lengthField],
@@ -76,7 +79,7 @@ export function straightSleeve(
 /** Height and widths of the head. A large armhole for a thin arm would stand up like a mushroom: the girth is then let out. */
 function solveShape(
   pen: Pen,
-  kind: SleeveKind,
+  join: SetInKind['join'],
   armhole: number,
   head: Halves,
 ): Halves & { readonly height: number } {
@@ -85,9 +88,7 @@ function solveShape(
   let solved = solveHead(girth, head.front, head.back, shapes)
   // The front half is the shorter: it too must keep some width. Gathers fill a head however high it stands.
   const bound =
-    kind.join === 'gathered'
-      ? Infinity
-      : Math.min(highestHead * armhole, 0.66 * Math.min(head.front, head.back))
+    join === 'gathered' ? Infinity : Math.min(highestHead * armhole, 0.66 * Math.min(head.front, head.back))
   if (solved && solved.height > bound) {
     // Height falls as girth grows, so a few secant steps on girth bring the height to its bound.
     for (let round = 0; round < 12 && solved && solved.height > bound + 0.01; round += 1) {

@@ -9,7 +9,7 @@ import {
   startOfPath,
   turnFrom,
 } from './curves'
-import { garmentOf, neckShape } from './formulas'
+import { garmentOf, neckShape, styleOf } from './formulas'
 import { Findings, type DraftLaw } from './violation'
 
 /** A bend under this many degrees in all is no bend that an eye or an iron would notice. */
@@ -21,9 +21,10 @@ const sewable = 5
 /** Curves bend as their kind may: necks and hems one way, an armhole at most twice, half a sleeve head exactly twice. */
 export const fairCurves: DraftLaw = (draft, order, engine) => {
   const found = new Findings(14)
-  const square = ['square', 'sweetheart'].includes(
-    String(neckShape(order, garmentOf(order, engine.garments))),
-  )
+  const garment = garmentOf(order, engine.garments)
+  const square = ['square', 'sweetheart'].includes(String(neckShape(order, garment)))
+  const cap =
+    garment.design.some((value) => value.id === 'sleeve') && styleOf(order, garment, 'sleeve') === 'cap'
   for (const piece of draft.pieces) {
     for (const edge of piece.edges) {
       const where = `${piece.id}.${edge.id}`
@@ -34,7 +35,10 @@ export const fairCurves: DraftLaw = (draft, order, engine) => {
       if (!cornered) joints(found, where, edge.path)
       const bends = inflections(edge.path)
       const head = piece.id === 'sleeve' && edge.id.startsWith('head-')
-      if (head) {
+      if (head && cap) {
+        // A cap ends before or behind the place where the whole head bends back.
+        found.atMost(where, 'bends the other way so many times', bends, 1)
+      } else if (head) {
         if (bends !== 1) found.add(where, `bends the other way ${bends} times, once is due`)
       } else if (edge.role === 'armhole') {
         found.atMost(where, 'bends the other way so many times', bends, 1)

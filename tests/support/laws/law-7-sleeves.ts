@@ -33,8 +33,10 @@ export const sleeves: DraftLaw = (draft, order, engine) => {
     }
     const drawn = lengthOfPath(head.path)
     const holes = armhole
-      .map((run) => edge(run.piece, run.edge))
-      .map((one) => (one?.role === 'armhole' ? lengthOfPath(one.path) : NaN))
+      .map((run) => ({ run, one: edge(run.piece, run.edge) }))
+      .map(({ run, one }) =>
+        one?.role === 'armhole' ? (run.to ?? lengthOfPath(one.path)) - (run.from ?? 0) : NaN,
+      )
     const hole = holes.reduce((sum, one) => sum + one, 0)
     lengths.head += drawn
     lengths.armhole += hole
@@ -56,15 +58,45 @@ export const sleeves: DraftLaw = (draft, order, engine) => {
   const cut = { flared: 'sleeve', bell: 'bell' }[String(kind)]
   if (cut) {
     const value = (id: string): number => Number(styleOf(order, garment, id))
-    mouths(found, draft, order, value(`${cut}Cuts`), value(`${cut}Spread`))
+    const spread = value(`${cut}Spread`)
+    mouths(
+      found,
+      draft,
+      order,
+      Array.from({ length: value(`${cut}Cuts`) }, () => spread),
+    )
   }
+  if (kind === 'bishop') {
+    const [behind, before] = ['bishopBack', 'bishopFront'].map((id) => Number(styleOf(order, garment, id)))
+    mouths(found, draft, order, [behind, behind, before, before] as number[])
+  }
+  if (kind === 'cap') coveredPart(found, draft, Number(styleOf(order, garment, 'capReach')), tolerance)
   return found.all
 }
 
-function mouths(found: Findings, draft: Draft, order: DraftOrder, cuts: number, spread: number): void {
+/** A cap ends where it was asked to, the same part of the armhole in front and behind. */
+function coveredPart(found: Findings, draft: Draft, reach: number, tolerance: number): void {
+  for (const side of ['front', 'back'] as const) {
+    const holes = draft.pieces.find((one) => one.id === side)?.edges.filter((one) => one.role === 'armhole')
+    const whole = (holes ?? []).reduce((sum, one) => sum + lengthOfPath(one.path), 0)
+    const sewn = draft.seams
+      .filter((seam) => seam.a.some((run) => run.edge === `head-${side}`))
+      .flatMap((seam) => seam.b)
+      .reduce((sum, run) => {
+        const hole = holes?.find((one) => one.id === run.edge)
+        return sum + (hole ? (run.to ?? lengthOfPath(hole.path)) - (run.from ?? 0) : NaN)
+      }, 0)
+    found.atMost(`${side} of the cap`, 'off the part asked', Math.abs(sewn - reach * whole), tolerance)
+  }
+}
+
+/** @param spreads asked for each cut, from the back, mm. */
+function mouths(found: Findings, draft: Draft, order: DraftOrder, spreads: readonly number[]): void {
   const marks = draft.pieces.find((one) => one.id === 'sleeve')?.marks ?? []
-  const asked = order.tape ? Math.round(spread / order.tape) * order.tape : spread
-  for (let cut = 1; cut <= cuts; cut += 1) {
+  const cuts = spreads.length
+  for (const [index, spread] of spreads.entries()) {
+    const cut = index + 1
+    const asked = order.tape ? Math.round(spread / order.tape) * order.tape : spread
     const left = marks.find((mark) => mark.id === `cut${cut}Left`)
     const right = marks.find((mark) => mark.id === `cut${cut}Right`)
     if (!left || !right) found.add(`cut ${cut}`, 'has no mouth')

@@ -244,9 +244,12 @@ export function correctedOrder(garment: GarmentDefinition): fc.Arbitrary<DraftOr
   })
 }
 
-/** Styles in which every measurement of a garment can have its say: sleeved and pulled on over the head, and buttoned. */
+/** Styles in which every measurement of a garment can have its say: sleeved and pulled on over the head, and buttoned with cuffs. */
 export function tellingStyles(garment: GarmentDefinition): readonly Readonly<Record<string, string>>[] {
-  return [{ backOpening: 'none', sleeve: 'plain' }, { backOpening: 'button band' }].map((chosen) =>
+  return [
+    { backOpening: 'none', sleeve: 'plain' },
+    { backOpening: 'button band', sleeve: 'bishop' },
+  ].map((chosen) =>
     Object.fromEntries(
       Object.entries(chosen).filter(([id, is]) =>
         garment.design.some((value) => value.id === id && value.choices?.includes(is)),
