@@ -290,8 +290,8 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
     [
       'a measurement is asked for and not used',
       'garments/flared-dress.ts',
-      "'armLength',",
-      "'armLength', 'wrist',",
+      '...sleeveEstimates,',
+      "...sleeveEstimates, 'elbow',",
     ],
   ],
   17: [

@@ -1,7 +1,7 @@
 import type { Path, Point } from '../../contract'
-import { mirrorX, reversePath, transformPath } from '../../geometry'
+import { intersections, mirrorX, reversePath, transformPath } from '../../geometry'
 import type { Pen } from '../../pen/pen'
-import type { PiecePen } from '../../pen/piece-pen'
+import { straight, type PiecePen } from '../../pen/piece-pen'
 import { fairCurve } from '../hem'
 import { backFullness, frontFullness } from '../sleeve-head'
 import { fitHead } from '../solve-head'
@@ -70,7 +70,10 @@ export function drawSleeve(
   })
   sleeve.cut({ cloth: 'main', count: 2, onFold: false, handed: true })
   const long = sleeve.at('hemLevel').y
-  sleeve.grain({ x: 0, y: long * 0.35 }, { x: 0, y: long * 0.8 })
+  // A tapered hem rises in the middle.
+  const down = straight({ x: 0, y: 0 }, { x: 0, y: long + 200 })
+  const foot = intersections(sleeve.edge('hem').path, down)[0]?.point.y ?? long
+  sleeve.grain({ x: 0, y: Math.min(long, foot) * 0.35 }, { x: 0, y: Math.min(long * 0.8, foot - 5) })
 }
 
 /** Square to an underarm seam, outwards: the direction in which the head reaches it. */
