@@ -264,6 +264,41 @@ export interface Correction {
   readonly note?: string
 }
 
+/** A named fit remedy, and by how much: it moves everything that the remedy names, together. */
+export interface RemedyUse {
+  readonly id: string
+  /** mm, within the remedy's range. */
+  readonly amount: number
+  readonly off?: boolean
+}
+
+/** A usual misfit and what is done about it. */
+export interface RemedyDefinition {
+  readonly id: string
+  readonly name: string
+  /** What is seen on the body. */
+  readonly see: string
+  /** What the amount is, and what moves with it. */
+  readonly does: string
+  readonly source: string
+  /** mm */
+  readonly default: number
+  readonly min: number
+  readonly max: number
+  /** Garments that it is offered for. */
+  readonly garments: readonly string[]
+}
+
+/** A mark that a remedy moves. */
+export interface RemedyMove {
+  readonly remedy: string
+  readonly piece: string
+  readonly mark: string
+  readonly by: Point
+  /** mm */
+  readonly distance: number
+}
+
 export type DesignChoice = number | string | boolean
 
 export interface DraftOrder {
@@ -279,6 +314,8 @@ export interface DraftOrder {
   /** The workroom's own measurements; their values stand among `measurements`, and formulas may name them. */
   readonly ownMeasurements?: readonly OwnMeasurement[]
   readonly corrections?: readonly Correction[]
+  /** Named fit remedies, on top of rules and style and beneath the corrections. */
+  readonly remedies?: readonly RemedyUse[]
   /** Wording of steps only; default 'cm'. */
   readonly unit?: Unit
   /** Round every tape mark to so many mm while drafting (chalk guide). */
@@ -395,6 +432,50 @@ export interface MeasurementDefinition {
   /** mm, outside which it is refused. */
   readonly min: number
   readonly max: number
+}
+
+/** A size of a nest: a name and its measurements, mm. */
+export interface NestSize {
+  readonly id: string
+  readonly name: string
+  readonly card: Readonly<Record<string, number>>
+}
+
+/** One size as it was drafted, and the style its lines are drawn in. */
+export interface NestedSize {
+  readonly id: string
+  readonly name: string
+  readonly style: string
+  readonly draft: Draft
+}
+
+/** A piece in all its sizes, laid on each other at one mark. */
+export interface NestedPiece {
+  readonly id: string
+  readonly name: string
+  /** The mark at which the sizes lie on each other. */
+  readonly alignedAt: string
+  /** How each size is moved in its own frame, by size; sizes that have no such piece are left out. */
+  readonly shifts: Readonly<Record<string, Point>>
+  /** The size that lies still: its label, grain and inner lines are drawn. */
+  readonly base: string
+}
+
+/** A fit in all sizes, mm. */
+export interface NestFit {
+  readonly id: string
+  readonly sizes: Readonly<
+    Record<string, { readonly body?: number; readonly ease: number; readonly length: number }>
+  >
+}
+
+/** A garment in a range of sizes at once. */
+export interface Nest {
+  readonly garment: string
+  /** From the first that was asked for to the last. */
+  readonly sizes: readonly NestedSize[]
+  readonly pieces: readonly NestedPiece[]
+  readonly fits: readonly NestFit[]
 }
 
 export type DrawingItem =

@@ -11,6 +11,8 @@ import { Pen } from './pen/pen'
 import { writeDimensions } from './pen/write-dimensions'
 import { writeSteps } from './pen/write-steps'
 import { Values } from './pen/values'
+import { applyRemedies } from './remedies/apply'
+import { rulesInForce } from './rules-in-force'
 import { finish } from './pieces/finish'
 
 /**
@@ -21,10 +23,7 @@ import { finish } from './pieces/finish'
  * @throws DraftingError with every problem found when the order cannot be drafted.
  */
 export function draftGarment(order: DraftOrder): Draft {
-  const garment = findGarment(order)
-  const problems: Problem[] = []
-  const ready = checkOrder(garment, order, problems)
-  if (!ready) throw new DraftingError(problems)
+  const { garment, ready } = readyOrder(order)
   const pen = draw(garment, order, ready)
   const { pieces, seams } = finish(pen)
   judgeCorrected(pen, pieces, seams)
@@ -40,6 +39,33 @@ export function draftGarment(order: DraftOrder): Draft {
     notions: pen.notions,
     cautions: [...estimateCautions(ready), ...pen.cautions],
   }
+}
+
+/** The garment of an order, and the order made ready to be drawn. @throws DraftingError with every problem found */
+export function readyOrder(order: DraftOrder): { readonly garment: Garment; readonly ready: ReadyOrder } {
+  const garment = findGarment(order)
+  const problems: Problem[] = []
+  const ready = checkOrder(garment, remedied(garment, order, problems), problems)
+  if (!ready || problems.length > 0) throw new DraftingError(problems)
+  return { garment, ready }
+}
+
+/**
+ * An order as its fit remedies leave it: rules and style values raised, marks corrected. It drafts alike.
+ * @throws DraftingError when a remedy is at fault
+ */
+export function withRemedies(order: DraftOrder): DraftOrder {
+  const problems: Problem[] = []
+  const plain = remedied(findGarment(order), order, problems)
+  if (problems.length > 0) throw new DraftingError(problems)
+  return plain
+}
+
+function remedied(garment: Garment, order: DraftOrder, problems: Problem[]): DraftOrder {
+  if (order.remedies === undefined) return order
+  const formulaOf = (id: string): string | undefined =>
+    rulesInForce(order).find((rule) => rule.id === id)?.formula
+  return applyRemedies(garment.definition, order, formulaOf, problems)
 }
 
 /** Lets the garment draw itself with a pen. For the engine's own use: what redrafts many times needs only marks. */

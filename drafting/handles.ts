@@ -1,8 +1,6 @@
-import type { DraftOrder, Handle, HandleMove, Point, Problem } from './contract'
-import { draw } from './draft-garment'
+import type { DraftOrder, Handle, HandleMove, Point } from './contract'
+import { draw, readyOrder } from './draft-garment'
 import { DraftingError } from './drafting-error'
-import { findGarment } from './garments'
-import { checkOrder } from './pen/check-order'
 import type { Pen } from './pen/pen'
 
 /** Half the step by which a value is changed to see what moves: mm for lengths, and about the same for shares and angles. */
@@ -15,11 +13,8 @@ const steps = { length: 0.5, angle: 0.05, share: 0.0005 } as const
  * @throws DraftingError when the order itself cannot be drafted.
  */
 export function handles(order: DraftOrder): readonly Handle[] {
-  const garment = findGarment(order)
-  const problems: Problem[] = []
   const quiet: DraftOrder = { ...order, explain: false }
-  const ready = checkOrder(garment, quiet, problems)
-  if (!ready) throw new DraftingError(problems)
+  const { garment, ready } = readyOrder(quiet)
   const redraw = (value: string, number: number): Pen | undefined => {
     try {
       return draw(garment, quiet, { ...ready, design: { ...ready.design, [value]: number } })

@@ -19,6 +19,12 @@ const correction = z.strictObject({
   note: z.string().max(500).optional(),
 })
 
+const remedy = z.strictObject({
+  id: z.string().max(60),
+  amount: millimetres,
+  off: z.boolean().optional(),
+})
+
 const measurement = z.string().regex(/^[a-zA-Z][a-zA-Z0-9_]{0,59}$/, 'This measurement is not known.')
 
 const method = z.strictObject({
@@ -48,6 +54,7 @@ export const orderShape = z.strictObject({
   method: method.optional(),
   ownMeasurements: z.array(ownMeasurement).max(100).readonly().optional(),
   corrections: z.array(correction).max(200).optional(),
+  remedies: z.array(remedy).max(50).readonly().optional(),
   unit: unitShape.optional(),
   tape: z.number().min(0).max(100).optional(),
   explain: z.boolean().optional(),

@@ -1,11 +1,12 @@
-import type { Draft, Drawing, Path } from '../contract'
+import type { Draft, Drawing, Nest, Path } from '../contract'
 import { bounds, flatten } from '../geometry/path'
 import { arrange } from './arrange'
 import { boundsOfPoints } from './bounds'
 import { drawing } from './drawing'
 import { labelsOffJoins } from './label-joins'
 import { printLayers } from './layers'
-import type { Places, TitleBlock } from './options'
+import { nestDrawing } from './nest-drawing'
+import type { DrawingOptions, Places, TitleBlock } from './options'
 import { outline } from './outline'
 import { pack } from './pack'
 import type { Paper } from './papers'
@@ -17,6 +18,8 @@ import type { Join, Orientation, Tiling } from './tiling'
 
 export interface LayOutRequest {
   readonly draft: Draft
+  /** Drawn in the place of the draft, which is then the room that it takes: see nestRoom. */
+  readonly nest?: Nest
   /** Of the labels on the pieces. */
   readonly title?: TitleBlock
   readonly paper: Paper
@@ -68,14 +71,15 @@ export function layOut(asked: LayOutRequest): LaidOut {
   const unpacked = tried.filter((way) => way.places === tried[0]?.places)
   const best = tried.reduce((before, next) => (isBetter(next, before) ? next : before), none)
   const stretch = stretchFor(request, best.orientation)
-  const full = drawing(draft, {
+  const options: DrawingOptions = {
     layers: printLayers,
     allowances,
     places: best.places,
     title,
     // Labels stay as large on the paper as they are at full size.
     textScale: 1 / printScales[request.scale ?? 'full'],
-  })
+  }
+  const full = request.nest ? nestDrawing(chosenOf(request.nest, draft), options) : drawing(draft, options)
   const laid = stretchDrawing(full, stretch)
   const outlines = outlinesAt(request, best)
   const regions = outlines.map((path) => flatten(path))
@@ -94,6 +98,11 @@ const none: Way = { places: {}, orientation: 'portrait', count: Infinity, length
 function chosenPieces({ draft, pieces }: LayOutRequest): Draft {
   if (!pieces) return draft
   return { ...draft, pieces: draft.pieces.filter(({ id }) => pieces.includes(id)) }
+}
+
+/** The pieces of a nest that are laid. */
+function chosenOf(nest: Nest, { pieces }: Draft): Nest {
+  return { ...nest, pieces: nest.pieces.filter(({ id }) => pieces.some((piece) => piece.id === id)) }
 }
 
 const isBetter = (a: Way, b: Way) => a.count < b.count || (a.count === b.count && a.length < b.length - 1)

@@ -103,7 +103,7 @@ function spoils(garment: GarmentDefinition): fc.Arbitrary<Spoil> {
     .tuple(
       fc.constantFrom(
         ...['garment', 'measurements', 'design', 'rules', 'corrections', 'unit', 'tape'],
-        ...['method', 'ownMeasurements'],
+        ...['method', 'ownMeasurements', 'remedies'],
       ),
       nonsense,
     )
@@ -151,8 +151,16 @@ function spoils(garment: GarmentDefinition): fc.Arbitrary<Spoil> {
     .map((one): Spoil => (order) => {
       order.method = one
     })
+  const remedies = fc
+    .array(
+      fc.record({ id: fc.oneof(fc.constantFrom('round-back', 'large-arm'), nonsense), amount: nonsense }),
+    )
+    .map((list): Spoil => (order) => {
+      order.remedies = list
+    })
   return fc.oneof(
     method,
+    remedies,
     into('measurements', measurement, nonsense),
     into('design', style, nonsense),
     into('rules', rule, fc.oneof(formulas, nonsense)),

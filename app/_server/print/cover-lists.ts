@@ -1,5 +1,5 @@
 import 'server-only'
-import { cuttingWords, styles } from '@/drafting/drawing'
+import { cuttingWords, styleOf, styles } from '@/drafting/drawing'
 import type { Style, StyleName } from '@/drafting/drawing'
 import { arrowhead } from '@/drafting/drawing/arrowhead'
 import type { CoverContext } from './cover-page'
@@ -41,10 +41,10 @@ function drawHeads(content: PageContent, x: number, y: number): void {
   content.path(arrowhead({ x: x + sample + 0.2, y }, { x: 1, y: 0 }, 3, 1.6), styles.arrowhead)
 }
 
-/** What each kind of line means. Returns where the next list may start. */
+/** What each kind of line means. Of a nest, each size's. Returns where the next list may start. */
 export function drawLegend(
   content: PageContent,
-  { allowances }: CoverContext,
+  { allowances, nest }: CoverContext,
   x: number,
   top: number,
 ): number {
@@ -55,6 +55,11 @@ export function drawLegend(
     content.line({ x, y: y - 1.1 }, { x: x + sample, y: y - 1.1 }, styles[style])
     if (style === 'grain') drawHeads(content, x, y - 1.1)
     content.text(words, { x: x + 25, y }, { size })
+    y += 5.2
+  }
+  for (const { name, style } of nest?.sizes ?? []) {
+    content.line({ x, y: y - 1.1 }, { x: x + sample, y: y - 1.1 }, styleOf(style))
+    content.text(`size ${name}`, { x: x + 25, y }, { size })
     y += 5.2
   }
   for (const [ticks, words] of [

@@ -1,5 +1,5 @@
 import 'server-only'
-import type { Draft, Path } from '@/drafting/contract'
+import type { Draft, Nest, Path } from '@/drafting/contract'
 import { safeMargin, trueMeasure } from '@/drafting/drawing'
 import type { Measured, Paper, PrintScale, Tiling } from '@/drafting/drawing'
 import { drawCautions, drawLegend, drawPieces } from './cover-lists'
@@ -10,6 +10,8 @@ import type { TypeSetter } from './type-setter'
 
 export interface CoverContext {
   readonly draft: Draft
+  /** Whose sizes are listed. */
+  readonly nest?: Nest
   readonly title: PatternTitle
   readonly paper: Paper
   readonly tiling: Tiling

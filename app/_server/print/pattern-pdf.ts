@@ -68,6 +68,7 @@ export async function documentOf(
     title.garment,
     title.maker,
     ...request.draft.pieces.map(({ name }) => name),
+    ...(request.nest?.sizes ?? []).map(({ name }) => name),
   ]
   const type = await TypeSetter.for(document, texts)
   const resources = document.context.nextRef()
