@@ -2,6 +2,7 @@ import { garment } from '../pen/garment'
 import { drawBodice, finishBodice, fitBodice } from '../parts/bodice'
 import { bodiceAllowances, bodiceEaseDesign, dartDesign, upperBodiceDesign } from '../parts/bodice/design'
 import { bodiceEstimates, bodiceFound, bodiceWaistRules, upperBodiceRules } from '../parts/bodice/rules'
+import { collarDesign, collarRules } from '../parts/collars'
 import { buttonRules, openingDesign } from '../parts/openings'
 import { allSleeves, sleeveDesign, sleeveRules } from '../parts/sleeves'
 
@@ -16,10 +17,17 @@ export const bodice = garment({
     ...upperBodiceDesign,
     ...bodiceEaseDesign,
     ...sleeveDesign('none', ...allSleeves),
+    ...collarDesign,
     ...openingDesign(['zip', 'button band'], 350),
     ...bodiceAllowances,
   ],
-  rules: [...upperBodiceRules, ...bodiceWaistRules, ...sleeveRules(...allSleeves), ...buttonRules],
+  rules: [
+    ...upperBodiceRules,
+    ...bodiceWaistRules,
+    ...sleeveRules(...allSleeves),
+    ...collarRules,
+    ...buttonRules,
+  ],
   found: bodiceFound,
   draft(pen) {
     const drawn = drawBodice(pen, {

@@ -3,6 +3,7 @@ import { angleRule, garment, geometry, lengthRule } from '../pen/garment'
 import { choice, length, share } from '../pen/design'
 import type { Pen } from '../pen/pen'
 import type { PiecePen } from '../pen/piece-pen'
+import { collarDesign, collarRules } from '../parts/collars'
 import { faceNeckAndArmholes } from '../parts/facings'
 import { facedBody } from '../parts/facing'
 import { deepenArmhole } from '../parts/armhole-room'
@@ -70,6 +71,7 @@ export const flaredDress = garment({
       },
     ),
     ...sleeveDesign('plain', 'none', ...allSleeves.slice(1)),
+    ...collarDesign,
     ...openingDesign(['zip', 'none', 'button band', 'keyhole', 'side zip']),
     ...pocketDesign,
     length('neckAllowance', 'Neck allowance', 'allowances', { default: 10, min: 0, max: 20 }),
@@ -117,6 +119,7 @@ export const flaredDress = garment({
     ),
     lengthRule('frontDip', 'Front hem lower by', 'min(balance, 1.5cm)'),
     lengthRule('leastBareArmhole', 'Least armhole without a sleeve', 'upperArm + 4cm'),
+    ...collarRules,
     ...openingRules,
     ...sleeveRules(...allSleeves),
   ],

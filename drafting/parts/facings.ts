@@ -4,6 +4,7 @@ import type { Pen } from '../pen/pen'
 import { armholeFacing, shoulderFacing, type Faced } from './facing'
 import { neckFacing } from './neck-facing'
 import type { Centre } from './openings/opening'
+import { sewNeck } from './sew-neck'
 
 /** A body to be faced, and how its centre ends. */
 export type FacedHalf = readonly [Faced, Centre]
@@ -50,11 +51,13 @@ export function faceNeckAndArmholes(
       b: [{ piece: facing, edge }],
       join: 'faced',
     })
-  for (const [faced, centre] of [front, back]) {
+  const [ofFront, ofBack] = [front, back].map(([faced, centre]) => {
     const neck = together ? shoulderFacing(pen, faced, asked, centre) : neckFacing(pen, faced, depth, centre)
-    sewOn('neckline', faced, neck.id)
     if (together) sewOn('armhole', faced, neck.id)
-  }
+    return neck.id
+  }) as [string, string]
+  const necklines = { front: runs(front[0].piece.id, 'neckline'), back: runs(back[0].piece.id, 'neckline') }
+  sewNeck(pen, front, back, necklines, { front: ofFront, back: ofBack })
   joinFacings(
     pen,
     'neck-facing',

@@ -159,16 +159,11 @@ function downTheFront(pen: Pen, facing: PiecePen, faced: Faced, band: Path, cent
   })
   cutFacing(facing, false)
   layGrain(facing, half * 0.4, 'foot')
-  for (const [id, edgeId, name] of [
-    ['front-edge', 'opening', 'Front edge to its facing'],
-    ['overlap-neck', 'overlap-neck', 'Top of the overlap to its facing'],
-  ] as const) {
-    pen.sew({
-      id,
-      name,
-      a: [{ piece: body.id, edge: edgeId }],
-      b: [{ piece: facing.id, edge: edgeId }],
-      join: 'faced',
-    })
-  }
+  pen.sew({
+    id: 'front-edge',
+    name: 'Front edge to its facing',
+    a: [{ piece: body.id, edge: 'opening' }],
+    b: [{ piece: facing.id, edge: 'opening' }],
+    join: 'faced',
+  })
 }

@@ -113,6 +113,11 @@ export class Pen {
     return this.values.chosen(id)
   }
 
+  /** A choice of the style that not every garment offers. */
+  offered(id: string): DesignChoice | undefined {
+    return this.values.offered(id)
+  }
+
   /** States a value found so that something fits, with the sum of what it follows from. */
   find(name: string, value: number, uses: Mask): void {
     this.values.find(name, value, uses)

@@ -42,6 +42,11 @@ export class Values {
     return value
   }
 
+  /** A choice of the style, undefined where the garment does not offer it. */
+  offered(id: string): DesignChoice | undefined {
+    return this.design[id]
+  }
+
   /** States a value that the draft found, and what it follows from. */
   find(name: string, value: number, uses: Mask): void {
     this.numbers[name] = value

@@ -32,6 +32,9 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     narrowShoulder: { sleeve: 'none', neckWidening: 70, frontNeckDrop: 80, backOpening: 'none', flare: 0.5 },
     buttons: { backOpening: 'button band', neckShape: 'V', buttonSize: 22 },
     keyhole: { backOpening: 'keyhole', sleeve: 'none' },
+    peterPan: { collar: 'Peter Pan' },
+    mandarin: { collar: 'mandarin', backOpening: 'none' },
+    shirt: { collar: 'shirt', backOpening: 'button band' },
   },
   bodice: {
     buttons: { backOpening: 'button band', dartTo: 'shoulder', sleeve: 'plain' },

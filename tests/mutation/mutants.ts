@@ -78,10 +78,34 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
       'from + length - within + 3 : from + within + 3 }',
     ],
     [
-      'the facing of a lapped front is not sewn to its edge',
+      'a flat collar is 2 % longer behind than the neckline',
+      'parts/collars/peter-pan.ts',
+      'drawn((100 * long.back)',
+      'drawn((102 * long.back)',
+    ],
+    [
+      'a collar’s upper layer is sewn to the body and its under layer too',
+      'parts/sew-neck.ts',
+      '...(facing ? { mirrored: true } : {})',
+      '...(facing ? {} : {})',
+    ],
+    [
+      'a stand is drawn on a wrong radius',
+      'parts/collars/stand.ts',
+      'const radius = half / turn',
+      'const radius = half / turn + 8',
+    ],
+    [
+      'what falls over does not fit its stand',
+      'parts/collars/shirt.ts',
+      'const radius = long / turn',
+      'const radius = long / turn + 3',
+    ],
+    [
+      'the facing of a lapped front is sewn to the top of its edge only',
       'parts/neck-facing.ts',
-      "['front-edge', 'opening', 'Front edge to its facing'],",
-      '',
+      "a: [{ piece: body.id, edge: 'opening' }],",
+      "a: [{ piece: body.id, edge: 'opening', to: 100 }],",
     ],
     [
       'a stretch beside the pocket is sewn twice',

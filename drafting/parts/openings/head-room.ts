@@ -2,6 +2,7 @@ import type { RuleDefinition } from '../../contract'
 import { lengthRule } from '../../pen/garment'
 import type { Mask } from '../../pen/masks'
 import type { Pen } from '../../pen/pen'
+import type { Centre } from './opening'
 import { straight, type PiecePen } from '../../pen/piece-pen'
 
 export const headRules: readonly RuleDefinition[] = [
@@ -22,10 +23,14 @@ export function slitForHead(pen: Pen, front: PiecePen, back: PiecePen, dropped: 
 export const roomUses = (pen: Pen, front: PiecePen, back: PiecePen): Mask =>
   pen.usesOf(['headRoom']) | back.edge('neckline').uses | front.edge('neckline').uses
 
-/** Slits the centre back on the fold where the neck does not go over the head, long enough, and says so. */
-export function letHeadThrough(pen: Pen, front: PiecePen, back: PiecePen, dropped: number): void {
+/**
+ * Slits the centre back on the fold where the neck does not go over the head, long enough, and says so.
+ *
+ * @returns how that centre ends then.
+ */
+export function letHeadThrough(pen: Pen, front: PiecePen, back: PiecePen, dropped: number): Centre {
   const short = slitForHead(pen, front, back, dropped)
-  if (short <= 0) return
+  if (short <= 0) return { kind: 'fold' }
   const long = Math.max(60, Math.ceil(short / 5) * 5)
   const top = back.at('centreNeck')
   back.inner(
@@ -42,4 +47,5 @@ export function letHeadThrough(pen: Pen, front: PiecePen, back: PiecePen, droppe
     'backOpening',
     'neckWidening',
   )
+  return { kind: 'fold', slit: true }
 }

@@ -6,7 +6,6 @@ export const none: Opening = {
   draw: (pen, front, back, dropped) => {
     onFold(front)
     onFold(back)
-    letHeadThrough(pen, front.piece, back.piece, dropped)
-    return { front: { kind: 'fold' }, back: { kind: 'fold' } }
+    return { front: { kind: 'fold' }, back: letHeadThrough(pen, front.piece, back.piece, dropped) }
   },
 }

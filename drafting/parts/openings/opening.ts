@@ -22,6 +22,8 @@ export interface Centre {
   readonly kind: 'fold' | 'zip' | 'lap' | 'seam'
   /** mm down the centre from the neckline that the facing must cover beyond its own depth: a keyhole. */
   readonly keyhole?: { readonly depth: number; readonly half: number }
+  /** Whether the centre is slit so that the neck goes over the head. */
+  readonly slit?: boolean
   readonly below?: OpenHalf['below']
 }
 

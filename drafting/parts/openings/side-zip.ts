@@ -14,8 +14,7 @@ export const sideZip: Opening = {
     onFold(front)
     onFold(back)
     zipInSide(pen, front.piece, back.piece, belowArmhole)
-    letHeadThrough(pen, front.piece, back.piece, dropped)
-    return { front: { kind: 'fold' }, back: { kind: 'fold' } }
+    return { front: { kind: 'fold' }, back: letHeadThrough(pen, front.piece, back.piece, dropped) }
   },
 }
 
