@@ -4,7 +4,9 @@ import { useMemo, useState } from 'react'
 import type { Draft } from '@/drafting/contract'
 import { layOut, paperOf } from '@/drafting/drawing'
 import type { LaidOut } from '@/drafting/drawing'
+import { ButtonLink } from '@/components/ui/button'
 import { Dialog } from '@/components/ui/dialog'
+import { DownloadLink } from './download-link'
 import { firstChoices } from './print-choices'
 import { PrintForm } from './print-form'
 import { PrintPreview } from './print-preview'
@@ -22,6 +24,8 @@ export function PrintDialog({
   /** Where the files of the saved version are: '/api/revisions/<id>'. */
   readonly base: string
   readonly printers?: Printers
+  /** Where the chalk guide is shown as cards. */
+  readonly chalk: string
 }) {
   return (
     <Dialog open={open} onClose={onClose} title="Print the pattern" wide>
@@ -34,10 +38,12 @@ function PrintChoice({
   draft,
   base,
   printers,
+  chalk,
 }: {
   readonly draft: Draft
   readonly base: string
   readonly printers?: Printers
+  readonly chalk: string
 }) {
   const [choices, setChoices] = useState(firstChoices)
   const laidOut = useMemo(
@@ -46,18 +52,39 @@ function PrintChoice({
   )
   return (
     <div className="grid gap-6 md:grid-cols-[19rem_1fr]">
-      <PrintForm
-        base={base}
-        choices={choices}
-        onChange={setChoices}
-        facts={factsOf(laidOut, paperOf(choices.paper, choices.roll).name)}
-        pieces={draft.pieces}
-        printers={printers}
-      />
+      <div className="grid content-start gap-6">
+        <PrintForm
+          base={base}
+          choices={choices}
+          onChange={setChoices}
+          facts={factsOf(laidOut, paperOf(choices.paper, choices.roll).name)}
+          pieces={draft.pieces}
+          printers={printers}
+        />
+        <WithoutPaper base={base} chalk={chalk} />
+      </div>
       <div className="grid place-items-center self-start bg-panel p-4 md:sticky md:top-0">
         <PrintPreview laidOut={laidOut} />
       </div>
     </div>
+  )
+}
+
+/** For those who chalk straight on the folded cloth. */
+function WithoutPaper({ base, chalk }: { readonly base: string; readonly chalk: string }) {
+  return (
+    <section className="grid gap-2 border-t hairline pt-4">
+      <h3 className="font-semibold">Cut without paper</h3>
+      <p className="text-sm text-walnut">
+        The chalk guide tells each mark in order, in lengths of the tape, and how the cloth is folded.
+      </p>
+      <DownloadLink look="plain" href={`${base}/chalk.pdf`} making="Writing the guide">
+        Download the chalk guide (PDF)
+      </DownloadLink>
+      <ButtonLink look="quiet" href={chalk}>
+        Tick it off at the table
+      </ButtonLink>
+    </section>
   )
 }
 

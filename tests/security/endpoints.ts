@@ -66,6 +66,12 @@ export const endpoints: Readonly<Record<string, Endpoint>> = {
     input: nothing,
     path: ({ headId }) => `/api/revisions/${headId}/pattern.svg`,
   },
+  'GET /api/revisions/[id]/chalk.pdf': {
+    access: drafters,
+    outOfReach: ['tutor', 'maker', 'student'],
+    input: () => ({ paper: 'letter' }),
+    path: ({ headId }) => `/api/revisions/${headId}/chalk.pdf`,
+  },
   'GET /api/drafts/[id]/revisions': {
     access: drafters,
     outOfReach: ['tutor', 'maker', 'student'],

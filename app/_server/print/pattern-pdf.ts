@@ -1,11 +1,11 @@
 import 'server-only'
-import { PDFDocument, PDFName, PDFRawStream, PrintScaling } from 'pdf-lib'
-import type { PDFRef } from 'pdf-lib'
+import { PDFDocument } from 'pdf-lib'
 import type { Draft } from '@/drafting/contract'
 import { coverPaper, layOut } from '@/drafting/drawing'
 import type { LaidOut, LayOutRequest } from '@/drafting/drawing'
 import { drawCover } from './cover-page'
-import { PageContent, pointsPerMm } from './page-content'
+import { addPage, describe } from './document'
+import { PageContent } from './page-content'
 import type { Pen } from './page-content'
 import { placedItems } from './page-items'
 import { addPdfLayers } from './pdf-layers'
@@ -59,7 +59,7 @@ export async function documentOf(
   const { title } = request
   const pen = { black: request.black ?? false, weight: request.bold ? boldWeight : 1 }
   const document = await PDFDocument.create({ updateMetadata: false })
-  describe(document, request)
+  describe(document, { title: title.name, subject: subjectOf(title), savedAt: request.savedAt })
   const saved = [title.version, title.date].filter(Boolean).join(' · ')
   const texts = [
     ...textsOf(drawing),
@@ -111,29 +111,4 @@ function wanted({ draft, pieces }: PatternRequest): Draft {
   return pieces ? { ...draft, pieces: draft.pieces.filter(({ id }) => pieces.includes(id)) } : draft
 }
 
-function describe(document: PDFDocument, { title, savedAt }: PatternRequest): void {
-  document.setTitle(title.name, { showInWindowTitleBar: true })
-  document.setSubject([title.garment, title.version].filter(Boolean).join(', '))
-  document.setCreator('Chalkfold')
-  document.setProducer('Chalkfold')
-  document.setCreationDate(savedAt)
-  document.setModificationDate(savedAt)
-  document.setLanguage('en')
-  const preferences = document.catalog.getOrCreateViewerPreferences()
-  preferences.setPrintScaling(PrintScaling.None)
-  preferences.setPickTrayByPDFSize(true)
-}
-
-function addPage(
-  document: PDFDocument,
-  resources: PDFRef,
-  width: number,
-  height: number,
-  bytes: Uint8Array,
-): void {
-  const page = document.addPage([width * pointsPerMm, height * pointsPerMm])
-  const { context } = document
-  const stream = PDFRawStream.of(context.obj({ Filter: 'FlateDecode', Length: bytes.length }), bytes)
-  page.node.set(PDFName.of('Contents'), context.register(stream))
-  page.node.set(PDFName.of('Resources'), resources)
-}
+const subjectOf = ({ garment, version }: PatternTitle) => [garment, version].filter(Boolean).join(', ')

@@ -120,7 +120,9 @@ function Opened({
       {open === 'share' && (
         <ShareLeaf onClose={close} draftId={draft.id} draftName={name} beforeMaking={autosave.flush} />
       )}
-      {open === 'print' && <PrintLeaf onClose={close} store={store} revisionId={printed} />}
+      {open === 'print' && (
+        <PrintLeaf onClose={close} store={store} draftId={draft.id} revisionId={printed} />
+      )}
     </>
   )
 }

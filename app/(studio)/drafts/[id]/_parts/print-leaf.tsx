@@ -9,17 +9,28 @@ import { usePrinters } from '../../../_data/printers'
 export function PrintLeaf({
   onClose,
   store,
+  draftId,
   revisionId,
 }: {
   readonly onClose: () => void
   readonly store: StudioStore
+  readonly draftId: string
   readonly revisionId: string | undefined
 }) {
   const { draft } = store.get()
   const printers = usePrinters()
   if (draft && revisionId) {
     const base = `/api/revisions/${revisionId}`
-    return <PrintDialog open onClose={onClose} draft={draft} base={base} printers={printers} />
+    return (
+      <PrintDialog
+        open
+        onClose={onClose}
+        draft={draft}
+        base={base}
+        printers={printers}
+        chalk={`/drafts/${draftId}/chalk`}
+      />
+    )
   }
   return (
     <Dialog open onClose={onClose} title="Print the pattern">
