@@ -245,17 +245,20 @@ function checkCorrections(given: unknown, problems: Problem[]): readonly Correct
   return good
 }
 
+/** Nobody reads a tape finer than this, mm; marks without end would be looked for on one. */
+const finestTape = 0.1
+
 /** Unit, tape and the like. */
 function checkManner(order: DraftOrder, problems: Problem[]): void {
   if (order.unit !== undefined && order.unit !== 'in' && order.unit !== 'cm') {
     problems.push({ field: 'unit', code: 'out-of-range', message: 'The unit is “in” or “cm”.' })
   }
-  if (order.tape !== undefined && !(isNumber(order.tape) && order.tape > 0 && order.tape <= 12.7)) {
+  if (order.tape !== undefined && !(isNumber(order.tape) && order.tape >= finestTape && order.tape <= 12.7)) {
     problems.push({
       field: 'tape',
       code: 'out-of-range',
-      message: 'The tape is read to some fraction: more than 0 and at most ½ in (12.7 mm).',
-      min: 0,
+      message: 'The tape is read to some fraction: at least 0.1 mm and at most ½ in (12.7 mm).',
+      min: finestTape,
       max: 12.7,
     })
   }
