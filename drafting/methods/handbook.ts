@@ -25,7 +25,7 @@ const dress: readonly MethodRule[] = [
 const bodice: readonly MethodRule[] = [
   rule(
     'scyeLine',
-    'min(bust / 6 + 7cm, bust / 8 + 10.7cm) + armholeDeepening',
+    'min(bust / 6 + 7cm, bust / 8 + 10.7cm)',
     `${sources.sloper}: bust / 6 + 7 cm; the other on a full bust, where that grows too fast: ${commonPractice}`,
   ),
   rule('backQuarter', '(bust + bustEase) / 4', `${sources.sloper}: front and back alike`),

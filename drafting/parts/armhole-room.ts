@@ -1,5 +1,6 @@
 import type { Point } from '../contract'
 import { pathLength, rotate, towards, unit } from '../geometry'
+import { nothing } from '../pen/masks'
 import type { Pen } from '../pen/pen'
 import { solveBetween } from '../pen/solve'
 import { armholeCurve } from './armhole'
@@ -67,54 +68,18 @@ export function deepenArmhole(pen: Pen, side: Point): void {
  * dart. Close enough to the drawn armholes, which lean a little with their side seams.
  */
 export function deepenFitted(pen: Pen): void {
-  pen.find('armholeDeepening', 0, 0n)
   for (const side of ['back', 'front'] as const) {
-    const out = Math.cos((pen.value(`${side}Slope`) * Math.PI) / 180) * pen.value(`${side}Shoulder`)
-    pen.find(
-      `${side}Tip`,
-      pen.value(`${side}NeckWidth`) + out,
-      pen.usesOf([`${side}Slope`, `${side}Shoulder`, `${side}NeckWidth`]),
-    )
+    const tip = pen.follow(() => {
+      const out = Math.cos((pen.value(`${side}Slope`) * Math.PI) / 180) * pen.value(`${side}Shoulder`)
+      return pen.value(`${side}NeckWidth`) + out
+    })
+    pen.find(`${side}Tip`, tip.made, tip.uses)
   }
-  if (pen.chosen('sleeve') === 'none') return
-  const down = { x: 0, y: 1 }
-  const half = (neck: number, slope: number, long: number, across: number, underarm: Point): number => {
-    const shoulder = towards(slope)
-    const tip = { x: neck + shoulder.x * long, y: shoulder.y * long }
-    return pathLength(armholeCurve(tip, { x: across, y: (tip.y + underarm.y) / 2 }, underarm, shoulder, down))
+  if (pen.chosen('sleeve') === 'none') {
+    pen.find('armholeDeepening', 0, nothing)
+    return
   }
-  const levels = { back: pen.value('scyeLine') + pen.value('napeDepth'), front: pen.value('frontScye') }
-  const bust = { x: pen.value('bustPointOut'), y: pen.value('bustHeight') }
-  const spare = (more: number): number => {
-    const swung = rotate(
-      { x: pen.value('frontQuarter'), y: levels.front + more },
-      -pen.value('bustDartAngle'),
-      bust,
-    )
-    return (
-      half(
-        pen.value('backNeckWidth'),
-        pen.value('backSlope'),
-        pen.value('backShoulder'),
-        pen.value('backHalf'),
-        {
-          x: pen.value('backQuarter'),
-          y: levels.back + more,
-        },
-      ) +
-      half(
-        pen.value('frontNeckWidth'),
-        pen.value('frontSlope'),
-        pen.value('frontShoulder'),
-        pen.value('frontHalf'),
-        swung,
-      ) -
-      pen.value('leastArmhole') -
-      6
-    )
-  }
-  if (spare(0) >= 0) return
-  const more = solveBetween(spare, 0, deepest, 1e-7)
+  const { made: more, uses } = pen.follow(() => fittedDeepening(pen))
   if (more === undefined) {
     pen.refuse({
       field: 'upperArm',
@@ -123,28 +88,35 @@ export function deepenFitted(pen: Pen): void {
         'The arm is too large for an armhole on this body. Check the upper arm and the bust, or leave the sleeve out.',
     })
   }
-  const uses = [
-    'leastArmhole',
-    'frontScye',
-    'backQuarter',
-    'frontQuarter',
-    'backHalf',
-    'frontHalf',
-    'bustDartAngle',
-    'bustPointOut',
-    'bustHeight',
-    'backSlope',
-    'frontSlope',
-    'backShoulder',
-    'frontShoulder',
-  ]
-  pen.refind('armholeDeepening', pen.tape ? Math.ceil(more / pen.tape) * pen.tape : more, pen.usesOf(uses))
+  pen.find('armholeDeepening', pen.tape ? Math.ceil(more / pen.tape) * pen.tape : more, uses)
+  if (more === 0) return
   pen.caution(
     'armhole-deepened',
     `The armhole is ${pen.say(more)} deeper than its rule, so that there is room for the arm.`,
     'upperArm',
     'sleeveEase',
   )
+}
+
+/** How much deeper than by rule both halves must be, mm; undefined when no depth would do. */
+function fittedDeepening(pen: Pen): number | undefined {
+  const down = { x: 0, y: 1 }
+  const half = (side: 'front' | 'back', underarm: Point): number => {
+    const shoulder = towards(pen.value(`${side}Slope`))
+    const long = pen.value(`${side}Shoulder`)
+    const tip = { x: pen.value(`${side}NeckWidth`) + shoulder.x * long, y: shoulder.y * long }
+    const hollow = { x: pen.value(`${side}Half`), y: (tip.y + underarm.y) / 2 }
+    return pathLength(armholeCurve(tip, hollow, underarm, shoulder, down))
+  }
+  const bust = { x: pen.value('bustPointOut'), y: pen.value('bustHeight') }
+  const level = pen.value('scyeLine') + pen.value('napeDepth')
+  const wanted = pen.value('leastArmhole') + 12
+  const spare = (more: number): number => {
+    const closed = { x: pen.value('frontQuarter'), y: pen.value('frontScye') + more }
+    const front = half('front', rotate(closed, -pen.value('bustDartAngle'), bust))
+    return front + half('back', { x: pen.value('backQuarter'), y: level + more }) - wanted
+  }
+  return spare(0) >= 0 ? 0 : solveBetween(spare, 0, deepest, 1e-7)
 }
 
 /** The shoulders must be wider than the neck and not much wider than the quarter, or the armhole would turn outwards. */

@@ -1,5 +1,5 @@
 import type { Path, Point } from '../contract'
-import { reversePath, unit } from '../geometry'
+import { distance, endOf, endTangent, reversePath, unit } from '../geometry'
 import { nothing, type Mask } from '../pen/masks'
 import type { Pen } from '../pen/pen'
 import { between, type PiecePen } from '../pen/piece-pen'
@@ -72,6 +72,29 @@ export function fitWaist(
     field: 'waist',
     code: 'impossible-shape',
     message: `A waist of ${pen.say(wanted)} does not lie fair between this centre and side with its darts. Check waist, hip and bust against each other, or change their ease.`,
+  })
+}
+
+/**
+ * The waist of a bodice as it runs to the end of its side seam, which may have been corrected since the waist was fitted.
+ *
+ * @param side the side seam from the underarm to the waist.
+ */
+export function waistTo(
+  pen: Pen,
+  centre: { readonly at: Point; readonly leaves: Point },
+  side: Path,
+  fitted: FittedWaist,
+): FittedWaist {
+  const at = endOf(side)
+  if (distance(at, fitted.side) < 1e-6) return fitted
+  const down = endTangent(side)
+  const waist = openWaist(centre, { at, arrives: { x: down.y, y: -down.x } }, fitted.darts, false)
+  if (waist) return { side: at, darts: fitted.darts, waist }
+  return pen.refuse({
+    field: 'corrections',
+    code: 'impossible-shape',
+    message: 'With these corrections the waist misses its darts. Correct the waist or the side seam less.',
   })
 }
 

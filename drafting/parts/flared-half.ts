@@ -1,11 +1,12 @@
 import type { Path, Point } from '../contract'
-import { unit, add, scale, magnitude, cubic, openPath, endTangent } from '../geometry'
+import { unit, magnitude, endTangent } from '../geometry'
 import type { Mask } from '../pen/masks'
 import type { Pen } from '../pen/pen'
 import { between, type PiecePen } from '../pen/piece-pen'
 import { armholeCurve } from './armhole'
 import { fairCurve } from './hem'
 import { backNeckline, chosenNeckline, leaning } from './necklines'
+import { takenInOf, throughTakenIn } from './taken-in'
 
 /** Directions that the whole of one half is drawn by. */
 export interface HalfShape {
@@ -238,40 +239,13 @@ export function drawHalf(
 
 /** The side seam: straight, or curved through what corrections take in or let out at their levels. */
 function takenIn(pen: Pen, piece: PiecePen, top: Point, bottom: Point): Path {
-  const corrections = pen.corrections.forSeam('side')
-  const down = unit(between(top, bottom))
-  const across = { x: -down.y, y: down.x }
-  const long = magnitude(between(top, bottom))
-  if (corrections.length === 0) return openPath([{ kind: 'line', from: top, to: bottom }])
-  let from = top
-  let start = 0
-  const segments: ReturnType<typeof cubic>[] = []
-  const join = (to: Point, end: number): void => {
-    const reach = (end - start) / 3
-    segments.push(cubic(from, add(from, scale(down, reach)), add(to, scale(down, -reach)), to))
-    from = to
-    start = end
-  }
-  for (const { id, level, by } of corrections) {
-    const along = (level - top.y) / down.y
-    if (along < start + 30 || along > long - 60) {
-      pen.refuse({
-        field: `corrections.${id}`,
-        code: 'impossible-shape',
-        message:
-          'A side seam can be taken in between the underarm and the hem, and no two places nearer than 3 cm. Choose a level between them.',
-        min: top.y + 30 * down.y,
-        max: top.y + (long - 60) * down.y,
-      })
-    }
-    const at = add(add(top, scale(down, along)), scale(across, by))
+  const { path, places } = throughTakenIn(top, bottom, takenInOf(pen, 'side', top, bottom, 60))
+  for (const { id, at } of places) {
     piece.place(`takenIn-${id}`, at, {
       say: 'Correction: take in the side seam here, the same on front and back',
     })
-    join(at, along)
   }
-  join(bottom, long)
-  return openPath(segments)
+  return path
 }
 
 /** The hem of one half, from the side to the centre, square to both. */

@@ -45,6 +45,7 @@ export class Pen {
   readonly notions: Notion[] = []
   readonly cautions: Caution[] = []
   private readonly problems: Problem[] = []
+  private trail: Mask | undefined
 
   constructor(
     readonly values: Values,
@@ -68,12 +69,31 @@ export class Pen {
 
   /** The number behind a rule, measurement, style or found value; not rounded. */
   value(name: string): number {
+    if (this.trail !== undefined) this.heed(this.values.mask(name))
     return this.values.number(name)
+  }
+
+  /**
+   * Runs a construction and gathers what it follows from: every name whose number it asks for, and all that the marks and
+   * edges follow from that it looks at. What it makes need not list its sources by hand, and cannot forget one.
+   */
+  follow<T>(construct: () => T): { readonly made: T; readonly uses: Mask } {
+    const outer = this.trail
+    this.trail = nothing
+    const made = construct()
+    const uses = this.trail
+    this.trail = outer === undefined ? undefined : outer | uses
+    return { made, uses }
+  }
+
+  /** Adds to what the construction being followed depends on. */
+  heed(uses: Mask): void {
+    if (this.trail !== undefined) this.trail |= uses
   }
 
   /** A length as it is measured out, mm: rounded to the tape when there is one. Refuses a negative one. */
   length(name: string): number {
-    const value = this.values.number(name)
+    const value = this.value(name)
     if (value < -1e-9) {
       this.refuse({
         field: name,

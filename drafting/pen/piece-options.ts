@@ -51,4 +51,6 @@ export interface MarkOptions {
   readonly onCentre?: boolean
   /** Why no correction can move it, and what to correct instead. */
   readonly fixed?: string
+  /** The end of a seam that has a length to keep: however it or the other end is moved, it stays so far, mm, from that point. */
+  readonly keeps?: { readonly from: Point; readonly length: number }
 }

@@ -67,7 +67,9 @@ export class PiecePen {
 
   /** Where a mark stands. */
   at(id: string): Point {
-    return this.mark(id).at
+    const mark = this.mark(id)
+    this.pen.heed(mark.x | mark.y)
+    return mark.at
   }
 
   /** The place that rules and style gave a mark, before any correction moved it: what others are measured from. */
@@ -235,7 +237,9 @@ export class PiecePen {
     const fixed = options.fixed ?? this.fixed
     if (fixed) this.held.set(id, fixed)
     if (correction) this.refuseToMove(id, correction, fixed, options.onCentre ?? false)
-    const own = correction ? `${id}-by-rule` : id
+    const moved = keeping(options.keeps, correction ? add(at, correction.by) : at)
+    const stays = !correction && distance(moved, at) < 1e-6
+    const own = stays ? id : `${id}-by-rule`
     this.kinds.set(id, options.kind ?? 'construction')
     if (options.drag) this.drags.set(id, options.drag)
     this.marks.set(own, { id: own, at, x, y })
@@ -255,18 +259,19 @@ export class PiecePen {
         ...(options.from ? [openPath([line(this.at(options.from), at)])] : []),
       ],
     })
-    if (!correction) return
-    const moved = add(at, correction.by)
+    if (stays) return
+    const by = subtract(moved, at)
+    const why = correction?.note ? `Correction: ${correction.note}` : 'Correction: move the mark'
     this.kinds.set(own, 'construction')
     this.marks.set(id, { id, at: moved, x, y })
     this.pen.note({
       id: `${this.id}.${id}`,
       piece: this.id,
       kind: 'mark',
-      say: correction.note ? `Correction: ${correction.note}` : 'Correction: move the mark',
+      say: correction ? why : 'Move it with the corrected neighbour, so that the seam closes',
       from: own,
-      direction: correction.by,
-      length: magnitude(correction.by),
+      direction: by,
+      length: magnitude(by),
       marks: [id],
       uses: x | y,
       draws: [openPath([line(at, moved)])],
@@ -370,6 +375,7 @@ export class PiecePen {
   edge(id: string): DrawnEdge {
     const edge = this.edges.find((one) => one.id === id)
     if (!edge) throw new Error(`${this.id} has no edge “${id}” yet.`)
+    this.pen.heed(edge.uses)
     return edge
   }
 
@@ -398,6 +404,13 @@ export class PiecePen {
       ...(this.held.has(mark.id) ? { fixed: this.held.get(mark.id) as string } : {}),
     }))
   }
+}
+
+/** The point at the length that a seam keeps, on the way to where its end was moved. */
+function keeping(keeps: MarkOptions['keeps'], at: Point): Point {
+  if (!keeps) return at
+  const far = distance(keeps.from, at)
+  return far < 1e-9 ? at : add(keeps.from, scale(subtract(at, keeps.from), keeps.length / far))
 }
 
 /** The straight path between two points. */

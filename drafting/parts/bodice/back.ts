@@ -1,86 +1,61 @@
 import type { Point } from '../../contract'
-import { cubic, openPath, pathLength, pointAt, slicePath, startTangent, towards, unit } from '../../geometry'
+import {
+  cubic,
+  distance,
+  identity,
+  openPath,
+  pathLength,
+  pointAt,
+  slicePath,
+  startTangent,
+  unit,
+} from '../../geometry'
+import type { Mask } from '../../pen/masks'
 import type { Pen } from '../../pen/pen'
 import { between, straight, type PiecePen } from '../../pen/piece-pen'
 import { armholeCurve } from '../armhole'
-import { drawWaist, fitWaist, pinned, waistDarts } from '../fitted-waist'
+import { fitWaist, pinned, waistDarts, waistTo } from '../fitted-waist'
+import { backNeckline, leaning } from '../necklines'
+import { takenInOf, throughTakenIn, type TakenIn } from '../taken-in'
+import { dartAngle, type WaistDart } from '../waist-darts'
 import type { BodiceWay } from '.'
-import { facedBody, type Faced } from '../facing'
-import { backNeckline, chosenNeckline, leaning } from '../necklines'
+import { princessPlace } from './bust-darts'
+import { grainBesideCentre, placeWaistTips, type BodiceHalf, type Lean } from './half'
+import { openUpper, type Opening, type UpperEdge } from './open-darts'
+import { waistEdges } from './outline'
+import { drawHalf } from './panels'
+import { mouthOf } from './places'
 
-/** Marks of neck, shoulder and levels of a fitted back, in drafting order. */
-export function bodiceBackMarks(pen: Pen, back: PiecePen): void {
-  const { widening } = chosenNeckline(pen)
-  back.start('neckLevel', { x: 0, y: 0 }, 'Mark the level of the side neck on the centre')
-  back.go('neckPoint', 'neckLevel', 'right', 'backNeckWidth', {
-    say: 'Go across the width of the back neck',
-    round: 'up',
-  })
-  const shoulder = towards(pen.value('backSlope'))
-  back.aim('shoulderMeasured', 'neckPoint', shoulder, pen.length('frontShoulder'), {
-    say: 'Down the slope go the length of the shoulder',
-    by: 'frontShoulder',
-    uses: ['backSlope'],
-  })
-  back.aim('shoulderTip', 'shoulderMeasured', shoulder, pen.length('shoulderEase'), {
-    say: 'Go on by the ease of the back shoulder',
-    by: 'shoulderEase',
-    uses: ['backSlope'],
-    drag: ['backSlope'],
-  })
-  back.aim('sideNeck', 'neckPoint', shoulder, pen.length(widening), {
-    say: 'Open the neck along the shoulder',
-    by: widening,
-    uses: ['backSlope'],
-    drag: ['neckWidening'],
-  })
-  pen.find(
-    'neckFall',
-    pen.value(widening) * Math.sin((pen.value('backSlope') * Math.PI) / 180),
-    pen.usesOf([widening, 'backSlope']),
-  )
-  back.go('nape', 'neckLevel', 'down', 'napeDepth', { say: 'Come down to the nape' })
-  back.go('centreNeck', 'neckLevel', 'down', 'backNeckDepth', {
-    say: 'Come down the depth of the back neck',
-    drag: ['backNeckDrop'],
-  })
-  back.go('scyeLevel', 'nape', 'down', 'scyeLine', {
-    say: 'From the nape come down to the level of the underarm',
-  })
-  back.go('underarm', 'scyeLevel', 'right', 'backQuarter', {
-    say: 'Go across a quarter of the bust with its ease',
-    drag: ['bustEase'],
-  })
-  back.go('waistLevel', 'nape', 'down', 'napeToWaist', { say: 'From the nape come down to the waist' })
-  back.go('centreWaist', 'waistLevel', 'right', 'centreBackIn', { say: 'Come in at the centre back' })
+/** A side seam as the other half must match it: the length by rule, mm, and where corrections take it in. */
+export interface SideSeam {
+  readonly chord: number
+  readonly taken: readonly TakenIn[]
+  readonly uses: Mask
 }
+
+/** A side seam of a bodice may be taken in down to its end, and its end with it, mm. */
+const beyondEnd = -40
 
 /** Draws the back from its marks: the waist fitted first, then neck, shoulder, armhole, side, waist and centre. */
 export function drawBodiceBack(
   pen: Pen,
   back: PiecePen,
-  lean: number,
+  lean: Lean,
   way: BodiceWay,
-): { readonly faced: Faced; readonly waist: readonly string[] } {
+): BodiceHalf & { readonly side: SideSeam } {
   const at = (id: string): Point => back.at(id)
-  const centreDown = unit(
-    between({ x: 0, y: (at('scyeLevel').y + at('waistLevel').y) / 2 }, at('centreWaist')),
-  )
-  const names = ['backWaistHalf', 'backDart', 'centreBackIn', 'backQuarter', 'scyeLine']
-  const axis = at('underarm').x * 0.44
-  const darts = waistDarts(axis, at('scyeLevel').y, at('waistLevel').y, pen.value('backDart'))
-  const centre = { at: at('centreWaist'), leaves: { x: centreDown.y, y: -centreDown.x } }
-  const waist = fitWaist(
-    pen,
-    centre,
-    at('underarm'),
-    { level: at('waistLevel').y },
-    darts,
-    pen.value('backWaistHalf'),
-  )
-  back.place('sideWaist', waist.side, {
+  const planned = pen.follow(() => dartsOf(pen, back))
+  const darts = placeWaistTips(back, planned.made, at('waistLevel').y, planned.uses)
+  const fitted = pen.follow(() => {
+    pen.heed(planned.uses)
+    const centre = centreOf(back)
+    const place = { level: at('waistLevel').y }
+    const half = pen.value('backWaistHalf')
+    return { centre, fit: fitWaist(pen, centre, at('underarm'), place, darts, half) }
+  })
+  back.place('sideWaist', fitted.made.fit.side, {
     say: 'Mark the waist on the side, found so that the waist fits',
-    uses: names,
+    mask: fitted.uses,
     stepKind: 'solve',
   })
   back.place(
@@ -91,61 +66,101 @@ export function drawBodiceBack(
   back.go('hollow', 'halfDepth', 'right', 'backHalf', {
     say: 'Go across half the back: the hollow of the armhole',
   })
-  if (at('hollow').x > at('underarm').x - 15) {
-    pen.refuse({
-      field: 'acrossBack',
-      code: 'impossible-shape',
-      message:
-        'Across the back the body is wider than this bust allows. Measure across back and bust again, or give more bust ease.',
-      max: 2 * (at('underarm').x - 15),
-    })
+  checkRoom(pen, back)
+  const drawn = pen.follow(() => {
+    const [top, end] = [at('underarm'), at('sideWaist')]
+    const taken = takenInOf(pen, 'side', top, end, beyondEnd)
+    const { path } = throughTakenIn(top, end, taken)
+    pen.heed(lean.uses)
+    const shoulder = unit(between(at('neckPoint'), at('shoulderTip')))
+    const upper: readonly [UpperEdge, UpperEdge, UpperEdge, UpperEdge] = [
+      { id: 'neckline', path: backNeckline(at('centreNeck'), at('sideNeck'), leaning(lean.degrees)) },
+      { id: 'shoulder', path: straight(at('sideNeck'), at('shoulderTip')) },
+      {
+        id: 'armhole',
+        path: armholeCurve(at('shoulderTip'), at('hollow'), top, shoulder, startTangent(path)),
+      },
+      { id: 'side', path },
+    ]
+    const waist = waistTo(pen, fitted.made.centre, path, fitted.made.fit)
+    return { upper, waist, side: { chord: distance(top, end), taken } }
+  })
+  const { upper, waist, side } = drawn.made
+  const uses = fitted.uses | drawn.uses
+  const princess = princessPlace(pen)
+  const edges = [
+    ...openUpper(upper, { ...closed, upper: seamOf(pen, waist.darts) }),
+    ...waistEdges(waist, { side: 'sideWaist', centre: 'centreWaist' }, () => identity),
+  ]
+  const half = drawHalf(pen, back, edges, {
+    uses,
+    waist: way.waist,
+    end: 'centreWaist',
+    ...(princess ? { princess: { from: princess, node: 'waistDart1Point', turned: 0 } } : {}),
+  })
+  grainBesideCentre(back)
+  back.cut({ cloth: 'main', count: 2, onFold: false, handed: true })
+  centreBack(pen, back, centreOf(back).down, uses, way)
+  const [neckline, , armhole, down] = upper
+  return {
+    ...half,
+    faced: {
+      piece: back,
+      neckline: neckline.path,
+      armhole: armhole.path,
+      side: startTangent(down.path),
+      uses,
+    },
+    centre: { kind: way.buttons ? 'seam' : 'zip' },
+    side: { ...side, uses },
   }
-  const shoulder = unit(between(at('neckPoint'), at('shoulderTip')))
-  const side = straight(at('underarm'), at('sideWaist'))
-  back.curve(
-    'neckline',
-    backNeckline(at('centreNeck'), at('sideNeck'), leaning(lean)),
-    'centreNeck',
-    'sideNeck',
-    {
-      role: 'neckline',
-      allowance: 'neckAllowance',
-      say: 'Draw the back neckline',
-    },
-  )
-  back.line('shoulder', 'sideNeck', 'shoulderTip', {
-    role: 'seam',
-    allowance: 'shoulderAllowance',
-    say: 'Draw the shoulder',
+}
+
+/** The waist dart of the back, or two; a princess seam swallows a single one. */
+function dartsOf(pen: Pen, back: PiecePen): readonly WaistDart[] {
+  const point = { x: back.at('underarm').x * 0.44, y: back.at('underarm').y }
+  const waist = back.at('waistLevel').y
+  const intake = pen.value('backDart')
+  return princessPlace(pen)
+    ? [{ point, angle: dartAngle(intake, waist - point.y) }]
+    : waistDarts(point.x, point.y, waist, intake)
+}
+
+/** A back has no bust dart: a princess seam opens nothing above its waist dart. */
+const closed = { centre: undefined, swing: identity, inner: identity, outer: identity }
+
+function seamOf(pen: Pen, darts: readonly WaistDart[]): readonly Opening[] {
+  const place = princessPlace(pen)
+  const [tip] = darts
+  if (!place || !tip) return []
+  const mouth = mouthOf(pen, { id: 'princess', place, degrees: 0 }, 0)
+  return mouth ? [{ ...mouth, point: tip.point, degrees: 0 }] : []
+}
+
+function checkRoom(pen: Pen, back: PiecePen): void {
+  const { x } = back.at('underarm')
+  if (back.at('hollow').x <= x - 15) return
+  pen.refuse({
+    field: 'acrossBack',
+    code: 'impossible-shape',
+    message:
+      'Across the back the body is wider than this bust allows. Measure across back and bust again, or give more bust ease.',
+    max: 2 * (x - 15),
   })
-  back.curve(
-    'armhole',
-    armholeCurve(at('shoulderTip'), at('hollow'), at('underarm'), shoulder, startTangent(side)),
-    'shoulderTip',
-    'underarm',
-    {
-      role: 'armhole',
-      allowance: 'armholeAllowance',
-      say: 'Draw the armhole',
-      through: ['hollow', 'sideWaist'],
-    },
-  )
-  back.line('side', 'underarm', 'sideWaist', {
-    role: 'seam',
-    allowance: 'sideAllowance',
-    say: 'Draw the side seam',
-  })
-  const ends = { centre: 'centreWaist', side: 'sideWaist' }
-  const edges = drawWaist(back, waist, ends, false, names, way.waist)
-  centreBack(pen, back, centreDown, names, way)
-  return { faced: facedBody(back), waist: edges }
+}
+
+/** Where the waist of the back starts, and the direction of the centre seam there. */
+function centreOf(back: PiecePen) {
+  const waist = back.at('centreWaist')
+  const down = unit(between({ x: 0, y: (back.at('underarm').y + back.at('waistLevel').y) / 2 }, waist))
+  return { at: waist, leaves: { x: down.y, y: -down.x }, down }
 }
 
 /** The centre back: straight to the level of the underarm, then in to the waist, where it meets it square. */
-function centreBack(pen: Pen, back: PiecePen, down: Point, uses: readonly string[], way: BodiceWay): void {
+function centreBack(pen: Pen, back: PiecePen, down: Point, uses: Mask, way: BodiceWay): void {
   const waist = back.at('centreWaist')
   const neck = back.at('centreNeck')
-  const bend = { x: 0, y: Math.max(neck.y + 20, back.at('scyeLevel').y) }
+  const bend = { x: 0, y: Math.max(neck.y + 20, back.at('underarm').y) }
   const long = waist.y - bend.y
   const whole = openPath([
     cubic(
@@ -156,7 +171,7 @@ function centreBack(pen: Pen, back: PiecePen, down: Point, uses: readonly string
     ),
     { kind: 'line', from: bend, to: neck },
   ])
-  const options = { allowance: 'centreBackAllowance', uses }
+  const options = { allowance: 'centreBackAllowance', mask: uses }
   if (way.buttons) {
     back.curve('centre', whole, 'centreWaist', 'centreNeck', {
       role: 'seam',
@@ -180,7 +195,8 @@ function centreBack(pen: Pen, back: PiecePen, down: Point, uses: readonly string
   }
   back.place('zipEnd', pointAt(whole, below), {
     say: 'Mark the end of the zip',
-    uses: ['zipLength', ...uses],
+    uses: ['zipLength'],
+    mask: uses,
     drag: ['zipLength'],
   })
   back.curve(

@@ -1,9 +1,36 @@
 import type { DesignValue } from '../../contract'
-import { angle, choice, length } from '../../pen/design'
+import { angle, choice, length, share } from '../../pen/design'
 
-/** Bust and waist darts of a fitted bodice. */
+const withDarts = { id: 'shaping', is: ['darts'] }
+
+/** Bust and waist darts of a fitted bodice, or the seams that take their place. */
 export const dartDesign: readonly DesignValue[] = [
-  choice('dartTo', 'Bust dart to', 'darts', ['side', 'shoulder', 'armhole', 'neck', 'waist']),
+  choice('shaping', 'Shaped by', 'darts', [
+    'darts',
+    'princess from the shoulder',
+    'princess from the armhole',
+  ]),
+  choice(
+    'dartTo',
+    'Bust dart to',
+    'darts',
+    ['side', 'shoulder', 'armhole', 'neck', 'waist', 'centre front'],
+    withDarts,
+  ),
+  choice(
+    'dartSharedWith',
+    'Bust dart shared with',
+    'darts',
+    ['nothing', 'waist', 'side', 'shoulder', 'armhole', 'neck', 'centre front'],
+    withDarts,
+  ),
+  share(
+    'dartShare',
+    'Share of the second dart',
+    'darts',
+    { default: 0.5, min: 0.2, max: 0.8 },
+    { id: 'dartSharedWith', is: ['waist', 'side', 'shoulder', 'armhole', 'neck', 'centre front'] },
+  ),
   length(
     'dartBelowArmhole',
     'Dart below the armhole',
@@ -37,5 +64,6 @@ export const bodiceAllowances: readonly DesignValue[] = [
   length('armholeAllowance', 'Armhole allowance', 'allowances', { default: 10, min: 0, max: 15 }),
   length('sideAllowance', 'Side allowance', 'allowances', { default: 19, min: 0, max: 30 }),
   length('centreBackAllowance', 'Centre back allowance', 'allowances', { default: 19, min: 0, max: 30 }),
+  length('panelAllowance', 'Panel seam allowance', 'allowances', { default: 12.7, min: 0, max: 25 }),
   length('waistAllowance', 'Waist allowance', 'allowances', { default: 12.7, min: 0, max: 25 }),
 ]

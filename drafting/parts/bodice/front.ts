@@ -1,348 +1,259 @@
-import type { Point, Run } from '../../contract'
-import { applyTo, distance, pathLength, rotation, startTangent, towards, unit } from '../../geometry'
+import type { Path, Point } from '../../contract'
+import { applyTo, distance, endOf, startOf, startTangent, transformPath, undo, unit } from '../../geometry'
+import type { Mask } from '../../pen/masks'
 import type { Pen } from '../../pen/pen'
 import { between, straight, type PiecePen } from '../../pen/piece-pen'
 import { armholeCurve } from '../armhole'
-import type { BodiceWay } from '.'
-import { openDart, type PlacedEdge, type UpperEdge } from './bust-dart'
-import { drawWaist, fitWaist, pinned, waistDarts, type FittedWaist } from '../fitted-waist'
-import type { Faced } from '../facing'
+import { fitWaist, pinned, waistDarts, waistTo, type FittedWaist } from '../fitted-waist'
 import { chosenNeckline, leaning } from '../necklines'
 import { lapFront } from '../openings/button-band'
 import { onFold, type Centre } from '../openings/opening'
-
-/** Where the bust dart may open: the edge, and how far along: a share of it, or a named length. */
-const places: Readonly<
-  Record<string, { readonly edge: string; readonly share?: number; readonly by?: string }>
-> = {
-  side: { edge: 'side', by: 'dartBelowArmhole' },
-  shoulder: { edge: 'shoulder', share: 0.5 },
-  armhole: { edge: 'armhole', share: 0.6 },
-  neck: { edge: 'neckline' },
-}
-
-/** The front of a fitted bodice, and what the other pieces need of it. */
-export interface BodiceFront {
-  readonly faced: Faced
-  /** The edges that each edge of the outline consists of, in order: a dart divides the one that it opens on. */
-  readonly runs: (edge: string) => Run[]
-  /** Its waist edges from the side to the centre, as they are drawn. */
-  readonly waist: readonly string[]
-  readonly centre: Centre
-}
-
-/** Marks of neck, shoulder, bust and levels, in drafting order. */
-export function bodiceFrontMarks(pen: Pen, front: PiecePen): void {
-  const { depth, widening } = chosenNeckline(pen)
-  front.start('neckLevel', { x: 0, y: 0 }, 'Fold the cloth; mark the level of the side neck on the centre')
-  front.go('neckPoint', 'neckLevel', 'right', 'frontNeckWidth', {
-    say: 'Go across the width of the front neck',
-    round: 'up',
-  })
-  front.go('centreNeck', 'neckLevel', 'down', depth, {
-    say: 'Come down the depth of the front neck',
-    drag: ['frontNeckDrop'],
-  })
-  pen.tag({
-    piece: 'front',
-    from: 'neckLevel',
-    to: 'centreNeck',
-    label: 'Neck depth',
-    value: 'frontNeckDrop',
-    over: pen.length(depth) - pen.value('frontNeckDrop'),
-  })
-  const shoulder = towards(pen.value('frontSlope'))
-  front.aim('shoulderTip', 'neckPoint', shoulder, pen.length('frontShoulder'), {
-    say: 'Down the slope go the length of the shoulder',
-    by: 'frontShoulder',
-    uses: ['frontSlope'],
-    drag: ['frontSlope'],
-  })
-  front.aim('sideNeck', 'neckPoint', shoulder, pen.length(widening), {
-    say: 'Open the neck along the shoulder',
-    by: widening,
-    uses: ['frontSlope'],
-    drag: ['neckWidening'],
-  })
-  pen.tag({
-    piece: 'front',
-    from: 'neckPoint',
-    to: 'sideNeck',
-    label: 'Neck wider by',
-    value: 'neckWidening',
-    over: pen.length(widening) - pen.value('neckWidening'),
-  })
-  front.go('bustLevel', 'neckLevel', 'down', 'bustHeight', { say: 'Come down the bust height' })
-  front.go('bustPoint', 'bustLevel', 'right', 'bustPointOut', {
-    say: 'Go across half the bust span: here is the bust point',
-    kind: 'drill',
-  })
-  front.go('scyeLevel', 'neckLevel', 'down', 'frontScye', { say: 'Come down to the level of the underarm' })
-  front.go('underarmClosed', 'scyeLevel', 'right', 'frontQuarter', {
-    say: 'Go across a quarter of the bust with its ease: the underarm while the bust dart is closed',
-    drag: ['bustEase'],
-  })
-  front.go('centreWaist', 'neckLevel', 'down', 'frontWaistLength', {
-    say: 'Come down the front waist length',
-  })
-}
+import { throughTakenIn } from '../taken-in'
+import { dartAngle, type WaistDart } from '../waist-darts'
+import type { BodiceWay } from '.'
+import type { SideSeam } from './back'
+import { bustDarts, princessPlace, type BustDart } from './bust-darts'
+import { centreEdges } from './centre-front'
+import { framesOf, openUpper, tipOf, type FrontBlock, type Opening, type UpperEdge } from './open-darts'
+import { grainBesideCentre, placeWaistTips, type BodiceHalf, type Lean } from './half'
+import { waistEdges } from './outline'
+import { drawHalf } from './panels'
+import { mouthOf, soundOpenings } from './places'
 
 /**
- * Draws the front: the waist first, which tells where the side goes, then the upper outline with the side swung up by the
- * bust dart, and the dart opened at its place.
+ * Draws the front of a bodice: it finds how its bust darts open, then draws the outline with the side swung up and opens
+ * them. The waist is fitted so that its darts closed it has its length and the side seam that of the back.
  *
- * @param seam length of the back's side seam, mm, which the front's must have.
+ * @param side the back's side seam, whose length the front's must have.
  * @param lean how the neckline leaves the side neck.
  */
 export function drawBodiceFront(
   pen: Pen,
   front: PiecePen,
-  seam: number,
-  lean: number,
+  side: SideSeam,
+  lean: Lean,
   way: BodiceWay,
-): BodiceFront {
-  const at = (id: string): Point => front.at(id)
-  const bust = at('bustPoint')
-  const names = [
-    'bustDartAngle',
-    'frontWaistHalf',
-    'frontDart',
-    'waistTip',
-    'frontQuarter',
-    'frontScye',
-    'sideShare',
+): BodiceHalf {
+  const plans = pen.follow(() => {
+    const bust = bustDarts(pen, way.buttons ?? false)
+    return { bust, waist: dartsOf(pen, front, bust) }
+  })
+  const darts = princessPlace(pen)
+    ? plans.made.waist
+    : placeWaistTips(front, plans.made.waist, front.at('centreWaist').y, plans.uses)
+  const plan = pen.follow(() => {
+    pen.heed(plans.uses)
+    return planFront(pen, front, side, lean, plans.made.bust, darts)
+  })
+  const { block, openings } = plan.made
+  const frames = framesOf(block, placeTips(front, openings, plan.uses))
+  front.place('underarm', applyTo(frames.swing, front.at('underarmClosed')), {
+    say: 'Swing the side up about the point of the dart by its angle',
+    mask: plan.uses,
+    through: ['underarmClosed', 'bustPoint'],
+    stepKind: 'turn',
+  })
+  placeHollow(front)
+  checkRoom(pen, front)
+
+  const lower = pen.follow(() => {
+    pen.heed(plan.uses | side.uses)
+    const top = applyTo(undo(frames.swing), front.at('underarm'))
+    const { waist } = plan.made
+    const moved = distance(top, front.at('underarmClosed')) > 1e-6
+    return { top, waist: moved ? fitFront(pen, front, top, side, waist.darts) : waist }
+  })
+  const { top } = lower.made
+  front.place('sideWaistEnd', applyTo(frames.outer, lower.made.waist.side), {
+    say: 'Mark the waist on the side',
+    mask: plan.uses | lower.uses,
+    keeps: { from: applyTo(frames.outer, top), length: side.chord },
+  })
+  const drawn = pen.follow(() => {
+    const end = applyTo(undo(frames.outer), front.at('sideWaistEnd'))
+    const { path } = throughTakenIn(top, end, side.taken)
+    const waist = waistTo(pen, centreOf(front), path, lower.made.waist)
+    const swung = pinned(
+      transformPath(frames.swing, path),
+      front.at('underarm'),
+      applyTo(frames.swing, endOf(path)),
+    )
+    return { waist, upper: upperEdges(front, necklineOf(pen, front, lean), front.at('hollow'), swung) }
+  })
+  const { waist, upper } = drawn.made
+  const uses = plan.uses | lower.uses | drawn.uses
+  const edges = [
+    ...openUpper(upper, frames),
+    ...waistEdges(waist, { side: 'sideWaistEnd', centre: 'centreWaist' }, (stretch) =>
+      stretch === 0 ? frames.inner : frames.outer,
+    ),
+    ...centreEdges(front, frames),
   ]
-  const waistTip = bust.y + pen.length('waistTip')
-  const darts = waistDarts(bust.x, waistTip, at('centreWaist').y, pen.value('frontDart'))
-  const centre = { at: at('centreWaist'), leaves: { x: 1, y: 0 } }
-  const waist = fitWaist(
-    pen,
-    centre,
-    at('underarmClosed'),
-    { length: seam },
-    darts,
-    pen.value('frontWaistHalf'),
-  )
-
-  const place = places[String(pen.chosen('dartTo'))]
-  const angle = pen.value('bustDartAngle')
-  const upper = swungOutline(pen, front, waist, lean, place, angle)
-  const along = place && mouthAlong(pen, upper.edges, place)
-  const opened = openDart(
-    upper.edges,
-    place && along !== undefined ? { edge: place.edge, along } : undefined,
-    upper.point,
-    angle,
-  )
-
-  const sideWaist = opened.beyond ? waist.side : (upper.edges.at(-1)?.path.segments.at(-1)?.to as Point)
-  front.place('sideWaistEnd', sideWaist, { say: 'Mark the waist on the side', uses: names })
-  drawOutline(front, opened.edges, upper.point, names)
-  const turned = opened.beyond ? waist : swingWaist(waist, upper.point, -angle)
-  const ends = { centre: 'centreWaist', side: 'sideWaistEnd' }
-  const waistEdges = drawWaist(front, turned, ends, false, names, way.waist)
-  const half = {
-    piece: front,
-    foot: 'centreWaist',
-    below: { edge: 'waist', role: 'waist', allowance: 'waistAllowance', finish: way.waist },
-  } as const
-  if (way.buttons) lapFront(pen, half)
-  else onFold(half)
-
-  const [neckline, , armhole, side] = upper.edges as [UpperEdge, UpperEdge, UpperEdge, UpperEdge]
+  const princess = princessPlace(pen)
+  const half = drawHalf(pen, front, edges, {
+    uses,
+    waist: way.waist,
+    ...(frames.centre ? {} : { end: 'centreWaist' }),
+    ...(princess
+      ? { princess: { from: princess, node: 'bustPoint', turned: pen.value('bustDartAngle') } }
+      : {}),
+  })
+  const centre = frames.centre ? sewCentreFront(pen, front) : openCentre(pen, front, way)
+  const [neckline, , armhole, down] = upper
   return {
+    ...half,
+    centre,
     faced: {
       piece: front,
       neckline: neckline.path,
       armhole: armhole.path,
-      side: startTangent(side.path),
-      uses: pen.usesOf(names),
+      side: startTangent(down.path),
+      uses,
     },
-    runs: (edge) =>
-      opened.edges.filter((one) => one.of === edge).map((one) => ({ piece: 'front', edge: one.id })),
-    waist: waistEdges,
-    centre: way.buttons ? { kind: 'lap', below: half.below } : { kind: 'fold' },
   }
 }
 
-/** The outline from the neck to the side waist, with everything beyond the bust swung up about the dart's point. */
-function swungOutline(
+/** The front on the fold, or lapped over and buttoned. */
+function openCentre(pen: Pen, front: PiecePen, way: BodiceWay): Centre {
+  const below = { edge: 'waist', role: 'waist', allowance: 'waistAllowance', finish: way.waist } as const
+  const half = { piece: front, foot: 'centreWaist', below }
+  if (way.buttons) lapFront(pen, half)
+  else onFold(half)
+  grainBesideCentre(front)
+  front.cut({
+    cloth: 'main',
+    count: way.buttons ? 2 : 1,
+    onFold: !way.buttons,
+    handed: way.buttons ?? false,
+  })
+  return way.buttons ? { kind: 'lap', below } : { kind: 'fold' }
+}
+
+/** The front sewn at the centre, where a dart opens there; its neckline can still be faced on the fold. */
+function sewCentreFront(pen: Pen, front: PiecePen): Centre {
+  front.grain({ x: 35, y: front.at('centreNeck').y + 30 }, { x: 35, y: front.at('bustLevel').y - 10 })
+  front.cut({ cloth: 'main', count: 2, onFold: false, handed: true })
+  for (const edge of ['centre', 'centre-below'])
+    pen.sew({
+      id: `${edge}-front`,
+      name: edge === 'centre' ? 'Centre front above the dart' : 'Centre front below the dart',
+      a: [{ piece: 'front', edge }],
+      b: [{ piece: 'front', edge, mirrored: true }],
+    })
+  return { kind: 'fold' }
+}
+
+const centreOf = (front: PiecePen) => ({ at: front.at('centreWaist'), leaves: { x: 1, y: 0 } })
+
+/** The waist darts of the front; a princess seam swallows one that comes to the bust point. */
+function dartsOf(pen: Pen, front: PiecePen, plans: readonly BustDart[]): readonly WaistDart[] {
+  const bust = front.at('bustPoint')
+  const waist = front.at('centreWaist').y
+  const intake = pen.value('frontDart')
+  if (princessPlace(pen)) return [{ point: bust, angle: dartAngle(intake, waist - bust.y) }]
+  const tip = bust.y + pen.length('waistTip')
+  const darts = waistDarts(bust.x, tip, waist, intake)
+  // Where the bust dart opens at the waist there is a dart, however little the waist takes in.
+  return darts.length || !plans.some(({ place }) => place === 'waist')
+    ? darts
+    : [{ point: { x: bust.x, y: tip }, angle: 0 }]
+}
+
+/** Everything that the bust darts open by, drafted with the darts closed. */
+function planFront(
   pen: Pen,
   front: PiecePen,
-  waist: FittedWaist,
-  lean: number,
-  place: (typeof places)[string] | undefined,
-  angle: number,
-): { readonly edges: readonly UpperEdge[]; readonly point: Point } {
-  const at = (id: string): Point => front.at(id)
-  const bust = at('bustPoint')
-  const closed = at('underarmClosed')
-  const point = dartPoint(pen, front, waist, place)
-  const swing = rotation(-angle, point)
-  const underarm = applyTo(swing, closed)
-  front.place('underarm', underarm, {
-    say: 'Swing the side up about the point of the dart by its angle',
-    uses: ['bustDartAngle', 'dartShort'],
-    through: ['underarmClosed', 'bustPoint'],
-    stepKind: 'turn',
+  side: SideSeam,
+  lean: Lean,
+  plans: readonly BustDart[],
+  darts: readonly WaistDart[],
+) {
+  pen.heed(side.uses)
+  const bust = front.at('bustPoint')
+  const atWaist = plans.find((plan) => plan.place === 'waist')
+  const closed = front.at('underarmClosed')
+  const waist = fitFront(pen, front, closed, side, darts)
+  const neckline = necklineOf(pen, front, lean)
+  const block: FrontBlock = {
+    bust,
+    short: princessPlace(pen) ? 0 : pen.length('dartShort'),
+    mouths: plans.flatMap((plan) => mouthOf(pen, plan, bust.y) ?? []),
+    waist: { degrees: atWaist?.degrees ?? 0, point: darts[0]?.point ?? bust },
+    centre: straight(front.at('centreNeck'), front.at('centreWaist')),
+    outline: (swing) => {
+      const underarm = applyTo(swing, closed)
+      const hollow = { x: pen.length('frontHalf'), y: (front.at('shoulderTip').y + underarm.y) / 2 }
+      return upperEdges(front, neckline, hollow, straight(underarm, applyTo(swing, waist.side)))
+    },
+  }
+  return { block, waist, openings: soundOpenings(pen, block) }
+}
+
+const fitFront = (
+  pen: Pen,
+  front: PiecePen,
+  top: Point,
+  side: SideSeam,
+  darts: readonly WaistDart[],
+): FittedWaist =>
+  fitWaist(pen, centreOf(front), top, { length: side.chord }, darts, pen.value('frontWaistHalf'))
+
+function necklineOf(pen: Pen, front: PiecePen, lean: Lean): Path {
+  pen.heed(lean.uses)
+  return chosenNeckline(pen).draw(front.at('centreNeck'), front.at('sideNeck'), leaning(lean.degrees))
+}
+
+/** The outline from the neck to the waist with the side swung up. */
+function upperEdges(
+  front: PiecePen,
+  neckline: Path,
+  hollow: Point,
+  side: Path,
+): readonly [UpperEdge, UpperEdge, UpperEdge, UpperEdge] {
+  const tip = front.at('shoulderTip')
+  const shoulder = unit(between(front.at('neckPoint'), tip))
+  return [
+    { id: 'neckline', path: neckline },
+    { id: 'shoulder', path: straight(front.at('sideNeck'), tip) },
+    { id: 'armhole', path: armholeCurve(tip, hollow, startOf(side), shoulder, startTangent(side)) },
+    { id: 'side', path: side },
+  ]
+}
+
+/** Marks the points of the bust darts; a correction there takes its dart along. */
+function placeTips(front: PiecePen, openings: readonly Opening[], uses: Mask): readonly Opening[] {
+  return openings.map((one) => {
+    if (one.dart.id === 'princess') return one
+    const id = tipOf(one.dart.id)
+    front.place(id, one.point, {
+      say: 'The point of the bust dart, short of the bust point',
+      through: ['bustPoint'],
+      mask: uses,
+    })
+    return { ...one, point: front.at(id) }
   })
-  const shoulder = unit(between(at('neckPoint'), at('shoulderTip')))
-  const sideWaist = applyTo(swing, waist.side)
-  const side = unit(between(underarm, sideWaist))
+}
+
+function placeHollow(front: PiecePen): void {
+  const level = (front.at('shoulderTip').y + front.at('underarm').y) / 2
   front.place(
     'halfDepth',
-    { x: 0, y: (at('shoulderTip').y + underarm.y) / 2 },
+    { x: 0, y: level },
     { say: 'Half way down the armhole', through: ['shoulderTip', 'underarm'] },
   )
   front.go('hollow', 'halfDepth', 'right', 'frontHalf', {
     say: 'Go across half the front: the hollow of the armhole',
   })
-  const shape = chosenNeckline(pen)
-  if (at('hollow').x > underarm.x - 15 || bust.x > underarm.x - 20) {
-    pen.refuse({
-      field: 'acrossFront',
-      code: 'impossible-shape',
-      message:
-        'Across the front the body is wider than this bust allows. Measure across front and bust again, or give more bust ease.',
-      max: 2 * (underarm.x - 15),
-    })
-  }
-  return {
-    point,
-    edges: [
-      { id: 'neckline', path: shape.draw(at('centreNeck'), at('sideNeck'), leaning(lean)) },
-      { id: 'shoulder', path: straight(at('sideNeck'), at('shoulderTip')) },
-      { id: 'armhole', path: armholeCurve(at('shoulderTip'), at('hollow'), underarm, shoulder, side) },
-      { id: 'side', path: straight(underarm, sideWaist) },
-    ],
-  }
 }
 
-/** The dart stops short of the bust point, on the way to its mouth. */
-function dartPoint(
-  pen: Pen,
-  front: PiecePen,
-  waist: FittedWaist,
-  place: (typeof places)[string] | undefined,
-): Point {
-  const bust = front.at('bustPoint')
-  if (!place) return waist.darts[0]?.point ?? { x: bust.x, y: bust.y + pen.length('waistTip') }
-  const shoulder = {
-    x: (front.at('sideNeck').x + front.at('shoulderTip').x) / 2,
-    y: (front.at('sideNeck').y + front.at('shoulderTip').y) / 2,
-  }
-  const closed = front.at('underarmClosed')
-  const down = unit(between(closed, waist.side))
-  const below = pen.length('dartBelowArmhole')
-  const towardsMouth: Readonly<Record<string, Point>> = {
-    side: { x: closed.x + down.x * below, y: closed.y + down.y * below },
-    shoulder,
-    armhole: { x: pen.length('frontHalf'), y: (front.at('shoulderTip').y + closed.y) / 2 },
-    neckline: { x: front.at('sideNeck').x * 0.7, y: front.at('centreNeck').y * 0.7 },
-  }
-  const mouth = towardsMouth[place.edge] as Point
-  const long = distance(bust, mouth)
-  const short = Math.min(pen.length('dartShort'), long * 0.4)
-  return { x: bust.x + ((mouth.x - bust.x) * short) / long, y: bust.y + ((mouth.y - bust.y) * short) / long }
-}
-
-function mouthAlong(pen: Pen, edges: readonly UpperEdge[], place: (typeof places)[string]): number {
-  const edge = edges.find((one) => one.id === place.edge) as UpperEdge
-  const share = place.edge === 'neckline' ? chosenNeckline(pen).dartAt : place.share
-  return place.by ? pen.length(place.by) : pathLength(edge.path) * (share ?? 0.5)
-}
-
-/** The waist of a front whose bust dart is at the waist: the side part swings with the side. */
-function swingWaist(waist: FittedWaist, about: Point, degrees: number): FittedWaist {
-  const swing = rotation(degrees, about)
-  const [inner, ...outer] = waist.waist.stretches
-  return {
-    ...waist,
-    side: applyTo(swing, waist.side),
-    darts: waist.darts.map((dart, index) =>
-      index === 0 ? dart : { ...dart, point: applyTo(swing, dart.point) },
-    ),
-    waist: { ...waist.waist, stretches: [inner!, ...outer.map((path) => turnPath(path, swing))] },
-  }
-}
-
-const turnPath = (path: BodicePath, swing: ReturnType<typeof rotation>): BodicePath => ({
-  closed: path.closed,
-  segments: path.segments.map((segment) =>
-    segment.kind === 'line'
-      ? { kind: 'line', from: applyTo(swing, segment.from), to: applyTo(swing, segment.to) }
-      : {
-          kind: 'cubic',
-          from: applyTo(swing, segment.from),
-          control1: applyTo(swing, segment.control1),
-          control2: applyTo(swing, segment.control2),
-          to: applyTo(swing, segment.to),
-        },
-  ),
-})
-type BodicePath = FittedWaist['waist']['stretches'][number]
-
-const roles = {
-  neckline: 'neckline',
-  shoulder: 'seam',
-  armhole: 'armhole',
-  side: 'seam',
-  dart: 'dart',
-} as const
-const allowances: Readonly<Record<string, string>> = {
-  neckline: 'neckAllowance',
-  shoulder: 'shoulderAllowance',
-  armhole: 'armholeAllowance',
-  side: 'sideAllowance',
-}
-const words: Readonly<Record<string, string>> = {
-  neckline: 'Draw the front neckline',
-  shoulder: 'Draw the shoulder',
-  armhole: 'Draw the armhole: square off the shoulder, in to the hollow, round to the underarm',
-  side: 'Draw the side seam',
-  dart: 'Draw a leg of the bust dart to its point',
-}
-
-/** Puts the upper edges and the dart's legs on the piece, with a mark at every corner. */
-function drawOutline(
-  front: PiecePen,
-  edges: readonly PlacedEdge[],
-  point: Point,
-  names: readonly string[],
-): void {
-  const start: Readonly<Record<string, string>> = {
-    neckline: 'centreNeck',
-    shoulder: 'sideNeck',
-    armhole: 'shoulderTip',
-    side: 'underarm',
-  }
-  front.place('bustDartPoint', point, {
-    say: 'The point of the bust dart, short of the bust point',
-    through: ['bustPoint'],
-    uses: names,
+function checkRoom(pen: Pen, front: PiecePen): void {
+  const { x } = front.at('underarm')
+  if (front.at('hollow').x <= x - 15 && front.at('bustPoint').x <= x - 20) return
+  pen.refuse({
+    field: 'acrossFront',
+    code: 'impossible-shape',
+    message:
+      'Across the front the body is wider than this bust allows. Measure across front and bust again, or give more bust ease.',
+    max: 2 * (x - 15),
   })
-  let from = 'centreNeck'
-  edges.forEach((edge, index) => {
-    const end = edge.path.segments.at(-1)?.to as Point
-    const next = edges[index + 1]
-    const known = next && start[next.id]
-    let to = !next
-      ? 'sideWaistEnd'
-      : next.of === 'dart' && edge.of === 'dart'
-        ? 'bustDartPoint'
-        : `end-${edge.id}`
-    if (known && distance(front.at(known), end) < 1e-6) to = known
-    if (!front.marks.has(to)) front.place(to, end, { say: 'Mark where it ends', uses: names })
-    front.curve(edge.id, pinned(edge.path, front.at(from), front.at(to)), from, to, {
-      role: roles[edge.of as keyof typeof roles],
-      ...(allowances[edge.of] ? { allowance: allowances[edge.of] as string } : {}),
-      say: words[edge.of] as string,
-      kind: edge.of === 'neckline' || edge.of === 'armhole' ? 'curve' : 'line',
-      uses: names,
-    })
-    from = to
-  })
-  if (edges.some((edge) => edge.of === 'dart')) {
-    front.dart('bust-dart', ['bust-dart-upper', 'bust-dart-lower'], point, 'down')
-  }
 }

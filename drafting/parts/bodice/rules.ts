@@ -31,7 +31,7 @@ export const upperBodiceRules: readonly RuleDefinition[] = [
   lengthRule('frontShoulder', 'Front shoulder', 'shoulderLength'),
   lengthRule('shoulderEase', 'Ease of the back shoulder', '0.8cm'),
   lengthRule('backShoulder', 'Back shoulder', 'shoulderLength + shoulderEase'),
-  lengthRule('scyeLine', 'Underarm below the nape', 'bust / 8 + 9.5cm + armholeDeepening'),
+  lengthRule('scyeLine', 'Underarm below the nape', 'bust / 8 + 9.5cm'),
   lengthRule('balance', 'Front longer than back over the bust', 'frontWaistLength - napeToWaist - napeDepth'),
   lengthRule('frontScye', 'Underarm below the front side neck', 'scyeLine + napeDepth + balance'),
   lengthRule('backQuarter', 'Back quarter', '(bust + bustEase) / 4 - 0.5cm'),

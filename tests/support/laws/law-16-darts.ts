@@ -105,10 +105,13 @@ function capped(found: Findings, piece: Piece, dart: Dart, where: string, around
 export const movedDartsKeepTheirAngle: OrderLaw = (order, engine) => {
   const found = new Findings(16)
   const garment = garmentOf(order, engine.garments)
+  const alone = garment.design.some((value) => value.id === 'dartSharedWith')
+    ? withStyle(order, 'dartSharedWith', 'nothing')
+    : order
   const places = garment.design.find((value) => value.id === 'dartTo')?.choices ?? []
   const angles = places
     .filter((place) => place !== 'waist')
-    .map((place) => angleOf(drafted(withStyle({ ...order, explain: false }, 'dartTo', place), engine)))
+    .map((place) => angleOf(drafted(withStyle({ ...alone, explain: false }, 'dartTo', place), engine)))
     .filter((angle) => angle !== undefined)
   const [least, most] = [Math.min(...angles), Math.max(...angles)]
   if (angles.length > 1)

@@ -33,6 +33,8 @@ export const squareCorners: DraftLaw = (draft, order, engine) => {
     if (seam.join !== 'plain') continue
     for (const { where, a, b } of corners(draft, seam)) {
       if (!sewnAt.has(a.beyond.role)) continue
+      // Where a dart opens at the centre front there is a seam, and a V is pointed on it as it is on a fold.
+      if (pointed && a.beyond.role === 'neckline' && a.piece === b.piece && a.piece.id === 'front') continue
       found.atMost(where, 'angles off 180° in all', Math.abs(a.angle + b.angle - 180), 1)
     }
   }
