@@ -56,16 +56,18 @@ export const dartCap = (
 }
 
 const turns = (onLeft: Meeting, first: Path, second: Path, onRight: Meeting, after: Side): Cap => {
-  const lead: Segment[] = [line(endOf(second), onRight.point)]
-  if (onRight.along === undefined) lead.push(line(onRight.point, after.start))
+  // Where the seam bends, the folded edge meets the other leg a hair beside its own cut line: that step is the dart's too.
+  const cap: readonly Segment[] = [...second.segments, line(endOf(second), onRight.point)]
+  const lead: readonly Segment[] =
+    onRight.along === undefined ? [line(onRight.point, after.start)] : []
   return {
     into: {
       joint: onLeft.point,
       leave: onLeft.along,
       lead: [line(onLeft.point, first.segments[0]!.from), ...first.segments],
     },
-    middle: { joint: endOf(first), lead: second.segments },
-    outOf: { joint: endOf(second), lead, enter: onRight.along },
+    middle: { joint: endOf(first), lead: cap },
+    outOf: { joint: onRight.point, lead, enter: onRight.along },
   }
 }
 

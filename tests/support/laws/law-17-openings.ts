@@ -47,10 +47,12 @@ export const openings: DraftLaw = (draft, order, engine) => {
   return found.all
 }
 
-/** Length of all edges of one role on front and back; a dart may part them in two. */
+const bodies = new Set(['front', 'front-side', 'back', 'back-side'])
+
+/** Length of all edges of one role on front and back; a dart or a princess seam may part them in two. */
 function edges(draft: Draft, role: 'neckline' | 'armhole'): number {
   return draft.pieces
-    .filter((piece) => piece.id === 'front' || piece.id === 'back')
+    .filter((piece) => bodies.has(piece.id))
     .flatMap((piece) => piece.edges)
     .filter((one) => one.role === role)
     .reduce((sum, one) => sum + lengthOfPath(one.path), 0)
