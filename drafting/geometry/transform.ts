@@ -90,13 +90,3 @@ export const transformPath = (transform: Transform, path: Path): Path => {
   }
   return { segments: mapped, closed: path.closed }
 }
-
-/** The move that undoes a rigid move: a turn, a shift, or both. */
-export const undo = ({ a, b, c, d, e, f }: Transform): Transform => ({
-  a,
-  b: c,
-  c: b,
-  d,
-  e: -(a * e + b * f),
-  f: -(c * e + d * f),
-})

@@ -27,6 +27,13 @@ export function neckLeans(pen: Pen, front: PiecePen, back: PiecePen): { front: n
   const ofBack = Math.min(together - ofFront, most.back)
   const left = together - ofBack
   if (left <= most.front + 1e-9) return { front: left, back: ofBack }
+  // Both a little nearer to straight than is fair by rule: still one bend, and the corner at the shoulder is gone.
+  const [furthestFront, furthestBack] = [further(most.front), further(most.back)]
+  if (together <= furthestFront + furthestBack) {
+    const share = (together - most.front - most.back) / (furthestFront + furthestBack - most.front - most.back)
+    const front = most.front + share * (furthestFront - most.front)
+    return { front, back: together - front }
+  }
   // The shallowest drop that would do, if any: the most lean falls as the neck gets deeper.
   const drop = pen.value('frontNeckDrop')
   const depth = -size(front).y
@@ -39,4 +46,9 @@ export function neckLeans(pen: Pen, front: PiecePen, back: PiecePen): { front: n
       'A neck so deep in front and back and so narrow makes a corner at the shoulder. Open it wider, or make front or back less deep.',
     ...(less === undefined ? {} : { min: 0, max: Math.max(0, Math.floor((drop - less) * 10) / 10) }),
   })
+}
+
+/** A lean whose curve runs nearer to straight: the level part at the centre shrinks by a third. Degrees. */
+function further(lean: number): number {
+  return (Math.atan(Math.tan((lean * Math.PI) / 180) * 1.2) * 180) / Math.PI
 }

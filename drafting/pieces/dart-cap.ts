@@ -58,8 +58,7 @@ export const dartCap = (
 const turns = (onLeft: Meeting, first: Path, second: Path, onRight: Meeting, after: Side): Cap => {
   // Where the seam bends, the folded edge meets the other leg a hair beside its own cut line: that step is the dart's too.
   const cap: readonly Segment[] = [...second.segments, line(endOf(second), onRight.point)]
-  const lead: readonly Segment[] =
-    onRight.along === undefined ? [line(onRight.point, after.start)] : []
+  const lead: readonly Segment[] = onRight.along === undefined ? [line(onRight.point, after.start)] : []
   return {
     into: {
       joint: onLeft.point,

@@ -354,8 +354,8 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
     [
       'the side seam is taken in on the front only',
       'parts/flared-half.ts',
-      "pen.corrections.forSeam('side')",
-      "pen.corrections.forSeam('side').filter(() => piece.id === 'front')",
+      "takenInOf(pen, 'side', top, bottom, 60)",
+      "takenInOf(pen, 'side', top, bottom, 60).filter(() => piece.id === 'front')",
     ],
     [
       'a shared mark is corrected on one side only',

@@ -9,7 +9,6 @@ import {
   rotation,
   applyTo,
   scale,
-  unit,
 } from '../../geometry'
 import { between } from '../../pen/piece-pen'
 
