@@ -30,7 +30,8 @@ export function neckLeans(pen: Pen, front: PiecePen, back: PiecePen): { front: n
   // Both a little nearer to straight than is fair by rule: still one bend, and the corner at the shoulder is gone.
   const [furthestFront, furthestBack] = [further(most.front), further(most.back)]
   if (together <= furthestFront + furthestBack) {
-    const share = (together - most.front - most.back) / (furthestFront + furthestBack - most.front - most.back)
+    const share =
+      (together - most.front - most.back) / (furthestFront + furthestBack - most.front - most.back)
     const front = most.front + share * (furthestFront - most.front)
     return { front, back: together - front }
   }
