@@ -77,13 +77,17 @@ export const sleeves: DraftLaw = (draft, order, engine) => {
 /** A cap ends where it was asked to, the same part of the armhole in front and behind. */
 function coveredPart(found: Findings, draft: Draft, reach: number, tolerance: number): void {
   for (const side of ['front', 'back'] as const) {
-    const holes = draft.pieces.find((one) => one.id === side)?.edges.filter((one) => one.role === 'armhole')
-    const whole = (holes ?? []).reduce((sum, one) => sum + lengthOfPath(one.path), 0)
+    // A princess seam leaves a part of the armhole on the panel of the side.
+    const holes = draft.pieces
+      .filter((one) => one.id === side || one.id === `${side}-side`)
+      .flatMap((piece) => piece.edges.map((edge) => ({ ...edge, piece: piece.id })))
+      .filter((one) => one.role === 'armhole')
+    const whole = holes.reduce((sum, one) => sum + lengthOfPath(one.path), 0)
     const sewn = draft.seams
       .filter((seam) => seam.a.some((run) => run.edge === `head-${side}`))
       .flatMap((seam) => seam.b)
       .reduce((sum, run) => {
-        const hole = holes?.find((one) => one.id === run.edge)
+        const hole = holes.find((one) => one.id === run.edge && one.piece === run.piece)
         return sum + (hole ? (run.to ?? lengthOfPath(hole.path)) - (run.from ?? 0) : NaN)
       }, 0)
     found.atMost(`${side} of the cap`, 'off the part asked', Math.abs(sewn - reach * whole), tolerance)
