@@ -1,6 +1,6 @@
 /**
  * `npm run pictures`: the screenshots of the README, taken from the demo workroom: laptop and phone, light and dark,
- * into docs/pictures.
+ * into scripts/pictures.
  */
 import { mkdirSync } from 'node:fs'
 import { join } from 'node:path'
@@ -13,7 +13,7 @@ import { takeSlot } from './testing/slot.mjs'
 import { bringUpApp } from './testing/test-app.mjs'
 import { bringUpDatabase } from './testing/test-database.mjs'
 
-const folder = join(root, 'docs', 'pictures')
+const folder = join(root, 'scripts', 'pictures')
 const devices = {
   laptop: { viewport: { width: 1440, height: 900 } },
   phone: { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true, deviceScaleFactor: 2 },
@@ -83,5 +83,5 @@ async function keep(page, name) {
   await page.waitForLoadState('networkidle')
   await page.evaluate(() => document.fonts.ready)
   await page.screenshot({ path: join(folder, `${name}.png`), animations: 'disabled' })
-  say(`docs/pictures/${name}.png`)
+  say(`scripts/pictures/${name}.png`)
 }
