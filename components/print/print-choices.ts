@@ -18,6 +18,8 @@ export interface PrintChoices {
   readonly pieces?: readonly string[]
   /** What the printer makes of 100 mm. */
   readonly measured: Measured
+  /** Of a version that was printed or shared before: as it was then, or as it is drawn today. */
+  readonly drawing: 'kept' | 'today'
 }
 
 export const firstChoices: PrintChoices = {
@@ -31,6 +33,7 @@ export const firstChoices: PrintChoices = {
   black: false,
   bold: false,
   measured: trueMeasure,
+  drawing: 'kept',
 }
 
 /**
@@ -39,6 +42,7 @@ export const firstChoices: PrintChoices = {
  */
 export function patternAddress(base: string, format: 'pdf' | 'svg', choices: PrintChoices): string {
   const query = new URLSearchParams({ allowances: choices.allowances ? 'yes' : 'no' })
+  if (choices.drawing === 'today') query.set('drawing', 'today')
   if (format === 'pdf') {
     query.set('paper', choices.paper)
     query.set('orientation', choices.orientation)

@@ -7,6 +7,7 @@ import type { LaidOut } from '@/drafting/drawing'
 import { ButtonLink } from '@/components/ui/button'
 import { Dialog } from '@/components/ui/dialog'
 import { DownloadLink } from './download-link'
+import { KeptChoice, type Otherwise } from './kept-choice'
 import { firstChoices } from './print-choices'
 import { PrintForm } from './print-form'
 import { PrintPreview } from './print-preview'
@@ -26,6 +27,8 @@ export function PrintDialog({
   readonly printers?: Printers
   /** Where the chalk guide is shown as cards. */
   readonly chalk: string
+  /** When the version was printed or shared before and is drawn otherwise today. */
+  readonly otherwise?: Otherwise | null
 }) {
   return (
     <Dialog open={open} onClose={onClose} title="Print the pattern" wide>
@@ -39,34 +42,46 @@ function PrintChoice({
   base,
   printers,
   chalk,
+  otherwise,
 }: {
   readonly draft: Draft
   readonly base: string
   readonly printers?: Printers
   readonly chalk: string
+  readonly otherwise?: Otherwise | null
 }) {
   const [choices, setChoices] = useState(firstChoices)
+  const shown = otherwise && choices.drawing === 'kept' ? otherwise.kept : draft
   const laidOut = useMemo(
-    () => layOut({ draft, ...choices, paper: paperOf(choices.paper, choices.roll) }),
-    [draft, choices],
+    () => layOut({ ...choices, draft: shown, paper: paperOf(choices.paper, choices.roll) }),
+    [shown, choices],
   )
   return (
-    <div className="grid gap-6 md:grid-cols-[19rem_1fr]">
-      <div className="grid content-start gap-6">
-        <PrintForm
-          base={base}
-          choices={choices}
-          onChange={setChoices}
-          facts={factsOf(laidOut, paperOf(choices.paper, choices.roll).name)}
-          pieces={draft.pieces}
-          printers={printers}
+    <>
+      {otherwise && (
+        <KeptChoice
+          otherwise={otherwise}
+          drawing={choices.drawing}
+          onChange={(drawing) => setChoices({ ...choices, drawing })}
         />
-        <WithoutPaper base={base} chalk={chalk} />
+      )}
+      <div className="grid gap-6 md:grid-cols-[19rem_1fr]">
+        <div className="grid content-start gap-6">
+          <PrintForm
+            base={base}
+            choices={choices}
+            onChange={setChoices}
+            facts={factsOf(laidOut, paperOf(choices.paper, choices.roll).name)}
+            pieces={shown.pieces}
+            printers={printers}
+          />
+          <WithoutPaper base={base} chalk={chalk} />
+        </div>
+        <div className="grid place-items-center self-start bg-panel p-4 md:sticky md:top-0">
+          <PrintPreview laidOut={laidOut} />
+        </div>
       </div>
-      <div className="grid place-items-center self-start bg-panel p-4 md:sticky md:top-0">
-        <PrintPreview laidOut={laidOut} />
-      </div>
-    </div>
+    </>
   )
 }
 

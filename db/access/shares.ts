@@ -27,6 +27,7 @@ export interface ShareDetails {
 /** What a link opens. The order is for the server to draw from: it holds the body's measurements. */
 export interface OpenedShare {
   readonly scope: ShareScope
+  readonly workroomId: string
   readonly draftName: string
   readonly workroomName: string
   /** Of the workroom. */
@@ -132,6 +133,7 @@ export async function openShare(token: string): Promise<OpenedShare | null> {
   if (!head.sharedAt) await head.update({ sharedAt: new Date() })
   return {
     scope: share.scope,
+    workroomId: share.workroomId,
     draftName: draft.name,
     workroomName: workroom.name,
     timeZone: workroom.timeZone,

@@ -72,6 +72,12 @@ export const endpoints: Readonly<Record<string, Endpoint>> = {
     input: () => ({ paper: 'letter' }),
     path: ({ headId }) => `/api/revisions/${headId}/chalk.pdf`,
   },
+  'GET /api/revisions/[id]/kept': {
+    access: drafters,
+    outOfReach: ['tutor', 'maker', 'student'],
+    input: nothing,
+    path: ({ headId }) => `/api/revisions/${headId}/kept`,
+  },
   'GET /api/drafts/[id]/revisions': {
     access: drafters,
     outOfReach: ['tutor', 'maker', 'student'],

@@ -56,6 +56,9 @@ export const printChoices = {
 /** The choices of a one-page drawing, which has no paper. */
 export const drawingChoices = { allowances: printChoices.allowances }
 
+/** Of a version that was printed or shared before: as it was then, or as the engine draws it today. */
+export const whichDrawing = z.enum(['kept', 'today'], 'Say kept or today.').default('kept')
+
 export type PrintQuery = z.output<z.ZodObject<typeof printChoices>>
 
 /** The choices as the layout takes them. @throws AccessError invalid when a piece is wanted that the draft has not */

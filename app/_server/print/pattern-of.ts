@@ -1,6 +1,6 @@
 import 'server-only'
-import { draftGarment, garments } from '@/drafting'
-import type { Draft, DraftOrder } from '@/drafting/contract'
+import { garments } from '@/drafting'
+import type { DraftOrder } from '@/drafting/contract'
 import type { PatternTitle } from './pattern-title'
 
 /** A version of a draft, as far as its paper pattern needs it. */
@@ -44,9 +44,4 @@ function inWords({ savedAt, timeZone, zoneSaid }: Printable): { date: string; ti
     timeZoneName: zoneSaid ? 'short' : undefined,
   })
   return { date, time }
-}
-
-/** The draft of a version, as it was kept when it was first printed, else drawn afresh. @throws DraftingError */
-export function draftOf(order: DraftOrder, kept: Draft | null): Draft {
-  return kept ?? draftGarment({ ...order, explain: true })
 }

@@ -1,12 +1,13 @@
 import 'server-only'
 import type { OpenedShare } from '@/db/access/shares'
 import { draftGarment } from '@/drafting'
-import type { Draft, Unit } from '@/drafting/contract'
+import type { Draft, DraftOrder, Unit } from '@/drafting/contract'
 import { arrange, cuttingWords, drawing, layOut, paperOf, toSvg, typesetFractions } from '@/drafting/drawing'
 import { formatLength } from '@/drafting/lengths'
 import { piecesById, runsLength } from '@/drafting/pieces/runs'
 import { seamAgrees } from '@/drafting/pieces/seam-agrees'
 import { garmentName } from '../print/pattern-of'
+import { sharedDrawing } from './shared-drawing'
 
 /** The same words in either unit: the visitor chooses, the server is not asked again. */
 export type InUnits = Readonly<Record<Unit, string>>
@@ -41,6 +42,8 @@ export interface SharedView {
   readonly sheets: { readonly a4: number; readonly letter: number }
   /** Of a lesson. */
   readonly steps: readonly SharedStep[] | null
+  /** Pieces that the engine would draw otherwise today: what is shown and printed is the drawing as it was first shared. */
+  readonly otherwise: readonly string[]
 }
 
 /** Texts must be read on a screen on which the whole sheet shows. */
@@ -51,9 +54,9 @@ const both = (mm: number): InUnits => ({
   cm: formatLength(mm, 'cm'),
 })
 
-/** What a link shows, drawn now from the draft's newest version. @throws DraftingError */
-export function sharedView(share: OpenedShare): SharedView {
-  const draft = draftGarment({ ...share.order, unit: 'cm', explain: share.scope === 'lesson' })
+/** What a link shows: the draft's newest version. @throws DraftingError */
+export async function sharedView(share: OpenedShare): Promise<SharedView> {
+  const { draft, otherwise } = await sharedDrawing(share)
   const garment = garmentName(share.order.garment)
   return {
     name: share.draftName,
@@ -66,7 +69,8 @@ export function sharedView(share: OpenedShare): SharedView {
     tags: tagsOf(draft),
     checks: checksOf(draft),
     sheets: { a4: sheets(draft, 'a4'), letter: sheets(draft, 'letter') },
-    steps: share.scope === 'lesson' ? stepsOf(draft, draftGarment({ ...share.order, unit: 'in' })) : null,
+    steps: share.scope === 'lesson' ? stepsOf(share.order) : null,
+    otherwise: [...new Set(otherwise.map(({ piece }) => piece))],
   }
 }
 
@@ -107,7 +111,9 @@ function checksOf(draft: Draft): readonly SharedCheck[] {
   })
 }
 
-function stepsOf(inCentimetres: Draft, inInches: Draft): readonly SharedStep[] {
+function stepsOf(order: DraftOrder): readonly SharedStep[] {
+  const inCentimetres = draftGarment({ ...order, unit: 'cm' })
+  const inInches = draftGarment({ ...order, unit: 'in' })
   return inCentimetres.steps.map((step, index) => {
     const inches = inInches.steps[index]?.arithmetic
     const sum =

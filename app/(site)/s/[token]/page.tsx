@@ -23,5 +23,5 @@ export default async function SharedPage({ params }: { readonly params: Promise<
     await takeTry('token address', requestAddress(await headers())).catch(() => undefined)
     notFound()
   }
-  return <SharedDraft token={token} opened={sharedView(share)} />
+  return <SharedDraft token={token} opened={await sharedView(share)} />
 }

@@ -1,6 +1,8 @@
 import type { Metadata } from 'next'
+import { drawnOtherwise } from '@/app/_server/print/kept-or-drawn'
 import { forPage, requireActor } from '@/app/_server/session'
 import { getDraft } from '@/db/access/drafts'
+import { keptDraft } from '@/db/access/kept-drafts'
 import { may } from '@/db/permissions'
 import { OpenDraft } from './_parts/open-draft'
 
@@ -10,6 +12,8 @@ export default async function DraftPage({ params }: { params: Promise<{ id: stri
   const { id } = await params
   const actor = await requireActor(`/drafts/${id}`)
   const { name, clientId, clientName, head, writable } = await forPage(getDraft(actor, id))
+  const kept = head.printed || head.shared ? await forPage(keptDraft(actor, head.id)) : null
+  const otherwise = drawnOtherwise(head.order, kept)
   return (
     <OpenDraft
       key={id}
@@ -18,6 +22,13 @@ export default async function DraftPage({ params }: { params: Promise<{ id: stri
         clientId && clientName
           ? { href: `/clients/${clientId}`, label: clientName }
           : { href: '/drafts', label: 'Drafts' }
+      }
+      otherwise={
+        otherwise && {
+          keptAt: otherwise.keptAt,
+          differences: otherwise.differences,
+          drawable: otherwise.drawable,
+        }
       }
       userId={actor.userId}
       workroomId={actor.workroomId}

@@ -6,6 +6,7 @@ import type { SharedView } from '@/app/_server/share/shared-view'
 import { useShared } from '@/app/(site)/_data/shared'
 import { firstChoices } from '@/components/print/print-choices'
 import { PrintForm } from '@/components/print/print-form'
+import { Note } from '@/components/ui/error-note'
 import { Moment } from '@/components/ui/moment'
 import NoSuchLink from '../not-found'
 import { Checks, Lengths, Pieces } from './lists'
@@ -32,6 +33,12 @@ export function SharedDraft({ token, opened }: { readonly token: string; readonl
         </div>
         <UnitChoice unit={unit} onChange={setUnit} />
       </header>
+      {view.otherwise.length > 0 && (
+        <Note kind="caution" className="mb-4">
+          This is the drawing as it was shared. Today {view.otherwise.join(', ')} would be drawn a little
+          otherwise: whoever has printed some of it already goes on with this one.
+        </Note>
+      )}
       <Sheet svg={view.svg} unit={unit} />
       <div className="mt-10 grid gap-x-12 gap-y-10 md:grid-cols-[1fr_1fr] xl:grid-cols-[1fr_1fr_18rem]">
         <Lengths tags={view.tags} unit={unit} />

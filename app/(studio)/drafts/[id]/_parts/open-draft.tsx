@@ -5,14 +5,26 @@ import { useCallback, useMemo, useState } from 'react'
 import { Studio } from '@/components/studio/studio'
 import { createStudioStore } from '@/components/studio/store'
 import { ErrorNote } from '@/components/ui/error-note'
-import { draftGarment, garments, handles, measurements } from '@/drafting'
+import { DraftingError, draftGarment, garments, handles, measurements } from '@/drafting'
+import type { Draft, DraftOrder } from '@/drafting/contract'
 import type { Version } from '../../../_data/api'
 import { ConflictNotice } from './conflict-notice'
 import { DraftName } from './draft-name'
+import { KeptNotice, type KeptOtherwise } from './kept-notice'
 import { SignedOutNotice } from './signed-out-notice'
 import { contentOf, useAutosave } from './use-autosave'
 
 const engine = { draftGarment, handles }
+
+/** A version as it is drawn today; nothing when it cannot be. */
+function drawn(order: DraftOrder): Draft | undefined {
+  try {
+    return draftGarment(order)
+  } catch (error) {
+    if (error instanceof DraftingError) return undefined
+    throw error
+  }
+}
 
 // What opens over the table is fetched when it is first asked for: the table itself comes sooner.
 const PrintLeaf = dynamic(() => import('./print-leaf').then((part) => part.PrintLeaf), { ssr: false })
@@ -30,6 +42,8 @@ export interface OpenDraftProps {
     readonly shareable: boolean
   }
   readonly back: { readonly href: string; readonly label: string }
+  /** When the version on the table was printed or shared, and is drawn otherwise today. */
+  readonly otherwise: KeptOtherwise | null
   readonly userId: string
   readonly workroomId: string
 }
@@ -45,6 +59,7 @@ export function OpenDraft(props: OpenDraftProps) {
 function Opened({
   draft,
   back,
+  otherwise,
   userId,
   workroomId,
   garment,
@@ -57,7 +72,11 @@ function Opened({
   const { store } = studio
   const [name, setName] = useState(draft.name)
   const [open, setOpen] = useState<'versions' | 'share' | 'print'>()
-  const [printed, setPrinted] = useState<string>()
+  const [printed, setPrinted] = useState<{
+    readonly revisionId: string | undefined
+    readonly draft: Draft | undefined
+  }>()
+  const [told, setTold] = useState(false)
   const place = { draftId: draft.id, head: draft.head, writable: draft.writable, userId, workroomId }
   const { state, theirs, settle, autosave } = useAutosave(store, place)
 
@@ -66,11 +85,15 @@ function Opened({
   const onShare = useCallback(() => setOpen('share'), [])
   const onPrint = useCallback(() => {
     store.commit('Change')
-    void autosave.flush().then((revision) => {
-      setPrinted(revision)
+    void autosave.flush().then((revisionId) => {
+      setPrinted({ revisionId, draft: store.get().draft })
       setOpen('print')
     })
   }, [autosave, store])
+  const onPrintVersion = (version: Version) => {
+    setPrinted({ revisionId: version.id, draft: drawn(version.order) })
+    setOpen('print')
+  }
 
   const notice = useMemo(() => {
     if (theirs) {
@@ -91,8 +114,10 @@ function Opened({
       )
     }
     if (state.kind === 'signed-out') return <SignedOutNotice onBack={() => void autosave.retry()} />
-    return state.kind === 'refused' ? <ErrorNote>{state.message}</ErrorNote> : undefined
-  }, [autosave, settle, state, store, theirs])
+    if (state.kind === 'refused') return <ErrorNote>{state.message}</ErrorNote>
+    if (!otherwise || told) return undefined
+    return <KeptNotice otherwise={otherwise} onPrint={onPrint} onClose={() => setTold(true)} />
+  }, [autosave, onPrint, otherwise, settle, state, store, theirs, told])
 
   return (
     <>
@@ -115,14 +140,13 @@ function Opened({
           store={store}
           autosave={autosave}
           writable={draft.writable}
+          onPrint={onPrintVersion}
         />
       )}
       {open === 'share' && (
         <ShareLeaf onClose={close} draftId={draft.id} draftName={name} beforeMaking={autosave.flush} />
       )}
-      {open === 'print' && (
-        <PrintLeaf onClose={close} store={store} draftId={draft.id} revisionId={printed} />
-      )}
+      {open === 'print' && printed && <PrintLeaf onClose={close} draftId={draft.id} {...printed} />}
     </>
   )
 }

@@ -1,44 +1,60 @@
 'use client'
 
+import { useQuery } from '@tanstack/react-query'
+import type { Draft } from '@/drafting/contract'
+import type { Otherwise } from '@/components/print/kept-choice'
 import { PrintDialog } from '@/components/print/print-dialog'
-import type { StudioStore } from '@/components/studio/store'
 import { Dialog } from '@/components/ui/dialog'
+import { ErrorNote } from '@/components/ui/error-note'
+import { ask } from '../../../_data/api'
 import { usePrinters } from '../../../_data/printers'
 
-/** The paper pattern of what is on the table, once it is saved: what is printed can always be printed again. */
+/** The paper pattern of a saved version: what is printed can always be printed again, as it was. */
 export function PrintLeaf({
   onClose,
-  store,
+  draft,
   draftId,
   revisionId,
 }: {
   readonly onClose: () => void
-  readonly store: StudioStore
+  /** As it is drawn today; missing when it cannot be. */
+  readonly draft: Draft | undefined
   readonly draftId: string
+  /** Missing when what is on the table could not be saved. */
   readonly revisionId: string | undefined
 }) {
-  const { draft } = store.get()
   const printers = usePrinters()
-  if (draft && revisionId) {
+  const kept = useQuery({
+    queryKey: ['kept', revisionId],
+    queryFn: () => ask<Otherwise | null>(`/api/revisions/${revisionId}/kept`),
+    enabled: revisionId !== undefined,
+  })
+  const shown = kept.data?.kept ?? draft
+  if (shown && revisionId && kept.isSuccess) {
     const base = `/api/revisions/${revisionId}`
     return (
       <PrintDialog
         open
         onClose={onClose}
-        draft={draft}
+        draft={draft ?? shown}
         base={base}
         printers={printers}
+        otherwise={kept.data}
         chalk={`/drafts/${draftId}/chalk`}
       />
     )
   }
   return (
     <Dialog open onClose={onClose} title="Print the pattern">
-      <p>
-        {draft
-          ? 'What is on the table could not be saved yet, and only a saved version is printed. Try again when the bar says “Saved”.'
-          : 'Nothing is drawn yet: put in the measurements first.'}
-      </p>
+      {kept.error && <ErrorNote>{kept.error.message}</ErrorNote>}
+      {kept.isLoading && <p role="status">Laying out the pieces…</p>}
+      {!kept.isLoading && !kept.error && (
+        <p>
+          {draft
+            ? 'What is on the table could not be saved yet, and only a saved version is printed. Try again when the bar says “Saved”.'
+            : 'Nothing is drawn yet: put in the measurements first.'}
+        </p>
+      )}
     </Dialog>
   )
 }

@@ -17,6 +17,8 @@ interface Props {
   readonly store: StudioStore
   readonly autosave: Autosave
   readonly writable: boolean
+  /** Prints a version that was printed or shared before. */
+  readonly onPrint: (version: Version) => void
 }
 
 /** Every saved version: give the present one a name, or put an old one back on the table. */
@@ -28,7 +30,7 @@ export function VersionsDialog(props: Props) {
   )
 }
 
-function Versions({ onClose, draftId, store, autosave, writable }: Props) {
+function Versions({ onClose, draftId, store, autosave, writable, onPrint }: Props) {
   const queries = useQueryClient()
   const key = ['versions', draftId]
   const list = useQuery({
@@ -37,8 +39,10 @@ function Versions({ onClose, draftId, store, autosave, writable }: Props) {
   })
   const again = () => queries.invalidateQueries({ queryKey: key })
 
+  const fetched = (id: string) => ask<Version>(`/api/drafts/${draftId}/revisions/${id}`)
+  const print = useMutation({ mutationFn: fetched, onSuccess: onPrint })
   const restore = useMutation({
-    mutationFn: (id: string) => ask<Version>(`/api/drafts/${draftId}/revisions/${id}`),
+    mutationFn: fetched,
     onSuccess: (version) => {
       const { unit: _unit, ...order } = version.order
       store.replace({ order, typed: version.typed }, `Back to ${version.name ?? momentText(version.savedAt)}`)
@@ -51,7 +55,7 @@ function Versions({ onClose, draftId, store, autosave, writable }: Props) {
       {writable && <NameForm store={store} autosave={autosave} onNamed={again} />}
       {list.isPending && <p role="status">Looking for the versions…</p>}
       {list.error && <ErrorNote>{list.error.message}</ErrorNote>}
-      {restore.error && <ErrorNote>{restore.error.message}</ErrorNote>}
+      {(restore.error ?? print.error) && <ErrorNote>{(restore.error ?? print.error)?.message}</ErrorNote>}
       <ol className="border-t hairline">
         {list.data?.map((version) => (
           <li key={version.id} className="flex items-center justify-between gap-4 border-b hairline py-2.5">
@@ -61,15 +65,22 @@ function Versions({ onClose, draftId, store, autosave, writable }: Props) {
               </p>
               <p className="text-sm text-walnut">{notes(version).join(' · ')}</p>
             </div>
-            {version.id === autosave.base() ? (
-              <span className="text-sm text-walnut">On the table</span>
-            ) : (
-              writable && (
-                <Button busy={restore.isPending} onClick={() => restore.mutate(version.id)}>
-                  Put back
+            <div className="flex shrink-0 items-center gap-2">
+              {(version.printed || version.shared) && (
+                <Button look="quiet" busy={print.isPending} onClick={() => print.mutate(version.id)}>
+                  Print again
                 </Button>
-              )
-            )}
+              )}
+              {version.id === autosave.base() ? (
+                <span className="text-sm text-walnut">On the table</span>
+              ) : (
+                writable && (
+                  <Button busy={restore.isPending} onClick={() => restore.mutate(version.id)}>
+                    Put back
+                  </Button>
+                )
+              )}
+            </div>
           </li>
         ))}
       </ol>
