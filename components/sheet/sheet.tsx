@@ -9,14 +9,16 @@ import {
   useState,
   type Ref,
 } from 'react'
-import type { Draft } from '@/drafting/contract'
+import type { Draft, MeasurementDefinition } from '@/drafting/contract'
 import { boundsOf } from '@/drafting/drawing/bounds'
 import { arrange, drawing, placePath, type Layer, type Places } from '@/drafting/drawing'
 import { classes } from '@/components/ui/classes'
 import { isStale } from '@/components/studio/state'
 import { useStudio, useStudioState } from '@/components/studio/use-store'
+import { FixedPoints } from './fixed-points'
 import { watchView } from './gestures'
 import { Points } from './points'
+import { readableLabels } from './readable-labels'
 import { ScaleBar } from './scale-bar'
 import { createStage, type Emphasis, type Stage } from './stage'
 import { Tags } from './tags'
@@ -42,6 +44,7 @@ export interface SheetProps {
   /** Only the emphasis is drawn: the draft is being watched as it is made. */
   readonly replaying: boolean
   readonly showTags: boolean
+  readonly definitions: readonly MeasurementDefinition[]
   /** Present on a phone: a tag opens its editor instead of being one. */
   readonly onOpenTag?: (dimension: string) => void
 }
@@ -52,8 +55,8 @@ const readable = 14
 
 /** The table: the drawing, its tags and points, under a window that pans and zooms. */
 export function Sheet(props: SheetProps) {
-  const { control, layers, hidden, emphasise, replaying, showTags, onOpenTag } = props
-  const { store } = useStudio()
+  const { control, layers, hidden, emphasise, replaying, showTags, definitions, onOpenTag } = props
+  const { store, writable } = useStudio()
   const area = useRef<HTMLDivElement>(null)
   const svg = useRef<SVGSVGElement>(null)
   const stage = useRef<Stage>(undefined)
@@ -66,6 +69,9 @@ export function Sheet(props: SheetProps) {
   const unit = useStudioState((state) => state.unit)
   const handles = useHandles()
   const tags = useTagEntries()
+
+  const placesNow = useCallback(() => places.current, [])
+  const viewNow = useCallback(() => view.current, [])
 
   const position = useCallback(() => {
     const box = area.current
@@ -97,7 +103,7 @@ export function Sheet(props: SheetProps) {
       unit,
       textScale: textScaleAt(view.current.scale),
     })
-    const shown = list.items.filter(
+    const shown = readableLabels(list.items, view.current.scale).filter(
       (item) =>
         !(item.layer === 'dimension' && item.kind === 'text') && !(item.piece && hidden.has(item.piece)),
     )
@@ -120,7 +126,7 @@ export function Sheet(props: SheetProps) {
       const list = drawing(draft, { layers: ['cut', 'stitch', 'fold'], places: places.current })
       const own = piece ? boundsOf(list.items.filter((item) => item.piece === piece)) : list.bounds
       const size = { width: box.clientWidth, height: box.clientHeight }
-      setView(fitView(own, size, size.width < 600 ? 36 : 56))
+      setView(fitView(own, size, size.width < 600 ? 36 : 64))
       moved.current = false
     },
     [setView, store],
@@ -188,10 +194,13 @@ export function Sheet(props: SheetProps) {
           <Tags tags={tags.filter((tag) => !hidden.has(tag.piece))} onOpen={onOpenTag} />
           <Points
             handles={handles.filter((handle) => !hidden.has(handle.piece))}
-            places={() => places.current}
-            view={() => view.current}
+            places={placesNow}
+            view={viewNow}
             area={() => area.current?.getBoundingClientRect()}
           />
+          {writable && (
+            <FixedPoints {...{ handles, hidden, definitions }} places={placesNow} view={viewNow} />
+          )}
         </>
       )}
       <ScaleBar scale={scale} unit={unit} />

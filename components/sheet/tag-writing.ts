@@ -35,8 +35,12 @@ function tagWishes(area: HTMLElement, draft: Draft, places: Places, view: View):
 
 function textLength(element: HTMLElement): number {
   const input = element.querySelector('input')
-  return input ? input.value.length + 1 : (element.querySelector('span')?.textContent?.length ?? 4)
+  if (input) return figuresOf(input.value) + 1
+  return figuresOf(element.querySelector('span')?.textContent ?? '0000')
 }
+
+/** A fraction is set in small figures over each other: it takes the room of two, with the space before it. */
+const figuresOf = (text: string) => text.replace(/\s?\d+[⁄/]\d+/, '00').length
 
 /** Puts each tag below `area` at its place, clear of the points, without asking React. */
 export function placeTagElements(

@@ -12,6 +12,12 @@ import { formatLength } from '@/drafting/lengths'
 const shape =
   'group absolute top-0 left-0 text-tag pointer-events-auto data-folded:z-0 z-10 focus-within:z-30 hover:z-20'
 
+/** A tag without room for its figures: a dot in the least room that a pointer can take. */
+const folded =
+  'group-data-folded:not-focus:size-6 group-data-folded:not-focus:min-w-0 group-data-folded:not-focus:rounded-full ' +
+  'group-data-folded:not-focus:border-transparent group-data-folded:not-focus:bg-indigo group-data-folded:not-focus:bg-clip-content ' +
+  'group-data-folded:not-focus:p-[7px] group-data-folded:not-focus:text-[0px]'
+
 /** Words that open over a tag: centred on it, or inwards where the window ends. */
 const words =
   'absolute left-1/2 z-40 -translate-x-1/2 group-data-[edge=left]:left-0 group-data-[edge=left]:translate-x-0 ' +
@@ -97,7 +103,7 @@ export const ValueTag = memo(function ValueTag({
           className={classes(
             frame,
             'measure min-h-6 min-w-10 px-2 text-center leading-5 [field-sizing:content] focus:border-indigo',
-            'group-data-folded:not-focus:w-6 group-data-folded:not-focus:rounded-full group-data-folded:not-focus:px-0 group-data-folded:not-focus:text-[0px]',
+            folded,
           )}
         />
       )}

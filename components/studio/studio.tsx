@@ -103,6 +103,7 @@ function Table({ definitions, name, back, saving, notice, onVersions, onShare, o
             emphasise={emphasise}
             replaying={step !== undefined}
             showTags={tags}
+            definitions={definitions}
             onOpenTag={narrow ? setDocked : undefined}
           />
           <OpeningProblems definitions={definitions} />
