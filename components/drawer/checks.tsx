@@ -9,7 +9,7 @@ import { typesetFractions } from '@/drafting/drawing/typeset'
 import { useStudioState } from '@/components/studio/use-store'
 import { piecesById, runsLength } from '@/drafting/pieces/runs'
 import { seamAgrees } from '@/drafting/pieces/seam-agrees'
-import { wordsOf } from './choices'
+import { wordsOf } from './words-of'
 
 /** What a look over the pattern would find: seams walked, the body it closes on, and what is odd. */
 export function Checks({

@@ -134,6 +134,46 @@ test('everything works from the keyboard alone', async ({ page }) => {
   await expect(ribbon).toHaveAttribute('aria-valuetext', /Finished pattern/)
 })
 
+test('a point that cannot be dragged says why, and what does move it', async ({ page }) => {
+  await measureClient(page, 'Fixed Test', body)
+  await startDress(page, 'Fixed dress')
+  const words = page.locator('[data-sheet]').getByText('move it.').last()
+  const point = page.getByRole('button', { name: /^Point C of Front\. / })
+  await point.focus()
+  await expect(point).toHaveAccessibleName(
+    /cannot be dragged: it follows from the body\. Across shoulders and the rule “Half the shoulders” move it\./,
+  )
+  await expect(words).toBeVisible()
+  await page.keyboard.press('ArrowRight')
+  await expect(page.getByRole('button', { name: /^Point G of Front\. / })).toBeFocused()
+
+  await point.focus()
+  const dot = await page.locator('[data-sheet] .rotate-45').boundingBox()
+  await page.keyboard.press('Tab')
+  await expect(words).toBeHidden()
+  await page.mouse.move((dot?.x ?? 0) + (dot?.width ?? 0) / 2, (dot?.y ?? 0) + (dot?.height ?? 0) / 2)
+  await expect(words).toBeVisible()
+  await page.mouse.move(2, 2)
+  await expect(words).toBeHidden()
+})
+
+test('choices are folded by part, drawn, and what does not apply is not asked', async ({ page }) => {
+  await measureClient(page, 'Choice Test', body)
+  await startDress(page, 'Choice dress')
+  const drawer = page.getByRole('complementary', { name: 'Drawer' })
+  await drawer.getByRole('radio', { name: 'Square' }).check()
+  await expect(drawer.getByRole('radio', { name: 'Square' })).toBeChecked()
+  const sleeve = drawer.getByRole('button', { name: /^Sleeve/ })
+  await expect(sleeve).toHaveAttribute('aria-expanded', 'false')
+  await expect(sleeve).toContainText('Plain')
+  await sleeve.click()
+  await expect(drawer.getByLabel('Sleeve length')).toBeVisible()
+  await expect(page.locator('[data-sheet] [data-piece=sleeve]').first()).toBeAttached()
+  await drawer.getByRole('radio', { name: 'None' }).check()
+  await expect(drawer.getByLabel('Sleeve length')).toHaveCount(0)
+  await expect(page.locator('[data-sheet] [data-piece=sleeve]')).toHaveCount(0)
+})
+
 test('zooming keeps the place under the pointer; the wheel pans', async ({ page }) => {
   await measureClient(page, 'View Test', body)
   await startDress(page, 'View dress')
