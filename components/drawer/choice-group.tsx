@@ -31,7 +31,7 @@ export function ChoiceGroup({
   const shown = open || wrong
   return (
     <section className="border-b hairline last:border-b-0">
-      <h3>
+      <h2>
         <button
           type="button"
           aria-expanded={shown}
@@ -47,7 +47,7 @@ export function ChoiceGroup({
             className={classes('ml-auto shrink-0 text-walnut', shown && 'rotate-180')}
           />
         </button>
-      </h3>
+      </h2>
       <div id={id} hidden={!shown} className="grid gap-4 px-4 pt-1 pb-5">
         {shown && values.map((value) => <Choice key={value.id} value={value} />)}
       </div>

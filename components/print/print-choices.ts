@@ -1,4 +1,5 @@
-import { rollWidths, trueMeasure } from '@/drafting/drawing'
+import { rollWidths } from '@/drafting/drawing/papers'
+import { trueMeasure } from '@/drafting/drawing/print-scale'
 import type { Join, Measured, Orientation, PaperId, PrintScale } from '@/drafting/drawing'
 
 /** How a person wants the pattern on paper. */

@@ -61,7 +61,7 @@ export function Ribbon({
   return (
     <section
       aria-label="Ribbon"
-      className="flex h-14 shrink-0 items-stretch gap-3 border-t border-rule bg-ground px-3"
+      className="flex min-h-14 shrink-0 items-stretch gap-3 border-t border-rule bg-ground px-3"
     >
       <div
         role="slider"
@@ -81,7 +81,7 @@ export function Ribbon({
         }}
         className="relative min-w-0 flex-1 cursor-ew-resize touch-none"
       >
-        <p className="absolute inset-x-0 top-1 truncate text-sm" aria-hidden>
+        <p className="pt-1 pb-8 text-sm sm:absolute sm:inset-x-0 sm:top-0 sm:truncate sm:pb-0" aria-hidden>
           {step ? (
             <>
               <span className="font-semibold">{now + 1}</span> {typesetFractions(stepWords(step))}

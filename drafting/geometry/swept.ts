@@ -1,4 +1,6 @@
-import { FillRule, unionD } from 'clipper2-ts'
+// The parts that a union needs: the whole library weighs twice as much in a browser.
+import { ClipType, FillRule } from 'clipper2-ts/dist/Core.js'
+import { ClipperD } from 'clipper2-ts/dist/Engine.js'
 import type { Path, Point } from '../contract'
 import { flatten } from './flatten'
 import { polyline } from './path'
@@ -84,13 +86,13 @@ export const sweptAreas = (points: readonly Point[], distance: number): Polygon[
 }
 
 /** All the areas as one, outlines only. */
-export const unionOf = (areas: readonly Polygon[]): Polygon[] =>
-  unionD(
-    areas.map((area) => area.map(({ x, y }) => ({ x, y }))),
-    [],
-    FillRule.NonZero,
-    DECIMALS,
-  ).map((outline) => outline.map(({ x, y }) => ({ x, y })))
+export const unionOf = (areas: readonly Polygon[]): Polygon[] => {
+  const union = new ClipperD(DECIMALS)
+  union.addSubjectPaths(areas.map((area) => area.map(({ x, y }) => ({ x, y }))))
+  const outlines: Point[][] = []
+  union.execute(ClipType.Union, FillRule.NonZero, outlines)
+  return outlines.map((outline) => outline.map(({ x, y }) => ({ x, y })))
+}
 
 /** The outline around most area, clockwise on the sheet. */
 export const largest = (outlines: readonly Polygon[]): Polygon => {

@@ -7,7 +7,7 @@ const parts = [
   {
     name: 'Draft',
     words:
-      'Every length on the drawing is a field, every point a handle on a number. Change one and the whole pattern follows: facing, sleeve, pocket.',
+      'Every length on the drawing is a field, every point moves a number. Change one and the whole pattern follows: facing, sleeve, pocket.',
   },
   {
     name: 'Check',

@@ -17,7 +17,7 @@ import type { Printable } from '@/app/_server/print/pattern-of'
 export async function printed(
   actor: Actor,
   revisionId: string,
-  drawing: 'kept' | 'today',
+  drawing: 'kept' | 'today' = 'kept',
 ): Promise<{ printable: Printable; draft: Draft }> {
   const revision = await getRevision(actor, revisionId)
   const [details, kept, workroom] = await Promise.all([
