@@ -14,7 +14,9 @@ async function scriptsOf(page: Page): Promise<number> {
 
 /** Says the weight in the report, and holds the page to its budget in kB (1,000 bytes, gzipped). */
 function hold(what: string, weight: number, budget: number): void {
-  test.info().annotations.push({ type: `scripts of ${what}`, description: `${(weight / 1000).toFixed(0)} kB` })
+  test
+    .info()
+    .annotations.push({ type: `scripts of ${what}`, description: `${(weight / 1000).toFixed(0)} kB` })
   expect.soft(weight, `scripts of ${what}, bytes`).toBeLessThanOrEqual(budget * 1000)
 }
 
