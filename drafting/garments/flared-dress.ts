@@ -9,6 +9,7 @@ import { facedBody } from '../parts/facing'
 import { deepenArmhole } from '../parts/armhole-room'
 import { drawHalf, flareDirection, hemOf, lowerMarks, upperMarks } from '../parts/flared-half'
 import { neckRules } from '../parts/neck-rules'
+import { neckDesign } from '../parts/necklines'
 import { neckLeans } from '../parts/neck-lean'
 import { fitLevels } from '../parts/levels'
 import { pocketBag, pocketDesign, pocketMouth, sewWithPocket } from '../parts/pockets/in-seam'
@@ -47,7 +48,7 @@ export const flaredDress = garment({
     'head',
   ],
   design: [
-    choice('neckShape', 'Neck shape', 'neckline', ['round', 'V', 'square', 'boat', 'scoop', 'sweetheart']),
+    ...neckDesign('round', 'V', 'square', 'boat', 'scoop', 'sweetheart', 'keyhole', 'high'),
     length('neckWidening', 'Neck wider by', 'neckline', { default: 0, min: 0, max: 70 }),
     length('frontNeckDrop', 'Front neck lower by', 'neckline', { default: 0, min: 0, max: 130 }),
     length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 120 }),

@@ -7,6 +7,7 @@ import { armholeCurve } from './armhole'
 import { fairCurve } from './hem'
 import { backNeckline, chosenNeckline, leaning } from './necklines'
 import { takenInOf, throughTakenIn } from './taken-in'
+import { openNeck } from './open-neck'
 
 /** Directions that the whole of one half is drawn by. */
 export interface HalfShape {
@@ -28,7 +29,6 @@ export function flareDirection(degrees: number): Point {
 export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): void {
   const shape = chosenNeckline(pen)
   const sleeved = pen.chosen('sleeve') !== 'none'
-  const { widening } = shape
   piece.start('neckLevel', { x: 0, y: 0 }, 'Fold the cloth; mark the level of the side neck on the centre')
   piece.go('neckPoint', 'neckLevel', 'right', 'neckWidth', {
     say: 'From the centre go across the width of the neck',
@@ -45,24 +45,9 @@ export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): v
     shared: true,
   })
   const shoulder = unit(between(piece.at('neckPoint'), piece.at('shoulderTip')))
-  piece.aim('sideNeck', 'neckPoint', shoulder, pen.length(widening), {
-    say: 'Open the neck along the shoulder',
-    by: widening,
+  openNeck(pen, piece, shoulder, magnitude(between(piece.at('neckPoint'), piece.at('shoulderTip'))), {
     through: ['neckPoint', 'shoulderTip'],
-    drag: ['neckWidening'],
-    shared: true,
   })
-  const bare = magnitude(between(piece.at('sideNeck'), piece.at('shoulderTip')))
-  if (bare < 25 || piece.at('sideNeck').x > piece.at('shoulderTip').x) {
-    const room = magnitude(between(piece.at('neckPoint'), piece.at('shoulderTip'))) - 25
-    pen.refuse({
-      field: 'neckWidening',
-      code: 'impossible-shape',
-      message: `The neckline is wider than the shoulder. Open it by at most ${pen.say(Math.max(0, room))}.`,
-      min: 0,
-      max: Math.max(0, room),
-    })
-  }
   pen.find('neckFall', piece.at('sideNeck').y, piece.mark('sideNeck').y)
   const depth = side === 'back' ? 'backNeckDepth' : shape.depth
   const drop = side === 'front' ? 'frontNeckDrop' : 'backNeckDrop'
@@ -77,14 +62,6 @@ export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): v
     label: side === 'front' ? 'Neck depth' : 'Back neck depth',
     value: drop,
     over: pen.length(depth) - pen.value(drop),
-  })
-  pen.tag({
-    piece: piece.id,
-    from: 'neckPoint',
-    to: 'sideNeck',
-    label: 'Neck wider by',
-    value: 'neckWidening',
-    over: pen.length(widening) - pen.value('neckWidening'),
   })
   pen.tag({
     piece: piece.id,

@@ -338,6 +338,12 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
       'const even = (bust - first) / (spaces + 0.5)',
     ],
     [
+      'a stand is taken to be as wide above as below',
+      'parts/openings/head-room.ts',
+      '(half - shorter)',
+      'half',
+    ],
+    [
       'a keyhole is too shallow for the head',
       'parts/openings/keyhole.ts',
       'Math.max(wanted, ',

@@ -2,6 +2,7 @@ import { towards } from '../../geometry'
 import type { Pen } from '../../pen/pen'
 import type { PiecePen } from '../../pen/piece-pen'
 import { chosenNeckline } from '../necklines'
+import { neckOpens, openNeck } from '../open-neck'
 
 /**
  * Marks of neck, shoulder and levels of a fitted back, in drafting order.
@@ -17,13 +18,7 @@ export function bodiceBackMarks(pen: Pen, back: PiecePen, shoulder: number): voi
     shared: true,
   })
   const slope = towards(pen.value('backSlope'))
-  back.aim('sideNeck', 'neckPoint', slope, pen.length(widening), {
-    say: 'Open the neck along the shoulder',
-    by: widening,
-    uses: ['backSlope'],
-    drag: ['neckWidening'],
-    shared: true,
-  })
+  openNeck(pen, back, slope, pen.length('frontShoulder'), { uses: ['backSlope', 'frontShoulder'] })
   back.aim('shoulderMeasured', 'neckPoint', slope, pen.length('frontShoulder'), {
     say: 'Down the slope go the length of the shoulder',
     by: 'frontShoulder',
@@ -39,8 +34,8 @@ export function bodiceBackMarks(pen: Pen, back: PiecePen, shoulder: number): voi
   })
   pen.find(
     'neckFall',
-    pen.value(widening) * Math.sin((pen.value('backSlope') * Math.PI) / 180),
-    pen.usesOf([widening, 'backSlope']),
+    neckOpens(pen, pen.length('frontShoulder')).open * Math.sin((pen.value('backSlope') * Math.PI) / 180),
+    pen.usesOf([widening, 'backSlope', 'frontShoulder']),
   )
   back.go('nape', 'neckLevel', 'down', 'napeDepth', { say: 'Come down to the nape' })
   back.go('centreNeck', 'neckLevel', 'down', 'backNeckDepth', {

@@ -1,5 +1,6 @@
 import type { DesignValue } from '../../contract'
 import { angle, choice, length, share } from '../../pen/design'
+import { neckDesign } from '../necklines'
 
 const withDarts = { id: 'shaping', is: ['darts'] }
 
@@ -44,7 +45,7 @@ export const dartDesign: readonly DesignValue[] = [
 
 /** Neck and shoulders of a fitted bodice. */
 export const upperBodiceDesign: readonly DesignValue[] = [
-  choice('neckShape', 'Neck shape', 'neckline', ['round', 'V', 'square', 'scoop', 'sweetheart']),
+  ...neckDesign('round', 'V', 'square', 'scoop', 'sweetheart', 'keyhole', 'high', 'boat'),
   length('neckWidening', 'Neck wider by', 'neckline', { default: 0, min: 0, max: 60 }),
   length('frontNeckDrop', 'Front neck lower by', 'neckline', { default: 0, min: 0, max: 100 }),
   length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 100 }),

@@ -2,11 +2,17 @@ import { towards } from '../../geometry'
 import type { Pen } from '../../pen/pen'
 import type { PiecePen } from '../../pen/piece-pen'
 import { chosenNeckline } from '../necklines'
+import { neckOpens, openNeck } from '../open-neck'
 import { deepened } from './back-marks'
 
 /** Marks of neck, shoulder, bust and levels, in drafting order. */
 export function bodiceFrontMarks(pen: Pen, front: PiecePen): void {
   const { depth, widening } = chosenNeckline(pen)
+  pen.find(
+    'frontNeckFall',
+    neckOpens(pen, pen.length('frontShoulder')).open * Math.sin((pen.value('frontSlope') * Math.PI) / 180),
+    pen.usesOf([widening, 'frontSlope', 'frontShoulder']),
+  )
   front.start('neckLevel', { x: 0, y: 0 }, 'Fold the cloth; mark the level of the side neck on the centre')
   front.go('neckPoint', 'neckLevel', 'right', 'frontNeckWidth', {
     say: 'Go across the width of the front neck',
@@ -26,27 +32,13 @@ export function bodiceFrontMarks(pen: Pen, front: PiecePen): void {
     over: pen.length(depth) - pen.value('frontNeckDrop'),
   })
   const shoulder = towards(pen.value('frontSlope'))
-  front.aim('sideNeck', 'neckPoint', shoulder, pen.length(widening), {
-    say: 'Open the neck along the shoulder',
-    by: widening,
-    uses: ['frontSlope'],
-    drag: ['neckWidening'],
-    shared: true,
-  })
+  openNeck(pen, front, shoulder, pen.length('frontShoulder'), { uses: ['frontSlope', 'frontShoulder'] })
   front.aim('shoulderTip', 'neckPoint', shoulder, pen.length('frontShoulder'), {
     say: 'Down the slope go the length of the shoulder',
     by: 'frontShoulder',
     uses: ['frontSlope'],
     drag: ['frontSlope'],
     shared: true,
-  })
-  pen.tag({
-    piece: 'front',
-    from: 'neckPoint',
-    to: 'sideNeck',
-    label: 'Neck wider by',
-    value: 'neckWidening',
-    over: pen.length(widening) - pen.value('neckWidening'),
   })
   front.go('bustLevel', 'neckLevel', 'down', 'bustHeight', { say: 'Come down the bust height' })
   front.go('bustPoint', 'bustLevel', 'right', 'bustPointOut', {

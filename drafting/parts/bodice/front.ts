@@ -6,6 +6,7 @@ import { between, straight, type PiecePen } from '../../pen/piece-pen'
 import { armholeCurve } from '../armhole'
 import { fitWaist, pinned, waistDarts, waistTo, type FittedWaist } from '../fitted-waist'
 import { chosenNeckline, leaning } from '../necklines'
+import { withKeyhole } from '../openings'
 import { lapFront } from '../openings/button-band'
 import { onFold, type Centre } from '../openings/opening'
 import { throughTakenIn } from '../taken-in'
@@ -126,7 +127,7 @@ function openCentre(pen: Pen, front: PiecePen, way: BodiceWay): Centre {
     onFold: !way.buttons,
     handed: way.buttons ?? false,
   })
-  return way.buttons ? { kind: 'lap', below } : { kind: 'fold' }
+  return withKeyhole(pen, front, way.buttons ? { kind: 'lap', below } : { kind: 'fold' })
 }
 
 /** The front sewn at the centre, where a dart opens there; its neckline can still be faced on the fold. */
@@ -140,6 +141,7 @@ function sewCentreFront(pen: Pen, front: PiecePen): Centre {
       a: [{ piece: 'front', edge }],
       b: [{ piece: 'front', edge, mirrored: true }],
     })
+  withKeyhole(pen, front, { kind: 'seam' })
   return { kind: 'fold' }
 }
 

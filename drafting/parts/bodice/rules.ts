@@ -27,6 +27,8 @@ export const upperBodiceRules: readonly RuleDefinition[] = [
   lengthRule('backNeckDepth', 'Back neck depth', 'napeDepth + neckFall + backNeckDrop'),
   lengthRule('frontNeckDepth', 'Front neck depth', 'neckBase / 5 + 0.2cm + frontNeckDrop'),
   lengthRule('vNeckDepth', 'V neck: front depth', 'frontNeckDepth + 5.8cm'),
+  lengthRule('boatWidening', 'Boat neck: opening along the shoulder', 'frontShoulder * 0.35 + neckWidening'),
+  lengthRule('boatNeckDepth', 'Boat neck: front depth', '4cm + frontNeckFall + frontNeckDrop'),
   ...neckRules,
   lengthRule('frontShoulder', 'Front shoulder', 'shoulderLength'),
   lengthRule('shoulderEase', 'Ease of the back shoulder', '0.8cm'),
@@ -75,5 +77,6 @@ export const bodiceFound: Garment['found'] = {
   backTip: 'length',
   frontTip: 'length',
   neckFall: 'length',
+  frontNeckFall: 'length',
   ...sleeveFound,
 }

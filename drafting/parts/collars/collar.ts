@@ -24,8 +24,16 @@ export interface NeckEdge {
   readonly over: number
 }
 
+/** Style values that give a stand its height and its rise to the front. */
+export interface StandNames {
+  readonly height: string
+  readonly rise: string
+}
+
 /** A kind of collar. */
 export interface Collar {
+  /** The stand that it closes round the neck with, whose top edge is shorter than the neckline; none where it falls open. */
+  readonly stands?: (pen: Pen) => StandNames | undefined
   readonly draw: (pen: Pen, neck: Neck) => NeckEdge
 }
 
@@ -51,7 +59,14 @@ export function standingEnds(centres: Centres): { readonly front: End; readonly 
 }
 
 /** Draws the end of a collar piece, from one mark to the next. */
-export function drawEnd(piece: PiecePen, id: string, end: End, from: string, to: string): void {
+export function drawEnd(
+  piece: PiecePen,
+  id: string,
+  end: End,
+  from: string,
+  to: string,
+  allowance: string,
+): void {
   const place = id.replace('-', ' ')
   if (end === 'fold') {
     piece.line(id, from, to, { role: 'fold', say: `The ${place} lies on the fold` })
@@ -60,7 +75,7 @@ export function drawEnd(piece: PiecePen, id: string, end: End, from: string, to:
   piece.line(id, from, to, {
     role: end === 'seam' ? 'seam' : 'free',
     finish: 'seam',
-    allowance: 'collarAllowance',
+    allowance,
     say: end === 'seam' ? `The seam at the ${place}` : `The end at the ${place}`,
   })
 }

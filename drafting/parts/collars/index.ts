@@ -3,6 +3,7 @@ import { choice, length } from '../../pen/design'
 import type { Pen } from '../../pen/pen'
 import { chosenNeckline } from '../necklines'
 import type { Collar } from './collar'
+import { funnel } from './funnel'
 import { mandarin, standDesign } from './mandarin'
 import { peterPan, peterPanDesign } from './peter-pan'
 import { shirt, shirtCollarDesign, shirtCollarRules } from './shirt'
@@ -23,11 +24,20 @@ export const collarDesign: readonly DesignValue[] = [
     { default: 7, min: 0, max: 12 },
     { id: 'collar', is: Object.keys(collars) },
   ),
+  length(
+    'funnelAllowance',
+    'Funnel allowance',
+    'allowances',
+    { default: 7, min: 0, max: 12 },
+    { id: 'neckShape', is: ['high'] },
+  ),
 ]
 
 export const collarRules: readonly RuleDefinition[] = shirtCollarRules
 
 /** The collar of a style, if its neckline takes one and it has one. */
 export function chosenCollar(pen: Pen): Collar | undefined {
-  return chosenNeckline(pen).takesCollar ? collars[String(pen.offered('collar'))] : undefined
+  const takes = chosenNeckline(pen).takesCollar
+  if (takes === 'funnel') return funnel
+  return takes === 'any' ? collars[String(pen.offered('collar'))] : undefined
 }

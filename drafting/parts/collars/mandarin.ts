@@ -3,6 +3,7 @@ import { length } from '../../pen/design'
 import { closeBehind, cutCollar, sewLayers, standingEnds, type Collar } from './collar'
 import { drawStand, standCurves } from './stand'
 
+const stand = { height: 'standHeight', rise: 'standRise' }
 const standing = { id: 'collar', is: ['mandarin', 'shirt'] }
 
 export const standDesign: readonly DesignValue[] = [
@@ -15,13 +16,14 @@ export const standDesign: readonly DesignValue[] = [
  * where the garment opens. Common practice, from memory: 3.5–4 cm high.
  */
 export const mandarin: Collar = {
+  stands: () => stand,
   draw(pen, neck) {
     const collar = pen.piece('collar', 'Stand collar')
     const height = pen.length('standHeight')
     const half = neck.long.front + neck.long.back
     const curves = standCurves({ half, over: 0, height, rise: pen.length('standRise') })
     const ends = standingEnds(neck.centres)
-    const names = { heightBy: 'standHeight', riseBy: 'standRise', corner: height * 0.4 }
+    const names = { ...stand, corner: height * 0.4, allowance: 'collarAllowance' }
     const turned = drawStand(pen, collar, neck, curves, ends, names)
     cutCollar(collar, ends)
     collar.grain({ x: 12, y: -height * 0.2 }, { x: 12, y: -height * 0.8 })

@@ -79,7 +79,7 @@ export const peterPan: Collar = {
       say: 'Draw the neck edge: the front neckline, and on in one sweep to the centre back',
       mask: uses,
     })
-    drawEnd(collar, 'centre-back', ends.back, 'centreBack', 'outerBack')
+    drawEnd(collar, 'centre-back', ends.back, 'centreBack', 'outerBack', 'collarAllowance')
     collar.curve('outer', outerEdge(neckEdge, width, out), 'outerBack', 'centreNeck', {
       role: 'free',
       finish: 'seam',

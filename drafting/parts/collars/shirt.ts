@@ -19,6 +19,7 @@ import {
 } from './collar'
 import { drawStand, standCurves } from './stand'
 
+const shirtStand = { height: 'standHeight', rise: 'standRise' }
 const worn = { id: 'collar', is: ['shirt'] }
 
 export const shirtCollarDesign: readonly DesignValue[] = [
@@ -37,6 +38,7 @@ export const shirtCollarRules: readonly RuleDefinition[] = [
 
 /** A collar with points: a stand and what falls over it, or both cut in one. */
 export const shirt: Collar = {
+  stands: (pen) => (pen.chosen('collarStand') ? shirtStand : undefined),
   draw(pen, neck) {
     const half = neck.long.front + neck.long.back
     if (pen.chosen('collarStand')) return withStand(pen, neck, half)
@@ -57,7 +59,7 @@ function withStand(pen: Pen, neck: Neck, half: number): NeckEdge {
   const height = pen.length('standHeight')
   const curves = standCurves({ half, over, height, rise: pen.length('standRise') })
   const ends = standingEnds(neck.centres)
-  const names = { heightBy: 'standHeight', riseBy: 'standRise', corner: 0, over: overlap?.uses ?? nothing }
+  const names = { ...shirtStand, corner: 0, over: overlap?.uses ?? nothing, allowance: 'collarAllowance' }
   const turned = drawStand(pen, stand, neck, curves, ends, names)
   cutCollar(stand, ends)
   stand.grain({ x: 12, y: -height * 0.2 }, { x: 12, y: -height * 0.8 })
@@ -128,7 +130,7 @@ function drawFall(
     uses,
     mask,
   })
-  drawEnd(collar, 'centre-back', ends.back, 'centreBack', 'outerBack')
+  drawEnd(collar, 'centre-back', ends.back, 'centreBack', 'outerBack', 'collarAllowance')
   const turned = { role: 'free', finish: 'seam', allowance: 'collarAllowance' } as const
   collar.curve('outer', fallOuter(collar.at('outerBack'), collar.at('point')), 'outerBack', 'point', {
     ...turned,

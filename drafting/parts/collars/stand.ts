@@ -14,7 +14,7 @@ import { nothing, type Mask } from '../../pen/masks'
 import type { Pen } from '../../pen/pen'
 import { straight, type PiecePen } from '../../pen/piece-pen'
 import { solveBetween } from '../../pen/solve'
-import { drawEnd, type End, type Neck } from './collar'
+import { drawEnd, type End, type Neck, type StandNames } from './collar'
 
 /** What a stand is drawn from, mm. */
 export interface StandShape {
@@ -36,13 +36,24 @@ export interface StandCurves {
   readonly over: Path | undefined
 }
 
+/** Under this rise a stand is straight, mm. */
+const straightBelow = 0.05
+
+/** The angle by which a stand bends over half the neckline so that it rises so far, radians. */
+const bendOf = (half: number, rise: number): number =>
+  solveBetween((by) => (half * (1 - Math.cos(by))) / by - rise, 1e-6, 1.5) ?? 1.5
+
+/** How much shorter than half the neckline the top edge of a stand is, mm. */
+export const topShorter = (half: number, height: number, rise: number): number =>
+  rise < straightBelow ? 0 : height * bendOf(half, rise)
+
 /**
  * A stand bent about a point above it. The rise of an arc L long that turns by θ is L·(1 − cos θ)/θ, its parallel h above is
  * shorter by h·θ (geometry); common practice gives the same as half the neck × shortening / (2 × height).
  */
 export function standCurves({ half, over, height, rise }: StandShape): StandCurves {
-  if (rise < 0.05) return level(half, over, height)
-  const turn = solveBetween((by) => (half * (1 - Math.cos(by))) / by - rise, 1e-6, 1.5) ?? 1.5
+  if (rise < straightBelow) return level(half, over, height)
+  const turn = bendOf(half, rise)
   const radius = half / turn
   const point = { x: 0, y: -radius }
   const degrees = (turn * 180) / Math.PI
@@ -71,10 +82,10 @@ function level(half: number, over: number, height: number): StandCurves {
   }
 }
 
-export interface StandOptions {
-  /** The names behind height and rise. */
-  readonly heightBy: string
-  readonly riseBy: string
+/** What a stand is drawn by. */
+export interface StandOptions extends StandNames {
+  /** Style value that gives the allowance of its turned edges. */
+  readonly allowance: string
   /** Radius of the rounded corner where it ends at the centre front, mm; 0 leaves it square. */
   readonly corner: number
   /** What the overlap follows from that it runs on over. */
@@ -92,16 +103,16 @@ export function drawStand(
   neck: Neck,
   curves: StandCurves,
   ends: { readonly front: End; readonly back: End },
-  { heightBy, riseBy, corner, over = nothing }: StandOptions,
+  { height, rise, corner, allowance, over = nothing }: StandOptions,
 ): readonly string[] {
-  const uses = [heightBy, riseBy]
+  const uses = [height, rise]
   const mask = neck.uses | over | pen.usesOf(uses)
   piece.start('centreBack', { x: 0, y: 0 }, 'Mark the centre back of the neck edge')
-  piece.go('topBack', 'centreBack', 'up', heightBy, {
+  piece.go('topBack', 'centreBack', 'up', height, {
     say: 'Go up the height of the stand',
-    drag: [heightBy],
+    drag: [height],
   })
-  pen.tag({ piece: piece.id, from: 'centreBack', to: 'topBack', label: 'Height', value: heightBy })
+  pen.tag({ piece: piece.id, from: 'centreBack', to: 'topBack', label: 'Height', value: height })
   piece.place('neckFront', startOf(curves.neck), {
     say: 'Along the neck edge, rising to the front, go half the neckline',
     from: 'centreBack',
@@ -117,12 +128,12 @@ export function drawStand(
     say: 'Draw the neck edge, as long as the neckline',
     mask,
   })
-  drawEnd(piece, 'centre-back', ends.back, 'centreBack', 'topBack')
-  const turned = { role: 'free', finish: 'seam', allowance: 'collarAllowance' } as const
+  drawEnd(piece, 'centre-back', ends.back, 'centreBack', 'topBack', allowance)
+  const turned = { role: 'free', finish: 'seam', allowance } as const
   piece.curve('top', top, 'topBack', 'topFront', { ...turned, say: 'Draw the top edge even with it', mask })
   const edges = ends.back === 'end' ? ['centre-back', 'top'] : ['top']
   if (ends.front === 'fold') {
-    drawEnd(piece, 'centre-front', 'fold', 'topFront', 'neckFront')
+    drawEnd(piece, 'centre-front', 'fold', 'topFront', 'neckFront', allowance)
     return edges
   }
   const end = rounded ? roundOff(curves.top, top, startOf(curves.neck)) : lapEnd(curves, startOf(curves.neck))

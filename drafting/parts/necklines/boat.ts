@@ -6,5 +6,5 @@ export const boat: Neckline = {
   widening: 'boatWidening',
   lean: (slope) => slope,
   mostLean: mostCurvedLean,
-  draw: (centre, side, leaves) => neckCurve(centre, side, leaves, 0.55, 0.6),
+  draw: (centre, side, leaves) => neckCurve(centre, side, leaves, 0.52, 0.52),
 }

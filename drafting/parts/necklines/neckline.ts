@@ -12,8 +12,8 @@ export interface Neckline {
   readonly mostLean: (width: number, depth: number) => number
   /** Style value that gives the depth of a keyhole below its centre, where it has one. */
   readonly keyhole?: string
-  /** Whether a collar can be sewn to it. */
-  readonly takesCollar?: boolean
+  /** What can be sewn to it: any collar, or the funnel that belongs to it. */
+  readonly takesCollar?: 'any' | 'funnel'
   /** Where a dart may open on it, share of its length from the centre: clear of a corner. Half way unless it says so. */
   readonly dartAt?: number
   /** How it goes on over a lapped front: straight on from a point, or level; otherwise the overlap mirrors it. */

@@ -4,7 +4,7 @@ import { mostCurvedLean, neckCurve, type Neckline } from './neckline'
 export const round: Neckline = {
   depth: 'frontNeckDepth',
   widening: 'neckWidening',
-  takesCollar: true,
+  takesCollar: 'any',
   lean: (slope) => slope,
   mostLean: mostCurvedLean,
   draw: (centre, side, leaves) => neckCurve(centre, side, leaves, 0.52, 0.48),

@@ -1,6 +1,7 @@
 import type { DesignValue, RuleDefinition } from '../../contract'
 import { choice, length } from '../../pen/design'
 import type { Pen } from '../../pen/pen'
+import type { PiecePen } from '../../pen/piece-pen'
 import { chosenNeckline } from '../necklines'
 import { buttonBand, buttonDesign, buttonRules } from './button-band'
 
@@ -10,7 +11,7 @@ import { drawDrop } from './drop'
 import { headRules } from './head-room'
 import { keyhole, keyholeDesign } from './keyhole'
 import { none } from './none'
-import type { Centres, OpenHalf, Opening } from './opening'
+import type { Centre, Centres, OpenHalf, Opening } from './opening'
 import { sideZip } from './side-zip'
 
 /** The openings by their names in the style. */
@@ -54,15 +55,19 @@ export function drawOpening(pen: Pen, front: OpenHalf, back: OpenHalf): Centres 
   const value = chosenNeckline(pen).keyhole
   const depth = value ? pen.length(value) : 0
   const centres = opening.draw(pen, front, back, depth)
-  if (!value) return centres
-  if (centres.front.kind === 'fold') {
-    return { ...centres, front: { ...centres.front, keyhole: drawDrop(pen, front.piece, value) } }
-  }
+  return { ...centres, front: withKeyhole(pen, front.piece, centres.front) }
+}
+
+/** Draws the keyhole of a keyhole neckline on a front that lies on the fold; one that is sewn or opens has none, and it is said. */
+export function withKeyhole(pen: Pen, front: PiecePen, centre: Centre): Centre {
+  const value = chosenNeckline(pen).keyhole
+  if (!value) return centre
+  if (centre.kind === 'fold') return { ...centre, keyhole: drawDrop(pen, front, value) }
   pen.caution(
     'keyhole-left-out',
-    'The front opens from top to bottom, so no keyhole is drawn in it. Close the garment elsewhere for a keyhole.',
+    'The centre front is a seam or an edge, so no keyhole is drawn in it. Put the dart or the opening elsewhere for a keyhole.',
     'neckShape',
     'backOpening',
   )
-  return centres
+  return centre
 }

@@ -69,7 +69,7 @@ export const dragsArrive: OrderLaw = (order, engine) => {
         there = withStyle(there, move.value, value)
       }
       const target = markAt(there, engine, handle)
-      if (!target) continue
+      if (!target || heldBack(there, engine)) continue
       const gap = drag(order, engine, handle, target)
       if (gap !== undefined)
         found.atMost(
@@ -81,6 +81,11 @@ export const dragsArrive: OrderLaw = (order, engine) => {
     }
   }
   return found.all
+}
+
+/** Whether the draft says that a point stays short of what was asked: it cannot be dragged any farther there. */
+function heldBack(order: DraftOrder, engine: Engine): boolean {
+  return drafted(order, engine)?.cautions.some((caution) => caution.code === 'neck-narrowed') ?? false
 }
 
 /** Drags step by step, asking for the handle anew each time. @returns how far from the target it ends; undefined when refused on the way */

@@ -39,6 +39,7 @@ export const openings: DraftLaw = (draft, order, engine) => {
       .filter((one) => one.id === 'slit' || one.id === 'keyhole')
     const opening = neck + slits.reduce((sum, one) => sum + 2 * lengthOfPath(one.path), 0)
     found.atMost('neck', 'does not go over the head by', body('head') + 20 - opening, 1e-6)
+    stands(found, draft, body('head') + 20)
   }
   if (opens === 'button band') buttoned(found, draft, style('buttonSize') as number)
   const armhole = edges(draft, 'armhole')
@@ -56,6 +57,16 @@ function edges(draft: Draft, role: 'neckline' | 'armhole'): number {
     .flatMap((piece) => piece.edges)
     .filter((one) => one.role === role)
     .reduce((sum, one) => sum + lengthOfPath(one.path), 0)
+}
+
+/** A stand or funnel that is closed all round goes over the head with its top edge too. */
+function stands(found: Findings, draft: Draft, head: number): void {
+  for (const piece of draft.pieces) {
+    const top = piece.edges.find((one) => one.id === 'top')
+    const closed = piece.edges.some((one) => one.id === 'centre-back' && one.role === 'seam')
+    if (!['collar', 'collar-stand', 'funnel'].includes(piece.id) || !top || !closed) continue
+    found.atMost(piece.id, 'does not go over the head by', head - 2 * lengthOfPath(top.path), 1e-6)
+  }
 }
 
 /** Buttons stand on the centre front, clear of each other, and the front laps over by enough to carry them. */
