@@ -1,5 +1,6 @@
 import { draftGarment, garments, handles } from '../../drafting'
 import { sanityBodies } from '../support/bodies'
+import { allocationNote } from './support/allocation'
 import { bench } from './support/bench'
 
 /** How far the value is dragged by now: another length each time, so that no draft is remembered. */
@@ -15,8 +16,14 @@ for (const garment of garments) {
     design: dragged ? { [dragged.id]: Math.min(from + next(), dragged.max ?? Infinity) } : {},
     explain,
   })
-  await bench(`${garment.name}, order to draft, no words`, () => draftGarment(order(false)), { aim: 0.5 })
-  await bench(`${garment.name}, order to draft, steps and sums`, () => draftGarment(order(true)), { aim: 1 })
+  for (const [words, explain, aim] of [
+    ['no words', false, 0.5],
+    ['steps and sums', true, 1],
+  ] as const) {
+    const draft = () => draftGarment(order(explain))
+    const note = await allocationNote(draft)
+    await bench(`${garment.name}, order to draft, ${words}`, draft, { aim, note })
+  }
 }
 
 await bench('Flared dress, every point to drag found', () =>
