@@ -12,7 +12,8 @@ export interface Actor {
   readonly sessionId: string
 }
 
-export type Resource = 'clients' | 'cards' | 'drafts' | 'shares' | 'methods' | 'workroom' | 'members'
+export type Resource =
+  'clients' | 'cards' | 'drafts' | 'shares' | 'methods' | 'blocks' | 'workroom' | 'members'
 export type Action = 'read' | 'write'
 
 /**
@@ -38,6 +39,7 @@ export const permissions: Readonly<Record<Role, Grants>> = {
     drafts: everything,
     shares: everything,
     methods: everything,
+    blocks: everything,
     workroom: everything,
     members: everything,
   },
@@ -47,6 +49,7 @@ export const permissions: Readonly<Record<Role, Grants>> = {
     drafts: everything,
     shares: everything,
     methods: everything,
+    blocks: everything,
     workroom: { read: ['all'] },
   },
   tutor: {

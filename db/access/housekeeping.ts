@@ -10,7 +10,7 @@ const day = 24 * 3_600_000
 
 /**
  * Thins automatic versions older than a day to the last one of each hour. Named, printed and shared ones, branches of a
- * conflict and the one that counts stay for ever.
+ * conflict, clients' blocks and the one that counts stay for ever.
  */
 export async function thinRevisions(now = new Date()): Promise<void> {
   await connection.query(
@@ -20,7 +20,8 @@ export async function thinRevisions(now = new Date()): Promise<void> {
            PARTITION BY r.draftId, DATE_FORMAT(r.savedAt, '%Y%m%d%H') ORDER BY r.savedAt DESC, r.id DESC
          ) AS place
          FROM revisions r JOIN drafts d ON d.id = r.draftId AND d.headId <> r.id
-         WHERE r.kind = 'auto' AND r.conflict = 0 AND r.printedAt IS NULL AND r.sharedAt IS NULL
+         LEFT JOIN client_blocks b ON b.revisionId = r.id
+         WHERE b.id IS NULL AND r.kind = 'auto' AND r.conflict = 0 AND r.printedAt IS NULL AND r.sharedAt IS NULL
            AND r.savedAt < :before
        ) AS placed WHERE place > 1
      )`,

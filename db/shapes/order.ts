@@ -53,7 +53,7 @@ export const orderShape = z.strictObject({
   rules: z.record(name, z.string().max(500)).refine(few, 'At most 200 rules.').optional(),
   method: method.optional(),
   ownMeasurements: z.array(ownMeasurement).max(100).readonly().optional(),
-  corrections: z.array(correction).max(200).optional(),
+  corrections: z.array(correction).max(200).readonly().optional(),
   remedies: z.array(remedy).max(50).readonly().optional(),
   unit: unitShape.optional(),
   tape: z.number().min(0).max(100).optional(),

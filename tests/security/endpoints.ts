@@ -240,6 +240,14 @@ export const endpoints: Readonly<Record<string, Endpoint>> = {
     access: drafters,
     input: ({ clientId }) => ({ id: clientId, archived: true }),
   },
+  'app/(workroom)/clients/actions.ts#makeBlock': {
+    access: drafters,
+    input: ({ draftId }) => ({ draftId }),
+  },
+  'app/(workroom)/clients/actions.ts#dropBlock': {
+    access: drafters,
+    input: ({ clientId }) => ({ clientId, garment: 'flared-dress' }),
+  },
   'app/(workroom)/cards/actions.ts#saveCard': {
     access: drafters,
     input: ({ clientId }) => ({

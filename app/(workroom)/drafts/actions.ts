@@ -4,6 +4,7 @@ import { revalidatePath } from 'next/cache'
 import * as z from 'zod'
 import { workroomAction } from '@/app/_server/session'
 import { assignDraft } from '@/db/access/assigning'
+import { listBlocks } from '@/db/access/blocks'
 import { getCard } from '@/db/access/cards'
 import { createDraft, renameDraft as rename } from '@/db/access/drafts'
 import { getMethod } from '@/db/access/methods'
@@ -15,6 +16,7 @@ import { idShape } from '@/db/shapes/ids'
 import { invalid } from '@/db/access-error'
 import { garments, methods } from '@/drafting'
 import { firstOrder } from './_parts/first-order'
+import { fromBlocks } from './_parts/from-blocks'
 import { publishedSize } from './_parts/published-sizes'
 
 const started = z
@@ -27,6 +29,8 @@ const started = z
     sizeId: z.string().max(80).optional(),
     /** A built-in method's, or that of one of the workroom's own. */
     methodId: z.string().max(60).optional(),
+    /** Whether it starts from the client's blocks. */
+    fromBlock: z.boolean().default(false),
     purpose: z.enum(draftPurposes).optional(),
   })
   .refine(({ cardId, sizeId }) => (cardId === undefined) !== (sizeId === undefined), {
@@ -43,7 +47,7 @@ async function chosenMethod(actor: Actor, id: string | undefined) {
 /** Starts a draft: a garment on a measure card or a published size, by a drafting method, with the workroom's usual allowances. */
 export const startDraft = workroomAction(
   started,
-  async (actor, { id, revisionId, name, garment, cardId, sizeId, methodId, purpose }) => {
+  async (actor, { id, revisionId, name, garment, cardId, sizeId, methodId, fromBlock, purpose }) => {
     const definition = garments.find((each) => each.id === garment)
     if (!definition) throw invalid('garment', 'Choose a garment from the list.')
     const [card, workroom, method, own] = await Promise.all([
@@ -53,11 +57,13 @@ export const startDraft = workroomAction(
       engineMeasurements(actor),
     ])
     const body = card ?? { unit: workroom.unit, values: publishedSize(sizeId) }
-    const { order, typed } = firstOrder(definition, body, {
+    const plain = firstOrder(definition, body, {
       allowances: workroom.allowances,
       method,
       own,
     })
+    const blocks = fromBlock && card?.clientId ? await listBlocks(actor, card.clientId) : []
+    const { order, typed, left } = fromBlocks(plain, blocks, card)
     await createDraft(actor, {
       id,
       revisionId,
@@ -69,7 +75,7 @@ export const startDraft = workroomAction(
       typed,
     })
     revalidatePath('/drafts')
-    return { id }
+    return { id, left }
   },
 )
 

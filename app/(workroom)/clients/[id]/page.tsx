@@ -6,26 +6,32 @@ import { ButtonLink } from '@/components/ui/button'
 import { Card } from '@/components/ui/card'
 import { Page } from '@/components/ui/page'
 import { listMakers } from '@/db/access/assigning'
+import { listBlocks } from '@/db/access/blocks'
 import { listCards } from '@/db/access/cards'
 import { getClient } from '@/db/access/clients'
 import { listDrafts } from '@/db/access/drafts'
 import { may, reachOf } from '@/db/permissions'
+import { garments } from '@/drafting'
 import { dayText } from '../../_data/dates'
 import { DraftRows } from '../../drafts/_parts/draft-rows'
 import { ArchiveButton } from '../_parts/archive-button'
+import { BlocksCard } from '../_parts/blocks-card'
 import { CardRows } from '../_parts/card-rows'
 
 export const metadata: Metadata = { title: 'Client' }
+
+const garmentName = (id: string) => garments.find((garment) => garment.id === id)?.name ?? id
 
 export default async function ClientPage({ params }: { params: Promise<{ id: string }> }) {
   const { id } = await params
   const actor = await requireActor(`/clients/${id}`)
   const client = await forPage(getClient(actor, id))
-  const [cards, drafts, makers] = await forPage(
+  const [cards, drafts, makers, blocks] = await forPage(
     Promise.all([
       listCards(actor, id),
       listDrafts(actor, { clientId: id }),
       reachOf(actor, 'drafts', 'write').has('all') ? listMakers(actor) : [],
+      may(actor, 'blocks', 'write') ? listBlocks(actor, id) : [],
     ]),
   )
   const writable = may(actor, 'clients', 'write')
@@ -84,6 +90,19 @@ export default async function ClientPage({ params }: { params: Promise<{ id: str
               </p>
             )}
           </Card>
+          {may(actor, 'blocks', 'write') && (drafts.items.length > 0 || blocks.length > 0) && (
+            <BlocksCard
+              clientId={id}
+              blocks={blocks.map(({ garment, draftId, draftName, versionName, setAt }) => ({
+                garment,
+                garmentName: garmentName(garment),
+                draftId,
+                draftName,
+                version: versionName ?? `as it was on ${dayText(setAt)}`,
+              }))}
+              drafts={drafts.items.map((draft) => ({ id: draft.id, name: draft.name }))}
+            />
+          )}
         </div>
         <Card title="Contact">
           <dl className="grid gap-3">

@@ -8,6 +8,7 @@ import { Checkbox } from '@/components/ui/checkbox'
 import { ErrorNote } from '@/components/ui/error-note'
 import { Field } from '@/components/ui/field'
 import { Select } from '@/components/ui/select'
+import { useToast } from '@/components/ui/toast'
 import { startDraft } from '../actions'
 import { GarmentChoice } from './garment-choice'
 import type { PicturedGarment } from './garment-pictures'
@@ -28,6 +29,7 @@ export function NewDraftForm({
   cards,
   sizes,
   methods,
+  blocks,
   first,
   teachable,
 }: {
@@ -37,6 +39,8 @@ export function NewDraftForm({
   readonly sizes: readonly SizeTable[]
   /** Built in, and the workroom's own. */
   readonly methods: readonly Method[]
+  /** In words, the client's blocks. */
+  readonly blocks: readonly string[]
   /** The card or the size that the choice begins with. */
   readonly first: string
   /** Whether the person may make it a teaching draft, which others may read. */
@@ -49,6 +53,8 @@ export function NewDraftForm({
   const [teaching, setTeaching] = useState(false)
   const table = sizes.find((each) => each.sizes.some(({ id }) => id === body))
   const [method, setMethod] = useState(methods[0]?.id ?? '')
+  const [fromBlock, setFromBlock] = useState(blocks.length > 0)
+  const say = useToast()
   const onCard = cards.some((each) => each.id === body)
   const [named, setNamed] = useState<string>()
   const [problems, setProblems] = useState<readonly { field: string; message: string }[]>([])
@@ -65,11 +71,14 @@ export function NewDraftForm({
           name,
           garment,
           methodId: method,
+          fromBlock: fromBlock && onCard,
           ...(onCard ? { cardId: body } : { sizeId: body }),
           ...(teaching ? { purpose: 'teaching' } : {}),
         })
-        if (result.ok) router.push(`/drafts/${ids.id}`)
-        else setProblems(result.problems)
+        if (result.ok) {
+          if (result.value.left.length > 0) say(`Left in the block: ${result.value.left.join('; ')}.`)
+          router.push(`/drafts/${ids.id}`)
+        } else setProblems(result.problems)
       } catch {
         setProblems([{ field: '', message: 'The server could not be reached. Nothing is lost: try again.' }])
       }
@@ -100,6 +109,14 @@ export function NewDraftForm({
         hint={methods.find((each) => each.id === method)?.description}
         choices={methods.map((each) => ({ value: each.id, label: each.name }))}
       />
+      {blocks.length > 0 && onCard && (
+        <Checkbox
+          label="Start from the client’s block"
+          hint={`${blocks.join('; ')}. Its corrections come along where this garment has the same points and rules.`}
+          checked={fromBlock}
+          onChange={(event) => setFromBlock(event.target.checked)}
+        />
+      )}
       <Field
         label="Name of the draft"
         value={name}

@@ -3,6 +3,7 @@ import { forPage, requireActor } from '@/app/_server/session'
 import { ButtonLink } from '@/components/ui/button'
 import { EmptyState } from '@/components/ui/empty-state'
 import { Page } from '@/components/ui/page'
+import { listBlocks } from '@/db/access/blocks'
 import { listCards } from '@/db/access/cards'
 import { getClient, listClients } from '@/db/access/clients'
 import { listMethods } from '@/db/access/methods'
@@ -34,11 +35,12 @@ export default async function NewDraftPage({ searchParams }: { searchParams: Sea
     )
   }
 
-  const [client, cards, own] = await forPage(
+  const [client, cards, own, blocks] = await forPage(
     Promise.all([
       clientId ? getClient(actor, clientId) : undefined,
       clientId || may(actor, 'cards', 'read') ? listCards(actor, clientId ?? null) : [],
       listMethods(actor),
+      clientId && may(actor, 'blocks', 'read') ? listBlocks(actor, clientId) : [],
     ]),
   )
   // A draft for a client stands on her own measurements; any other may stand on a published size.
@@ -74,6 +76,9 @@ export default async function NewDraftPage({ searchParams }: { searchParams: Sea
         cards={cards.map((card) => ({ id: card.id, name: `${card.name}, ${dayText(card.takenOn)}` }))}
         sizes={sizes}
         methods={[...methods, ...own].map(({ id, name, description }) => ({ id, name, description }))}
+        blocks={blocks.map(({ draftName, versionName }) =>
+          [draftName, versionName].filter(Boolean).join(', '),
+        )}
         first={(cards.find(({ id }) => id === one(asked.card)) ?? cards[0] ?? middleSize()).id}
         teachable={!client && reachOf(actor, 'drafts', 'write').has('all')}
       />
