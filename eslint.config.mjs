@@ -37,15 +37,7 @@ const noDefaultExports = {
 
 const config = [
   {
-    ignores: [
-      'node_modules/**',
-      '.next*/**',
-      '.data/**',
-      '.cache/**',
-      'next-env.d.ts',
-      'test-results/**',
-      'public/sw.js',
-    ],
+    ignores: ['node_modules/**', '.next*/**', '.data/**', '.cache/**', 'next-env.d.ts', 'test-results/**'],
   },
   ...next,
   ...typescript,

@@ -9,7 +9,9 @@ import './globals.css'
 export const metadata: Metadata = {
   title: { default: 'Chalkfold', template: '%s · Chalkfold' },
   description: 'Flat pattern drafting for dressmakers: measure, draft, check, print.',
-  icons: { icon: '/icons/mark.svg' },
+  icons: { icon: '/icons/mark.svg', apple: '/icons/mark-192.png' },
+  manifest: '/manifest.webmanifest',
+  appleWebApp: { title: 'Chalkfold' },
 }
 
 export const viewport: Viewport = {

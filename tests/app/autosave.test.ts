@@ -145,6 +145,26 @@ describe('autosave', () => {
     expect(states.at(-1)).toBe('saved')
   })
 
+  it('hands on what the server has after each save, for opening without the network', async () => {
+    network([Response.json({ ok: true, value: { outcome: 'saved', head: version('made') } })])
+    const onServer: string[] = []
+    const autosave = createAutosave({
+      draftId: 'draft',
+      base: 'first',
+      newId: () => 'made',
+      keep: async () => {},
+      drop: async () => {},
+      onSaved: ({ id }) => onServer.push(id),
+      onState: () => {},
+      onConflict: () => {},
+    })
+    autosave.change(content(1))
+    await vi.advanceTimersByTimeAsync(2100)
+    expect(onServer).toEqual(['made'])
+    autosave.goOnFrom(version('theirs'), undefined)
+    expect(onServer).toEqual(['made', 'theirs'])
+  })
+
   it('says that a device is full, and still sends', async () => {
     const sent = network([])
     const states: SaveState['kind'][] = []

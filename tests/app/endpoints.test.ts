@@ -2,8 +2,13 @@ import { describe, expect, it } from 'vitest'
 import { endpoints } from '../security/endpoints'
 import { inlineActions, sourceEndpoints } from '../support/source-endpoints'
 
-/** Written out instead of wrapped, because there is nobody to ask for: health, and signing in itself. */
-const written = new Set(['GET /api/health', 'GET /api/auth/[...nextauth]', 'POST /api/auth/[...nextauth]'])
+/** Written out instead of wrapped, because there is nobody to ask for: health, the files of the build, and signing in itself. */
+const written = new Set([
+  'GET /api/health',
+  'GET /api/shell',
+  'GET /api/auth/[...nextauth]',
+  'POST /api/auth/[...nextauth]',
+])
 
 /** What checks who calls: by the cookie, or by the secret in a link. */
 function wrapperFor(name: string): string {

@@ -42,6 +42,7 @@ const drafters = ['owner', 'drafter'] as const
  */
 export const endpoints: Readonly<Record<string, Endpoint>> = {
   'GET /api/health': { access: 'anybody', input: nothing, path: () => '/api/health', plain: true },
+  'GET /api/shell': { access: 'anybody', input: nothing, path: () => '/api/shell', plain: true },
   'GET /api/auth/[...nextauth]': {
     access: 'anybody',
     input: nothing,

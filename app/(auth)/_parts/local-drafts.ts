@@ -1,12 +1,6 @@
-import { openDB } from 'idb'
-import { localPrefix, localStore } from '@/app/(studio)/_data/local-copy'
-
-/** Names of the databases in which drafts wait on this device, of whoever used it. */
-async function localNames(): Promise<readonly string[]> {
-  if (!('indexedDB' in window) || !indexedDB.databases) return []
-  const all = await indexedDB.databases()
-  return all.flatMap(({ name }) => (name?.startsWith(localPrefix) ? [name] : []))
-}
+import { deleteDB, openDB } from 'idb'
+import { forgetHere } from '@/app/(studio)/_data/here'
+import { localNames, localStore } from '@/app/(studio)/_data/local-copy'
 
 /** How many drafts on this device have changes that the server does not have. */
 export async function countUnsent(): Promise<number> {
@@ -22,7 +16,8 @@ export async function countUnsent(): Promise<number> {
   return count
 }
 
-/** Takes every draft off this device. */
+/** Takes everybody's drafts off this device, and has the other open pages leave. */
 export async function forgetLocal(): Promise<void> {
-  for (const name of await localNames()) indexedDB.deleteDatabase(name)
+  forgetHere()
+  await Promise.all((await localNames()).map((name) => deleteDB(name)))
 }

@@ -15,6 +15,8 @@ export interface AutosaveOptions {
   readonly newId: () => string
   readonly keep: (copy: LocalCopy) => Promise<void>
   readonly drop: (headId: string) => Promise<void>
+  /** The server has a version now: this is what stands there. */
+  readonly onSaved?: (now: Version) => void
   readonly onState: (state: SaveState) => void
   /** Another tab or person saved first. Ours is kept beside it; the person chooses. */
   readonly onConflict: (theirs: Version) => void
@@ -36,7 +38,7 @@ interface Head extends Content {
  * at a time; a version is sent under the same id until it is answered, so that a lost answer is a retry and not a conflict.
  */
 export function createAutosave(options: AutosaveOptions) {
-  const { draftId, newId, keep, drop, onState, onConflict } = options
+  const { draftId, newId, keep, drop, onSaved, onState, onConflict } = options
   let base = options.base
   let head: Head | undefined
   let sending: Promise<void> | undefined
@@ -80,6 +82,7 @@ export function createAutosave(options: AutosaveOptions) {
       base = id
       if (head === version) head = undefined
       await drop(id).catch(() => undefined)
+      onSaved?.(now)
       onState(head ? { kind: 'unsaved' } : { kind: 'saved', at: now.savedAt })
     } catch (error) {
       waitingToRetry = true
@@ -134,6 +137,7 @@ export function createAutosave(options: AutosaveOptions) {
     /** After a conflict: goes on from the other version, with what stands on the table as the next one. */
     goOnFrom(theirs: Version, content: Content | undefined) {
       base = theirs.id
+      onSaved?.(theirs)
       held = false
       head = content ? { ...content, id: newId(), kind: 'auto' } : undefined
       if (head) void send()

@@ -1,4 +1,6 @@
 import type { Metadata } from 'next'
+import { OnThisDevice } from '@/app/(workroom)/_parts/on-this-device'
+import { buildId } from '@/app/_server/build'
 import { drawnOtherwise } from '@/app/_server/print/kept-or-drawn'
 import { forPage, requireActor } from '@/app/_server/session'
 import { getDraft } from '@/db/access/drafts'
@@ -15,23 +17,26 @@ export default async function DraftPage({ params }: { params: Promise<{ id: stri
   const kept = head.printed || head.shared ? await forPage(keptDraft(actor, head.id)) : null
   const otherwise = drawnOtherwise(head.order, kept)
   return (
-    <OpenDraft
-      key={id}
-      draft={{ id, name, head, writable, shareable: writable && may(actor, 'shares', 'write') }}
-      back={
-        clientId && clientName
-          ? { href: `/clients/${clientId}`, label: clientName }
-          : { href: '/drafts', label: 'Drafts' }
-      }
-      otherwise={
-        otherwise && {
-          keptAt: otherwise.keptAt,
-          differences: otherwise.differences,
-          drawable: otherwise.drawable,
+    <>
+      <OnThisDevice build={buildId} userId={actor.userId} workroomId={actor.workroomId} />
+      <OpenDraft
+        key={id}
+        draft={{ id, name, head, writable, shareable: writable && may(actor, 'shares', 'write') }}
+        back={
+          clientId && clientName
+            ? { href: `/clients/${clientId}`, label: clientName }
+            : { href: '/drafts', label: 'Drafts' }
         }
-      }
-      userId={actor.userId}
-      workroomId={actor.workroomId}
-    />
+        otherwise={
+          otherwise && {
+            keptAt: otherwise.keptAt,
+            differences: otherwise.differences,
+            drawable: otherwise.drawable,
+          }
+        }
+        userId={actor.userId}
+        workroomId={actor.workroomId}
+      />
+    </>
   )
 }

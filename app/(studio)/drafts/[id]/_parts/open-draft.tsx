@@ -1,13 +1,15 @@
 'use client'
 
 import dynamic from 'next/dynamic'
-import { useCallback, useMemo, useState } from 'react'
+import { useCallback, useEffect, useMemo, useState } from 'react'
 import { Studio } from '@/components/studio/studio'
 import { createStudioStore } from '@/components/studio/store'
-import { ErrorNote } from '@/components/ui/error-note'
+import { ErrorNote, Note } from '@/components/ui/error-note'
 import { DraftingError, draftGarment, garments, handles, measurements } from '@/drafting'
 import type { Draft, DraftOrder } from '@/drafting/contract'
 import type { Version } from '../../../_data/api'
+import { localName } from '../../../_data/local-copy'
+import { rememberOpened } from '../../../_data/opened-drafts'
 import { ConflictNotice } from './conflict-notice'
 import { DraftName } from './draft-name'
 import { KeptNotice, type KeptOtherwise } from './kept-notice'
@@ -46,6 +48,8 @@ export interface OpenDraftProps {
   readonly otherwise: KeptOtherwise | null
   readonly userId: string
   readonly workroomId: string
+  /** It comes from this device, because the server could not be reached. */
+  readonly fromDevice?: boolean
 }
 
 /** A draft on the table: the store, what keeps it, and the dialogs around it. */
@@ -62,6 +66,7 @@ function Opened({
   otherwise,
   userId,
   workroomId,
+  fromDevice = false,
   garment,
 }: OpenDraftProps & { readonly garment: (typeof garments)[number] }) {
   const [studio] = useState(() => {
@@ -79,6 +84,15 @@ function Opened({
   const [told, setTold] = useState(false)
   const place = { draftId: draft.id, head: draft.head, writable: draft.writable, userId, workroomId }
   const { state, theirs, settle, autosave } = useAutosave(store, place)
+
+  useEffect(() => {
+    if (fromDevice) return
+    const opened = { draftId: draft.id, draft, back, openedAt: new Date().toISOString() }
+    // Without room on the device it only opens with the network.
+    void rememberOpened(localName(userId, workroomId), opened).catch(() => undefined)
+    // What it was opened with; every later version is remembered when it is saved.
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+  }, [draft.id])
 
   const close = () => setOpen(undefined)
   const onVersions = useCallback(() => setOpen('versions'), [])
@@ -115,9 +129,18 @@ function Opened({
     }
     if (state.kind === 'signed-out') return <SignedOutNotice onBack={() => void autosave.retry()} />
     if (state.kind === 'refused') return <ErrorNote>{state.message}</ErrorNote>
-    if (!otherwise || told) return undefined
-    return <KeptNotice otherwise={otherwise} onPrint={onPrint} onClose={() => setTold(true)} />
-  }, [autosave, onPrint, otherwise, settle, state, store, theirs, told])
+    if (otherwise && !told)
+      return <KeptNotice otherwise={otherwise} onPrint={onPrint} onClose={() => setTold(true)} />
+    if (!fromDevice) return undefined
+    return (
+      <Note kind="info" className="border-b hairline">
+        <p role="status">
+          Opened from this device, without the network. What you change is kept here, and saved as soon as the
+          network is back.
+        </p>
+      </Note>
+    )
+  }, [autosave, fromDevice, onPrint, otherwise, settle, state, store, theirs, told])
 
   return (
     <>

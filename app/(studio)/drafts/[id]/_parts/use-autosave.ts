@@ -6,6 +6,7 @@ import type { SaveState } from '@/components/studio/save-state'
 import type { StudioStore } from '@/components/studio/store'
 import type { Version } from '../../../_data/api'
 import { createAutosave, type Content } from '../../../_data/autosave'
+import { rememberSaved } from '../../../_data/opened-drafts'
 import { dropLocal, localName, readLocal, writeLocal } from '../../../_data/local-copy'
 
 interface Place {
@@ -36,6 +37,7 @@ export function useAutosave(store: StudioStore, { draftId, head, writable, userI
       newId,
       keep: (copy) => writeLocal(name, copy),
       drop: (headId) => dropLocal(name, draftId, headId),
+      onSaved: (now) => void rememberSaved(name, draftId, now).catch(() => undefined),
       onState: setState,
       onConflict: setTheirs,
     }),
