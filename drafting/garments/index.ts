@@ -7,6 +7,7 @@ import { circleSkirt } from './circle-skirt'
 import { flaredDress } from './flared-dress'
 import { gatheredSkirt } from './gathered-skirt'
 import { goredSkirt } from './gored-skirt'
+import { kaftan } from './kaftan'
 import { straightSkirt } from './straight-skirt'
 
 const all: readonly Garment[] = [
@@ -17,6 +18,7 @@ const all: readonly Garment[] = [
   aLineSkirt,
   goredSkirt,
   gatheredSkirt,
+  kaftan,
 ]
 
 /** Every garment that can be drafted. */

@@ -68,6 +68,11 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     default: {},
     full: { fullness: 2.5, opening: 'side zip', length: 900 },
   },
+  kaftan: {
+    default: {},
+    gusset: { overarmSlope: 20, neckShape: 'V', sideSlits: false },
+    short: { sleeveReach: 0.3, length: 900, backOpening: 'keyhole' },
+  },
   'circle-skirt': {
     default: {},
     full: { share: '1', panels: 4, pockets: true },

@@ -48,6 +48,8 @@ const orders: readonly DraftOrder[] = [
   skirt({}),
   { ...skirt({ share: '1', pockets: true, waistEasedIn: 5 }, two), unit: 'in' },
   skirt({ share: '1 1/2', panels: 5 }),
+  { garment: 'kaftan', measurements: two, design: { gusset: 'always', sleeveReach: 0.3 } },
+  { garment: 'kaftan', measurements: one, design: { sleeveReach: 0.25, mouthWidth: 150 } },
   dress(one, { sleeve: 'bishop' }),
   dress(two, { sleeve: 'cap', neckShape: 'scoop' }),
   dress(one, { sleeve: 'puff', neckShape: 'sweetheart' }),

@@ -36,6 +36,12 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
   ],
   2: [
     [
+      'a gusset is set into the back of the sleeve by 2 mm too little',
+      'parts/kimono/gusset.ts',
+      "a: [run(half, 'sleeve-under', sleeve)],",
+      "a: [run(half, 'sleeve-under', half === 'back' ? sleeve + 2 : sleeve)],",
+    ],
+    [
       'the hem of a bishop sleeve is 2 mm longer than its cuff gathers',
       'parts/sleeves/bishop.ts',
       "+ pen.value('bishopGather')",
@@ -184,6 +190,12 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
     ['no caution says that an allowance was too wide', 'pieces/finish.ts', "'allowance-clipped',", "'',"],
   ],
   7: [
+    [
+      'a kimono sleeve ends as soon as it clears the body',
+      'parts/kimono/layout.ts',
+      'run - sizes.corner - 45',
+      'run - 5',
+    ],
     [
       'the front of the head is 1 mm short',
       'parts/sleeves/set-in.ts',

@@ -8,6 +8,7 @@ import { buttonBand, buttonDesign, buttonRules } from './button-band'
 export { buttonRules }
 import { centreBackZip } from './centre-back-zip'
 import { drawDrop } from './drop'
+import { frontSlit, frontSlitDesign } from './front-slit'
 import { headRules } from './head-room'
 import { keyhole, keyholeDesign } from './keyhole'
 import { none } from './none'
@@ -21,6 +22,7 @@ const openings: Readonly<Record<string, Opening>> = {
   'button band': buttonBand,
   keyhole,
   'side zip': sideZip,
+  'front slit': frontSlit,
 }
 
 /**
@@ -39,6 +41,7 @@ export function openingDesign(offered: readonly [string, ...string[]], zip = 380
     ),
     ...buttonDesign,
     ...keyholeDesign,
+    ...frontSlitDesign,
   ]
   return [
     choice('backOpening', 'Opening', 'opening', offered),

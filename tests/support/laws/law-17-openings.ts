@@ -16,7 +16,7 @@ export const openings: DraftLaw = (draft, order, engine) => {
     ['neckWidening', 'frontNeckDrop', 'backNeckDrop'].every((id) => style(id) === 0) &&
     !order.rules &&
     !order.corrections?.some((one) => !one.off)
-  const slopes = ['shoulderSlope', 'frontSlope', 'backSlope']
+  const slopes = ['shoulderSlope', 'frontSlope', 'backSlope', 'overarmSlope']
   const asUsual = slopes.every((id) => {
     const slope = garment.design.find((value) => value.id === id)
     return !slope || style(id) === slope.default
@@ -42,6 +42,8 @@ export const openings: DraftLaw = (draft, order, engine) => {
     stands(found, draft, body('head') + 20)
   }
   if (opens === 'button band') buttoned(found, draft, style('buttonSize') as number)
+  // A sleeve in one with the body has no armhole.
+  if (!garment.design.some((value) => value.id === 'sleeve') || style('sleeve') === 'kimono') return found.all
   const armhole = edges(draft, 'armhole')
   const ease = style('sleeve') === 'none' ? 0 : (numberOf('sleeveEase', order, garment, draft.used) ?? NaN)
   found.atMost('armhole', 'tighter than the arm and its ease by', body('upperArm') + ease - armhole, 1e-6)

@@ -34,6 +34,7 @@ const promised: Readonly<Record<string, Readonly<Record<string, Fit['relation']>
   'a-line-skirt': { waist: 'equal', hip: 'at-least' },
   'gored-skirt': { waist: 'equal', hip: 'at-least' },
   'gathered-skirt': { waist: 'equal' },
+  kaftan: { bust: 'at-least', hip: 'at-least', biceps: 'at-least' },
   bodice: { bust: 'equal', waist: 'equal', biceps: 'at-least', armhole: 'at-least' },
 }
 

@@ -7,10 +7,14 @@ import { Findings, type DraftLaw } from './violation'
 export const sleeves: DraftLaw = (draft, order, engine) => {
   const found = new Findings(7)
   const garment = garmentOf(order, engine.garments)
-  if (!garment.design.some((value) => value.id === 'sleeve')) return found.all
+  if (!garment.design.some((value) => value.id === 'sleeve')) {
+    inOne(found, draft)
+    return found.all
+  }
   const kind = styleOf(order, garment, 'sleeve')
   const sleeve = draft.pieces.find((one) => one.id === 'sleeve')
-  if (kind === 'none') {
+  if (kind === 'kimono') inOne(found, draft)
+  if (kind === 'none' || kind === 'kimono') {
     if (sleeve) found.add('sleeve', 'is drawn for a dress without one')
     return found.all
   }
@@ -72,6 +76,23 @@ export const sleeves: DraftLaw = (draft, order, engine) => {
   }
   if (kind === 'cap') coveredPart(found, draft, Number(styleOf(order, garment, 'capReach')), tolerance)
   return found.all
+}
+
+/** A sleeve in one with the body ends clear of its side, and a gusset is a square that front and back share alike. */
+function inOne(found: Findings, draft: Draft): void {
+  for (const id of ['front', 'back']) {
+    const piece = draft.pieces.find((one) => one.id === id)
+    const [low, corner] = ['wristLow', 'underarm'].map(
+      (mark) => piece?.marks.find((one) => one.id === mark)?.at,
+    )
+    if (!piece?.edges.some((one) => one.id === 'mouth') || !low || !corner) continue
+    if (low.x - corner.x < 60)
+      found.add(id, `its sleeve is only ${(low.x - corner.x).toFixed(1)} mm clear of its side`)
+  }
+  const gusset = draft.pieces.find((one) => one.id === 'gusset')
+  const sides = gusset?.edges.map((one) => lengthOfPath(one.path)) ?? []
+  const [first = 0] = sides
+  for (const side of sides) found.atMost('gusset', 'sides differ', Math.abs(side - first), 1e-6)
 }
 
 /** A cap ends where it was asked to, the same part of the armhole in front and behind. */
