@@ -22,9 +22,10 @@ export function closeUp(sketch: Sketch, draft: Draft, part: string): Sketch {
   if (part === 'neckline' || part === 'collar') return windowOn(sketch, neck, 0.7)
   if (part === 'sleeve' || part === 'armhole') {
     const arm = cornersOf('armhole')
-    const sleeve = sketch.lines.slice(0, -1).flatMap(({ kind, path }) => {
+    // Sleeves hang beside the centre; body and collar lie on it.
+    const sleeve = sketch.lines.flatMap(({ kind, path }) => {
       const { min, max } = bounds(path)
-      return kind === 'shape' ? [min, max] : []
+      return kind === 'shape' && (min.x > 0 || max.x < 0) ? [min, max] : []
     })
     return windowOn(sketch, [...arm, ...sleeve], 0.12)
   }

@@ -1,6 +1,7 @@
 import type { Draft, Piece, Point } from '../contract'
 import { boundsOfPoints } from '../drawing/bounds'
 import { bounds } from '../geometry'
+import { neckSketch } from './at-neck'
 import { bandOver } from './band'
 import { bodySketch } from './body'
 import { fanned } from './fan'
@@ -21,7 +22,7 @@ export interface Sketch {
  * @param draft of any garment
  */
 export function sketch(draft: Draft): Sketch {
-  const own = draft.pieces.filter((piece) => !isFacing(piece))
+  const own = draft.pieces.filter((piece) => piece.id === 'collar-stand' || !isFacing(piece))
   const fronts = own.filter(isFront)
   const lines = fronts.length > 0 ? frontSketch(fronts, own) : fanned(own)
   const corners = lines.flatMap(({ path }) => {
@@ -37,5 +38,11 @@ function frontSketch(fronts: readonly Piece[], own: readonly Piece[]): readonly 
   const body = bodySketch(fronts)
   const sleeve = own.find(({ id }) => id === 'sleeve')
   const band = own.find(({ id }) => id === 'waistband')
-  return [...(sleeve ? sleeveSketch(sleeve, fronts) : []), ...body, ...(band ? bandOver(fronts, band) : [])]
+  const front = fronts.find(({ id }) => id === 'front')
+  return [
+    ...(sleeve ? sleeveSketch(sleeve, fronts) : []),
+    ...body,
+    ...(front ? neckSketch(front, own) : []),
+    ...(band ? bandOver(fronts, band) : []),
+  ]
 }

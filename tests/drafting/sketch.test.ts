@@ -46,9 +46,9 @@ it('no two garments look alike', () => {
   expect(new Set(pictures).size).toBe(garments.length)
 })
 
-it('each neck shape and each sleeve of the dress can be told apart', () => {
+it('each neck shape, sleeve, collar and way of closing in front can be told apart', () => {
   const dress = garments.find(({ id }) => id === 'flared-dress')
-  for (const id of ['neckShape', 'sleeve']) {
+  for (const id of ['neckShape', 'sleeve', 'collar']) {
     const choices = dress?.design.find((value) => value.id === id)?.choices ?? []
     const pictures = choices.map((choice) =>
       JSON.stringify(pictureOf(drawn('flared-dress', { [id]: choice }))),
