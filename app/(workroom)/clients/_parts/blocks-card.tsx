@@ -59,7 +59,10 @@ export function BlocksCard({
             {blocks.map(({ garment, garmentName, draftId: id, draftName, version }) => (
               <li key={garment} className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1">
                 <span>
-                  <Link href={`/drafts/${id}`} className="font-semibold underline underline-offset-4">
+                  <Link
+                    href={`/drafts/${id}`}
+                    className="font-semibold decoration-rule underline-offset-4 hover:text-indigo hover:underline"
+                  >
                     {draftName}
                   </Link>{' '}
                   <span className="text-walnut">
@@ -81,7 +84,7 @@ export function BlocksCard({
         {drafts.length > 0 && (
           <div className="flex flex-wrap items-end gap-3">
             <Select
-              label="Draft"
+              label="Draft to start from"
               className="min-w-52 grow"
               value={draftId}
               onChange={(event) => setDraftId(event.target.value)}
