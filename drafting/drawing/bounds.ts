@@ -4,13 +4,16 @@ import { textCorners } from './text-box'
 
 /** The smallest upright box around all items; a point at 0,0 when there are none. */
 export function boundsOf(items: readonly DrawingItem[]): Drawing['bounds'] {
-  return boundsOfPoints(
-    items.flatMap((item) => {
-      if (item.kind === 'text') return textCorners(item)
-      const { min, max } = bounds(item.path)
-      return [min, max]
-    }),
-  )
+  const corners: Point[] = []
+  for (const item of items) {
+    if (item.kind === 'text') {
+      corners.push(...textCorners(item))
+      continue
+    }
+    const { min, max } = bounds(item.path)
+    corners.push(min, max)
+  }
+  return boundsOfPoints(corners)
 }
 
 /** The smallest upright box around all points; a point at 0,0 when there are none. */
@@ -21,10 +24,10 @@ export function boundsOfPoints(points: readonly Point[]): Drawing['bounds'] {
   let maxX = -Infinity
   let maxY = -Infinity
   for (const { x, y } of points) {
-    minX = Math.min(minX, x)
-    minY = Math.min(minY, y)
-    maxX = Math.max(maxX, x)
-    maxY = Math.max(maxY, y)
+    if (x < minX) minX = x
+    if (y < minY) minY = y
+    if (x > maxX) maxX = x
+    if (y > maxY) maxY = y
   }
   return { min: { x: minX, y: minY }, max: { x: maxX, y: maxY } }
 }

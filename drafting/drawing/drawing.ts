@@ -14,7 +14,7 @@ import { markItems } from './mark-items'
 import { notchItems } from './notch-items'
 import type { DrawingOptions } from './options'
 import { cutItems, stitchItems } from './outline-items'
-import { placeItem } from './place'
+import { itemPlacer } from './place'
 
 /** What one layer of one piece shows, in the piece's own frame. */
 type Painter = (piece: Piece, draft: Draft, options: DrawingOptions) => readonly DrawingItem[]
@@ -44,14 +44,13 @@ const painters: Readonly<Record<Layer, Painter>> = {
 export function drawing(draft: Draft, options: DrawingOptions = {}): Drawing {
   const places = options.places ?? arrange(draft, { allowances: options.allowances ?? true })
   const wanted = options.layers ?? patternLayers
-  const items = layers
-    .filter((layer) => wanted.includes(layer))
-    .flatMap((layer) =>
-      draft.pieces.flatMap((piece) =>
-        painters[layer](piece, draft, options)
-          .filter((item) => item.layer === layer)
-          .map((item) => placeItem(item, places[piece.id])),
-      ),
-    )
+  const laid = draft.pieces.map((piece) => ({ piece, place: itemPlacer(places[piece.id]) }))
+  const items: DrawingItem[] = []
+  for (const layer of layers) {
+    if (!wanted.includes(layer)) continue
+    for (const { piece, place } of laid)
+      for (const item of painters[layer](piece, draft, options))
+        if (item.layer === layer) items.push(place(item))
+  }
   return { items, bounds: boundsOf(items) }
 }

@@ -62,12 +62,8 @@ function search(
   width: number,
   height: number,
 ): Point | null {
-  let top = Infinity
-  let bottom = -Infinity
-  for (const [from] of wall) {
-    top = Math.min(top, from.y)
-    bottom = Math.max(bottom, from.y)
-  }
+  const { left, right, top, bottom } = boxOf(wall)
+  if (right - left < width + 2 * clearance) return null
   const half = height / 2 + clearance
   for (const row of rows) {
     const y = top + (bottom - top) * row
@@ -76,6 +72,20 @@ function search(
     if (gap && gap.to - gap.from >= width + 2 * clearance) return { x: (gap.from + gap.to) / 2, y }
   }
   return null
+}
+
+function boxOf(wall: readonly Stroke[]) {
+  let left = Infinity
+  let right = -Infinity
+  let top = Infinity
+  let bottom = -Infinity
+  for (const [{ x, y }] of wall) {
+    if (x < left) left = x
+    if (x > right) right = x
+    if (y < top) top = y
+    if (y > bottom) bottom = y
+  }
+  return { left, right, top, bottom }
 }
 
 /** The widest stretch of the band y ± half that no line enters and that lies inside the wall. */
@@ -102,13 +112,15 @@ function widestGap(wall: readonly Stroke[], inner: readonly Stroke[], y: number,
 
 /** The stretch of x that a stroke covers within the band, or null when it stays outside. */
 function shadow([from, to]: Stroke, top: number, bottom: number): { from: number; to: number } | null {
-  const [upper, lower] = from.y <= to.y ? [from, to] : [to, from]
+  const falls = from.y <= to.y
+  const upper = falls ? from : to
+  const lower = falls ? to : from
   if (lower.y < top || upper.y > bottom) return null
   const rise = lower.y - upper.y
-  const xAt = (y: number) => (rise === 0 ? upper.x : upper.x + ((lower.x - upper.x) * (y - upper.y)) / rise)
-  const a = rise === 0 ? upper.x : xAt(Math.max(top, upper.y))
-  const b = rise === 0 ? lower.x : xAt(Math.min(bottom, lower.y))
-  return { from: Math.min(a, b), to: Math.max(a, b) }
+  const run = lower.x - upper.x
+  const a = rise === 0 ? upper.x : upper.x + (run * (Math.max(top, upper.y) - upper.y)) / rise
+  const b = rise === 0 ? lower.x : upper.x + (run * (Math.min(bottom, lower.y) - upper.y)) / rise
+  return a < b ? { from: a, to: b } : { from: b, to: a }
 }
 
 function isInside(wall: readonly Stroke[], x: number, y: number): boolean {

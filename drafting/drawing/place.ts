@@ -14,10 +14,17 @@ export function placeTransform(place: Place | undefined): Transform {
 
 /** An item of a piece as it lies at the piece's place. Texts turn with their piece. */
 export function placeItem(item: DrawingItem, place: Place | undefined): DrawingItem {
-  if (!place) return item
+  return itemPlacer(place)(item)
+}
+
+/** Lays the items of one piece at its place. */
+export function itemPlacer(place: Place | undefined): (item: DrawingItem) => DrawingItem {
+  if (!place) return (item) => item
   const transform = placeTransform(place)
-  if (item.kind === 'path') return { ...item, path: transformPath(transform, item.path) }
-  return { ...item, at: applyTo(transform, item.at), turn: item.turn + (place.turn ?? 0) }
+  return (item) =>
+    item.kind === 'path'
+      ? { ...item, path: transformPath(transform, item.path) }
+      : { ...item, at: applyTo(transform, item.at), turn: item.turn + (place.turn ?? 0) }
 }
 
 /** A path as it lies at its piece's place. */
