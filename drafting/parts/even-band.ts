@@ -19,8 +19,7 @@ import {
   startTangent,
 } from '../geometry'
 import { straight, type PiecePen } from '../pen/piece-pen'
-import { leaning, neckCurve } from './necklines'
-import { mostCurvedLean } from './necklines/neckline'
+import { neckCurve } from './necklines'
 import { v } from './necklines/v'
 import { trimBetween } from './trim'
 
@@ -55,11 +54,20 @@ export function evenBand(neckline: Path, depth: number, body: PiecePen, shoulder
     return openPath([line(low, knee), line(knee, end)])
   }
   if (pointed) return v.draw(low, end, { x: -arrives.x, y: -arrives.y })
-  const lean = Math.min(
-    (Math.atan2(arrives.x, -arrives.y) * 180) / Math.PI,
-    mostCurvedLean(end.x - low.x, low.y - end.y),
-  )
-  return neckCurve(low, end, leaning(lean), 0.52, 0.5)
+  return roundBand(low, end, scale(arrives, -1))
+}
+
+/** From the centre, square to it, to the shoulder, in a given direction there. */
+function roundBand(low: Point, end: Point, leaves: Point): Path {
+  const width = end.x - low.x
+  const depth = low.y - end.y
+  if (leaves.y <= 1e-9 || width + (leaves.x * depth) / leaves.y > 0.35 * width) {
+    return neckCurve(low, end, leaves, 0.52, 0.5)
+  }
+  // A narrow neck leaves the shoulder too flat for one bend: two gentle ones.
+  return openPath([
+    cubic(low, { x: low.x + 0.3 * width, y: low.y }, add(end, scale(leaves, 0.35 * depth)), end),
+  ])
 }
 
 /** Radius of the inside corner where a band turns down into a tongue or a front facing, mm. */

@@ -1,7 +1,8 @@
-import { intersections } from '../geometry'
+import { startOf } from '../geometry'
 import type { Pen } from '../pen/pen'
 import { straight, type PiecePen } from '../pen/piece-pen'
 import type { Centre } from './openings/opening'
+import { innerGrain } from './inner-grain'
 import { dropPath } from './openings/drop'
 
 /** Marks traced from the body, so that corrections there follow here. */
@@ -44,7 +45,9 @@ export function closeFacing(pen: Pen, facing: PiecePen, centre: Centre): void {
     })
   }
   cutFacing(facing, onFold)
-  layGrain(facing, Math.min(14, Math.abs(facing.at('sideNeck').x) / 3))
+  const side = facing.at('sideNeck').x
+  const outer = startOf(facing.edge('outer').path).x
+  layGrain(facing, Math.min(14, side / 3), side * 0.6, side * 0.85, (side + outer) / 2)
   const [top, bottom] = [facing.at('centreNeck'), facing.at('centreEdge')]
   if (centre.keyhole) {
     facing.inner(
@@ -68,13 +71,9 @@ export function closeFacing(pen: Pen, facing: PiecePen, centre: Centre): void {
   }
 }
 
-/** Lays the grain along the centre, so far out, between the neckline and the lower edge: inside whatever their shapes. */
-export function layGrain(facing: PiecePen, out: number, lower = 'outer'): void {
-  const column = straight({ x: out, y: -2000 }, { x: out, y: 4000 })
-  const above = intersections(facing.edge('neckline').path, column).map(({ point }) => point.y)
-  const top = Math.max(...above, facing.at('sideNeck').y)
-  const below = intersections(facing.edge(lower).path, column).map(({ point }) => point.y)
-  const bottom = Math.min(...below.filter((y) => y > top), top + 1000)
-  const clear = Math.min(5, (bottom - top) / 4)
-  facing.grain({ x: out, y: top + clear }, { x: out, y: bottom - clear })
+/** The grain lies in the first of these columns, mm from the centre, or in a later one where the facing is much longer. */
+export function layGrain(facing: PiecePen, ...columns: readonly number[]): void {
+  const outline = facing.edges.map((edge) => edge.path)
+  const grain = innerGrain(outline, columns)
+  if (grain) facing.grain(grain.from, grain.to)
 }

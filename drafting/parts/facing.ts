@@ -5,7 +5,7 @@ import type { Pen } from '../pen/pen'
 import { between, type PiecePen } from '../pen/piece-pen'
 import { fairCurve } from './hem'
 import { armholeCurve } from './armhole'
-import { closeFacing, copyMarks } from './facing-centre'
+import { closeFacing, copyMarks, layGrain } from './facing-centre'
 import type { Centre } from './openings/opening'
 
 /** What a facing is traced from: a body with its darts closed. */
@@ -95,8 +95,7 @@ export function armholeFacing(pen: Pen, faced: Faced, depth: number): PiecePen {
     { cloth: 'interfacing', count: 2, onFold: false, handed: true },
   )
   const middle = facing.at('hollow').x - depth / 2
-  const level = facing.at('hollow').y
-  facing.grain({ x: middle, y: level - depth * 0.6 }, { x: middle, y: level + depth * 0.6 })
+  layGrain(facing, middle, middle + depth / 4, middle + depth / 2)
   return facing
 }
 

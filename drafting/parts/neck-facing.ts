@@ -158,7 +158,7 @@ function downTheFront(pen: Pen, facing: PiecePen, faced: Faced, band: Path, cent
     mask: faced.uses,
   })
   cutFacing(facing, false)
-  layGrain(facing, half * 0.4, 'foot')
+  layGrain(facing, half * 0.4)
   pen.sew({
     id: 'front-edge',
     name: 'Front edge to its facing',

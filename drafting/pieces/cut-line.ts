@@ -77,6 +77,7 @@ const sideOf = (edge: OutlineEdge, clipped: Set<string>): Side => {
     edge,
     allowance,
     offset,
+    tight: parallel.clipped,
     start: startOf(offset),
     end: endOf(offset),
     leaving: startTangent(edge.path),

@@ -14,6 +14,8 @@ export const mitre = (a: Side, b: Side, at: Point): Turn => {
   const dx = b.start.x - a.end.x
   const dy = b.start.y - a.end.y
   const along = dot(a.arriving, b.leaving)
+  const shortened = along > 0 && (a.tight || b.tight) ? cutBack(a, b) : undefined
+  if (shortened) return shortened
   if (Math.abs(dx) + Math.abs(dy) <= SAME && (along > 0 || a.allowance + b.allowance === 0))
     return straightOn(a, b)
   const turn = cross(a.arriving, b.leaving)
@@ -39,6 +41,13 @@ export const mitre = (a: Side, b: Side, at: Point): Turn => {
 
 /** The two sides go on from one another: one point. */
 const straightOn = (a: Side, b: Side): Turn => ({ joint: b.allowance === 0 ? b.start : a.end, lead: [] })
+
+/** Two edges of one curve that bends tighter than its allowance where they join: their offsets cross before their ends. */
+const cutBack = (a: Side, b: Side): Turn | undefined => {
+  const one = intersections(a.offset, b.offset)[0]
+  if (!one || one.a > pathLength(a.offset) - 1e-3) return undefined
+  return { joint: one.point, leave: one.a, lead: [], enter: one.b }
+}
 
 /** At an inner corner the offsets cross: both are cut back to there. */
 const innerCorner = (a: Side, b: Side): Turn | undefined => {
@@ -71,19 +80,33 @@ const behind = (p: Point, side: Side): boolean => dot(subtract(p, side.start), s
 const ahead = (p: Point, side: Side): boolean => dot(subtract(p, side.end), side.arriving) >= 0
 
 /**
- * A sharp corner cut off at 2.5 × the larger allowance, square to the line from the corner to where the mitre would be: with
- * equal allowances the bisector.
+ * A sharp corner cut off square to the line from the corner to where the mitre would be (with equal allowances the bisector), so
+ * that nothing lies farther from the corner than 2.5 × the larger allowance.
  */
 const bevel = (a: Side, b: Side, at: Point, towardsMitre: Point): Turn => {
   const limit = MITRE_LIMIT * Math.max(a.allowance, b.allowance)
-  const { x, y } = unit(towardsMitre)
-  const outA = (a.end.x - at.x) * x + (a.end.y - at.y) * y
-  const outB = (b.start.x - at.x) * x + (b.start.y - at.y) * y
-  const runA = Math.max(0, (limit - outA) / (a.arriving.x * x + a.arriving.y * y))
-  const runB = Math.max(0, (limit - outB) / -(b.leaving.x * x + b.leaving.y * y))
-  const first = { x: a.end.x + a.arriving.x * runA, y: a.end.y + a.arriving.y * runA }
-  const second = { x: b.start.x - b.leaving.x * runB, y: b.start.y - b.leaving.y * runB }
+  const towards = unit(towardsMitre)
+  const back = { x: -b.leaving.x, y: -b.leaving.y }
+  const reach = Math.min(
+    reached(subtract(a.end, at), a.arriving, towards, limit),
+    reached(subtract(b.start, at), back, towards, limit),
+  )
+  const first = runTo(a.end, a.arriving, at, towards, reach)
+  const second = runTo(b.start, back, at, towards, reach)
   return { joint: first, lead: [line(first, second), line(second, b.start)] }
+}
+
+/** How far towards the mitre a straight line has come when it is at the limit from the corner; all relative to the corner. */
+const reached = (from: Point, along: Point, towards: Point, limit: number): number => {
+  const by = dot(from, along)
+  const run = -by + Math.sqrt(Math.max(0, by * by - dot(from, from) + limit * limit))
+  return dot(from, towards) + run * dot(along, towards)
+}
+
+/** A line run on until it has come so far towards the mitre. */
+const runTo = (from: Point, along: Point, at: Point, towards: Point, reach: number): Point => {
+  const run = Math.max(0, (reach - dot(subtract(from, at), towards)) / dot(along, towards))
+  return { x: from.x + along.x * run, y: from.y + along.y * run }
 }
 
 /**

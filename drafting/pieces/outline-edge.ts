@@ -22,6 +22,8 @@ export interface Side {
   readonly allowance: number
   /** The stitch edge moved out by its allowance, loops cut away. */
   readonly offset: Path
+  /** Whether the edge bends tighter than its allowance somewhere. */
+  readonly tight: boolean
   /** Where the offset starts and ends, and which way it runs there. */
   readonly start: Point
   readonly end: Point

@@ -32,7 +32,14 @@ const orders: readonly DraftOrder[] = [
   dress(small, { sleeve: 'flared', sleeveLength: 420, neckShape: 'boat', pockets: false }),
   dress(one, { backOpening: 'none', hemWay: 'swung' }),
   dress({ ...one, upperArm: 380 }),
-  dress(one, { neckWidening: 60, neckAllowance: 20 }),
+  dress(small, {
+    flare: 0.5,
+    armholeDrop: 80,
+    armholeAllowance: 15,
+    frontHollow: 12,
+    bustEase: 40,
+    sleeve: 'none',
+  }),
   dress(two, { backOpening: 'button band', collar: 'shirt' }),
   dress(one, { collar: 'Peter Pan' }),
   dress(one, {

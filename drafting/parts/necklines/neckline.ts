@@ -33,6 +33,9 @@ export function mostCurvedLean(width: number, depth: number): number {
   return (Math.atan2(0.65 * width, depth) * 180) / Math.PI
 }
 
+/** A shallow wide neck turns up to the shoulder no tighter than about this, mm: half an inch of allowance goes round it. */
+const tightest = 15
+
 /**
  * A curve square to the centre that leaves the side neck in a given direction and bends one way only.
  *
@@ -45,6 +48,8 @@ export function neckCurve(centre: Point, side: Point, leaves: Point, flat: numbe
   const reach = Math.min(fall, 0.9) * (leaves.y > 1e-9 ? depth / leaves.y : depth)
   // Where the two end directions cross: the level part must stop short of it.
   const corner = leaves.y > 1e-9 ? width + (leaves.x * depth) / leaves.y : width
-  const run = Math.min(flat * width, 0.9 * corner)
+  // How tightly it ends is the square of its last reach over what the level part leaves of the width.
+  const level = Math.max(flat * width, width - (1.5 * reach * reach) / tightest)
+  const run = Math.min(level, 0.9 * corner)
   return openPath([cubic(centre, { x: centre.x + run, y: centre.y }, add(side, scale(leaves, reach)), side)])
 }

@@ -8,6 +8,9 @@ const strap = 0.58
 /** How much each end of the curve over the bust turns from its chord, degrees: a shallow arc. */
 const bulge = 26
 
+/** The steepest that it rises from the centre, degrees. */
+const steepest = -72
+
 const from = (start: Point, degrees: number, reach: number): Point => ({
   x: start.x + Math.cos((degrees * Math.PI) / 180) * reach,
   y: start.y + Math.sin((degrees * Math.PI) / 180) * reach,
@@ -29,8 +32,10 @@ export const sweetheart: Neckline = {
     }
     const chord = (Math.atan2(corner.y - centre.y, corner.x - centre.x) * 180) / Math.PI
     const reach = distance(centre, corner) * 0.36
+    // A deep narrow one must not stand upright on the fold: its allowance would run up it without end.
+    const leaving = Math.max(chord - bulge, Math.min(chord - 4, steepest))
     return openPath([
-      cubic(centre, from(centre, chord - bulge, reach), from(corner, chord + bulge, -reach), corner),
+      cubic(centre, from(centre, leaving, reach), from(corner, chord + bulge, -reach), corner),
       line(corner, side),
     ])
   },

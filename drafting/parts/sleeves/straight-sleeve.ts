@@ -55,12 +55,13 @@ export function markHem(pen: Pen, sleeve: PiecePen, kind: SetInKind): void {
     pen.length(kind.length) - pen.length('headHeight'),
     pen.usesOf(['headHeight', kind.length]),
   )
-  if (pen.value('underarmLength') < 25) {
+  const least = height + shortestUnderarm(pen, kind)
+  if (pen.length(kind.length) < least) {
     pen.refuse({
       field: kind.lengthField,
       code: 'impossible-shape',
-      message: `The sleeve ends above the underarm. Make it at least ${pen.say(height + 25)} long.`,
-      ...(kind.lengthField === kind.length ? { min: height + 25 } : {}),
+      message: `The sleeve ends above the underarm, or so near it that its hem cannot be turned up. Make it at least ${pen.say(least)} long.`,
+      ...(kind.lengthField === kind.length ? { min: least } : {}),
     })
   }
   sleeve.go('hemLevel', 'crown', 'down', kind.length, {
@@ -74,6 +75,12 @@ export function markHem(pen: Pen, sleeve: PiecePen, kind: SetInKind): void {
     label: 'Sleeve length',
     ...(kind.lengthField === kind.length ? { value: kind.length } : {}),
   })
+}
+
+/** The underarm seam, mm, must reach over what the hem turns up: above it the sleeve grows out into its head. */
+function shortestUnderarm(pen: Pen, kind: SetInKind): number {
+  if (kind.hem === 'gathered' || kind.hem === 'dipped') return 25
+  return Math.max(25, pen.value('sleeveHemAllowance') + 6 + 2 * (pen.tape ?? 0))
 }
 
 /** Height and widths of the head. A large armhole for a thin arm would stand up like a mushroom: the girth is then let out. */

@@ -40,13 +40,14 @@ describe('corners of a cut line', () => {
     expect(clipped).toEqual([])
   })
 
-  test('a sharp corner reaches no further than 2.5 × the larger allowance along its bisector, then is cut square to it', () => {
+  test('a sharp corner reaches no further than 2.5 × the larger allowance, cut square to its bisector', () => {
     const { cutLine: path } = cutLine(
       outline([p(0, 0), 'seam', 10], [p(200, 20), 'seam', 10], [p(0, 40), 'seam', 10]),
     )
     const tip = cornersOf(path).filter(({ x }) => x > 210)
     expect(tip).toHaveLength(2)
-    for (const at of tip) expect(at.x).toBeCloseTo(225, 9)
+    for (const { x, y } of tip) expect(Math.hypot(x - 200, y - 20)).toBeCloseTo(25, 9)
+    expect(tip[0]?.x).toBeCloseTo(tip[1]?.x ?? 0, 9)
   })
 
   test('an inner corner is trimmed where the two cut lines cross', () => {

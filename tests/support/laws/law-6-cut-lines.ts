@@ -5,6 +5,8 @@ import { Chain, closedChain, insideRing, ringOf, stitchPath } from './outline'
 import { Findings, type DraftLaw } from './violation'
 
 const tolerance = 0.05
+/** How much nearer than it is a place may seem to an edge that is looked at as chords; nearer still, the edge swallows it. */
+const drawn = 0.005
 /** A mitre runs on to at most so many times the larger allowance. */
 const mitreLimit = 2.5
 
@@ -102,7 +104,7 @@ function offsetReached(
       const speed = Math.hypot(slope.x, slope.y)
       if (speed < 1e-6) continue
       const point = push(on, left({ x: slope.x / speed, y: slope.y / speed }), allowance)
-      if (allowance > 0 && side.chain.gap(point) < allowance - tolerance) {
+      if (allowance > 0 && side.chain.gap(point) < allowance - drawn) {
         // Turning to the left it bends towards its own allowance.
         const curvature = (slope.y * bend.x - slope.x * bend.y) / speed ** 3
         swallowed ||= curvature * allowance > 1
