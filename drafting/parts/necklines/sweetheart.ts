@@ -1,5 +1,6 @@
 import type { Point } from '../../contract'
-import { cubic, distance, line, openPath } from '../../geometry'
+import { line, openPath } from '../../geometry'
+import { fairCurve } from '../hem'
 import type { Neckline } from './neckline'
 
 /** How far down the strap comes, share of the depth of the neck. */
@@ -11,9 +12,9 @@ const bulge = 26
 /** The steepest that it rises from the centre, degrees. */
 const steepest = -72
 
-const from = (start: Point, degrees: number, reach: number): Point => ({
-  x: start.x + Math.cos((degrees * Math.PI) / 180) * reach,
-  y: start.y + Math.sin((degrees * Math.PI) / 180) * reach,
+const pointing = (degrees: number): Point => ({
+  x: Math.cos((degrees * Math.PI) / 180),
+  y: Math.sin((degrees * Math.PI) / 180),
 })
 
 /** Sweetheart: rises from a point at the centre in a curve over each bust to a corner, then straight up to the shoulder. */
@@ -31,12 +32,9 @@ export const sweetheart: Neckline = {
       y: side.y + depth * strap,
     }
     const chord = (Math.atan2(corner.y - centre.y, corner.x - centre.x) * 180) / Math.PI
-    const reach = distance(centre, corner) * 0.36
     // A deep narrow one must not stand upright on the fold: its allowance would run up it without end.
     const leaving = Math.max(chord - bulge, Math.min(chord - 4, steepest))
-    return openPath([
-      cubic(centre, from(centre, leaving, reach), from(corner, chord + bulge, -reach), corner),
-      line(corner, side),
-    ])
+    const over = fairCurve(centre, pointing(leaving), corner, pointing(chord + bulge), 0.65)
+    return openPath([...(over?.segments ?? [line(centre, corner)]), line(corner, side)])
   },
 }
