@@ -36,6 +36,9 @@ export function mostCurvedLean(width: number, depth: number): number {
 /** A shallow wide neck turns up to the shoulder no tighter than about this, mm: half an inch of allowance goes round it. */
 const tightest = 15
 
+/** The tightest bend at the centre of a deep narrow neck that can still be faced, mm. Common practice. */
+const sewable = 7
+
 /**
  * A curve square to the centre that leaves the side neck in a given direction and bends one way only.
  *
@@ -45,11 +48,14 @@ const tightest = 15
 export function neckCurve(centre: Point, side: Point, leaves: Point, flat: number, fall: number): Path {
   const width = side.x - centre.x
   const depth = centre.y - side.y
-  const reach = Math.min(fall, 0.9) * (leaves.y > 1e-9 ? depth / leaves.y : depth)
+  const along = (share: number): number => share * (leaves.y > 1e-9 ? depth / leaves.y : depth)
+  const share = Math.min(fall, 0.9)
   // Where the two end directions cross: the level part must stop short of it.
   const corner = leaves.y > 1e-9 ? width + (leaves.x * depth) / leaves.y : width
   // How tightly it ends is the square of its last reach over what the level part leaves of the width.
-  const level = Math.max(flat * width, width - (1.5 * reach * reach) / tightest)
+  const level = Math.max(flat * width, width - (1.5 * along(share) ** 2) / tightest)
   const run = Math.min(level, 0.9 * corner)
+  // A short level part would bend in a spike at the centre: then the curve runs on further from the shoulder.
+  const reach = along(Math.max(share, Math.min(0.93, 1 - (1.5 * run * run) / (sewable * depth))))
   return openPath([cubic(centre, { x: centre.x + run, y: centre.y }, add(side, scale(leaves, reach)), side)])
 }

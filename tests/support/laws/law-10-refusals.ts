@@ -176,10 +176,14 @@ function facingDepth(found: Findings, draft: Draft, asked: number, said: boolean
   if (!facing || said) return
   const shoulder = facing.edges.find((one) => one.id === 'shoulder')
   const neckline = facing.edges.find((one) => one.id === 'neckline')
-  const whole = draft.pieces.find((one) => one.id === 'front')?.edges.find((one) => one.id === 'shoulder')
-  if (!shoulder || !neckline || !whole) return
+  // A princess seam parts the shoulder in two.
+  const whole = draft.pieces
+    .filter((one) => one.id === 'front' || one.id === 'front-side')
+    .flatMap((one) => one.edges.filter((edge) => edge.id.startsWith('shoulder')))
+  if (!shoulder || !neckline || whole.length === 0) return
   // One facing for neck and armhole covers the whole shoulder.
-  if (Math.abs(lengthOfPath(shoulder.path) - lengthOfPath(whole.path)) < 1e-6) return
+  const long = whole.reduce((sum, edge) => sum + lengthOfPath(edge.path), 0)
+  if (Math.abs(lengthOfPath(shoulder.path) - long) < 1e-6) return
   const away = headingAtStart(shoulder.path)
   if (Number.isFinite(away.x))
     found.atMost(
