@@ -60,7 +60,7 @@ function Summary({ values }: { readonly values: readonly DesignValue[] }) {
   const { garment } = useStudio()
   const words = useStudioState((state) => {
     const offered = values.filter((value) =>
-      isOffered(value, (id) => currentValue(garment, state.order, `design.${id}`)),
+      isOffered(value, (id) => currentValue(garment, state.order, `design.${id}`), garment),
     )
     const said = offered.flatMap((value) => {
       const now = currentValue(garment, state.order, `design.${value.id}`) ?? value.default

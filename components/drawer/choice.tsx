@@ -1,11 +1,11 @@
 'use client'
 
-import type { DesignValue } from '@/drafting'
+import { offeredChoices, type DesignValue } from '@/drafting'
 import { Checkbox } from '@/components/ui/checkbox'
 import { Select } from '@/components/ui/select'
 import type { FieldRef } from '@/components/studio/field-ref'
 import { problemsAt } from '@/components/studio/store'
-import { useStudio, useStudioState } from '@/components/studio/use-store'
+import { useStudio, useStudioList, useStudioState } from '@/components/studio/use-store'
 import { ValueField } from '@/components/studio/value-field'
 import { currentValue } from '@/components/studio/values'
 import { PictureChoice } from './picture-choice'
@@ -46,7 +46,13 @@ function YesNo({ value }: { readonly value: DesignValue }) {
 function OneOf({ value }: { readonly value: DesignValue }) {
   const { now, problem, change, disabled } = useValue(value)
   const pictures = useChoicePictures(value)
-  const choices = (value.choices ?? []).map((choice) => ({ value: choice, label: wordsOf(choice) }))
+  const { garment } = useStudio()
+  const offered = useStudioList((state) =>
+    offeredChoices(garment.id, value, (id) => currentValue(garment, state.order, `design.${id}`)),
+  )
+  const choices = (value.choices ?? [])
+    .filter((choice) => offered.includes(choice) || choice === now)
+    .map((choice) => ({ value: choice, label: wordsOf(choice) }))
   if (pictures) {
     return (
       <PictureChoice

@@ -23,7 +23,6 @@ import {
   wholeArmhole,
 } from '../parts/sleeves'
 import { drawOpening, openingDesign, openingRules } from '../parts/openings'
-import { pocketGivesWay } from '../parts/openings/side-zip'
 
 /**
  * The one-piece flared dress of freehand cutting, in quarters: front on the fold, back on the fold or with a centre seam for
@@ -212,10 +211,9 @@ function sewSides(pen: Pen, front: PiecePen): void {
   const a = { piece: 'front', edge: 'side' }
   const b = { piece: 'back', edge: 'side' }
   const seam = { id: 'side', name: 'Side seam', smooth: true }
-  const mouth =
-    pen.chosen('pockets') && !pocketGivesWay(pen)
-      ? pocketMouth(pen, front.edge('side').path, pen.value('waistLevel'))
-      : undefined
+  const mouth = pen.chosen('pockets')
+    ? pocketMouth(pen, front.edge('side').path, pen.value('waistLevel'))
+    : undefined
   pen.settle()
   if (!mouth) return pen.sew({ ...seam, a: [a], b: [b] })
   const whole = pathLength(front.edge('side').path)

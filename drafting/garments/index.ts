@@ -8,7 +8,9 @@ import { flaredDress } from './flared-dress'
 import { gatheredSkirt } from './gathered-skirt'
 import { goredSkirt } from './gored-skirt'
 import { kaftan } from './kaftan'
+import { peplum } from './peplum'
 import { straightSkirt } from './straight-skirt'
+import { waistSeamDress } from './waist-seam-dress'
 
 const all: readonly Garment[] = [
   flaredDress,
@@ -19,6 +21,8 @@ const all: readonly Garment[] = [
   goredSkirt,
   gatheredSkirt,
   kaftan,
+  waistSeamDress,
+  peplum,
 ]
 
 /** Every garment that can be drafted. */

@@ -81,6 +81,13 @@ export function takeIn(pen: Pen, piece: PiecePen, path: Path, seam: Seam): Taken
   const least = (seam.alongSeam ? 0 : Math.max(0, startOf(path).y)) + origin + spare
   const most = (seam.alongSeam ? long : endOf(path).y) + origin - 4 * spare
   const asked = corrections.map(({ id, level, by }): Knot => {
+    if (least >= most) {
+      pen.refuse({
+        field: `corrections.${id}`,
+        code: 'impossible-shape',
+        message: `This seam is too short to be taken in between its ends.${seam.instead ? ` ${seam.instead}` : ''}`,
+      })
+    }
     if (level < least || level > most) {
       pen.refuse({
         field: `corrections.${id}`,

@@ -3,8 +3,9 @@ import { completeCard, measurementById } from '../body'
 import { formatLength } from '../lengths'
 import { checkMethod, formulasInForce } from './check-method'
 import { compileRules, type CompiledRules } from './compile'
+import { offeredChoices, ruledOut } from '../combinations'
 import type { Garment } from './garment'
-import { isOffered } from './design'
+import { isDrawn } from './design'
 import { checkOwnMeasurements, ownValues } from './own-measurements'
 import { isNumber, isRecord } from './plain-data'
 
@@ -137,7 +138,10 @@ function checkDesign(
 ): Record<string, DesignChoice> {
   const design: Record<string, DesignChoice> = {}
   for (const value of garment.definition.design) design[value.id] = value.default
-  if (given === undefined) return design
+  if (given === undefined) {
+    checkCombinations(garment, design, {}, problems)
+    return design
+  }
   if (!isRecord(given)) {
     problems.push({ field: 'design', code: 'unknown-field', message: 'The style is a list of named values.' })
     return design
@@ -157,14 +161,36 @@ function checkDesign(
     if (!wrong) design[id] = given[id] as DesignChoice
     // A value that is not offered with the other choices is not drawn, so it cannot be wrong for this draft.
     else if (
-      isOffered(
+      isDrawn(
         value,
         (other) => (isRecord(given) ? (given[other] as DesignChoice) : undefined) ?? design[other],
+        garment.definition,
       )
     )
       problems.push({ field: id, ...wrong })
   }
+  checkCombinations(garment, design, given, problems)
   return design
+}
+
+/** Refuses combinations that are not offered. What nobody chose gives way: a default is only a default. */
+function checkCombinations(
+  { definition }: Garment,
+  design: Record<string, DesignChoice>,
+  given: Readonly<Record<string, unknown>>,
+  problems: Problem[],
+): void {
+  const chosen = (id: string): DesignChoice | undefined => design[id]
+  for (const value of definition.design) {
+    const now = design[value.id]
+    const why = now === undefined ? undefined : ruledOut(definition.id, value.id, now, chosen)
+    if (!why) continue
+    const [first] = offeredChoices(definition.id, value, chosen)
+    if (given[value.id] === undefined && first !== undefined) design[value.id] = first
+    else if (isDrawn(value, chosen, definition)) {
+      problems.push({ field: value.id, code: 'out-of-range', message: `${value.name}: ${why}` })
+    }
+  }
 }
 
 function checkRuleNames(garment: Garment, given: unknown, problems: Problem[]): void {

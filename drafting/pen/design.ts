@@ -1,4 +1,5 @@
-import type { DesignChoice, DesignValue } from '../contract'
+import type { DesignChoice, DesignValue, GarmentDefinition } from '../contract'
+import { choicesOf, offeredChoices } from '../combinations'
 
 type When = DesignValue['when']
 
@@ -70,9 +71,21 @@ export function yesNo(
   return { id, name, part, kind: 'yes-no', default: byDefault, ...when(condition) }
 }
 
-/** Whether a value is offered with the other choices as they stand. */
-export function isOffered(value: DesignValue, chosen: (id: string) => DesignChoice | undefined): boolean {
-  if (!value.when) return true
-  const other = chosen(value.when.id)
-  return other !== undefined && value.when.is.includes(other)
+type Chosen = (id: string) => DesignChoice | undefined
+type Offering = Pick<GarmentDefinition, 'id' | 'design'>
+
+/** Whether what a value hangs on is chosen, and hangs on what is chosen itself. */
+export function isDrawn(value: DesignValue, chosen: Chosen, garment: Offering): boolean {
+  const { when: condition } = value
+  if (!condition) return true
+  const other = chosen(condition.id)
+  if (other === undefined || !condition.is.includes(other)) return false
+  const above = garment.design.find((one) => one.id === condition.id)
+  return !above || isDrawn(above, chosen, garment)
+}
+
+/** Whether a value is offered with the other choices as they stand: it is drawn, and they leave it more than one choice. */
+export function isOffered(value: DesignValue, chosen: Chosen, garment: Offering): boolean {
+  const left = offeredChoices(garment.id, value, chosen).length
+  return isDrawn(value, chosen, garment) && (left > 1 || choicesOf(value).length === left)
 }

@@ -58,6 +58,31 @@ const rules: Readonly<Record<string, Readonly<Record<string, string>>>> = {
     hip_per_gore: 'hip / gores',
     // The book prints 17 1/2 in for the other gores: 81 − 10 shared by four is 17 3/4, a slip of its arithmetic.
     other_gore_hem: '(hem_yd × 36 − front_gore_hem) / 4',
+    // 39 at the side, 39 1/2 at the back: each gore towards the back rises by the half inch between them.
+    back_rise_per_gore_step: 'back − side',
+  },
+  'skirt-wikieducator': {
+    width_1_2: 'hips / 2 + 2.5 cm',
+    back_hip_5_6: 'hips / 4 + 2 cm',
+    back_waist_1_7: 'waist / 4 + 3.2 cm',
+    front_waist_2_10: 'waist / 4 + 2 cm',
+    side_raise: '1 cm',
+    back_dart_width: '2 cm',
+    back_dart_length: '12 cm',
+    front_dart_width: '2 cm',
+    front_dart_length: '10 cm',
+    // Both halves, the darts closed. The handout takes no ease for the waist: 2.4 cm are what its figures leave.
+    finished_waist: '2 × (waist / 2 + 5.2 cm − 4 cm)',
+    finished_hip: '2 × (hips / 2 + 2.5 cm)',
+  },
+  // Divisions of half the size. What the lesson adds to them without saying from what (AD, KL, the back width) is left out.
+  'waist-rosenfeld-142': {
+    AB: 'depth',
+    AC: 'waist_len',
+    BG: 'size / 2 × 2 / 3',
+    BH: 'size / 2 / 3',
+    AK: 'size / 2 / 6',
+    GF: 'size / 2 / 6',
   },
   'vani-34': {
     scye_depth: 'chest / 8 + 2 1/2 in',

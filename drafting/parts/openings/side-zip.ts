@@ -18,18 +18,6 @@ export const sideZip: Opening = {
   },
 }
 
-/** Whether pockets are left out because the zip lies where they would be; says so. */
-export function pocketGivesWay(pen: Pen): boolean {
-  if (pen.chosen('backOpening') !== 'side zip') return false
-  pen.caution(
-    'pockets-left-out',
-    'The zip lies in the side seam, where the pocket would be: none is drawn. Put the zip at the centre back.',
-    'pockets',
-    'backOpening',
-  )
-  return true
-}
-
 /**
  * Marks a zip in the side seam of two halves with notches at both ends, and shortens it where the seam is too short.
  *

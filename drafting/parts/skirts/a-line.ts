@@ -2,12 +2,12 @@ import { length, share } from '../../pen/design'
 import { geometry, lengthRule } from '../../pen/garment'
 import type { Pen } from '../../pen/pen'
 import { seamPockets } from '../pockets/in-seam'
+import { patchDesign, patchFound, patchRules } from '../pockets/patch'
 import { waistbandDesign, waistbandRules, waistEasedIn } from '../waistband'
 import { skirtBlockDesign, skirtBlockRules } from './block'
 import { drawFitted } from './fitted'
-import type { SkirtHalf } from './marks'
 import type { Skirt } from './skirt'
-import { firstDartAngle } from './waist'
+import { firstDartAngle } from './marks'
 
 /** A fitted skirt whose first darts are partly closed, so that it opens towards the hem there and at the side. */
 export const aLine: Skirt = {
@@ -21,6 +21,7 @@ export const aLine: Skirt = {
     ...waistbandDesign,
     waistEasedIn,
     ...seamPockets(false),
+    ...patchDesign,
     length('hemAllowance', 'Hem allowance', 'allowances', { default: 30, min: 0, max: 50 }),
   ],
   rules: [
@@ -28,15 +29,15 @@ export const aLine: Skirt = {
     lengthRule('belowHip', 'From hip to hem', 'length - hipLine', geometry),
     lengthRule('sideFlare', 'Flare at the side', 'min(hemOpening / 2, 4cm) + flareMore'),
     ...waistbandRules,
+    ...patchRules,
   ],
-  found: { waistDrawn: 'length', hemOpening: 'length' },
+  found: { ...patchFound, waistDrawn: 'length', hemOpening: 'length' },
   draw: (pen, use) =>
     drawFitted(pen, use, {
-      close: (halves) => closing(pen, halves),
-      hem: (front) => {
-        const hip = front.at('hip')
+      close: closing(pen),
+      hem: (hip) => {
         const flare = pen.value('sideFlare')
-        const drop = front.at(front.byRule('centreHem')).y - hip.y
+        const drop = pen.length('length') - hip.y
         // As far from hip to hem at the side as at the centre.
         return { x: hip.x + flare, y: hip.y + Math.sqrt(drop * drop - flare * flare) }
       },
@@ -49,8 +50,8 @@ export const aLine: Skirt = {
 const mostClosed = 15
 
 /** Degrees of the first darts that are closed, in front and back alike so that both hang the same; states the mouth at the hem. */
-function closing(pen: Pen, halves: readonly SkirtHalf[]): number {
-  const asked = pen.value('dartClosed') * Math.min(...halves.map(firstDartAngle))
+function closing(pen: Pen): number {
+  const asked = pen.value('dartClosed') * Math.min(firstDartAngle(pen, 'front'), firstDartAngle(pen, 'back'))
   const close = Math.min(asked, mostClosed)
   if (close < asked - 0.01) {
     pen.caution(

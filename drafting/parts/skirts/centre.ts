@@ -87,6 +87,15 @@ export function skirtCentreMarks(pen: Pen, half: Half, use: SkirtUse, way: Walki
 /** Draws the centre from the hem up to the waist: a fold, or seam and opening with their vent or slit. */
 export function drawSkirtCentre(pen: Pen, half: Half, use: SkirtUse, way: WalkingRoom): void {
   const { piece } = half
+  if (half.side === 'back' && use.opening === 'open centre back') {
+    piece.line('opening', 'centreHem', 'centreWaist', {
+      role: 'opening',
+      allowance: 'centreBackAllowance',
+      corner: 'turned',
+      say: 'The centre back, open from waist to hem',
+    })
+    return
+  }
   if (!openAtBack(half, use)) {
     piece.line('centre', 'centreHem', 'centreWaist', { role: 'fold', say: 'The centre lies on the fold' })
     return

@@ -7,13 +7,14 @@ import { drawSkirtCentre, skirtCentreMarks } from './centre'
 import { atWaist, byCompass, fitArcs, levelOf, onCircle } from './circle-levels'
 import { alongFromTop } from './panels'
 import { sewSkirtSides, wholeWaist, type DrawnHalf } from './seams'
-import { skirtPiece, waistFinish, type DrawnSkirt, type SewnTo, type SkirtUse } from './skirt'
+import { backOnFold, skirtPiece, waistFinish, type DrawnSkirt, type SewnTo, type SkirtUse } from './skirt'
 
 /**
  * A circle in two halves, front on the fold and back on the fold or with a seam, each as wide at the waist as the half of the
  * bodice that it is sewn to: so their side seams meet.
  */
-export function drawCircleHalves(pen: Pen, use: SkirtUse, sewnTo: SewnTo): DrawnSkirt {
+export function drawCircleHalves(pen: Pen, use: SkirtUse & { readonly sewnTo: SewnTo }): DrawnSkirt {
+  const { sewnTo } = use
   const whole = 2 * (sewnTo.front.length + sewnTo.back.length)
   const radius = whole / (2 * Math.PI * pen.value('circleShare'))
   const front = drawHalf(pen, use, 'front', radius, sewnTo)
@@ -112,7 +113,7 @@ function drawHalf(
   drawSkirtCentre(pen, half, use, 'none')
   const deep = pathLength(piece.edge('side').path)
   piece.grain({ x: 20, y: deep * 0.3 }, { x: 20, y: deep * 0.8 })
-  const onFold = side === 'front' || use.opening !== 'centre-back zip'
+  const onFold = side === 'front' || backOnFold(use)
   piece.cut({ cloth: 'main', count: onFold ? 1 : 2, onFold, handed: !onFold })
   return { piece, waists: ['waist'], joints: [] }
 }

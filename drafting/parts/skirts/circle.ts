@@ -22,7 +22,8 @@ import {
 } from './panels'
 import { skirtPiece, waistFinish, type Skirt, type SkirtUse } from './skirt'
 
-const shares: Readonly<Record<string, number>> = {
+/** Shares of a circle by their names in the style. */
+export const shares: Readonly<Record<string, number>> = {
   '1/4': 0.25,
   '1/2': 0.5,
   '3/4': 0.75,
@@ -65,9 +66,12 @@ export const circle: Skirt = {
   ],
   found: { circleShare: 'number', circleAngle: 'angle', panelCount: 'number', waistDrawn: 'length' },
   draw(pen, use) {
-    stateShare(pen)
-    if (use.sewnTo) return drawCircleHalves(pen, use, use.sewnTo)
-    const panels = pen.value('panelCount')
+    const share = shares[String(pen.chosen('share'))] as number
+    pen.find('circleShare', share, pen.usesOf(['share']))
+    if (use.sewnTo) return drawCircleHalves(pen, { ...use, sewnTo: use.sewnTo })
+    const panels = enoughPanels(pen, share)
+    pen.find('circleAngle', share * 360, pen.usesOf(['share']))
+    pen.find('panelCount', panels, pen.usesOf(['share', 'panels']))
     const pieces = panelNames(panels).map(([id, name], index) =>
       drawPanel(pen, use, { id, name, index, panels }),
     )
@@ -75,14 +79,6 @@ export const circle: Skirt = {
     fitSkirt(pen, pieces, panels, use)
     return waistOfPanels(pieces, panels)
   },
-}
-
-/** States the share of a circle and into how many panels it is cut. */
-function stateShare(pen: Pen): void {
-  const share = shares[String(pen.chosen('share'))] as number
-  pen.find('circleShare', share, pen.usesOf(['share']))
-  pen.find('circleAngle', share * 360, pen.usesOf(['share']))
-  pen.find('panelCount', enoughPanels(pen, share), pen.usesOf(['share', 'panels']))
 }
 
 /** A panel spans at most half a circle: with fewer panels asked for, the fewest that will do are drawn, and it is said. */

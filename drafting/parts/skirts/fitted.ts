@@ -1,10 +1,11 @@
 import type { Point } from '../../contract'
 import type { Pen } from '../../pen/pen'
-import type { PiecePen } from '../../pen/piece-pen'
+import { patchPocket } from '../pockets/patch'
 import type { WalkingRoom } from './centre'
 import { fitHem, fitHip, fitWaistOf } from './fits'
 import { drawSkirtHalf } from './half'
-import { skirtMarks, type SkirtHalf } from './marks'
+import { meetDarts } from './below-darts'
+import { skirtMarks } from './marks'
 import { bandOnSkirt, sewSkirtSides, wholeWaist } from './seams'
 import { skirtPiece, type DrawnSkirt, type SkirtUse } from './skirt'
 import { fitSkirtWaist } from './waist'
@@ -12,9 +13,9 @@ import { fitSkirtWaist } from './waist'
 /** What tells one fitted skirt from another. */
 interface Manner {
   /** Degrees of the first darts that are closed into the hem. */
-  readonly close: (halves: readonly [SkirtHalf, SkirtHalf]) => number
+  readonly close: number
   /** Where the side ends, before it is turned. */
-  readonly hem: (front: PiecePen) => Point
+  readonly hem: (hip: Point) => Point
   readonly walking: WalkingRoom
   /** What the side follows from beside the rules of the block. */
   readonly uses: readonly string[]
@@ -22,13 +23,18 @@ interface Manner {
 
 /** Draws a skirt that is fitted with darts between waist and hip: front on the fold, back on the fold or with a seam. */
 export function drawFitted(pen: Pen, use: SkirtUse, { close, hem, walking, uses }: Manner): DrawnSkirt {
-  const [front, back] = [skirtPiece(pen, use, 'front', 'Front'), skirtPiece(pen, use, 'back', 'Back')]
-  const marked = [skirtMarks(pen, front, 'front'), skirtMarks(pen, back, 'back')] as const
   const { sewnTo } = use
+  if (sewnTo) {
+    const hip = { x: pen.lengthRounded('skirtQuarter', 'up'), y: pen.length('hipLine') }
+    meetDarts(pen, sewnTo, { close, hip, hem: hem(hip) })
+  }
+  const [front, back] = [skirtPiece(pen, use, 'front', 'Front'), skirtPiece(pen, use, 'back', 'Back')]
+  const by = sewnTo ? (['DartBelow', 'DartNext'] as const) : (['DartOut', 'DartBetween'] as const)
+  const marked = [skirtMarks(pen, front, 'front', by), skirtMarks(pen, back, 'back', by)] as const
   const [ofFront, ofBack] = fitSkirtWaist(pen, marked, {
-    close: close(marked),
+    close,
     hip: front.at('hip'),
-    hem: hem(front),
+    hem: hem(front.at('hip')),
     wanted: sewnTo ? [sewnTo.front.length, sewnTo.back.length] : pen.value('waistQuarter') * 2,
   })
   const halves = [
@@ -36,6 +42,7 @@ export function drawFitted(pen: Pen, use: SkirtUse, { close, hem, walking, uses 
     drawSkirtHalf(pen, ofBack, use, walking, uses),
   ] as const
   sewSkirtSides(pen, front, back, use)
+  patchPocket(pen, front, front.byRule('centreWaist'))
   fitWaistOf(pen, halves, use)
   fitHip(pen, halves, 'hipEase')
   fitHem(pen, halves)

@@ -4,12 +4,13 @@ import { fitAcross, type Pen } from '../../pen/pen'
 import { straight, type PiecePen } from '../../pen/piece-pen'
 import { pinned } from '../fitted-waist'
 import { seamPockets } from '../pockets/in-seam'
+import { patchDesign, patchFound, patchPocket, patchRules } from '../pockets/patch'
 import { takeIn } from '../take-in'
 import { bandAlways, waistbandRules } from '../waistband'
 import { drawSkirtCentre, skirtCentreMarks } from './centre'
 import { findWaist, fitHem, fitHip, hipUnknown } from './fits'
 import { bandOnSkirt, halfWaist, placesAround, sewSkirtSides, wholeWaist, type DrawnHalf } from './seams'
-import { skirtPiece, type Skirt, type SkirtUse } from './skirt'
+import { backOnFold, reachesHip, skirtPiece, type Skirt, type SkirtUse } from './skirt'
 
 /**
  * Rectangles gathered into a band. Fullness, common practice: one and a half times the waist for heavy cloth, two for most, two
@@ -28,6 +29,7 @@ export const gathered: Skirt = {
     length('zipLength', 'Zip length', 'opening', { default: 200, min: 150, max: 250 }),
     ...bandAlways,
     ...seamPockets(true),
+    ...patchDesign,
     length('waistAllowance', 'Waist allowance', 'allowances', { default: 12.7, min: 0, max: 20 }),
     length('sideAllowance', 'Side allowance', 'allowances', { default: 15, min: 0, max: 30 }),
     length(
@@ -46,20 +48,25 @@ export const gathered: Skirt = {
     ...waistbandRules.map((rule) =>
       rule.id === 'waistbandLength' ? { ...rule, formula: 'waistEdge', source: geometry } : rule,
     ),
+    ...patchRules,
     lengthRule('gathering', 'Gathered in', 'gatheredQuarter * 4 - waistEdge', geometry),
-    lengthRule('gatheringDrawn', 'Gathered in, as corrected', 'waistDrawn - waistEdge', geometry),
+    lengthRule('gatheringDrawn', 'Gathered in, as corrected', 'waistDrawn - waistMet', geometry),
   ],
-  found: { waistDrawn: 'length' },
+  found: { ...patchFound, waistDrawn: 'length', waistMet: 'length' },
   draw(pen, use) {
     const front = drawRectangle(pen, 'front', use)
     const back = drawRectangle(pen, 'back', use)
     const halves = [front, back]
     sewSkirtSides(pen, front.piece, back.piece, use)
+    if (!use.peplum) patchPocket(pen, front.piece, 'centreWaist')
     findWaist(pen, halves, ['gatheredQuarter'])
+    const { sewnTo } = use
+    const met = sewnTo ? 2 * (sewnTo.front.length + sewnTo.back.length) : pen.value('waistEdge')
+    pen.find('waistMet', met, sewnTo ? sewnTo.uses : pen.usesOf(['waistEdge']))
     bandOnSkirt(pen, front, back, use, gatheringRule(pen))
     if (!use.sewnTo) fitBand(pen)
-    if (pen.has('hip')) fitHip(pen, halves, 'fullness', 'hipEase')
-    else hipUnknown(pen)
+    if (pen.has('hip') && reachesHip(pen)) fitHip(pen, halves, 'fullness', 'hipEase')
+    else if (!pen.has('hip')) hipUnknown(pen)
     fitHem(pen, halves)
     const [ofFront, ofBack] = [halfWaist(front), halfWaist(back)]
     return {
@@ -71,8 +78,9 @@ export const gathered: Skirt = {
 
 /** What is gathered in: as the rules say, or as the corrected side seams leave it. */
 export function gatheringRule(pen: Pen): string {
-  const drawn = pen.value('waistDrawn')
-  return Math.abs(drawn - pen.value('gatheredQuarter') * 4) > 0.01 ? 'gatheringDrawn' : 'gathering'
+  return Math.abs(pen.value('gatheringDrawn') - pen.value('gathering')) > 0.01
+    ? 'gatheringDrawn'
+    : 'gathering'
 }
 
 function drawRectangle(pen: Pen, side: 'front' | 'back', use: SkirtUse): DrawnHalf {
@@ -89,7 +97,8 @@ function drawRectangle(pen: Pen, side: 'front' | 'back', use: SkirtUse): DrawnHa
   piece.line('waist', 'centreWaist', top, {
     role: 'waist',
     allowance: 'waistAllowance',
-    say: 'The edge that is gathered into the band',
+    finish: use.peplum ? 'bound' : 'seam',
+    say: 'The edge that is gathered',
   })
   piece.curve('side', pinned(taken.path, piece.at(top), piece.at(end)), top, end, {
     role: 'seam',
@@ -113,8 +122,9 @@ function drawRectangle(pen: Pen, side: 'front' | 'back', use: SkirtUse): DrawnHa
     piece.usesOf('sideWaist'),
     'line',
   )
-  piece.grain({ x: width * 0.2, y: 60 }, { x: width * 0.2, y: piece.at('centreHem').y - 60 })
-  const onFold = side === 'front' || use.opening !== 'centre-back zip'
+  const deep = piece.at('centreHem').y
+  piece.grain({ x: width * 0.2, y: deep * 0.15 }, { x: width * 0.2, y: deep * 0.85 })
+  const onFold = side === 'front' || backOnFold(use)
   piece.cut({ cloth: 'main', count: onFold ? 1 : 2, onFold, handed: !onFold })
   return { piece, waists: ['waist'], joints: [] }
 }
@@ -123,11 +133,13 @@ const level = 'A rectangle keeps its level edges: change the length instead.'
 
 function rectangleMarks(pen: Pen, piece: PiecePen): void {
   piece.start('centreWaist', { x: 0, y: 0 }, 'Mark the waist on the centre', { fixed: level })
-  piece.go('hipLevel', 'centreWaist', 'down', 'hipLine', {
-    say: 'Come down to the level of the hip',
-    onCentre: true,
-    shared: true,
-  })
+  if (reachesHip(pen)) {
+    piece.go('hipLevel', 'centreWaist', 'down', 'hipLine', {
+      say: 'Come down to the level of the hip',
+      onCentre: true,
+      shared: true,
+    })
+  }
   piece.go('centreHem', 'centreWaist', 'down', 'length', {
     say: 'Come down the length',
     drag: ['length'],

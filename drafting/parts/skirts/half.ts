@@ -8,7 +8,7 @@ import { takeIn } from '../take-in'
 import { drawSkirtCentre, skirtCentreMarks, type WalkingRoom } from './centre'
 import type { DrawnHalf } from './seams'
 import { hemFollows } from './marks'
-import { sewnToBodice, waistFinish, type SkirtUse } from './skirt'
+import { backOnFold, sewnToBodice, waistFinish, type SkirtUse } from './skirt'
 import { sideOf, waistTo, type FittedHalf } from './waist'
 
 /** What a fitted side follows from. */
@@ -85,7 +85,7 @@ export function drawSkirtHalf(
   drawSkirtCentre(pen, half, use, walking)
   const grain = { x: piece.at('hip').x * 0.14, y: piece.at('hipLevel').y + 20 }
   piece.grain(grain, { x: grain.x, y: piece.at('centreHem').y - 40 })
-  const onFold = half.side === 'front' || use.opening !== 'centre-back zip'
+  const onFold = half.side === 'front' || backOnFold(use)
   piece.cut({ cloth: 'main', count: onFold ? 1 : 2, onFold, handed: !onFold })
   return { piece, waists, joints: waist.joints }
 }

@@ -1,5 +1,6 @@
 import type { Pen } from '../../pen/pen'
 import type { PiecePen } from '../../pen/piece-pen'
+import { dartAngle } from '../waist-darts'
 
 /** Front or back of a skirt: which rules it is drawn by. */
 export interface SkirtHalf {
@@ -27,12 +28,27 @@ export function dartsTaken(pen: Pen, side: 'front' | 'back'): Pick<SkirtHalf, 'd
   return intake < leastDart ? { darts: 0, intake: 0 } : { darts, intake }
 }
 
+/** Degrees between the legs of the first dart; 0 where none is drawn. */
+export function firstDartAngle(pen: Pen, side: 'front' | 'back'): number {
+  const { darts, intake } = dartsTaken(pen, side)
+  return darts ? dartAngle(intake, pen.length(dartLong(side, 0))) : 0
+}
+
 /** The rule for the depth of a dart's point below the waist. */
 export const dartLong = (side: 'front' | 'back', index: number): string =>
   index === 1 && side === 'back' ? 'backDartShorter' : `${side}DartLong`
 
-/** Marks of levels, hip and dart points, in drafting order. */
-export function skirtMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): SkirtHalf {
+/**
+ * Marks of levels, hip and dart points, in drafting order.
+ *
+ * @param by ends of the rules for how far the first dart stands from the centre, and the second from the first.
+ */
+export function skirtMarks(
+  pen: Pen,
+  piece: PiecePen,
+  side: 'front' | 'back',
+  [out, between]: readonly [string, string],
+): SkirtHalf {
   const front = side === 'front'
   const onCentre = true
   if (front) piece.start('centreWaist', { x: 0, y: 0 }, 'Mark the waist on the fold', { onCentre })
@@ -69,7 +85,7 @@ export function skirtMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): S
   for (let index = 0; index < darts; index += 1) {
     const second = index === 1
     const foot = `dartFoot${index + 1}`
-    piece.go(foot, second ? 'dartFoot1' : level, 'right', `${side}Dart${second ? 'Between' : 'Out'}`, {
+    piece.go(foot, second ? 'dartFoot1' : level, 'right', `${side}${second ? between : out}`, {
       say: second ? 'Go on to the middle of the next dart' : 'Go across to the middle of the dart',
       fixed: 'Move the point of the dart: the dart goes with it.',
     })

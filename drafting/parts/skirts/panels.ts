@@ -46,7 +46,7 @@ export function sewPanels(pen: Pen, pieces: readonly PiecePen[], panels: number,
     panel.cut({ cloth: 'main', count: once ? 1 : 2, onFold: false, handed: !once })
   })
   const first = pieces[0] as PiecePen
-  const mouth = choosePocket(pen, first, panels, use)
+  const mouth = choosePocket(pen, first)
   pen.settle()
   const lengthOf = ({ piece, edge }: Run): number =>
     pieces.find((panel) => panel.id === piece)?.lengthOf(edge) ?? 0
@@ -97,25 +97,8 @@ function openPanels(pen: Pen, pieces: readonly PiecePen[], panels: number, use: 
 }
 
 /** Where a pocket goes: into the seam between the first two panels, or the first seam of two. With an odd number one side has it. */
-function choosePocket(
-  pen: Pen,
-  first: PiecePen,
-  panels: number,
-  use: SkirtUse,
-): ReturnType<typeof pocketMouth> {
+function choosePocket(pen: Pen, first: PiecePen): ReturnType<typeof pocketMouth> {
   if (!pen.chosen('pockets')) return undefined
-  const single = panels === 1
-  if (single || (use.opening === 'side zip' && sideSeam(panels) === 0)) {
-    pen.caution(
-      'pockets-left-out',
-      single
-        ? 'One panel has one seam, and the opening is in it: no pockets are drawn.'
-        : 'The zip lies in the seam where the pocket would be: none is drawn. Put the zip at the centre back.',
-      'pockets',
-      single ? 'panels' : 'opening',
-    )
-    return undefined
-  }
   const side = first.edge('right').path
   const mouth = pocketMouth(pen, alongFromTop(side), 0)
   if (mouth)

@@ -35,30 +35,16 @@ export function sewSkirtSides(
   const a: Run = { piece: front.id, edge: 'side' }
   const b: Run = { piece: back.id, edge: 'side' }
   const atSide = use.opening === 'side zip'
-  const zip = Math.min(pen.length(use.zip), long - 40)
+  const zip = use.peplum ? 0 : Math.min(pen.length(use.zip), long - 40)
   if (atSide) for (const piece of [front, back]) piece.notch('zip-end', 'side', zip, 2)
   if (!use.sewnTo) pen.notion({ kind: 'zip', length: zip, count: 1 })
-  const mouth = sidePocket(pen, front, atSide, measured)
+  const mouth = use.peplum ? undefined : sidePocket(pen, front, measured)
   if (mouth) sewWithPocket(pen, seam, a, b, mouth, long)
   else pen.sew({ ...seam, a: [a], b: [b] })
 }
 
-function sidePocket(
-  pen: Pen,
-  front: PiecePen,
-  atSide: boolean,
-  measured: Path,
-): ReturnType<typeof pocketMouth> {
+function sidePocket(pen: Pen, front: PiecePen, measured: Path): ReturnType<typeof pocketMouth> {
   if (!pen.chosen('pockets')) return undefined
-  if (atSide) {
-    pen.caution(
-      'pockets-left-out',
-      'The zip lies in the side seam, where the pocket would be: none is drawn. Put the zip at the centre back.',
-      'pockets',
-      'opening',
-    )
-    return undefined
-  }
   const side = front.edge('side')
   const mouth = pocketMouth(pen, measured, 0)
   if (mouth) pocketBag(pen, pathLength(side.path) - mouth.from - 40, side.uses | pen.usesOf(['pocketTop']))

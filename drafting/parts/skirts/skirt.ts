@@ -28,6 +28,8 @@ export interface SkirtUse {
   /** Level on the body of the skirt's waist, mm: where corrections count from the side neck. */
   readonly origin: number
   readonly sewnTo?: SewnTo
+  /** Too short for pockets and zip, its waist edge left for what it is sewn to: a peplum. */
+  readonly peplum?: boolean
 }
 
 /** A place along the whole waist that has a partner on the bodice: a side, a centre, a dart. */
@@ -79,4 +81,11 @@ export function skirtPiece(
 
 /** What becomes of the waist edge: sewn to a band or a bodice, or bound. */
 export const waistFinish = (pen: Pen, use: SkirtUse): 'seam' | 'bound' =>
-  use.sewnTo || pen.chosen('waistband') ? 'seam' : 'bound'
+  !use.peplum && (use.sewnTo || pen.chosen('waistband')) ? 'seam' : 'bound'
+
+/** Whether the centre back lies on the fold. */
+export const backOnFold = (use: SkirtUse): boolean =>
+  use.opening !== 'centre-back zip' && use.opening !== 'open centre back'
+
+/** Whether the hip lies on the skirt, so that it can be measured there. */
+export const reachesHip = (pen: Pen): boolean => pen.value('hipLine') < pen.length('length') - 10

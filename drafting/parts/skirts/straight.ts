@@ -1,5 +1,6 @@
 import { length } from '../../pen/design'
 import { seamPockets } from '../pockets/in-seam'
+import { patchDesign, patchFound, patchRules } from '../pockets/patch'
 import { waistbandDesign, waistbandRules, waistEasedIn } from '../waistband'
 import { skirtBlockDesign, skirtBlockRules } from './block'
 import { walkingDesign, walkingRules, type WalkingRoom } from './centre'
@@ -17,14 +18,15 @@ export const straight: Skirt = {
     ...waistbandDesign,
     waistEasedIn,
     ...seamPockets(false),
+    ...patchDesign,
     length('hemAllowance', 'Hem allowance', 'allowances', { default: 40, min: 0, max: 60 }),
   ],
-  rules: [...skirtBlockRules, ...walkingRules, ...waistbandRules],
-  found: { waistDrawn: 'length' },
+  rules: [...skirtBlockRules, ...walkingRules, ...waistbandRules, ...patchRules],
+  found: { ...patchFound, waistDrawn: 'length' },
   draw: (pen, use) =>
     drawFitted(pen, use, {
-      close: () => 0,
-      hem: (front) => ({ x: front.at('hip').x, y: front.at(front.byRule('centreHem')).y }),
+      close: 0,
+      hem: ({ x }) => ({ x, y: pen.length('length') }),
       walking: pen.chosen('walkingRoom') as WalkingRoom,
       uses: [],
     }),

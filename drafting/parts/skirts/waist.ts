@@ -63,12 +63,6 @@ const groundOf = ({ piece, darts, intake }: SkirtHalf): Ground => ({
   intake,
 })
 
-/** Degrees between the legs of the first dart; 0 where none is drawn. */
-export function firstDartAngle(half: SkirtHalf): number {
-  const { points, intake } = groundOf(half)
-  return points[0] ? dartAngle(intake, points[0].y) : 0
-}
-
 /** What is left of a dart is sewn when it is worth a dart; otherwise the side takes it. */
 const takesOut = ({ angle, point }: WaistDart): boolean =>
   2 * point.y * Math.sin((angle * Math.PI) / 360) >= leastDart - 0.01

@@ -106,7 +106,7 @@ export function neckShape(order: DraftOrder, garment: GarmentDefinition): unknow
 /** Whether a style value is offered with the others as they stand. */
 export function offers(order: DraftOrder, garment: GarmentDefinition, id: string): boolean {
   const { when } = garment.design.find((one) => one.id === id) ?? {}
-  return !when || when.is.includes(styleOf(order, garment, when.id))
+  return !when || (when.is.includes(styleOf(order, garment, when.id)) && offers(order, garment, when.id))
 }
 
 /**

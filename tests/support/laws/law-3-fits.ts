@@ -35,6 +35,8 @@ const promised: Readonly<Record<string, Readonly<Record<string, Fit['relation']>
   'gored-skirt': { waist: 'equal', hip: 'at-least' },
   'gathered-skirt': { waist: 'equal' },
   kaftan: { bust: 'at-least', hip: 'at-least', biceps: 'at-least' },
+  peplum: { waist: 'equal' },
+  'waist-seam-dress': { waist: 'equal', biceps: 'at-least', armhole: 'at-least' },
   bodice: { bust: 'equal', waist: 'equal', biceps: 'at-least', armhole: 'at-least' },
 }
 
@@ -43,11 +45,12 @@ export const fits: DraftLaw = (draft, order, engine) => {
   const found = new Findings(3)
   const lines = new Map<string, Chain>()
   const garment = garmentOf(order, engine.garments)
-  const meanings = order.garment.endsWith('-skirt')
-    ? aboutSkirt
-    : order.garment === 'bodice'
-      ? aboutBodice
-      : about
+  const meanings =
+    order.garment.endsWith('-skirt') || order.garment === 'peplum'
+      ? aboutSkirt
+      : order.garment === 'bodice' || order.garment === 'waist-seam-dress'
+        ? aboutBodice
+        : about
   const ids = draft.fits.map((fit) => fit.id)
   for (const id of new Set(ids)) {
     if (ids.indexOf(id) !== ids.lastIndexOf(id)) found.add(id, 'is measured twice')

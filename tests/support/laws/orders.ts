@@ -7,6 +7,7 @@ import type {
   DraftOrder,
   GarmentDefinition,
 } from '@/drafting/contract'
+import { ruledOut } from '@/drafting/combinations'
 import * as engine from '@/drafting/index'
 import { extremeBodies, plausibleBody, sanityBodies, sizeBodies, type NamedBody } from '../bodies'
 import { lengthOfPath } from './curves'
@@ -44,14 +45,17 @@ function ends(value: DesignValue): fc.Arbitrary<DesignChoice> {
 function offered(garment: GarmentDefinition, design: Design): Design {
   const chosen = (id: string): DesignChoice | undefined =>
     design[id] ?? garment.design.find((one) => one.id === id)?.default
-  return Object.fromEntries(
-    Object.entries(design).filter(([id]) => {
-      const condition = garment.design.find((one) => one.id === id)?.when
-      if (!condition) return true
-      const other = chosen(condition.id)
-      return other !== undefined && condition.is.includes(other)
-    }),
+  const holds = (id: string): boolean => {
+    const condition = garment.design.find((one) => one.id === id)?.when
+    if (!condition) return true
+    const other = chosen(condition.id)
+    return other !== undefined && condition.is.includes(other) && holds(condition.id)
+  }
+  const all: Record<string, DesignChoice> = Object.fromEntries(
+    Object.entries(design).filter(([id]) => holds(id)),
   )
+  for (const [id, choice] of Object.entries(all)) if (ruledOut(garment.id, id, choice, chosen)) delete all[id]
+  return all
 }
 
 function styles(
@@ -161,8 +165,8 @@ export function namedOrders(
 
 const small = fc.integer({ min: -100, max: 100 }).map((tenths) => tenths / 10)
 
-/** Garments whose points and seams cannot be corrected yet. */
-export const untouched: readonly string[] = ['bodice', 'kaftan']
+/** Garments whose points and seams cannot be corrected yet, and a peplum, which is too short for any. */
+export const untouched: readonly string[] = ['bodice', 'kaftan', 'peplum']
 
 /** Marks of the dress that a fitting moves. */
 const dressMarks = [
@@ -180,13 +184,17 @@ const dressMarks = [
 function movable(draft: Draft): readonly (readonly [piece: string, mark: string])[] {
   return draft.pieces.flatMap((piece) =>
     piece.marks
-      .filter((mark) => !mark.fixed && (draft.garment !== 'flared-dress' || onDress(piece.id, mark.id)))
+      .filter((mark) => !mark.fixed && corrects(draft.garment, piece.id, mark.id))
       .map((mark): [string, string] => [piece.id, mark.id]),
   )
 }
 
-const onDress = (piece: string, mark: string): boolean =>
-  (piece === 'front' || piece === 'back') && dressMarks.includes(mark)
+/** Which marks of a garment can be tried: all of a skirt, and those of the dress that stand on its outline. */
+function corrects(garment: string, piece: string, mark: string): boolean {
+  if (garment === 'waist-seam-dress') return piece.startsWith('skirt-')
+  if (garment !== 'flared-dress') return true
+  return (piece === 'front' || piece === 'back') && dressMarks.includes(mark)
+}
 
 /** Marks on the centre line stay there. */
 const onCentre = (draft: Draft, piece: string, mark: string): boolean =>
@@ -195,8 +203,11 @@ const onCentre = (draft: Draft, piece: string, mark: string): boolean =>
 /** Seams that can be taken in, and between which levels. */
 function seamsOf(draft: Draft): readonly string[] {
   if (draft.garment === 'flared-dress') return ['side']
+  const below = draft.garment === 'waist-seam-dress' ? 'skirt-' : ''
   const ids = draft.seams.map(({ id }) => id.replace(/-(above|below|pocket-front|pocket-back)$/, ''))
-  return [...new Set(ids)].filter((id) => /^(skirt-)?(side|first|first-left|last|seam(-\d+)?)$/.test(id))
+  return [...new Set(ids)].filter(
+    (id) => id.startsWith(below) && /^(skirt-)?(side|first|first-left|last|seam(-\d+)?)$/.test(id),
+  )
 }
 
 /** A level somewhere on a seam, mm. The seams of a circle stay as they are at waist and hem. */
@@ -205,7 +216,13 @@ function levelOf(draft: Draft, seam: string, share: number): number {
   const run = draft.seams.find(({ id }) => id.startsWith(seam))?.a[0]
   const edge = draft.pieces.find(({ id }) => id === run?.piece)?.edges.find(({ id }) => id === run?.edge)
   const long = edge ? lengthOfPath(edge.path) : 0
-  return draft.garment === 'circle-skirt' ? 31 + (long - 155) * share : long * 0.97 * share
+  if (draft.garment === 'waist-seam-dress') {
+    const waist = draft.pieces.find(({ id }) => id === 'back')?.marks.find(({ id }) => id === 'waistLevel')
+      ?.at.y
+    return (waist ?? 0) + 31 + (long * 0.9 - 155) * share
+  }
+  const ends = draft.garment === 'circle-skirt'
+  return ends ? 31 + (long - 155) * share : long * 0.97 * share
 }
 
 /** Small corrections of the marks of a draft, and one of its seams taken in or let out. */
@@ -245,15 +262,17 @@ export function correctedOrder(garment: GarmentDefinition): fc.Arbitrary<DraftOr
 }
 
 /** Styles in which every measurement of a garment can have its say: sleeved and pulled on over the head, and buttoned with cuffs. */
-export function tellingStyles(garment: GarmentDefinition): readonly Readonly<Record<string, string>>[] {
+export function tellingStyles(garment: GarmentDefinition): readonly Design[] {
   return [
     { backOpening: 'none', sleeve: 'plain' },
-    { backOpening: 'button band', sleeve: 'bishop' },
-  ].map((chosen) =>
-    Object.fromEntries(
+    { backOpening: 'button band', sleeve: 'bishop', cut: 'gathered' },
+  ].map((chosen) => ({
+    ...Object.fromEntries(
       Object.entries(chosen).filter(([id, is]) =>
         garment.design.some((value) => value.id === id && value.choices?.includes(is)),
       ),
     ),
-  )
+    // Long enough to lie over the hip.
+    ...(garment.id === 'peplum' ? { length: 300 } : {}),
+  }))
 }
