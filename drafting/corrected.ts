@@ -47,7 +47,8 @@ export function judgeCorrected(pen: Pen, pieces: readonly Piece[], seams: readon
   for (const piece of pieces) {
     const name = piece.name.toLowerCase()
     for (const edge of piece.edges) {
-      if (edge.role === 'fold' && Math.abs(startOf(edge.path).x - endOf(edge.path).x) > 1e-6)
+      const upright = edge.role === 'fold' && edge.id === 'centre'
+      if (upright && Math.abs(startOf(edge.path).x - endOf(edge.path).x) > 1e-6)
         refuse(`With this correction the fold of the ${name} would not be straight. Move it up or down only.`)
     }
     if (selfIntersections(stitchLine(piece)).length > 0)
