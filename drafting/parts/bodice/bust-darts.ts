@@ -36,7 +36,7 @@ export function bustDarts(pen: Pen, buttoned: boolean): readonly BustDart[] {
   const princess = princessPlace(pen)
   if (princess) return [{ id: 'princess', place: princess, degrees }]
   const placeOf = (id: string): DartPlace | 'nothing' => {
-    const place = pen.chosen(id) as DartPlace | 'nothing'
+    const place = (pen.offered(id) ?? 'nothing') as DartPlace | 'nothing'
     if (place !== 'centre front' || !buttoned) return place
     pen.caution(
       'dart-moved',
