@@ -3,6 +3,7 @@ import { DraftingError } from '../drafting-error'
 import type { Garment } from '../pen/garment'
 import { aLineSkirt } from './a-line-skirt'
 import { bodice } from './bodice'
+import { boxyBlouse } from './boxy-blouse'
 import { circleSkirt } from './circle-skirt'
 import { flaredDress } from './flared-dress'
 import { gatheredSkirt } from './gathered-skirt'
@@ -23,6 +24,7 @@ const all: readonly Garment[] = [
   kaftan,
   waistSeamDress,
   peplum,
+  boxyBlouse,
 ]
 
 /** Every garment that can be drafted. */

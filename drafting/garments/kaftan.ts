@@ -32,7 +32,7 @@ export const kaftan = garment({
     length('backNeckDrop', 'Back neck lower by', 'neckline', { default: 0, min: 0, max: 60 }),
     length('facingDepth', 'Facing depth', 'neckline', { default: 50.8, min: 30, max: 80 }),
     ...kimonoDesign({ slope: 12, reach: 0.75, mouth: 200, lower: 55 }),
-    length('bodyEase', 'Ease of the body', 'body', { default: 400, min: 200, max: 600 }),
+    length('bustEase', 'Ease of the body', 'body', { default: 400, min: 200, max: 600 }),
     length('length', 'Length from the shoulder', 'skirt', { default: 1300, min: 800, max: 1600 }),
     length('sideFlare', 'Side out at the hem by', 'skirt', { default: 60, min: 20, max: 150 }),
     yesNo('sideSlits', 'Side slits', 'skirt', true),
@@ -57,13 +57,13 @@ export const kaftan = garment({
     ...neckRules,
     lengthRule('halfShoulder', 'Half the shoulders', 'acrossShoulders / 2'),
     lengthRule('armholeDepth', 'Armhole depth', 'bust / 6 + 1.5in'),
-    lengthRule('kimonoQuarter', 'Quarter of the body', '(max(bust, hip) + bodyEase) / 4'),
+    lengthRule('kimonoQuarter', 'Quarter of the body', '(max(bust, hip) + bustEase) / 4'),
     ...kimonoRules,
-    lengthRule('lengthDrawn', 'Length, below the underarm', 'max(length, kimonoUnderarm + 30cm)'),
+    lengthRule('lengthDrawn', 'Length, below the underarm', 'max(length, underarmDepth + 30cm)'),
     lengthRule(
       'slitDrawn',
       'Slit, below the underarm',
-      'min(slitHeight, lengthDrawn - kimonoUnderarm - 18cm)',
+      'min(slitHeight, lengthDrawn - underarmDepth - 18cm)',
     ),
     lengthRule('hipLevel', 'Hip, from the side neck', 'napeToWaist + 2.2cm + waistToHip'),
     lengthRule(
@@ -79,9 +79,9 @@ export const kaftan = garment({
     ),
     ...headRules,
   ],
-  found: { ...kimonoFound, neckFall: 'length', sideDrop: 'length', zipDrawn: 'length' },
+  found: { ...kimonoFound, neckFall: 'length', zipDrawn: 'length' },
   draft(pen) {
-    const { front } = drawKimonoBody(pen)
+    const { front } = drawKimonoBody(pen, { slits: pen.chosen('sideSlits') === true, banded: false })
     sayWhatIsOdd(pen, front.at('wristTop').x)
   },
 })
@@ -104,7 +104,7 @@ function sayWhatIsOdd(pen: Pen, wide: number): void {
         'slitHeight',
       )
     }
-  } else if (pen.value('length') > 1000 && pen.value('bodyEase') < 300) {
+  } else if (pen.value('length') > 1000 && pen.value('bustEase') < 300) {
     pen.caution('narrow-to-walk', 'Long, narrow and without slits it hinders the step.', 'sideSlits')
   }
   if (wide > 720) {

@@ -68,6 +68,11 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     default: {},
     full: { fullness: 2.5, opening: 'side zip', length: 900 },
   },
+  'boxy-blouse': {
+    default: {},
+    kimono: { sleeve: 'kimono', hemFinish: 'band' },
+    bare: { sleeve: 'none', neckShape: 'V' },
+  },
   kaftan: {
     default: {},
     gusset: { overarmSlope: 20, neckShape: 'V', sideSlits: false },

@@ -65,4 +65,6 @@ export const kimonoFound: Garment['found'] = {
   underarmDeepening: 'length',
   sleeveLengthening: 'length',
   shoulderAlong: 'length',
+  underarmDepth: 'length',
+  sideDrop: 'length',
 }

@@ -8,14 +8,13 @@ import { hasGusset } from './room'
 export function fitKimono(pen: Pen, front: PiecePen, back: PiecePen): void {
   const halves = [front, back]
   const bustAt = hasGusset(pen) ? 'underarm' : 'roundEnd'
-  const asked = pen.value('kimonoQuarter') * 4
   const bust = halves.map((piece) => {
     const end = piece.at(bustAt)
     return { piece: piece.id, path: straight({ x: 0, y: end.y }, end), times: 2, length: end.x }
   })
   const low = front.at(bustAt).y
   if (halves.every((piece) => piece.at('centreNeck').y < low)) {
-    pen.fit(fitAcross('bust', 'at-least', asked - pen.value('bust'), pen.value('bust'), bust))
+    pen.fit(fitAcross('bust', 'at-least', pen.value('bustEase'), pen.value('bust'), bust))
   }
   const hips = halves.map((piece) => ({ piece, path: across(piece, pen.value('hipLevel')) }))
   if (hips.every(({ path }) => path)) {

@@ -8,6 +8,12 @@ import { backNeckline, chosenNeckline, leaning } from '../necklines'
 import { kimonoLayout } from './layout'
 import { cornerReach, hasGusset, steepestSleeve } from './room'
 
+/** How a straight body ends: with slits in its sides, with a band sewn to its hem. */
+export interface StraightWay {
+  readonly slits: boolean
+  readonly banded: boolean
+}
+
 /** Neck, shoulder, sleeve and underarm of one half, in the order in which they are chalked. */
 export function kimonoMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): void {
   const shape = chosenNeckline(pen)
@@ -50,9 +56,10 @@ export function kimonoMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): 
   piece.go('underarm', 'underarmLevel', 'right', 'kimonoQuarter', {
     say: 'Go across a quarter of the body with its ease',
     round: 'up',
-    drag: ['bodyEase', 'underarmLower'],
+    drag: ['bustEase', 'underarmLower'],
     shared: true,
   })
+  findUnderarm(pen, piece)
   const top = piece.at('wristTop')
   const laid = kimonoLayout({
     neckWidth: piece.at('neckPoint').x,
@@ -62,7 +69,7 @@ export function kimonoMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): 
     quarter: piece.at('underarm').x,
     underarm: piece.at('underarm').y,
     corner: pen.value(cornerReach(pen)),
-    steepest: steepestSleeve(pen, pen.value('lengthDrawn') - pen.value('kimonoUnderarm')),
+    steepest: steepestSleeve(pen, pen.value('lengthDrawn') - pen.value('underarmDepth')),
   })
   piece.aim('wristLow', 'wristTop', unit(between(top, laid.wristLow)), pen.length('mouthWidth'), {
     say: 'Across the end of the sleeve come down its opening, alike to its upper and under side',
@@ -72,6 +79,11 @@ export function kimonoMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): 
     shared: true,
   })
   tags(pen, piece, drop, depth)
+}
+
+/** States how deep the underarm lies, which the least length follows from. */
+function findUnderarm(pen: Pen, piece: PiecePen): void {
+  pen.find('underarmDepth', piece.at('underarm').y, piece.mark('underarm').y)
 }
 
 function tags(pen: Pen, piece: PiecePen, drop: string, depth: string): void {
@@ -99,7 +111,8 @@ function tags(pen: Pen, piece: PiecePen, drop: string, depth: string): void {
 }
 
 /** Length, side and slit of one half: the same drop from the underarm down the centre and down the side. */
-export function kimonoLower(pen: Pen, piece: PiecePen): void {
+export function straightLower(pen: Pen, piece: PiecePen, way: StraightWay): void {
+  findUnderarm(pen, piece)
   piece.go('lengthMark', 'neckLevel', 'down', 'lengthDrawn', {
     say: 'From the level of the side neck come down the length',
     drag: ['length'],
@@ -124,7 +137,7 @@ export function kimonoLower(pen: Pen, piece: PiecePen): void {
     drag: ['sideFlare'],
     shared: true,
   })
-  if (pen.chosen('sideSlits')) {
+  if (way.slits) {
     piece.aim('slitTop', 'sideHem', scale(down, -1), pen.length('slitDrawn'), {
       say: 'From the hem go up the side by the slit',
       by: 'slitDrawn',
@@ -158,6 +171,7 @@ export function drawKimonoHalf(
   lean: number,
   necks: Mask,
   foot: string,
+  way: StraightWay,
 ): void {
   const at = (id: string): Point => piece.at(id)
   const ends = [at('centreNeck'), at('sideNeck'), leaning(lean)] as const
@@ -192,20 +206,20 @@ export function drawKimonoHalf(
     say: 'Draw the end of the sleeve, square to its upper and under side',
     through,
   })
-  underarm(pen, piece, out)
-  if (pen.chosen('sideSlits')) {
+  underarm(pen, piece, out, way)
+  if (way.slits) {
     piece.line('side-slit', 'slitTop', 'sideHem', {
       role: 'opening',
       allowance: 'sideAllowance',
       say: 'The slit, turned in',
     })
   }
-  hem(pen, piece, foot)
+  straightHem(pen, piece, foot, way)
 }
 
 /** The underside of the sleeve and the side: one line round the underarm, or two that a gusset is set between. */
-function underarm(pen: Pen, piece: PiecePen, out: Point): void {
-  const end = pen.chosen('sideSlits') ? 'slitTop' : 'sideHem'
+function underarm(pen: Pen, piece: PiecePen, out: Point, way: StraightWay): void {
+  const end = way.slits ? 'slitTop' : 'sideHem'
   const seam = { role: 'seam', allowance: 'sideAllowance' } as const
   if (hasGusset(pen)) {
     piece.line('sleeve-under', 'wristLow', 'underarm', {
@@ -247,8 +261,8 @@ function underarm(pen: Pen, piece: PiecePen, out: Point): void {
   )
 }
 
-/** From the side to the centre, square to both. */
-function hem(pen: Pen, piece: PiecePen, foot: string): void {
+/** The hem from the side to the centre, square to both. */
+export function straightHem(pen: Pen, piece: PiecePen, foot: string, way: StraightWay): void {
   const from = piece.at('sideHem')
   const to = piece.at(foot)
   const down = unit(between(piece.at('underarm'), from))
@@ -261,9 +275,9 @@ function hem(pen: Pen, piece: PiecePen, foot: string): void {
     })
   }
   piece.curve('hem', fair, 'sideHem', foot, {
-    role: 'hem',
-    allowance: 'hemAllowance',
-    corner: 'turned',
+    ...(way.banded
+      ? { role: 'seam', allowance: 'sideAllowance' }
+      : { role: 'hem', allowance: 'hemAllowance', corner: 'turned' }),
     say: 'Draw the hem in one fair curve, square to the side and to the centre',
     through: ['underarm'],
   })

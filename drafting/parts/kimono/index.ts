@@ -8,7 +8,7 @@ import { neckLeans } from '../neck-lean'
 import { drawOpening } from '../openings'
 import { fitKimono } from './fits'
 import { sewUnderarm } from './gusset'
-import { drawKimonoHalf, kimonoLower, kimonoMarks } from './half'
+import { drawKimonoHalf, kimonoMarks, straightLower, type StraightWay } from './half'
 import { makeRoom } from './room'
 
 export { kimonoDesign, kimonoFound, kimonoRules } from './design'
@@ -18,7 +18,10 @@ export { kimonoDesign, kimonoFound, kimonoRules } from './design'
  * states `kimonoDesign` and `kimonoRules`, and rules for `neckWidth`, `halfShoulder`, `armholeDepth`, `kimonoQuarter`,
  * `lengthDrawn`, `slitDrawn`, `frontDip` and `hipLevel`.
  */
-export function drawKimonoBody(pen: Pen): { readonly front: PiecePen; readonly back: PiecePen } {
+export function drawKimonoBody(
+  pen: Pen,
+  way: StraightWay,
+): { readonly front: PiecePen; readonly back: PiecePen } {
   makeRoom(pen)
   const front = pen.piece('front', 'Front')
   const back = pen.piece('back', 'Back')
@@ -27,16 +30,18 @@ export function drawKimonoBody(pen: Pen): { readonly front: PiecePen; readonly b
     [back, 'back'],
   ] as const) {
     kimonoMarks(pen, piece, side)
-    kimonoLower(pen, piece)
+    straightLower(pen, piece, way)
   }
   front.go('centreHem', 'lengthMark', 'down', 'frontDip', {
     say: 'Lower the centre front by what the bust takes up',
   })
   const leans = neckLeans(pen, front, back)
   const necks = front.usesOf('centreNeck', 'sideNeck') | back.usesOf('centreNeck')
-  drawKimonoHalf(pen, front, 'front', leans.front, necks, 'centreHem')
-  drawKimonoHalf(pen, back, 'back', leans.back, necks, 'lengthMark')
-  const below = { edge: 'hem', role: 'hem', allowance: 'hemAllowance' } as const
+  drawKimonoHalf(pen, front, 'front', leans.front, necks, 'centreHem', way)
+  drawKimonoHalf(pen, back, 'back', leans.back, necks, 'lengthMark', way)
+  const below = way.banded
+    ? ({ edge: 'hem', role: 'seam', allowance: 'sideAllowance' } as const)
+    : ({ edge: 'hem', role: 'hem', allowance: 'hemAllowance' } as const)
   const centres = drawOpening(
     pen,
     { piece: front, foot: 'centreHem', below },

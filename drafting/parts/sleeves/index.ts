@@ -46,13 +46,19 @@ export const sleeveFound: Garment['found'] = {
   capBinding: 'length',
 }
 
+/** What may stand among the sleeves of a garment: one that is set in, none, or one in one with the body. */
+type Choice = Name | 'none' | 'kimono'
+
+const isSetIn = (name: Choice): name is Name => name !== 'none' && name !== 'kimono'
+
 /**
- * The choice of a sleeve and the style values of each.
+ * The choice of a sleeve and the style values of each that is set in.
  *
- * @param names those that the garment offers, the default first; 'none' leaves the armhole bare.
+ * @param names those that the garment offers, the default first; 'none' leaves the armhole bare, and a 'kimono' is
+ *   drawn by the garment with its body.
  */
-export function sleeveDesign(...names: readonly [Name | 'none', ...(Name | 'none')[]]): DesignValue[] {
-  const worn = names.filter((name): name is Name => name !== 'none')
+export function sleeveDesign(...names: readonly [Choice, ...Choice[]]): DesignValue[] {
+  const worn = names.filter(isSetIn)
   const is = (...some: readonly Name[]) => ({ id: 'sleeve', is: some.filter((name) => worn.includes(name)) })
   const all = is(...worn)
   const turnedUp = is(...worn.filter((name) => sleeves[name].turnedUp))
@@ -72,14 +78,14 @@ export function sleeveDesign(...names: readonly [Name | 'none', ...(Name | 'none
  * The rules of the sleeves that a garment offers. Common practice, no published source, but the level of the elbow, which
  * is from memory.
  */
-export function sleeveRules(...names: readonly (Name | 'none')[]): RuleDefinition[] {
+export function sleeveRules(...names: readonly Choice[]): RuleDefinition[] {
   return [
     lengthRule('biceps', 'Sleeve girth at the underarm', 'upperArm + sleeveEase'),
     lengthRule('leastArmhole', 'Least armhole for the arm', '(upperArm + sleeveEase) * 1.1'),
     lengthRule('frontHeadEase', 'Ease in the front of the head', 'sleeveHeadEase * 0.45'),
     lengthRule('backHeadEase', 'Ease in the back of the head', 'sleeveHeadEase * 0.55'),
     lengthRule('elbowLevel', 'Elbow below the crown', 'armLength / 2 + 2.5cm', 'from memory'),
-    ...names.flatMap((name) => (name === 'none' ? [] : sleeves[name].rules)),
+    ...names.filter(isSetIn).flatMap((name) => sleeves[name].rules),
   ]
 }
 

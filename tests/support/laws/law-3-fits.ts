@@ -63,7 +63,10 @@ export const fits: DraftLaw = (draft, order, engine) => {
     const body = asked(meaning?.body)
     if (body !== undefined)
       found.atMost(fit.id, 'body against the card', Math.abs((fit.body ?? NaN) - body), 1e-6)
-    const ease = asked(meaning?.ease)
+    // Round the arm a sleeve in one with the body has an ease of its own.
+    const inOne =
+      fit.id === 'biceps' && draft.pieces.some(({ edges }) => edges.some(({ id }) => id === 'mouth'))
+    const ease = asked(inOne ? 'kimonoEase' : meaning?.ease)
     if (ease !== undefined && !order.tape) {
       found.atMost(fit.id, 'ease against the style', Math.abs(fit.ease - ease), 1e-6)
     }
