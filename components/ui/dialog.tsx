@@ -40,7 +40,7 @@ export function Dialog({
         if (event.target === box.current) onClose()
       }}
       className={classes(
-        'm-0 mt-auto w-full max-w-full rounded-t bg-ground p-0 text-base text-ink shadow-float',
+        'm-0 mt-auto w-full max-w-full rounded-t border hairline bg-ground p-0 text-base text-ink shadow-float',
         'max-h-[92dvh] overflow-y-auto sm:m-auto sm:rounded',
         wide ? 'sm:max-w-240' : 'sm:max-w-130',
       )}
