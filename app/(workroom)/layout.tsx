@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react'
 import { buildId } from '@/app/_server/build'
 import { requireSignedIn } from '@/app/_server/session'
+import { ToastReady } from '@/components/ui/toast'
 import { may } from '@/db/permissions'
 import { OnThisDevice } from './_parts/on-this-device'
 import { WorkroomBar } from './_parts/workroom-bar'
@@ -22,6 +23,7 @@ export default async function WorkroomLayout({ children }: { children: ReactNode
     <>
       <WorkroomBar places={places} menu={<WorkroomMenu name={userName} />} />
       <main id="main">{children}</main>
+      <ToastReady />
       {actor && <OnThisDevice build={buildId} userId={actor.userId} workroomId={actor.workroomId} />}
     </>
   )

@@ -141,7 +141,7 @@ test('a point that cannot be dragged says why, and what does move it', async ({ 
   const point = page.getByRole('button', { name: /^Point C of Front\. / })
   await point.focus()
   await expect(point).toHaveAccessibleName(
-    /cannot be dragged: it follows from the body\. Across shoulders and the rule “Half the shoulders” move it\./,
+    /cannot be dragged: it follows from the body\. Across shoulders.* move it\.$/,
   )
   await expect(words).toBeVisible()
   await page.keyboard.press('ArrowRight')
@@ -161,7 +161,7 @@ test('choices are folded by part, drawn, and what does not apply is not asked', 
   await measureClient(page, 'Choice Test', body)
   await startDress(page, 'Choice dress')
   const drawer = page.getByRole('complementary', { name: 'Drawer' })
-  await drawer.getByRole('radio', { name: 'Square' }).check()
+  await drawer.locator('label', { hasText: 'Square' }).click()
   await expect(drawer.getByRole('radio', { name: 'Square' })).toBeChecked()
   const sleeve = drawer.getByRole('button', { name: /^Sleeve/ })
   await expect(sleeve).toHaveAttribute('aria-expanded', 'false')
@@ -169,7 +169,10 @@ test('choices are folded by part, drawn, and what does not apply is not asked', 
   await sleeve.click()
   await expect(drawer.getByLabel('Sleeve length')).toBeVisible()
   await expect(page.locator('[data-sheet] [data-piece=sleeve]').first()).toBeAttached()
-  await drawer.getByRole('radio', { name: 'None' }).check()
+  await drawer
+    .locator('label', { hasText: /^None$/ })
+    .first()
+    .click()
   await expect(drawer.getByLabel('Sleeve length')).toHaveCount(0)
   await expect(page.locator('[data-sheet] [data-piece=sleeve]')).toHaveCount(0)
 })
@@ -188,7 +191,7 @@ test('zooming keeps the place under the pointer; the wheel pans', async ({ page 
   expect(Math.abs((zoomed?.x ?? 0) - before.x)).toBeLessThan(1)
   expect(Math.abs((zoomed?.y ?? 0) - before.y)).toBeLessThan(1)
   await page.mouse.wheel(30, 40)
-  await expect.poll(async () => Math.round(((await hem.boundingBox())?.y ?? 0) - before.y)).toBe(-40)
+  await expect.poll(async () => Math.round(((await hem.boundingBox())?.y ?? 0) - (zoomed?.y ?? 0))).toBe(-40)
 })
 
 test('two tabs on one draft: both versions are kept, and the person chooses', async ({ page, context }) => {
