@@ -8,21 +8,27 @@ import { Dialog } from '@/components/ui/dialog'
 import { ErrorNote } from '@/components/ui/error-note'
 import { ask } from '../../../_data/api'
 import { usePrinters } from '../../../_data/printers'
+import { Queries } from '../../../_data/queries'
 
-/** The paper pattern of a saved version: what is printed can always be printed again, as it was. */
-export function PrintLeaf({
-  onClose,
-  draft,
-  draftId,
-  revisionId,
-}: {
+interface PrintLeafProps {
   readonly onClose: () => void
   /** As it is drawn today; missing when it cannot be. */
   readonly draft: Draft | undefined
   readonly draftId: string
   /** Missing when what is on the table could not be saved. */
   readonly revisionId: string | undefined
-}) {
+}
+
+/** The paper pattern of a saved version: what is printed can always be printed again, as it was. */
+export function PrintLeaf(props: PrintLeafProps) {
+  return (
+    <Queries>
+      <Print {...props} />
+    </Queries>
+  )
+}
+
+function Print({ onClose, draft, draftId, revisionId }: PrintLeafProps) {
   const printers = usePrinters()
   const kept = useQuery({
     queryKey: ['kept', revisionId],

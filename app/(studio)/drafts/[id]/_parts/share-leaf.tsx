@@ -4,22 +4,28 @@ import { useQuery, useQueryClient } from '@tanstack/react-query'
 import { v7 as newId } from 'uuid'
 import { ShareDialog } from '@/components/print/share-dialog'
 import { ask } from '../../../_data/api'
+import { Queries } from '../../../_data/queries'
 
 type Shares = Parameters<typeof ShareDialog>[0]['shares']
 
-/** Links to this draft: asked for when the dialog opens, made and taken back through our own routes. */
-export function ShareLeaf({
-  onClose,
-  draftId,
-  draftName,
-  beforeMaking,
-}: {
+interface ShareLeafProps {
   readonly onClose: () => void
   readonly draftId: string
   readonly draftName: string
   /** A link shows the newest saved version: what is on the table is saved first. */
   readonly beforeMaking: () => Promise<unknown>
-}) {
+}
+
+/** Links to this draft: asked for when the dialog opens, made and taken back through our own routes. */
+export function ShareLeaf(props: ShareLeafProps) {
+  return (
+    <Queries>
+      <Share {...props} />
+    </Queries>
+  )
+}
+
+function Share({ onClose, draftId, draftName, beforeMaking }: ShareLeafProps) {
   const queries = useQueryClient()
   const key = ['shares', draftId]
   const path = `/api/drafts/${draftId}/shares`

@@ -9,6 +9,7 @@ import { ErrorNote } from '@/components/ui/error-note'
 import { Field } from '@/components/ui/field'
 import { ask, type Version, type VersionSummary } from '../../../_data/api'
 import type { Autosave } from '../../../_data/autosave'
+import { Queries } from '../../../_data/queries'
 import { contentOf } from './use-autosave'
 
 interface Props {
@@ -25,7 +26,9 @@ interface Props {
 export function VersionsDialog(props: Props) {
   return (
     <Dialog open onClose={props.onClose} title="Versions">
-      <Versions {...props} />
+      <Queries>
+        <Versions {...props} />
+      </Queries>
     </Dialog>
   )
 }
