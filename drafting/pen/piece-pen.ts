@@ -243,21 +243,20 @@ export class PiecePen {
     this.kinds.set(id, options.kind ?? 'construction')
     if (options.drag) this.drags.set(id, options.drag)
     this.marks.set(own, { id: own, at, x, y })
+    const draws = options.draws ? [options.draws] : []
+    if (options.from) draws.push(openPath([line(this.at(options.from), at)]))
     this.pen.note({
       id: `${this.id}.${own}`,
       piece: this.id,
       kind: options.stepKind ?? (options.length === undefined && !options.from ? 'level' : 'mark'),
       say: options.say,
-      ...(options.from ? { from: options.from } : {}),
-      ...(options.direction ? { direction: options.direction } : {}),
-      ...(options.by ? { by: options.by } : {}),
-      ...(options.length === undefined ? {} : { length: options.length }),
+      from: options.from,
+      direction: options.direction,
+      by: options.by,
+      length: options.length,
       marks: [own],
       uses: x | y,
-      draws: [
-        ...(options.draws ? [options.draws] : []),
-        ...(options.from ? [openPath([line(this.at(options.from), at)])] : []),
-      ],
+      draws,
     })
     if (stays) return
     const by = subtract(moved, at)

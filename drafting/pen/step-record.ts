@@ -7,13 +7,13 @@ export interface StepRecord {
   readonly piece: string
   readonly kind: Step['kind']
   readonly say: string
-  readonly from?: string
-  readonly direction?: Point
+  readonly from?: string | undefined
+  readonly direction?: Point | undefined
   readonly marks: readonly string[]
   readonly edge?: string
   /** The rule or style value that gives the length. */
-  readonly by?: string
-  readonly length?: number
+  readonly by?: string | undefined
+  readonly length?: number | undefined
   readonly sagitta?: number
   readonly uses: Mask
   readonly draws: readonly Path[]

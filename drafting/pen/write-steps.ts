@@ -3,6 +3,8 @@ import { explainFormula } from '../rules'
 import { lengthDigits } from '../lengths'
 import type { Pen } from './pen'
 
+type Writable<T> = { -readonly [K in keyof T]: T[K] }
+
 /** Turns what the pen noted down into steps with words and sums. Without explanations the words and sums are left out. */
 export function writeSteps(pen: Pen): Step[] {
   const { rules } = pen.values
@@ -14,21 +16,25 @@ export function writeSteps(pen: Pen): Step[] {
           ? explainFormula(formula, pen.values.numbers, rules.kinds, pen.unit, record.length)
           : lengthDigits(record.length, pen.unit)
         : undefined
-    return {
+    const step: Writable<Partial<Step>> & Pick<Step, 'id' | 'piece' | 'kind' | 'text'> = {
       id: record.id,
       piece: record.piece,
       kind: record.kind,
       text: pen.explains ? record.say : '',
-      ...(record.from ? { from: record.from } : {}),
-      ...(record.direction ? { direction: record.direction } : {}),
-      marks: record.marks,
-      ...(record.edge ? { edge: record.edge } : {}),
-      ...(formula ? { rule: record.by as string, formula: formula.text } : {}),
-      ...(sum === undefined ? {} : { arithmetic: sum }),
-      ...(record.length === undefined ? {} : { length: record.length }),
-      ...(record.sagitta === undefined ? {} : { sagitta: record.sagitta }),
-      uses: rules.names.spell(record.uses),
-      draws: record.draws,
     }
+    if (record.from) step.from = record.from
+    if (record.direction) step.direction = record.direction
+    step.marks = record.marks
+    if (record.edge) step.edge = record.edge
+    if (formula) {
+      step.rule = record.by as string
+      step.formula = formula.text
+    }
+    if (sum !== undefined) step.arithmetic = sum
+    if (record.length !== undefined) step.length = record.length
+    if (record.sagitta !== undefined) step.sagitta = record.sagitta
+    step.uses = rules.names.spell(record.uses)
+    step.draws = record.draws
+    return step as Step
   })
 }
