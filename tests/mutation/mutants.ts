@@ -284,8 +284,8 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
     [
       'steps say 2 mm more than they draw',
       'pen/write-steps.ts',
-      '{ length: record.length }',
-      '{ length: record.length + 2 }',
+      'step.length = record.length',
+      'step.length = record.length + 2',
     ],
     [
       'edges name a step that drew something else',
