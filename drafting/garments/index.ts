@@ -10,11 +10,13 @@ import { gatheredSkirt } from './gathered-skirt'
 import { goredSkirt } from './gored-skirt'
 import { kaftan } from './kaftan'
 import { peplum } from './peplum'
+import { shiftDress } from './shift-dress'
 import { straightSkirt } from './straight-skirt'
 import { waistSeamDress } from './waist-seam-dress'
 
 const all: readonly Garment[] = [
   flaredDress,
+  shiftDress,
   circleSkirt,
   bodice,
   straightSkirt,

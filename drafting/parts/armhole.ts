@@ -23,7 +23,8 @@ export function armholeCurve(tip: Point, hollow: Point, underarm: Point, shoulde
   // A sloping shoulder must not carry the curve past its own hollow.
   const inwards = -leaves.x
   const hollowed = tip.x - hollow.x
-  const start = inwards > 1e-9 ? Math.min(upper * 0.36, (0.6 * hollowed) / inwards) : upper * 0.36
+  const start =
+    inwards > 1e-9 ? Math.max(upper * 0.08, Math.min(upper * 0.36, (0.6 * hollowed) / inwards)) : upper * 0.36
   return openPath([
     cubic(tip, add(tip, scale(leaves, start)), { x: hollow.x, y: hollow.y - upper * 0.36 }, hollow),
     cubic(

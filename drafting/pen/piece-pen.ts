@@ -344,6 +344,31 @@ export class PiecePen {
     })
   }
 
+  /**
+   * A dart that lies inside the piece, from the two sides of its mouth to its point. Where it runs on beyond its mouth to
+   * another point, a second dart shares the mouth.
+   */
+  innerDart(
+    id: string,
+    mouth: readonly [string, string],
+    point: string,
+    pressTo: Dart['pressTo'],
+    say: string,
+  ): void {
+    const [from, to, at] = [this.at(mouth[0]), this.at(mouth[1]), this.at(point)]
+    const legs = [openPath([line(from, at)]), openPath([line(at, to)])] as const
+    this.darts.push({ id, legs, point: at, pressTo, intake: distance(from, to) })
+    this.pen.note({
+      id: `${this.id}.${id}`,
+      piece: this.id,
+      kind: 'line',
+      say,
+      marks: [],
+      uses: this.usesOf(...mouth, point),
+      draws: legs,
+    })
+  }
+
   /** A line inside the piece: a level, a turn line, a place for something. */
   inner(
     id: string,

@@ -116,8 +116,8 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
     [
       'a stretch beside the pocket is sewn twice',
       'parts/pockets/in-seam.ts',
-      'a: [stretch(a, mouth.to, length)],',
-      'a: [stretch(a, mouth.to - 5, length)],',
+      'a: stretch(a, mouth.to, length),',
+      'a: stretch(a, mouth.to - 5, length),',
     ],
   ],
   3: [

@@ -51,7 +51,6 @@ export function bodiceBackMarks(pen: Pen, back: PiecePen, shoulder: number): voi
     drag: ['bustEase'],
   })
   back.go('waistLevel', 'nape', 'down', 'napeToWaist', { say: 'From the nape come down to the waist' })
-  back.go('centreWaist', 'waistLevel', 'right', 'centreBackIn', { say: 'Come in at the centre back' })
 }
 
 /** Deepens the armhole of a half below its rule where the arm needs room. @returns the mark on the level of the underarm */

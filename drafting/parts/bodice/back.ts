@@ -44,6 +44,7 @@ export function drawBodiceBack(
   way: BodiceWay,
 ): BodiceHalf & { readonly side: SideSeam } {
   const at = (id: string): Point => back.at(id)
+  back.go('centreWaist', 'waistLevel', 'right', 'centreBackIn', { say: 'Come in at the centre back' })
   const planned = pen.follow(() => dartsOf(pen, back))
   const darts = placeWaistTips(back, planned.made, at('waistLevel').y, planned.uses)
   const fitted = pen.follow(() => {
@@ -66,13 +67,13 @@ export function drawBodiceBack(
   back.go('hollow', 'halfDepth', 'right', 'backHalf', {
     say: 'Go across half the back: the hollow of the armhole',
   })
-  checkRoom(pen, back)
+  checkBackRoom(pen, back)
   const drawn = pen.follow(() => {
     const [top, end] = [at('underarm'), at('sideWaist')]
     const taken = takenInOf(pen, 'side', top, end, beyondEnd)
     const { path } = throughTakenIn(top, end, taken)
     pen.heed(lean.uses)
-    const shoulder = unit(between(at('neckPoint'), at('shoulderTip')))
+    const shoulder = unit(between(at('sideNeck'), at('shoulderTip')))
     const upper: readonly [UpperEdge, UpperEdge, UpperEdge, UpperEdge] = [
       { id: 'neckline', path: backNeckline(at('centreNeck'), at('sideNeck'), leaning(lean.degrees)) },
       { id: 'shoulder', path: straight(at('sideNeck'), at('shoulderTip')) },
@@ -137,7 +138,8 @@ function seamOf(pen: Pen, darts: readonly WaistDart[]): readonly Opening[] {
   return mouth ? [{ ...mouth, point: tip.point, degrees: 0 }] : []
 }
 
-function checkRoom(pen: Pen, back: PiecePen): void {
+/** Refuses a back that is wider across than its underarm: its armhole would turn outwards. */
+export function checkBackRoom(pen: Pen, back: PiecePen): void {
   const { x } = back.at('underarm')
   if (back.at('hollow').x <= x - 15) return
   pen.refuse({

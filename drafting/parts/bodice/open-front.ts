@@ -101,7 +101,7 @@ function upperEdges(
   side: Path,
 ): readonly [UpperEdge, UpperEdge, UpperEdge, UpperEdge] {
   const tip = front.at('shoulderTip')
-  const shoulder = unit(between(front.at('neckPoint'), tip))
+  const shoulder = unit(between(front.at('sideNeck'), tip))
   return [
     { id: 'neckline', path: neckline },
     { id: 'shoulder', path: straight(front.at('sideNeck'), tip) },

@@ -1,4 +1,4 @@
-import type { EdgeRole, Edge, Path, Point } from '../../contract'
+import type { Corner, EdgeRole, Edge, Path, Point } from '../../contract'
 import { applyTo, distance, endOf, reversePath, transformPath, type Transform } from '../../geometry'
 import type { Mask } from '../../pen/masks'
 import type { PiecePen } from '../../pen/piece-pen'
@@ -9,6 +9,7 @@ interface Manner {
   readonly role: EdgeRole
   readonly allowance?: string
   readonly kind: 'line' | 'curve'
+  readonly corner?: Corner
   readonly say: string
 }
 
@@ -27,6 +28,13 @@ const manners: Readonly<Record<string, Manner>> = {
     allowance: 'waistAllowance',
     kind: 'curve',
     say: 'Draw the waist as it runs with its darts closed, then open them',
+  },
+  hem: {
+    role: 'hem',
+    allowance: 'hemAllowance',
+    kind: 'curve',
+    corner: 'turned',
+    say: 'Draw the hem in one fair curve, square to the side and to the centre',
   },
   princess: {
     role: 'seam',
@@ -58,7 +66,12 @@ export function drawOutline(piece: PiecePen, edges: readonly PlacedEdge[], optio
   const standing = (id: string, at: Point): string => {
     if (piece.marks.has(id)) return distance(piece.at(id), at) < 1e-6 ? id : standing(`${id}-open`, at)
     if (source?.marks.has(id) && distance(source.at(id), at) < 1e-6) piece.trace(id, source, mask)
-    else piece.place(id, at, { say: 'Mark the corner', mask })
+    else
+      piece.place(id, at, {
+        say: 'Mark the corner',
+        mask,
+        fixed: 'It follows the marks on both sides of it.',
+      })
     return id
   }
   const first = edges[0]
@@ -66,10 +79,11 @@ export function drawOutline(piece: PiecePen, edges: readonly PlacedEdge[], optio
   edges.forEach((edge, index) => {
     const next = edges[index + 1]?.from ?? options.end ?? first?.from ?? ''
     const to = standing(next, endOf(edge.path))
-    const { role, allowance, kind, say } = manners[edge.of] as Manner
+    const { role, allowance, kind, corner, say } = manners[edge.of] as Manner
     piece.curve(edge.id, pinned(edge.path, piece.at(from), piece.at(to)), from, to, {
       role,
       ...(allowance ? { allowance } : {}),
+      ...(corner ? { corner } : {}),
       ...(edge.of === 'waist' && options.waist ? { finish: options.waist } : {}),
       say,
       kind,

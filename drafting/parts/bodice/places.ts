@@ -57,9 +57,10 @@ export function mouthOf(pen: Pen, dart: BustDart, bustLevel: number): Mouth | un
   return place && { ...place, dart }
 }
 
-/** A dart shorter than this is a stump, and one that meets its edge flatter cannot be capped. mm, degrees */
+/** A dart shorter than this is a stump; flatter to its edge, or nearer to a corner, it cannot be capped. mm, degrees, mm */
 const shortest = 55
 const flattest = 35
+const nearest = 22
 
 /** Whether a dart cannot be sewn where it opens. */
 function unsound(one: Opening, edges: readonly UpperEdge[]): boolean {
@@ -71,9 +72,8 @@ function unsound(one: Opening, edges: readonly UpperEdge[]): boolean {
   const leg = between(mouth, point)
   const long = distance(mouth, point)
   const steep = (Math.asin(Math.min(1, Math.abs(cross(unit(leg), tangentOn(edge, along))))) * 180) / Math.PI
-  const wide = 2 * long * Math.sin((one.degrees * Math.PI) / 360)
   const clearOfEnds = Math.min(along, pathLength(edge) - along)
-  if (long < shortest || steep < flattest || clearOfEnds < wide / 2 + 8) return true
+  if (long < shortest || steep < flattest || clearOfEnds < nearest) return true
   const whole = straight(mouth, point)
   return edges.some(({ path }) => intersections(path, whole).some(({ b }) => b > 1))
 }

@@ -161,6 +161,9 @@ export function pocketBag(pen: Pen, least: number, uses: Mask): PiecePen {
   return bag
 }
 
+/** One side of a seam: an edge, or what gives the stretches of one that a dart divides. */
+type Side = Run | ((from: number, to: number) => readonly Run[])
+
 /**
  * Sews a side seam with a pocket in it: the two sides to each other above and below the mouth, and to the bags along it.
  *
@@ -169,38 +172,39 @@ export function pocketBag(pen: Pen, least: number, uses: Mask): PiecePen {
 export function sewWithPocket(
   pen: Pen,
   seam: { readonly id: string; readonly name: string; readonly smooth?: boolean },
-  a: Run,
-  b: Run,
+  a: Side,
+  b: Side,
   mouth: PocketMouth,
   length: number,
 ): void {
-  const stretch = (run: Run, from: number, to: number): Run => ({ ...run, from, to })
+  const stretch = (side: Side, from: number, to: number): readonly Run[] =>
+    typeof side === 'function' ? side(from, to) : [{ ...side, from, to }]
   const bag: Run = { piece: 'pocket-bag', edge: 'mouth' }
   pen.sew({
     ...seam,
     id: `${seam.id}-above`,
     name: `${seam.name}, above the pocket`,
-    a: [stretch(a, 0, mouth.from)],
-    b: [stretch(b, 0, mouth.from)],
+    a: stretch(a, 0, mouth.from),
+    b: stretch(b, 0, mouth.from),
   })
   pen.sew({
     id: `${seam.id}-pocket-front`,
     name: `${seam.name}, front to pocket bag`,
-    a: [stretch(a, mouth.from, mouth.to)],
+    a: stretch(a, mouth.from, mouth.to),
     b: [bag],
   })
   pen.sew({
     id: `${seam.id}-pocket-back`,
     name: `${seam.name}, back to pocket bag`,
-    a: [stretch(b, mouth.from, mouth.to)],
+    a: stretch(b, mouth.from, mouth.to),
     b: [{ ...bag, mirrored: true }],
   })
   pen.sew({
     ...seam,
     id: `${seam.id}-below`,
     name: `${seam.name}, below the pocket`,
-    a: [stretch(a, mouth.to, length)],
-    b: [stretch(b, mouth.to, length)],
+    a: stretch(a, mouth.to, length),
+    b: stretch(b, mouth.to, length),
   })
   pen.sew({
     id: 'pocket-bags',

@@ -1,5 +1,5 @@
 import type { Draft, Fit } from '@/drafting/contract'
-import { chordsOf, endOfPath, lengthOfPath, startOfPath } from './curves'
+import { chordsOf, endOfPath, far, lengthOfPath, startOfPath } from './curves'
 import { garmentOf, numberOf } from './formulas'
 import { Chain, closedChain, ringOf, stitchPath } from './outline'
 import { Findings, type DraftLaw } from './violation'
@@ -37,6 +37,7 @@ const promised: Readonly<Record<string, Readonly<Record<string, Fit['relation']>
   kaftan: { bust: 'at-least', hip: 'at-least', biceps: 'at-least' },
   peplum: { waist: 'equal' },
   'waist-seam-dress': { waist: 'equal', biceps: 'at-least', armhole: 'at-least' },
+  'shift-dress': { waist: 'at-least', hip: 'at-least', biceps: 'at-least' },
   bodice: { bust: 'equal', waist: 'equal', biceps: 'at-least', armhole: 'at-least' },
 }
 
@@ -102,7 +103,12 @@ function measured(
     // A lapped front runs on beyond its centre, from which a girth is measured.
     const lapped = piece.edges.some((one) => one.id === 'overlap-neck')
     const centre = piece.lines.find((one) => lapped && one.id === 'centre-front')
+    // A girth leaves out what a dart inside the piece takes up: it ends on both sides of its mouth.
+    const mouths = piece.darts.flatMap((dart) =>
+      dart.edges ? [] : dart.legs.flatMap((leg) => chordsOf(leg)),
+    )
     for (const end of [startOfPath(path), endOfPath(path)]) {
+      if (mouths.some((point) => far(point, end) < 0.01)) continue
       const onCentre = centre ? new Chain(chordsOf(centre.path)).gap(end) : Infinity
       found.atMost(`${fit.id} on ${id}`, 'end off the stitch line', Math.min(line.gap(end), onCentre), 0.01)
     }

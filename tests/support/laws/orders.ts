@@ -5,6 +5,7 @@ import type {
   DesignValue,
   Draft,
   DraftOrder,
+  Edge,
   GarmentDefinition,
 } from '@/drafting/contract'
 import { ruledOut } from '@/drafting/combinations'
@@ -166,9 +167,9 @@ export function namedOrders(
 const small = fc.integer({ min: -100, max: 100 }).map((tenths) => tenths / 10)
 
 /** Garments whose points and seams cannot be corrected yet, and a peplum, which is too short for any. */
-export const untouched: readonly string[] = ['bodice', 'kaftan', 'boxy-blouse', 'peplum']
+export const untouched: readonly string[] = ['kaftan', 'boxy-blouse', 'peplum']
 
-/** Marks of the dress that a fitting moves. */
+/** Marks of a dress or a bodice that a fitting moves. */
 const dressMarks = [
   'shoulderTip',
   'sideNeck',
@@ -178,7 +179,14 @@ const dressMarks = [
   'sideHem',
   'neckPoint',
   'lengthMark',
+  'bustPoint',
+  'bustDartPoint',
+  'sideWaist',
+  'sideWaistEnd',
 ]
+
+/** Garments with facings and sleeves traced from a body, whose own marks alone a fitting moves. */
+const dressed = new Set(['flared-dress', 'bodice', 'shift-dress'])
 
 /** Every mark of a draft that a correction may move, by piece. */
 function movable(draft: Draft): readonly (readonly [piece: string, mark: string])[] {
@@ -192,7 +200,7 @@ function movable(draft: Draft): readonly (readonly [piece: string, mark: string]
 /** Which marks of a garment can be tried: all of a skirt, and those of the dress that stand on its outline. */
 function corrects(garment: string, piece: string, mark: string): boolean {
   if (garment === 'waist-seam-dress') return piece.startsWith('skirt-')
-  if (garment !== 'flared-dress') return true
+  if (!dressed.has(garment)) return true
   return (piece === 'front' || piece === 'back') && dressMarks.includes(mark)
 }
 
@@ -211,8 +219,19 @@ function seamsOf(draft: Draft): readonly string[] {
 }
 
 /** A level somewhere on a seam, mm. The seams of a circle stay as they are at waist and hem. */
+const levelsOf = (edge: Edge | undefined): readonly [number, number] => {
+  const ys = (edge?.path.segments ?? []).flatMap(({ from, to }) => [from.y, to.y])
+  return [Math.min(...ys), Math.max(...ys)]
+}
+
 function levelOf(draft: Draft, seam: string, share: number): number {
   if (draft.garment === 'flared-dress') return 350 + 350 * share
+  if (dressed.has(draft.garment)) {
+    const side = draft.pieces.flatMap(({ id, edges }) => (id.startsWith('back') ? edges : []))
+    const [from, to] = levelsOf(side.find(({ id }) => id === 'side'))
+    // A bodice is taken in down to its waist, a dress down to where its hem is turned up.
+    return from + 40 + (to - from - (draft.garment === 'bodice' ? 40 : 180)) * share
+  }
   const run = draft.seams.find(({ id }) => id.startsWith(seam))?.a[0]
   const edge = draft.pieces.find(({ id }) => id === run?.piece)?.edges.find(({ id }) => id === run?.edge)
   const long = edge ? lengthOfPath(edge.path) : 0
