@@ -78,12 +78,37 @@ function unsound(one: Opening, edges: readonly UpperEdge[]): boolean {
   return edges.some(({ path }) => intersections(path, whole).some(({ b }) => b > 1))
 }
 
+/** A princess seam from the shoulder keeps clear of a wide or deep neckline: it starts nearer to the shoulder tip there. */
+function clearOfNeck(pen: Pen, block: FrontBlock): readonly Opening[] {
+  const openings = findOpenings(block)
+  const [seam] = openings
+  if (seam?.dart.id !== 'princess' || seam.edge !== 'shoulder') return openings
+  const crosses = ([one]: readonly Opening[]): boolean => {
+    const edges = block.outline(framesOf(block, one ? [one] : []).swing)
+    const [neckline, shoulder] = edges
+    if (!one || !neckline || !shoulder) return false
+    const whole = straight(pointAt(shoulder.path, one.along(shoulder.path)), one.point)
+    return intersections(neckline.path, whole).length > 0
+  }
+  if (!crosses(openings)) return openings
+  const outer = findOpenings({ ...block, mouths: [{ ...seam, along: share(0.82) }] })
+  if (!crosses(outer)) return outer
+  pen.refuse({
+    field: 'neckWidening',
+    code: 'impossible-shape',
+    message:
+      'A princess seam from the shoulder would cut into this neckline. Make the neck less wide or deep, or start the seam at the armhole.',
+    min: 0,
+    max: Math.max(0, Math.floor(pen.value('neckWidening') - 10)),
+  })
+}
+
 /**
  * Where the bust darts of a front open. A dart that would cross the neckline, end in a stump or run out beside its edge is
  * opened in the side seam instead, and that is said.
  */
 export function soundOpenings(pen: Pen, block: FrontBlock): readonly Opening[] {
-  const openings = findOpenings(block)
+  const openings = clearOfNeck(pen, block)
   const frames = framesOf(block, openings)
   const edges = block.outline(frames.swing)
   const bad = frames.upper.filter(
