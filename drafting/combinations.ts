@@ -25,7 +25,7 @@ export const combinations: readonly Combination[] = [
     why: zipInPocket,
   },
   {
-    garments: ['flared-dress'],
+    garments: ['flared-dress', 'shift-dress'],
     when: { backOpening: ['side zip'] },
     not: { id: 'pockets', is: [true] },
     why: zipInPocket,

@@ -8,7 +8,6 @@ import { bodiceFrontMarks } from '../bodice/front-marks'
 import { faceNeckAndArmholes } from '../facings'
 import { neckLeans } from '../neck-lean'
 import { drawOpening } from '../openings'
-import { pocketGivesWay } from '../openings/side-zip'
 import { pocketBag, pocketMouth, sewWithPocket } from '../pockets/in-seam'
 import { sleeveInto } from '../sleeves'
 import { armholeStretch, type Armhole } from '../sleeves/armhole'
@@ -66,7 +65,7 @@ function sewSides(pen: Pen, front: ShiftHalf, back: ShiftHalf): void {
   const seam = { id: 'side', name: 'Side seam', smooth: true }
   const side = back.piece.edge('side')
   const level = back.piece.at('waistLevel').y
-  const mouth = pen.chosen('pockets') && !pocketGivesWay(pen) ? pocketMouth(pen, side.path, level) : undefined
+  const mouth = pen.chosen('pockets') ? pocketMouth(pen, side.path, level) : undefined
   pen.settle()
   if (!mouth) return pen.sew({ ...seam, a: back.runs('side'), b: front.runs('side') })
   const whole = pathLength(side.path)
