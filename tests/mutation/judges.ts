@@ -57,6 +57,9 @@ const orders: readonly DraftOrder[] = [
   skirt({ share: '1 1/2', panels: 5 }),
   { garment: 'kaftan', measurements: two, design: { gusset: 'always', sleeveReach: 0.3 } },
   { garment: 'kaftan', measurements: one, design: { sleeveReach: 0.25, mouthWidth: 150 } },
+  { garment: 'waist-seam-dress', measurements: one, design: {} },
+  { garment: 'waist-seam-dress', measurements: one, design: { skirt: 'gathered' } },
+  { garment: 'straight-skirt', measurements: one, design: { patchPockets: true } },
   dress(one, { sleeve: 'bishop' }),
   dress(two, { sleeve: 'cap', neckShape: 'scoop' }),
   dress(one, { sleeve: 'puff', neckShape: 'sweetheart' }),
@@ -72,6 +75,11 @@ const move = (mark: string, x: number, y: number): Correction => ({
 
 const corrected: readonly DraftOrder[] = [
   { ...dress(one), corrections: [{ id: 'waist', on: { seam: 'side', level: 480 }, by: 8 }] },
+  {
+    garment: 'straight-skirt',
+    measurements: one,
+    corrections: [{ id: 'hip', on: { seam: 'side', level: 205 }, by: 6 }],
+  },
   { ...dress(one), corrections: [move('shoulderTip', 4, 5)] },
   { ...dress(two), corrections: [move('underarm', 5, 6)] },
   { ...dress(one), corrections: [{ ...move('hollow', -4, 0), off: true }] },

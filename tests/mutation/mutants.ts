@@ -42,6 +42,18 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
       "a: [run(half, 'sleeve-under', half === 'back' ? sleeve + 2 : sleeve)],",
     ],
     [
+      'a skirt is 3 mm wider at the waist than the bodice that it is sewn to',
+      'parts/skirts/fitted.ts',
+      'wanted: sewnTo ? [sewnTo.front.length, sewnTo.back.length]',
+      'wanted: sewnTo ? [sewnTo.front.length + 3, sewnTo.back.length]',
+    ],
+    [
+      'the sides of skirt and bodice miss each other by 2 mm',
+      'parts/skirts/waist.ts',
+      'const by = index === 0 ? found.outward : -found.outward',
+      'const by = index === 0 ? found.outward + 2 : -found.outward - 2',
+    ],
+    [
       'the hem of a bishop sleeve is 2 mm longer than its cuff gathers',
       'parts/sleeves/bishop.ts',
       "+ pen.value('bishopGather')",
@@ -374,6 +386,12 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
       'parts/flared-half.ts',
       "takenInOf(pen, 'side', top, bottom, 60)",
       "takenInOf(pen, 'side', top, bottom, 60).filter(() => piece.id === 'front')",
+    ],
+    [
+      'a skirt is taken in on the front only',
+      'parts/take-in.ts',
+      '.flatMap((id) => pen.corrections.forSeam(id))',
+      ".flatMap((id) => (piece.id === 'front' ? pen.corrections.forSeam(id) : []))",
     ],
     [
       'a shared mark is corrected on one side only',

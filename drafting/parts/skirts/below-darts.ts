@@ -39,7 +39,24 @@ interface Move {
  * States how far the first darts are moved so that they meet the darts or seams of the bodice, whose folds they carry on, and
  * how much nearer the second then stands. Where there is no dart above or below, or no room, they stay where a skirt has them.
  */
-export function meetDarts(pen: Pen, sewnTo: SewnTo, fitting: Pick<Fitting, 'hip' | 'hem' | 'close'>): void {
+export function meetDarts(
+  pen: Pen,
+  sewnTo: SewnTo,
+  fitting: () => Pick<Fitting, 'hip' | 'hem' | 'close'>,
+): void {
+  const { made, uses } = pen.follow(() => movesOf(pen, sewnTo, fitting()))
+  sides.forEach((side, index) => {
+    const { moved, nearer } = made[index as 0 | 1]
+    pen.find(`${side}DartMoved`, moved, sewnTo.uses | uses)
+    pen.find(`${side}DartNearer`, nearer, sewnTo.uses | uses)
+  })
+}
+
+function movesOf(
+  pen: Pen,
+  sewnTo: SewnTo,
+  fitting: Pick<Fitting, 'hip' | 'hem' | 'close'>,
+): readonly [Move, Move] {
   const stay: Move = { moved: 0, nearer: 0 }
   const moves: [Move, Move] = [stay, stay]
   const wanted = [sewnTo.front.length, sewnTo.back.length] as const
@@ -57,12 +74,7 @@ export function meetDarts(pen: Pen, sewnTo: SewnTo, fitting: Pick<Fitting, 'hip'
           : (withRoom(pen, side, before.moved + joint - now, sewnTo[side].length) ?? stay)
     })
   }
-  const uses = sewnTo.uses | pen.usesOf(['skirtQuarter', 'sideTakes', 'frontDartOut', 'backDartOut'])
-  sides.forEach((side, index) => {
-    const { moved, nearer } = moves[index as 0 | 1]
-    pen.find(`${side}DartMoved`, moved, uses)
-    pen.find(`${side}DartNearer`, nearer, uses | pen.usesOf([`${side}DartBetween`]))
-  })
+  return moves
 }
 
 /** The first dart moved by so much, the second as far as that leaves room; undefined where it leaves none. */

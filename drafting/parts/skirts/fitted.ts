@@ -25,8 +25,10 @@ interface Manner {
 export function drawFitted(pen: Pen, use: SkirtUse, { close, hem, walking, uses }: Manner): DrawnSkirt {
   const { sewnTo } = use
   if (sewnTo) {
-    const hip = { x: pen.lengthRounded('skirtQuarter', 'up'), y: pen.length('hipLine') }
-    meetDarts(pen, sewnTo, { close, hip, hem: hem(hip) })
+    meetDarts(pen, sewnTo, () => {
+      const hip = { x: pen.lengthRounded('skirtQuarter', 'up'), y: pen.length('hipLine') }
+      return { close, hip, hem: hem(hip) }
+    })
   }
   const [front, back] = [skirtPiece(pen, use, 'front', 'Front'), skirtPiece(pen, use, 'back', 'Back')]
   const by = sewnTo ? (['DartBelow', 'DartNext'] as const) : (['DartOut', 'DartBetween'] as const)

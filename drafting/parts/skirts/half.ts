@@ -1,10 +1,12 @@
 import type { Path, Point } from '../../contract'
 import { applyTo, endOf, endTangent, identity, joinPaths, pathLength, startOf, undo } from '../../geometry'
+import { nothing } from '../../pen/masks'
 import type { Pen } from '../../pen/pen'
 import { straight } from '../../pen/piece-pen'
 import { drawWaist, pinned } from '../fitted-waist'
 import { fairCurve } from '../hem'
 import { takeIn } from '../take-in'
+import { belowDartRules } from './below-darts'
 import { drawSkirtCentre, skirtCentreMarks, type WalkingRoom } from './centre'
 import type { DrawnHalf } from './seams'
 import { hemFollows } from './marks'
@@ -46,7 +48,8 @@ export function drawSkirtHalf(
   more: readonly string[] = [],
 ): DrawnHalf {
   const { piece } = half
-  const mask = use.sewnTo?.uses ?? 0n
+  const below = belowDartRules.map(({ id }) => id)
+  const mask = use.sewnTo ? use.sewnTo.uses | pen.usesOf(below) : nothing
   const uses = [...sideUses, ...more]
   const follows = { uses, mask }
   sideMarks(half, follows, more.length > 0, use)
