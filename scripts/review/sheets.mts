@@ -53,6 +53,7 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     default: {},
     slit: { walkingRoom: 'slit', frontDarts: 2, pockets: true },
     sideZip: { opening: 'side zip', backDarts: 1, waistband: false, length: 450 },
+    patch: { patchPockets: true },
   },
   'a-line-skirt': {
     default: {},
@@ -77,6 +78,17 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     default: {},
     gusset: { overarmSlope: 20, neckShape: 'V', sideSlits: false },
     short: { sleeveReach: 0.3, length: 900, backOpening: 'keyhole' },
+  },
+  'waist-seam-dress': {
+    aLine: { sleeve: 'plain' },
+    straight: { skirt: 'straight', frontDarts: 2 },
+    gored: { skirt: 'gored', gores: 8 },
+    gathered: { skirt: 'gathered', pockets: true },
+    circle: { skirt: 'circle' },
+  },
+  peplum: {
+    round: {},
+    gathered: { cut: 'gathered' },
   },
   'circle-skirt': {
     default: {},
