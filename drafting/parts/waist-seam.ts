@@ -32,7 +32,7 @@ export function waistToMeet(pen: Pen, { front, back }: Bodice): SewnTo {
   return { front: half(front.waist), back: half(back.waist), uses }
 }
 
-/** Nearer than this two places along the seam are one, mm. */
+/** Darts nearer than this along the seam stand below each other, mm. */
 const together = 0.4
 
 /**
@@ -50,7 +50,10 @@ export function sewWaist(
   const matches = skirt.places
     .flatMap(({ key, at }) => {
       const meets = ofBodice.find((place) => place.key === key)
-      return meets && (gathered || Math.abs(meets.at - at) < together) ? [{ a: at, b: meets.at }] : []
+      const dart = /\d$/.test(key)
+      return meets && (gathered || !dart || Math.abs(meets.at - at) < together)
+        ? [{ a: at, b: meets.at }]
+        : []
     })
     .sort((one, next) => one.a - next.a)
   pen.sew({
