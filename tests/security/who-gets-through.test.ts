@@ -1,6 +1,6 @@
 import { afterAll, describe, expect, it } from 'vitest'
 import { Membership } from '@/db/models/membership'
-import { type Role, roles } from '@/db/permissions'
+import { type Actor, type Role, roles } from '@/db/permissions'
 import { forgetTries } from '../support/tries'
 import { makeThings } from '../support/things'
 import { type Reply, Visitor, builtActions } from '../support/visitor'
@@ -12,15 +12,23 @@ const callers: readonly Caller[] = [...roles, 'stranger', 'expelled', 'anonymous
 
 afterAll(forgetTries)
 
-/** A workroom with one of everything in it; new for each test, because endpoints change what they are tried on. */
-async function scene(): Promise<{ workroom: TestWorkroom; things: Things }> {
-  const workroom = await makeWorkroom()
-  const { actor } = await workroom.person('owner')
-  return { workroom, things: await makeThings(workroom, actor) }
+interface Scene {
+  readonly workroom: TestWorkroom
+  readonly owner: Actor
+  readonly things: Things
 }
 
-async function visitorFor(caller: Caller, workroom: TestWorkroom): Promise<Visitor> {
+/** A workroom with one of everything in it; new for each test, because endpoints change what they are tried on. */
+async function scene(): Promise<Scene> {
+  const workroom = await makeWorkroom()
+  const { actor } = await workroom.person('owner')
+  return { workroom, owner: actor, things: await makeThings(workroom, actor) }
+}
+
+/** The owner who calls is the one whose things they are: some belong to a person, not to the workroom. */
+async function visitorFor(caller: Caller, { workroom, owner }: Scene): Promise<Visitor> {
   if (caller === 'anonymous') return new Visitor()
+  if (caller === 'owner') return Visitor.signedIn(owner.sessionId)
   const home = caller === 'stranger' ? await makeWorkroom() : workroom
   const { actor } = await home.person(caller === 'stranger' || caller === 'expelled' ? 'owner' : caller)
   if (caller === 'expelled')
@@ -63,8 +71,9 @@ const all = Object.entries(endpoints)
 
 describe.each(all)('%s', (name, endpoint) => {
   it.each(callers)('for %s', async (caller) => {
-    const { workroom, things } = await scene()
-    const reply = await call(await visitorFor(caller, workroom), name, endpoint, things)
+    const made = await scene()
+    const { things } = made
+    const reply = await call(await visitorFor(caller, made), name, endpoint, things)
     expect(reply.status).not.toBe(500)
     expect(kindOf(reply), reply.text.slice(0, 500)).toBe(expected(caller, endpoint))
   })
@@ -73,9 +82,10 @@ describe.each(all)('%s', (name, endpoint) => {
 it.each(all.filter(([, { plain }]) => !plain))(
   '%s refuses fields that are not its own',
   async (name, endpoint) => {
-    const { workroom, things } = await scene()
+    const made = await scene()
+    const { things } = made
     const input = () => ({ ...endpoint.input(things), price: 1 })
-    const reply = await call(await visitorFor('owner', workroom), name, { ...endpoint, input }, things)
+    const reply = await call(await visitorFor('owner', made), name, { ...endpoint, input }, things)
     expect(reply.answer).toMatchObject({ ok: false })
     expect(JSON.stringify(reply.answer)).toContain('"field":"price"')
   },
@@ -89,8 +99,9 @@ const changing = all.filter(([name]) => !/^(GET|HEAD) /.test(name))
 
 describe.each(elsewhere)('a call from %s', (_where, from) => {
   it.each(changing)('is refused by %s', async (name, { path, input }) => {
-    const { workroom, things } = await scene()
-    const visitor = await visitorFor('owner', workroom)
+    const made = await scene()
+    const { things } = made
+    const visitor = await visitorFor('owner', made)
     const [method] = name.split(' ')
     const body = JSON.stringify(input(things))
     const headers = { 'content-type': 'application/json', ...from }
