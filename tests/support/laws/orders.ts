@@ -225,7 +225,12 @@ const levelsOf = (edge: Edge | undefined): readonly [number, number] => {
 }
 
 function levelOf(draft: Draft, seam: string, share: number): number {
-  if (draft.garment === 'flared-dress') return 350 + 350 * share
+  if (draft.garment === 'flared-dress') {
+    const at = (id: string): number =>
+      draft.pieces.find((piece) => piece.id === 'front')?.marks.find((mark) => mark.id === id)?.at.y ?? 0
+    const [least, most] = [at('underarm') + 45, at('sideHem') - 90]
+    return least + (most - least) * share
+  }
   if (dressed.has(draft.garment)) {
     const side = draft.pieces.flatMap(({ id, edges }) => (id.startsWith('back') ? edges : []))
     const [from, to] = levelsOf(side.find(({ id }) => id === 'side'))
