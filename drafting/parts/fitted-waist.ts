@@ -20,7 +20,9 @@ export function waistDarts(axis: number, tip: number, waist: number, intake: num
   return Array.from({ length: parts }, (_, index) => {
     // The outer of two darts is the shorter: the body curves less there.
     const shorter = index === 1 ? 12 * Math.sign(waist - tip) : 0
-    const point = { x: axis + (parts === 1 ? 0 : (index - 0.5) * 34), y: tip + shorter }
+    // Enough cloth between two mouths for the allowance of each to fold.
+    const apart = Math.max(34, intake / parts + 18)
+    const point = { x: axis + (parts === 1 ? 0 : (index - 0.5) * apart), y: tip + shorter }
     return { point, angle: dartAngle(intake / parts, Math.abs(waist - point.y)) }
   })
 }

@@ -38,9 +38,18 @@ const styles: Readonly<Record<string, Readonly<Record<string, DraftOrder['design
     mandarin: { collar: 'mandarin', backOpening: 'none' },
     shirt: { collar: 'shirt', backOpening: 'button band' },
   },
+  'shift-dress': {
+    default: {},
+    shoulder: { dartTo: 'shoulder', sleeve: 'short', hemFlare: 50 },
+    plain: { waistDarts: false, waistIn: 0, pockets: false, backOpening: 'none' },
+  },
   bodice: {
     buttons: { backOpening: 'button band', dartTo: 'shoulder', sleeve: 'plain' },
     side: {},
+    shared: { dartSharedWith: 'waist', dartTo: 'shoulder' },
+    centreFront: { dartTo: 'centre front', neckShape: 'V' },
+    princess: { shaping: 'princess from the shoulder', sleeve: 'plain' },
+    princessArmhole: { shaping: 'princess from the armhole' },
     shoulder: { dartTo: 'shoulder', sleeve: 'plain' },
     armhole: { dartTo: 'armhole', neckShape: 'V' },
     neck: { dartTo: 'neck', sleeve: 'flared' },

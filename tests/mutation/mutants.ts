@@ -36,6 +36,18 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
   ],
   2: [
     [
+      'a princess seam is longer round the bust on the side panel',
+      'parts/bodice/princess.ts',
+      'const [shift, more] = solvePair(off)',
+      'const [shift, more] = solvePair(off).map(() => 0) as [number, number]',
+    ],
+    [
+      'the front of a shift dress has its side 2 mm lower',
+      'parts/shift/lower.ts',
+      'y: back.at(id).y + to.y - from.y }',
+      'y: back.at(id).y + to.y - from.y + 2 }',
+    ],
+    [
       'a gusset is set into the back of the sleeve by 2 mm too little',
       'parts/kimono/gusset.ts',
       "a: [run(half, 'sleeve-under', sleeve)],",
@@ -244,6 +256,12 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
   ],
   9: [
     [
+      'a construction forgets what it read',
+      'pen/pen.ts',
+      'const uses = this.trail\n',
+      'const uses = nothing\n',
+    ],
+    [
       'steps leave out what rules follow from',
       'pen/values.ts',
       'mask |= this.mask(inner)',
@@ -340,6 +358,14 @@ const byLaw: Readonly<Record<number, readonly Row[]>> = {
       'garments/flared-dress.ts',
       '...sleeveEstimates,',
       "...sleeveEstimates, 'elbow',",
+    ],
+  ],
+  16: [
+    [
+      'a bust dart keeps its angle about its own point instead of the bust point',
+      'parts/bodice/open-darts.ts',
+      '(one.degrees * one.dart.degrees) / wide',
+      'one.degrees',
     ],
   ],
   17: [
