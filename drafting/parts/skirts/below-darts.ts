@@ -29,6 +29,8 @@ const sides = ['front', 'back'] as const
 /** A second dart stands at least so far inside the side, as a share of the half waist, and so far from the first, mm. */
 const inside = 0.86
 const leastBetween = 40
+/** Between the mouths of two darts, mm, so that the cloth folded into one does not reach the other. */
+const clearBetween = 20
 
 interface Move {
   readonly moved: number
@@ -79,13 +81,13 @@ function movesOf(
 
 /** The first dart moved by so much, the second as far as that leaves room; undefined where it leaves none. */
 function withRoom(pen: Pen, side: 'front' | 'back', moved: number, waist: number): Move | undefined {
-  const { darts } = dartsTaken(pen, side)
+  const { darts, intake } = dartsTaken(pen, side)
   const first = pen.value(`${side}DartOut`) + moved
   if (first < 30 || first > waist * inside) return undefined
   if (darts < 2) return { moved, nearer: 0 }
   const between = pen.value(`${side}DartBetween`)
   const nearer = Math.max(0, first + between - waist * inside)
-  return between - nearer < leastBetween ? undefined : { moved, nearer }
+  return between - nearer < Math.max(leastBetween, intake + clearBetween) ? undefined : { moved, nearer }
 }
 
 /** A half as its marks will stand. */
