@@ -30,11 +30,6 @@ export function deepenArmhole(pen: Pen, side: Point): void {
   const spare = (more: number): number =>
     half(level + more, 'frontHollowIn') + half(level + more, 'backHollowIn') - wanted
   checkShoulder(pen, tip, across, neck)
-  if (spare(0) >= 0) {
-    pen.find('armholeDeepening', 0, 0n)
-    return
-  }
-  const more = solveBetween(spare, 0, deepest, 1e-7)
   const uses = pen.usesOf([
     rule,
     lowering,
@@ -47,6 +42,12 @@ export function deepenArmhole(pen: Pen, side: Point): void {
     'backHollowIn',
     'flareAngle',
   ])
+  // What makes it deep enough counts as well when nothing need be added.
+  if (spare(0) >= 0) {
+    pen.find('armholeDeepening', 0, uses)
+    return
+  }
+  const more = solveBetween(spare, 0, deepest, 1e-7)
   if (more === undefined) {
     pen.refuse({
       field: 'upperArm',

@@ -92,6 +92,7 @@ export function upperMarks(pen: Pen, piece: PiecePen, side: 'front' | 'back'): v
     say: 'Go across a quarter of the bust with its ease',
     drag: ['bustEase', 'armholeDrop'],
     shared: true,
+    also: ['armholeDeepening'],
   })
   pen.tag({
     piece: piece.id,

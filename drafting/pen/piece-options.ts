@@ -47,6 +47,8 @@ export interface MarkOptions {
   readonly drag?: readonly string[]
   /** Sewn neighbours hold the same mark in the same place, so a correction of one moves all of them. */
   readonly shared?: boolean
+  /** Names that it follows from beside its own length: what would move it from some value on, though it adds nothing now. */
+  readonly also?: readonly string[]
   /** It stands on the centre line, so a correction moves it up and down only. */
   readonly onCentre?: boolean
   /** Why no correction can move it, and what to correct instead. */

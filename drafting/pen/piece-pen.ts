@@ -106,11 +106,12 @@ export class PiecePen {
     const length = options.round ? this.pen.lengthRounded(by, options.round) : this.pen.length(by)
     const uses = this.pen.values.mask(by)
     const vertical = towards === 'down' || towards === 'up'
+    const also = this.pen.usesOf(options.also ?? [])
     this.put(
       id,
       add(origin.at, scale(along, length)),
-      vertical ? origin.x : origin.x | uses,
-      vertical ? origin.y | uses : origin.y,
+      (vertical ? origin.x : origin.x | uses) | also,
+      (vertical ? origin.y | uses : origin.y) | also,
       { ...options, from, direction: along, by, length },
     )
   }

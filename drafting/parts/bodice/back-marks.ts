@@ -49,6 +49,7 @@ export function bodiceBackMarks(pen: Pen, back: PiecePen, shoulder: number): voi
   back.go('underarm', level, 'right', 'backQuarter', {
     say: 'Go across a quarter of the bust with its ease',
     drag: ['bustEase'],
+    also: ['armholeDeepening'],
   })
   back.go('waistLevel', 'nape', 'down', 'napeToWaist', { say: 'From the nape come down to the waist' })
 }
