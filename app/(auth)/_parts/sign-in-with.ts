@@ -15,8 +15,3 @@ export async function signInWith(email: string, password: string) {
     words[answer?.error ?? ''] ?? 'Signing in does not work at the moment. Try again in a minute.'
   return { ok: false as const, problems: [{ field: '', message }] }
 }
-
-/** Goes to a page of the workroom by a full load, so that nothing of another session stays in memory. */
-export function enter(path: string): void {
-  window.location.assign(path)
-}

@@ -7,7 +7,7 @@ import { Dialog } from '@/components/ui/dialog'
 import { useToast } from '@/components/ui/toast'
 import { signOut } from '../actions'
 import { countUnsent, forgetLocal } from './local-drafts'
-import { enter } from './sign-in-with'
+import { enter } from './enter'
 
 /** Signs out on this device and in the database. Held back with a choice while a draft on this device is unsaved. */
 export function SignOutButton({

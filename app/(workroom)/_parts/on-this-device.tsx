@@ -1,7 +1,7 @@
 'use client'
 
 import { useEffect } from 'react'
-import { enter } from '@/app/(auth)/_parts/sign-in-with'
+import { enter } from '@/app/(auth)/_parts/enter'
 import { noteHere, onSignedOut } from '@/app/(studio)/_data/here'
 
 /**

@@ -4,7 +4,7 @@ import { homePath } from '@/app/_server/session/safe-path'
 import { useActionForm } from '@/components/forms/use-action-form'
 import { Button } from '@/components/ui/button'
 import { ErrorNote } from '@/components/ui/error-note'
-import { enter } from '../../_parts/sign-in-with'
+import { enter } from '../../_parts/enter'
 import { acceptKnown } from '../actions'
 
 export function AcceptButton({ token }: { readonly token: string }) {

@@ -6,7 +6,8 @@ import { useActionForm } from '@/components/forms/use-action-form'
 import { Button } from '@/components/ui/button'
 import { ErrorNote } from '@/components/ui/error-note'
 import { Field } from '@/components/ui/field'
-import { enter, signInWith } from '../../_parts/sign-in-with'
+import { enter } from '../../_parts/enter'
+import { signInWith } from '../../_parts/sign-in-with'
 import { accept } from '../actions'
 
 export function AcceptForm({ token, email }: { readonly token: string; readonly email: string }) {

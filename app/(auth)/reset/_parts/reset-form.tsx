@@ -5,7 +5,8 @@ import { PasswordField } from '@/components/forms/password-field'
 import { useActionForm } from '@/components/forms/use-action-form'
 import { Button } from '@/components/ui/button'
 import { ErrorNote } from '@/components/ui/error-note'
-import { enter, signInWith } from '../../_parts/sign-in-with'
+import { enter } from '../../_parts/enter'
+import { signInWith } from '../../_parts/sign-in-with'
 import { reset } from '../actions'
 
 export function ResetForm({ token, email }: { readonly token: string; readonly email: string }) {

@@ -5,7 +5,7 @@ import { ChevronRight } from 'lucide-react'
 import { useState } from 'react'
 import { ErrorNote } from '@/components/ui/error-note'
 import { changeWorkroom } from '../../actions'
-import { enter } from '../../_parts/sign-in-with'
+import { enter } from '../../_parts/enter'
 
 /** The person's workrooms, each a way in. */
 export function WorkroomChoice({

@@ -6,7 +6,8 @@ import { useActionForm } from '@/components/forms/use-action-form'
 import { Button } from '@/components/ui/button'
 import { ErrorNote } from '@/components/ui/error-note'
 import { Select } from '@/components/ui/select'
-import { enter, signInWith } from '../../../_parts/sign-in-with'
+import { enter } from '../../../_parts/enter'
+import { signInWith } from '../../../_parts/sign-in-with'
 import { confirm } from '../../actions'
 
 const units = [
