@@ -1,5 +1,5 @@
-import type { Edge, Run } from '../../contract'
-import { endOf, startOf } from '../../geometry'
+import type { Edge, Path, Run } from '../../contract'
+import { endOf, intersections, startOf } from '../../geometry'
 import type { Mask } from '../../pen/masks'
 import type { Pen } from '../../pen/pen'
 import type { PiecePen } from '../../pen/piece-pen'
@@ -64,6 +64,11 @@ function legAt(edges: readonly PlacedEdge[], dart: string): number {
   return index
 }
 
+/** Whether a princess seam meets the neckline, as it may on a slight body with a wide deep neck. */
+function reachesNeck(seam: Path, edges: readonly PlacedEdge[]): boolean {
+  return edges.some(({ of, path }) => of === 'neckline' && intersections(seam, path).length > 0)
+}
+
 function drawPanels(
   pen: Pen,
   centre: PiecePen,
@@ -82,6 +87,13 @@ function drawPanels(
     waist: startOf(at(low + 2).path),
     waistBeyond: endOf(at(low - 1).path),
   })
+  if (reachesNeck(seams.centre, edges)) {
+    pen.refuse({
+      field: 'shaping',
+      code: 'impossible-shape',
+      message: `The neckline of the ${centre.name.toLowerCase()} reaches the princess seam. Make the neck narrower or less deep, or shape the bodice with darts.`,
+    })
+  }
   const side = pen.piece(`${centre.id}-side`, `${centre.name} side`)
   const ofCentre: readonly PlacedEdge[] = [
     ...edges.slice(0, top),
