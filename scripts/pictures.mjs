@@ -62,7 +62,7 @@ async function takeAll(context, { email, password }, suffix) {
   await openFirst(page, undefined, /^\/cards\/[0-9a-f-]{36}$/)
   await keep(page, `measure-card-${suffix}`)
 
-  await openFirst(page, '/drafts', /^\/drafts\/[0-9a-f-]{36}$/)
+  await openFirst(page, '/drafts?search=dress', /^\/drafts\/[0-9a-f-]{36}$/)
   await page.locator('svg').first().waitFor()
   await keep(page, `studio-${suffix}`)
 }
